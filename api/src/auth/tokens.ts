@@ -1,0 +1,29 @@
+import { createHash, randomBytes } from 'node:crypto';
+
+/** What the refresh cookie carries: which session, and a secret only that device knows. */
+export interface RefreshToken {
+  sessionId: string;
+  secret: string;
+}
+
+export function newSecret(): string {
+  return randomBytes(32).toString('base64url');
+}
+
+export function hashOf(secret: string): string {
+  return createHash('sha256').update(secret).digest('hex');
+}
+
+export function writeRefreshToken({ sessionId, secret }: RefreshToken): string {
+  return `${sessionId}.${secret}`;
+}
+
+const UUID = /^[0-9a-f]{8}-(?:[0-9a-f]{4}-){3}[0-9a-f]{12}$/;
+
+/** @returns undefined for anything that was not written by {@link writeRefreshToken}. */
+export function readRefreshToken(text: unknown): RefreshToken | undefined {
+  if (typeof text !== 'string') return undefined;
+  const [sessionId, secret, ...rest] = text.split('.');
+  if (!sessionId || !secret || rest.length > 0 || !UUID.test(sessionId)) return undefined;
+  return { sessionId, secret };
+}

@@ -1,0 +1,39 @@
+import { applyDecorators } from '@nestjs/common';
+import { ApiProperty } from '@nestjs/swagger';
+import { Transform } from 'class-transformer';
+import { IsISO8601, IsString, Matches, MaxLength, MinLength } from 'class-validator';
+
+/** An instant on the wire: ISO 8601 with an offset or Z, because a wall time alone names no instant. */
+export function IsInstant(): PropertyDecorator {
+  return applyDecorators(
+    ApiProperty({ type: String, format: 'date-time' }),
+    MaxLength(40),
+    IsISO8601(
+      { strict: true, strictSeparator: true },
+      { message: '$property is a date and time such as 2026-10-17T14:00:00Z' },
+    ),
+    Matches(/T\d{2}:\d{2}.*(Z|[+-]\d{2}:?\d{2})$/, {
+      message: '$property needs its offset from UTC, such as Z or +01:00',
+    }),
+  );
+}
+
+/** A calendar day, `2026-10-17`. */
+export function IsDay(): PropertyDecorator {
+  return applyDecorators(
+    ApiProperty({ type: String, format: 'date' }),
+    Matches(/^\d{4}-\d{2}-\d{2}$/, { message: '$property is a day such as 2026-10-17' }),
+    IsISO8601({ strict: true }, { message: '$property is not a day of the calendar' }),
+  );
+}
+
+/** Text somebody typed: trimmed, not empty, not endless, and without the NUL that PostgreSQL cannot store. */
+export function IsWords(maxLength: number, minLength = 1): PropertyDecorator {
+  return applyDecorators(
+    Transform(({ value }: { value: unknown }) => (typeof value === 'string' ? value.trim() : value)),
+    IsString(),
+    MinLength(minLength),
+    MaxLength(maxLength),
+    Matches(/^[^\u0000]*$/, { message: '$property has a character that cannot be stored' }),
+  );
+}

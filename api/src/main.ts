@@ -1,0 +1,21 @@
+import { NestFactory } from '@nestjs/core';
+import type { NestExpressApplication } from '@nestjs/platform-express';
+import { AppModule } from './app.module';
+import { setUpApp } from './app.setup';
+import { Environment } from './config/environment';
+
+async function main(): Promise<void> {
+  // rawBody: the card service signs the bytes it sends, so they are kept as they came.
+  const app = await NestFactory.create<NestExpressApplication>(AppModule, {
+    rawBody: true,
+    bufferLogs: true,
+  });
+  setUpApp(app);
+  const { HOST, PORT } = app.get(Environment);
+  await app.listen(PORT, HOST);
+}
+
+void main().catch((error: unknown) => {
+  console.error(error);
+  process.exitCode = 1;
+});

@@ -1,0 +1,5 @@
+import { asAdmin, templateName } from './database';
+
+export default async function globalTeardown(): Promise<void> {
+  await asAdmin(`DROP DATABASE IF EXISTS ${templateName()} WITH (FORCE)`);
+}
