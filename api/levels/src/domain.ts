@@ -1,0 +1,59 @@
+import { OutOfDomainError } from './errors';
+
+/** What one numeric input permits. Bounds left out are open, but the number must always be finite. */
+export interface Domain {
+  /** Name of the input as the caller knows it. */
+  input: string;
+  /** Name of the input as a member reads it. */
+  label: string;
+  unit?: string;
+  above?: number;
+  atLeast?: number;
+  below?: number;
+  atMost?: number;
+}
+
+/**
+ * The value itself when its domain permits it.
+ *
+ * @throws OutOfDomainError otherwise, with the value one decimal place lower as suggestion when that would fit.
+ */
+export function requireWithin(domain: Domain, value: number): number {
+  if (isWithin(domain, value)) return value;
+  const permitted = permittedText(domain);
+  const suggestion = suggestionFor(domain, value);
+  const question = suggestion === undefined ? '' : ` Did you mean ${suggestion}?`;
+  const message = Number.isFinite(value)
+    ? `${domain.label}: ${value} is outside what is possible here, ${permitted}.${question}`
+    : `${domain.label}: a number is needed, ${permitted}.`;
+  throw new OutOfDomainError(domain.input, value, permitted, message, suggestion);
+}
+
+function isWithin({ above, atLeast, below, atMost }: Domain, value: number): boolean {
+  return (
+    Number.isFinite(value) &&
+    (above === undefined || value > above) &&
+    (atLeast === undefined || value >= atLeast) &&
+    (below === undefined || value < below) &&
+    (atMost === undefined || value <= atMost)
+  );
+}
+
+function permittedText({ above, atLeast, below, atMost, unit }: Domain): string {
+  const bounds = [
+    above === undefined ? undefined : `more than ${above}`,
+    atLeast === undefined ? undefined : `at least ${atLeast}`,
+    below === undefined ? undefined : `less than ${below}`,
+    atMost === undefined ? undefined : `at most ${atMost}`,
+  ].filter((bound) => bound !== undefined);
+  const range = bounds.length === 0 ? 'any finite number' : bounds.join(' and ');
+  return unit === undefined ? range : `${range} ${unit}`;
+}
+
+/** A lost decimal point is the usual slip at the bench: 33 typed for 3.3. */
+function suggestionFor(domain: Domain, value: number): number | undefined {
+  const top = domain.atMost ?? domain.below;
+  if (top === undefined || !(value > top)) return undefined;
+  const tenth = Number((value / 10).toPrecision(12));
+  return isWithin(domain, tenth) ? tenth : undefined;
+}
