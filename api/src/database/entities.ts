@@ -1,8 +1,33 @@
 import { Session } from '../auth/session.entity';
 import { SignInFailure } from '../auth/sign-in-failure.entity';
 import { Club } from '../club/club.entity';
+import { BuildGroup, BuildGroupMember } from '../groups/build-group.entity';
+import { Instrument } from '../instruments/instrument.entity';
+import { InstrumentKind } from '../instruments/instrument-kind.entity';
+import { Resource } from '../instruments/resource.entity';
 import { Mail } from '../mail/mail.entity';
 import { Person } from '../people/person.entity';
+import { LevelPoint } from '../plans/level-point.entity';
+import { Plan } from '../plans/plan.entity';
+import { PlanCheck } from '../plans/plan-check.entity';
+import { PlanEdition } from '../plans/plan-edition.entity';
+import { Stage } from '../plans/stage.entity';
 
 /** Every table that has a class. */
-export const entities = [Club, Mail, Person, Session, SignInFailure];
+export const entities = [
+  BuildGroup,
+  BuildGroupMember,
+  Club,
+  Instrument,
+  InstrumentKind,
+  LevelPoint,
+  Mail,
+  Person,
+  Plan,
+  PlanCheck,
+  PlanEdition,
+  Resource,
+  Session,
+  SignInFailure,
+  Stage,
+];

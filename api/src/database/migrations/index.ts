@@ -1,1 +1,2 @@
 export { PeopleClubMail1700000000001 } from './0001-people-club-mail';
+export { PlansInstrumentsGroups1700000000002 } from './0002-plans-instruments-groups';
