@@ -1,0 +1,17 @@
+import { queryOptions, useQuery } from '@tanstack/react-query';
+import { setClubZone } from '../lib/club-zone';
+import { api, unwrap } from './client';
+import type { components } from './schema';
+
+export type Club = components['schemas']['ClubDto'];
+
+async function getClub(): Promise<Club> {
+  const club = await unwrap(api.GET('/api/club'));
+  setClubZone(club.timeZone);
+  return club;
+}
+
+/** The club's public name, zone and currency; it hardly ever changes. */
+export const clubQuery = queryOptions({ queryKey: ['club'], queryFn: getClub, staleTime: Infinity });
+
+export const useClub = () => useQuery(clubQuery);

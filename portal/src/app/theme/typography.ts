@@ -1,0 +1,59 @@
+import type { CSSProperties } from 'react';
+
+interface OwnVariants<T> {
+  display: T;
+  reading: T;
+  value: T;
+  small: T;
+  least: T;
+  label: T;
+  tag: T;
+}
+
+declare module '@mui/material/styles' {
+  interface TypographyVariants extends OwnVariants<CSSProperties> {}
+  interface TypographyVariantsOptions extends Partial<OwnVariants<CSSProperties>> {}
+}
+
+declare module '@mui/material/Typography' {
+  interface TypographyPropsVariantOverrides extends OwnVariants<true> {
+    h4: false;
+    h5: false;
+    h6: false;
+    subtitle1: false;
+    subtitle2: false;
+    overline: false;
+  }
+}
+
+const px = (size: number, line: number, fontWeight: number) => ({
+  fontSize: `${size / 16}rem`,
+  lineHeight: `${line / 16}rem`,
+  fontWeight,
+  letterSpacing: 0,
+});
+
+export const PHONE = '@media (max-width:899.95px)';
+
+/** Sizes in rem, so that a browser's own text size is honoured. Nothing is smaller than `least`. */
+export const typography = {
+  fontFamily: "'Merriweather Sans Variable', system-ui, sans-serif",
+  fontWeightLight: 300,
+  fontWeightRegular: 400,
+  fontWeightMedium: 600,
+  fontWeightBold: 700,
+  display: { ...px(38, 48, 300), [PHONE]: px(29, 38, 300) },
+  h1: { ...px(31, 40, 300), '& b, & strong': { fontWeight: 700 }, [PHONE]: px(28, 36, 300) },
+  h2: px(16, 22, 700),
+  h3: px(13.5, 19, 700),
+  reading: { ...px(33, 36, 700), letterSpacing: '-0.02em' },
+  value: px(15, 21, 600),
+  body1: px(14, 21, 400),
+  body2: px(12.5, 18, 400),
+  small: px(12.5, 18, 400),
+  caption: px(12.5, 18, 400),
+  least: px(11.5, 16, 600),
+  label: px(12, 16, 600),
+  tag: { ...px(11.5, 16, 600), letterSpacing: '0.02em' },
+  button: { ...px(14, 20, 700), textTransform: 'none' as const },
+};

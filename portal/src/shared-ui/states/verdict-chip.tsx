@@ -1,0 +1,40 @@
+import Box from '@mui/material/Box';
+
+import { StateMark } from './shape';
+import type { Verdict } from './state-words';
+import { VERDICTS } from './state-words';
+import { VisuallyHidden } from '../visually-hidden';
+
+interface VerdictChipProps {
+  verdict: Verdict;
+  /** "Too close" in a narrow place; read aloud in full. */
+  narrow?: boolean;
+}
+
+export function VerdictChip({ verdict, narrow = false }: VerdictChipProps) {
+  const { shape, colour, tint, words, short } = VERDICTS[verdict];
+  return (
+    <Box
+      component="span"
+      sx={{
+        display: 'inline-flex',
+        alignItems: 'center',
+        gap: '6px',
+        height: 24,
+        px: '8px',
+        borderRadius: '3px',
+        border: '1px solid',
+        borderColor: `token.${colour}`,
+        color: `token.${colour}`,
+        backgroundColor: `token.${tint}`,
+        fontWeight: 600,
+        fontSize: '0.8125rem',
+        whiteSpace: 'nowrap',
+      }}
+    >
+      <StateMark name={shape} size={14} />
+      <span aria-hidden={narrow || undefined}>{narrow ? short : words}</span>
+      {narrow && <VisuallyHidden>{words}</VisuallyHidden>}
+    </Box>
+  );
+}

@@ -1,0 +1,18 @@
+import type { CSSProperties, ReactNode } from 'react';
+
+const HIDDEN: CSSProperties = {
+  position: 'absolute',
+  width: 1,
+  height: 1,
+  margin: -1,
+  padding: 0,
+  overflow: 'hidden',
+  clip: 'rect(0 0 0 0)',
+  whiteSpace: 'nowrap',
+  border: 0,
+};
+
+/** Read aloud, not shown. */
+export function VisuallyHidden({ children }: { children: ReactNode }) {
+  return <span style={HIDDEN}>{children}</span>;
+}
