@@ -20,7 +20,7 @@ export class Person {
   @Column('text')
   name: string;
 
-  @Column('text', { array: true, default: () => `ARRAY['member']::text[]` })
+  @Column('text', { array: true, default: () => `'{member}'` })
   roles: Role[];
 
   /** argon2id, with its own parameters written inside. */

@@ -67,11 +67,11 @@ export class PlanCheck {
   target: number | null;
 
   /** What the form starts with: load, probe, pads in line. */
-  @Column('jsonb', { default: () => `'{}'::jsonb` })
+  @Column('jsonb', { default: () => `'{}'` })
   defaults: Record<string, number>;
 
   /** For a value worked out from others: the checks it is made of, in the method's order. */
-  @Column('uuid', { array: true, default: () => `'{}'::uuid[]` })
+  @Column('uuid', { array: true, default: () => `'{}'` })
   fromCheckIds: string[];
 
   @Column('uuid', { nullable: true })

@@ -50,6 +50,6 @@ export class Stage {
   @Column('text', { default: '' })
   summary: string;
 
-  @Column('text', { array: true, default: () => `'{}'::text[]` })
+  @Column('text', { array: true, default: () => `'{}'` })
   cautions: Caution[];
 }
