@@ -1,8 +1,12 @@
 import { Session } from '../auth/session.entity';
 import { SignInFailure } from '../auth/sign-in-failure.entity';
+import { Booking } from '../bookings/booking.entity';
+import { BookingItem } from '../bookings/booking-item.entity';
 import { Club } from '../club/club.entity';
 import { BuildGroup, BuildGroupMember } from '../groups/build-group.entity';
+import { Clearance } from '../instruments/clearance.entity';
 import { Instrument } from '../instruments/instrument.entity';
+import { InstrumentChange } from '../instruments/instrument-change.entity';
 import { InstrumentKind } from '../instruments/instrument-kind.entity';
 import { Resource } from '../instruments/resource.entity';
 import { Mail } from '../mail/mail.entity';
@@ -15,10 +19,14 @@ import { Stage } from '../plans/stage.entity';
 
 /** Every table that has a class. */
 export const entities = [
+  Booking,
+  BookingItem,
   BuildGroup,
   BuildGroupMember,
+  Clearance,
   Club,
   Instrument,
+  InstrumentChange,
   InstrumentKind,
   LevelPoint,
   Mail,
