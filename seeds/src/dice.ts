@@ -15,7 +15,8 @@ export interface Dice {
  * @param word - any text; the same word throws the same dice.
  */
 export function diceOf(word: string): Dice {
-  let state = [...word].reduce((sum, letter) => Math.imul(sum ^ letter.charCodeAt(0), 16_777_619), 2_166_136_261) >>> 0;
+  let state =
+    [...word].reduce((sum, letter) => Math.imul(sum ^ letter.charCodeAt(0), 16_777_619), 2_166_136_261) >>> 0;
   const next = (): number => {
     state = (state + 0x9e37_79b9) >>> 0;
     let mixed = Math.imul(state ^ (state >>> 16), 0x21f0_aaad);

@@ -17,7 +17,11 @@ async function main(): Promise<void> {
     const began = performance.now();
     const counts = await seedDemoClub(context, clock);
     const seconds = ((performance.now() - began) / 1000).toFixed(1);
-    console.log(`Seeded the demo club in ${seconds} s: ${Object.entries(counts).map(([what, n]) => `${n} ${what}`).join(', ')}.`);
+    console.log(
+      `Seeded the demo club in ${seconds} s: ${Object.entries(counts)
+        .map(([what, n]) => `${n} ${what}`)
+        .join(', ')}.`,
+    );
   } finally {
     await context.close();
   }

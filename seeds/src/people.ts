@@ -16,7 +16,10 @@ const member = (key: string, name: string, ...roles: Role[]): DemoPerson => ({
 });
 
 /** The accounts whose address says what they are for; the rest are first.last@. */
-const known = (address: string, person: DemoPerson): DemoPerson => ({ ...person, email: `${address}@larkmoor.example` });
+const known = (address: string, person: DemoPerson): DemoPerson => ({
+  ...person,
+  email: `${address}@larkmoor.example`,
+});
 
 /** Larkmoor Radio Builders. All of them are invented. */
 export const PEOPLE: readonly DemoPerson[] = [
