@@ -1,0 +1,33 @@
+import { Passwords } from '@ferrite-row/api/auth/passwords';
+import { ClubService } from '@ferrite-row/api/club/club.service';
+import type { SettableClock } from '@ferrite-row/api/common/clock';
+import type { ServiceContext } from '@ferrite-row/api/context';
+import { PeopleService } from '@ferrite-row/api/people/people.service';
+import { calendarAround } from './calendar';
+import { CLUB } from './club';
+import { PEOPLE } from './people';
+
+const PASSWORD = 'larkmoor-demo';
+
+/** How many of what were written, for the line that says so. */
+export type Counts = Record<string, number>;
+
+/**
+ * Lays the demo club around the clock's present, through the services, so that it obeys every rule of the product.
+ * The same on every run but for the dates. Leaves the clock where it found it.
+ */
+export async function seedDemoClub(context: ServiceContext, clock: SettableClock): Promise<Counts> {
+  const calendar = calendarAround(clock.now(), CLUB.timeZone);
+  const people = await seedPeople(context);
+  clock.set(calendar.now);
+  await context.get(ClubService).set(CLUB);
+  return { people: people.size };
+}
+
+async function seedPeople(context: ServiceContext): Promise<Map<string, string>> {
+  const passwordHash = await context.get(Passwords).hash(PASSWORD);
+  const enrolled = await context
+    .get(PeopleService)
+    .enrol(PEOPLE.map(({ name, email, roles }) => ({ name, email, roles, passwordHash })));
+  return new Map(PEOPLE.map(({ key }, index) => [key, enrolled[index]?.id ?? '']));
+}
