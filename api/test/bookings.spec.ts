@@ -8,6 +8,11 @@ import { startTestApp, TEST_NOW, type TestApp } from './app';
 
 const NOBODY = '5f0e0000-0000-4000-8000-000000000000';
 
+interface Refusal {
+  detail: string;
+  refused: { resourceId: string; reasons: { code: string }[] }[];
+}
+
 describe('booking benches and instruments', () => {
   let test: TestApp;
   let me: { person: { id: string; name: string }; agent: supertest.Agent };
@@ -166,11 +171,11 @@ describe('booking benches and instruments', () => {
   });
 
   describe('an instrument that may not be used', () => {
-    const reasonsOf = async (resourceIds: string[], more: object = {}): Promise<any> => {
+    const reasonsOf = async (resourceIds: string[], more: object = {}): Promise<Refusal> => {
       const before = await rows();
       const { body } = await book(resourceIds, more).expect(422);
       expect(await rows()).toBe(before);
-      return body;
+      return body as Refusal;
     };
 
     it('is refused in repair, with the steward’s words, the place in the list and a remedy; its bench too', async () => {

@@ -17,8 +17,8 @@ describe('instruments', () => {
   beforeEach(() => test.clock.set(TEST_NOW));
   afterAll(() => test.close());
 
-  const show = async (id: string, query: object = {}, who = member): Promise<any> =>
-    (await who.agent.get(`/api/instruments/${id}`).query(query).expect(200)).body;
+  const show = async (id: string, query: object = {}, who = member): Promise<object> =>
+    (await who.agent.get(`/api/instruments/${id}`).query(query).expect(200)).body as object;
   const change = (path: string, body: object, who = steward) =>
     who.agent.post(`/api/instruments/${path}`).send(body);
 
