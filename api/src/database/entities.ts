@@ -1,5 +1,11 @@
 import { Session } from '../auth/session.entity';
 import { SignInFailure } from '../auth/sign-in-failure.entity';
+import { BuildNight } from '../build-nights/build-night.entity';
+import { BuildNightBench } from '../build-nights/build-night-bench.entity';
+import { BuildNightMentor } from '../build-nights/build-night-mentor.entity';
+import { BuildNightPlace } from '../build-nights/build-night-place.entity';
+import { BuildNightSeries } from '../build-nights/build-night-series.entity';
+import { BuildNightStage } from '../build-nights/build-night-stage.entity';
 import { Club } from '../club/club.entity';
 import { BuildGroup, BuildGroupMember } from '../groups/build-group.entity';
 import { Instrument } from '../instruments/instrument.entity';
@@ -17,6 +23,12 @@ import { Stage } from '../plans/stage.entity';
 export const entities = [
   BuildGroup,
   BuildGroupMember,
+  BuildNight,
+  BuildNightBench,
+  BuildNightMentor,
+  BuildNightPlace,
+  BuildNightSeries,
+  BuildNightStage,
   Club,
   Instrument,
   InstrumentKind,
