@@ -1,4 +1,9 @@
 import { Module } from '@nestjs/common';
+import { BookingsRepository } from './bookings.repository';
+import { BookingsService } from './bookings.service';
 
-@Module({})
+@Module({
+  providers: [BookingsRepository, BookingsService],
+  exports: [BookingsService],
+})
 export class BookingsModule {}

@@ -1,5 +1,7 @@
 import { Session } from '../auth/session.entity';
 import { SignInFailure } from '../auth/sign-in-failure.entity';
+import { Booking } from '../bookings/booking.entity';
+import { BookingItem } from '../bookings/booking-item.entity';
 import { BuildNight } from '../build-nights/build-night.entity';
 import { BuildNightBench } from '../build-nights/build-night-bench.entity';
 import { BuildNightMentor } from '../build-nights/build-night-mentor.entity';
@@ -8,7 +10,9 @@ import { BuildNightSeries } from '../build-nights/build-night-series.entity';
 import { BuildNightStage } from '../build-nights/build-night-stage.entity';
 import { Club } from '../club/club.entity';
 import { BuildGroup, BuildGroupMember } from '../groups/build-group.entity';
+import { Clearance } from '../instruments/clearance.entity';
 import { Instrument } from '../instruments/instrument.entity';
+import { InstrumentChange } from '../instruments/instrument-change.entity';
 import { InstrumentKind } from '../instruments/instrument-kind.entity';
 import { Resource } from '../instruments/resource.entity';
 import { Mail } from '../mail/mail.entity';
@@ -21,8 +25,11 @@ import { Stage } from '../plans/stage.entity';
 
 /** Every table that has a class. */
 export const entities = [
+  Booking,
+  BookingItem,
   BuildGroup,
   BuildGroupMember,
+  Clearance,
   BuildNight,
   BuildNightBench,
   BuildNightMentor,
@@ -31,6 +38,7 @@ export const entities = [
   BuildNightStage,
   Club,
   Instrument,
+  InstrumentChange,
   InstrumentKind,
   LevelPoint,
   Mail,
