@@ -9,6 +9,7 @@ import {
   Unique,
   type Relation,
 } from 'typeorm';
+import { Booking } from '../bookings/booking.entity';
 import { Person } from '../people/person.entity';
 import { BuildNightSeries } from './build-night-series.entity';
 
@@ -16,6 +17,7 @@ import { BuildNightSeries } from './build-night-series.entity';
 @Entity()
 @Unique('build_night_times', ['id', 'startsAt', 'endsAt'])
 @Unique('build_night_number_once', ['seriesId', 'number'])
+@Unique('build_night_booking_once', ['bookingId'])
 @Index('build_night_starts', ['startsAt'])
 @Check('build_night_ends_after_start', `ends_at > starts_at`)
 @Check('build_night_places_some', `places BETWEEN 1 AND 100`)
@@ -51,6 +53,14 @@ export class BuildNight {
 
   @Column('text', { default: '' })
   note: string;
+
+  /** Holds its benches in the bench book; null for a night without a bench. */
+  @Column('uuid', { nullable: true })
+  bookingId: string | null;
+
+  @ManyToOne(() => Booking, { nullable: true })
+  @JoinColumn({ name: 'booking_id', foreignKeyConstraintName: 'build_night_holds_booking' })
+  booking: Relation<Booking> | null;
 
   @Column('uuid')
   madeById: string;
