@@ -1,14 +1,22 @@
 import { Injectable } from '@nestjs/common';
-import { DataSource, In, type EntityManager } from 'typeorm';
+import { Brackets, DataSource, In, IsNull, type EntityManager, type SelectQueryBuilder } from 'typeorm';
 import { Resource } from '../instruments/resource.entity';
 import { BookingItem } from './booking-item.entity';
 import { Booking } from './booking.entity';
+import { FIND_CLASHES, FIND_NEAREST_FREE } from './bookings.queries';
+import { cancellation } from './bookings.rules';
 import type { Clash, Span } from './bookings.types';
 
 type NewBooking = Pick<
   Booking,
   'kind' | 'title' | 'personId' | 'groupId' | 'checkId' | 'startsAt' | 'endsAt' | 'madeAt'
 >;
+
+/** A booking with what it holds. */
+export interface WholeBooking {
+  booking: Booking;
+  items: BookingItem[];
+}
 
 @Injectable()
 export class BookingsRepository {
@@ -32,9 +40,8 @@ export class BookingsRepository {
     booking: NewBooking,
     resourceIds: readonly string[],
   ): Promise<Booking> {
-    const made = await manager
-      .getRepository(Booking)
-      .save({ ...booking, cancelledAt: null, cancelledById: null });
+    const uncancelled = { cancelledAt: null, cancelledById: null };
+    const made = await manager.getRepository(Booking).save({ ...booking, ...uncancelled });
     await this.insertItems(manager, made, resourceIds);
     return made;
   }
@@ -44,10 +51,22 @@ export class BookingsRepository {
     { id, startsAt, endsAt }: Pick<Booking, 'id' | 'startsAt' | 'endsAt'>,
     resourceIds: readonly string[],
   ): Promise<void> {
-    const items = [...resourceIds]
-      .sort()
-      .map((resourceId) => ({ bookingId: id, resourceId, startsAt, endsAt, cancelledAt: null }));
+    const items = resourceIds.map((resourceId) => ({ bookingId: id, resourceId, startsAt, endsAt }));
     await manager.getRepository(BookingItem).insert(items);
+  }
+
+  /** Gives back what is not used yet: all of it, or from now on. What is over or given back already stays as it is. */
+  async release(manager: EntityManager, booking: Booking, now: Date, cancelledById: string): Promise<void> {
+    if (booking.cancelledAt !== null) return;
+    const extent = cancellation(booking, now);
+    if (extent === 'over') return;
+    const cut = extent === 'rest' ? { endsAt: now } : {};
+    await manager
+      .getRepository(Booking)
+      .update({ id: booking.id }, { ...cut, cancelledAt: now, cancelledById });
+    await manager
+      .getRepository(BookingItem)
+      .update({ bookingId: booking.id }, extent === 'rest' ? cut : { cancelledAt: now });
   }
 
   /** Everything confirmed that lies in the way of any of the spans, first span first. */
@@ -67,19 +86,77 @@ export class BookingsRepository {
       exceptBookingIds,
     ]);
   }
-}
 
-const FIND_CLASHES = `
-  SELECT (wanted.ordinal - 1)::integer AS "spanIndex", booking.id AS "bookingId", booking.kind, booking.title,
-         person.id AS "personId", person.name AS "personName",
-         resource.id AS "resourceId", resource.tag AS "resourceTag",
-         item.starts_at AS "startsAt", item.ends_at AS "endsAt", booking.made_at AS "madeAt"
-  FROM unnest($2::timestamptz[], $3::timestamptz[]) WITH ORDINALITY AS wanted(starts_at, ends_at, ordinal)
-  JOIN booking_item item
-    ON item.resource_id = ANY ($1::uuid[]) AND item.cancelled_at IS NULL
-   AND tstzrange(item.starts_at, item.ends_at, '[)') && tstzrange(wanted.starts_at, wanted.ends_at, '[)')
-  JOIN booking ON booking.id = item.booking_id
-  JOIN person ON person.id = booking.person_id
-  JOIN resource ON resource.id = item.resource_id
-  WHERE booking.id <> ALL ($4::uuid[])
-  ORDER BY wanted.ordinal, item.starts_at, resource.position, resource.tag`;
+  /** Up to three times within the window at which all of them are free as long as wanted, the nearest first. */
+  async findNearestFree(
+    resourceIds: readonly string[],
+    wanted: Span,
+    window: Span,
+    zone: string,
+  ): Promise<Span[]> {
+    const lengthMs = wanted.endsAt.getTime() - wanted.startsAt.getTime();
+    return this.dataSource.query<Span[]>(FIND_NEAREST_FREE, [
+      resourceIds,
+      wanted.startsAt,
+      lengthMs / 1000,
+      window.startsAt,
+      window.endsAt,
+      zone,
+    ]);
+  }
+
+  /** What touches the span, in the order it begins. */
+  async findBetween({ startsAt, endsAt }: Span, resourceId: string | undefined): Promise<WholeBooking[]> {
+    const found = this.confirmed().andWhere('booking.starts_at < :endsAt AND booking.ends_at > :startsAt', {
+      startsAt,
+      endsAt,
+    });
+    if (resourceId !== undefined) {
+      found.innerJoin(BookingItem, 'wanted', 'wanted.booking_id = booking.id');
+      found.andWhere('wanted.resource_id = :resourceId', { resourceId });
+    }
+    return this.withItems(await found.getMany());
+  }
+
+  /** A person's sessions that are not over. */
+  async findAhead(personId: string, now: Date): Promise<WholeBooking[]> {
+    const found = this.confirmed()
+      .andWhere(`booking.kind = 'session' AND booking.person_id = :personId`, { personId })
+      .andWhere('booking.ends_at > :now', { now });
+    return this.withItems(await found.getMany());
+  }
+
+  async findWhole(bookingId: string): Promise<WholeBooking | undefined> {
+    const found = this.named().where('booking.id = :bookingId', { bookingId });
+    const [whole] = await this.withItems(await found.getMany());
+    return whole;
+  }
+
+  /** Bookings that hold, those cut short included. */
+  private confirmed(): SelectQueryBuilder<Booking> {
+    const holds = new Brackets((where) =>
+      where.where('booking.cancelled_at IS NULL').orWhere('booking.cancelled_at > booking.starts_at'),
+    );
+    return this.named().where(holds);
+  }
+
+  private named(): SelectQueryBuilder<Booking> {
+    return this.dataSource
+      .getRepository(Booking)
+      .createQueryBuilder('booking')
+      .innerJoinAndSelect('booking.person', 'person')
+      .leftJoinAndSelect('booking.group', 'build_group')
+      .orderBy('booking.starts_at')
+      .addOrderBy('booking.id');
+  }
+
+  private async withItems(bookings: Booking[]): Promise<WholeBooking[]> {
+    const items = await this.dataSource.getRepository(BookingItem).find({
+      where: { bookingId: In(bookings.map(({ id }) => id)), cancelledAt: IsNull() },
+      relations: { resource: true },
+      order: { resource: { kind: 'ASC', position: 'ASC', tag: 'ASC' } },
+    });
+    const itemsOf = (id: string): BookingItem[] => items.filter(({ bookingId }) => bookingId === id);
+    return bookings.map((booking) => ({ booking, items: itemsOf(booking.id) }));
+  }
+}

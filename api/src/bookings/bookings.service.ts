@@ -65,25 +65,25 @@ export class BookingsService {
     await this.bookings.insertItems(manager, { id: bookingId, ...head }, resourceIds);
   }
 
-  /** For build nights: gives the benches back. Releasing what is released already changes nothing. */
+  /** For build nights: gives the benches back, those of a running night from now on. Twice is as good as once. */
   async releaseForNight(manager: EntityManager, bookingId: string, personId: string): Promise<void> {
-    const cancelledAt = this.clock.now();
-    await manager.query(
-      `UPDATE booking SET cancelled_at = $2, cancelled_by_id = $3
-       WHERE id = $1 AND kind = 'build night' AND cancelled_at IS NULL`,
-      [bookingId, cancelledAt, personId],
-    );
-    await manager.query(
-      `UPDATE booking_item SET cancelled_at = $2 WHERE booking_id = $1 AND cancelled_at IS NULL`,
-      [bookingId, cancelledAt],
-    );
+    const booking = await manager
+      .getRepository(Booking)
+      .findOne({ where: { id: bookingId, kind: 'build night' }, lock: { mode: 'pessimistic_write' } });
+    if (booking) await this.bookings.release(manager, booking, this.clock.now(), personId);
   }
 
-  private async lockOffered(manager: EntityManager, resourceIds: readonly string[]): Promise<void> {
-    const offered = await this.bookings.lockResources(manager, resourceIds);
-    const known = new Set(offered.filter(({ retiredAt }) => retiredAt === null).map(({ id }) => id));
+  /**
+   * Queues up for what is wanted, and refuses what the club does not offer.
+   *
+   * @throws DomainError 422 on the first of `resourceIds` that is unknown or retired
+   */
+  async lockOffered(manager: EntityManager, resourceIds: readonly string[]): Promise<void> {
     if (resourceIds.length === 0) throw fieldError('resourceIds', 'Choose at least one bench or instrument.');
-    if (!resourceIds.every((id) => known.has(id)))
-      throw fieldError('resourceIds', 'One of these is not a bench or instrument of the club, or no longer.');
+    const found = await this.bookings.lockResources(manager, resourceIds);
+    const offered = new Set(found.filter(({ retiredAt }) => retiredAt === null).map(({ id }) => id));
+    const missing = resourceIds.findIndex((id) => !offered.has(id));
+    if (missing >= 0)
+      throw fieldError(`resourceIds.${missing}`, 'The club has no such bench or instrument, or no longer.');
   }
 }
