@@ -2,6 +2,7 @@ import type supertest from 'supertest';
 import { startTestApp, type TestApp } from '../../test/app';
 import { bench, night, nightPlan, stage } from '../../test/factories/night.factory';
 import { someoneWith } from '../../test/factories/person.factory';
+import type { BuildNightDto } from './dto/build-night.dto';
 
 const ID = '00000000-0000-4000-8000-000000000000';
 
@@ -28,7 +29,8 @@ describe('listing build nights', () => {
       .expect(201);
     const days = async (from: string, to: string) => {
       const { body } = await list(from, to).expect(200);
-      return body.items.map(({ startsAt }: { startsAt: string }) => startsAt.slice(0, 10));
+      const { items } = body as { items: { startsAt: string }[] };
+      return items.map(({ startsAt }) => startsAt.slice(0, 10));
     };
     expect(await days('2026-05-05T20:30:00Z', '2026-05-12T18:30:00Z')).toEqual([]);
     expect(await days('2026-05-05T20:29:00Z', '2026-05-12T18:31:00Z')).toEqual(['2026-05-05', '2026-05-12']);
@@ -69,7 +71,7 @@ describe('listing build nights', () => {
     const seen = async (agent: supertest.Agent) => {
       const query = { from: '2026-01-20T00:00:00Z', to: '2026-01-21T00:00:00Z' };
       const { body } = await agent.get('/api/build-nights').query(query).expect(200);
-      return body.items[0];
+      return (body as { items: BuildNightDto[] }).items[0];
     };
     expect(await seen(member)).toMatchObject({ coming: 1, waiting: 1, mine: { state: 'waiting', line: 1 } });
     expect(await seen(second)).toMatchObject({
