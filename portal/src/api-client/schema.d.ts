@@ -4,460 +4,2061 @@
  */
 
 export interface paths {
-  '/api/auth/me': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/auth/me": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Who is signed in. */
+        get: operations["Auth.me"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Who is signed in. */
-    get: operations['Auth.me'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/auth/refresh': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/auth/refresh": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Exchanges the refresh cookie for the next pair. */
+        post: operations["Auth.refresh"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Exchanges the refresh cookie for the next pair. */
-    post: operations['Auth.refresh'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/auth/sign-in': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/auth/sign-in": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Starts a session. The tokens come as httpOnly cookies; scripts never see them. */
+        post: operations["Auth.signIn"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Starts a session. The tokens come as httpOnly cookies; scripts never see them. */
-    post: operations['Auth.signIn'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/auth/sign-out': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/auth/sign-out": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Ends the session on the server. Safe to repeat. */
+        post: operations["Auth.signOut"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Ends the session on the server. Safe to repeat. */
-    post: operations['Auth.signOut'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/club': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/benches": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The benches that can be booked, in the order they stand. */
+        get: operations["Benches.list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** The club's name, zone and currency. */
-    get: operations['Club.front'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/health': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/bookings": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Who has what in a stretch of at most 62 days. */
+        get: operations["Bookings.list"];
+        put?: never;
+        /** Books benches and instruments together: all of them, or nothing. */
+        post: operations["Bookings.book"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Answers 200 when the process can reach its database. */
-    get: operations['Health.check'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/people': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/bookings/mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Your own sessions that are not over. */
+        get: operations["Bookings.mine"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Everybody of the club, by name. */
-    get: operations['People.list'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/people/{personId}': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/bookings/{bookingId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        /** Cancels it, or ends it now when it runs already. Cancelling twice is no error. */
+        delete: operations["Bookings.cancel"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get: operations['People.show'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
+    "/api/build-nights": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The nights of a stretch of time, at most 100 days, earliest first; cancelled ones among them. */
+        get: operations["BuildNights.list"];
+        put?: never;
+        /**
+         * Schedules one night or a series, whole or not at all. When a bench or a mentor is taken on any date, nothing is
+         *     made and the answer is 409 `night-clash` with `clashes`: each date, the reasons, and what would make it clear.
+         *     Send it again with those dates in `skip`, or with other benches or mentors for them in `instead`.
+         */
+        post: operations["BuildNights.schedule"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/build-nights/preview": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** What scheduling this would meet, date by date. Nothing is kept. */
+        post: operations["BuildNights.preview"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/build-nights/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One night with the names of who is coming and who waits. */
+        get: operations["BuildNights.show"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        /** Changes one night; what is left out stays. Other times are told to everybody who is coming or waiting. */
+        patch: operations["BuildNights.change"];
+        trace?: never;
+    };
+    "/api/build-nights/{id}/cancel": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Cancels one night with a word, which goes to everybody who was coming, waiting or on duty. */
+        post: operations["BuildNights.cancel"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/build-nights/{id}/coming": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Says that the caller is coming: a place, or the end of the waiting list when the night is full. */
+        post: operations["BuildNights.come"];
+        /** Says that the caller is not coming after all; the first in the waiting list moves up. */
+        delete: operations["BuildNights.stayAway"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/clearances": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Who is cleared on what. */
+        get: operations["Clearances.list"];
+        put?: never;
+        /** Clears somebody on a kind of instrument, or renews what they have. */
+        post: operations["Clearances.grant"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/clearances/mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Clearances.mine"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/clearances/{clearanceId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete: operations["Clearances.end"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/club": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The club's name, zone and currency. */
+        get: operations["Club.front"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/groups": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Every group of the club with its members. */
+        get: operations["Groups.list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/groups/mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Groups.mine"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/health": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Answers 200 when the process can reach its database. */
+        get: operations["Health.check"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/instruments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Every instrument of the club, and whether you may book it on the day asked about. */
+        get: operations["Instruments.list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/instruments/{instrumentId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Instruments.show"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/instruments/{instrumentId}/calibration": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Sets the last day on which its calibration holds. */
+        post: operations["Instruments.changeCalibration"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/instruments/{instrumentId}/condition": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Puts it in repair, out of use, or back in use. */
+        post: operations["Instruments.changeCondition"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/instruments/{instrumentId}/history": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Who changed what on it, and when, the latest first. */
+        get: operations["Instruments.history"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/people": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Everybody of the club, by name. */
+        get: operations["People.list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/people/{personId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["People.show"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
 }
 export type webhooks = Record<string, never>;
 export interface components {
-  schemas: {
-    ClubDto: {
-      name: string;
-      address: string;
-      contactEmail: string;
-      /**
-       * @description IANA zone of the club's wall clock.
-       * @example Europe/London
-       */
-      timeZone: string;
-      /**
-       * @description ISO 4217
-       * @example GBP
-       */
-      currency: string;
-      /** @description Accounts of the demo club; empty anywhere else. */
-      demoAccounts: components['schemas']['DemoAccountDto'][];
+    schemas: {
+        BenchDto: {
+            id: string;
+            tag: string;
+            name: string;
+            /** @description Order on the page. */
+            position: number;
+        };
+        BenchPageDto: {
+            items: components["schemas"]["BenchDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
+        BookedResourceDto: {
+            /** @enum {string} */
+            kind: "bench" | "instrument";
+            id: string;
+            /** @example FR-031 */
+            tag: string;
+            name: string;
+        };
+        BookingDto: {
+            /** @enum {string} */
+            kind: "session" | "build night";
+            /** Format: uuid */
+            groupId: string | null;
+            groupName: string | null;
+            /**
+             * Format: uuid
+             * @description What it was made for: on your own only.
+             */
+            checkId: string | null;
+            id: string;
+            /** @description Of a build night; empty for a session. */
+            title: string;
+            personId: string;
+            personName: string;
+            /** @description Whether it is your session. */
+            mine: boolean;
+            resources: components["schemas"]["BookedResourceDto"][];
+            /** Format: date-time */
+            startsAt: string;
+            /** Format: date-time */
+            endsAt: string;
+            /** Format: date-time */
+            madeAt: string;
+            /** @description Whether you may cancel it now. */
+            mayCancel: boolean;
+        };
+        BookingOverlapDto: {
+            takenBy: components["schemas"]["TakenDto"][];
+            /** @description Up to three times at which everything wanted is free for as long, the nearest first. */
+            nearestFree: components["schemas"]["SpanDto"][];
+            /**
+             * @description Stable; opened, it explains itself.
+             * @example /problems/invalid-input
+             */
+            type: string;
+            title: string;
+            status: number;
+            /** @description This occurrence, in words for a member. */
+            detail: string;
+            /** @description Names this request in the log. */
+            instance: string;
+            errors?: components["schemas"]["FieldProblemDto"][];
+        };
+        BuildNightDetailDto: {
+            id: string;
+            title: string;
+            series: components["schemas"]["NightSeriesDto"] | null;
+            /** Format: date-time */
+            startsAt: string;
+            /** Format: date-time */
+            endsAt: string;
+            places: number;
+            /** @description How many are coming. */
+            coming: number;
+            /** @description How many wait for a place. */
+            waiting: number;
+            note: string;
+            benches: components["schemas"]["NightBenchDto"][];
+            mentors: components["schemas"]["NightPersonDto"][];
+            stages: components["schemas"]["NightStageDto"][];
+            /** @description null: not said anything. */
+            mine: components["schemas"]["NightStandingDto"] | null;
+            /** Format: date-time */
+            cancelledAt: string | null;
+            cancelledReason: string | null;
+            /** @description In the order in which they said so. */
+            comingPeople: components["schemas"]["NightGuestDto"][];
+            /** @description In the order in which they move up. */
+            waitingPeople: components["schemas"]["NightGuestDto"][];
+        };
+        BuildNightDto: {
+            id: string;
+            title: string;
+            series: components["schemas"]["NightSeriesDto"] | null;
+            /** Format: date-time */
+            startsAt: string;
+            /** Format: date-time */
+            endsAt: string;
+            places: number;
+            /** @description How many are coming. */
+            coming: number;
+            /** @description How many wait for a place. */
+            waiting: number;
+            note: string;
+            benches: components["schemas"]["NightBenchDto"][];
+            mentors: components["schemas"]["NightPersonDto"][];
+            stages: components["schemas"]["NightStageDto"][];
+            /** @description null: not said anything. */
+            mine: components["schemas"]["NightStandingDto"] | null;
+            /** Format: date-time */
+            cancelledAt: string | null;
+            cancelledReason: string | null;
+        };
+        BuildNightsDto: {
+            items: components["schemas"]["BuildNightDto"][];
+        };
+        CancelNightDto: {
+            reason: string;
+        };
+        ChangeCalibrationDto: {
+            /**
+             * Format: date
+             * @description Last day on which the calibration holds.
+             */
+            dueOn: string;
+            /** @description Who calibrated it, and what it came out at. */
+            note: string;
+        };
+        ChangeConditionDto: {
+            /** @enum {string} */
+            condition: "ready" | "in repair" | "out of use";
+            /** @description What is wrong, or what was put right; members read it. */
+            note: string;
+        };
+        ChangeNightDto: {
+            /** Format: date-time */
+            startsAt?: string;
+            /** Format: date-time */
+            endsAt?: string;
+            title?: string;
+            /** @description Not fewer than are coming. More moves the waiting list up. */
+            places?: number;
+            note?: string;
+            benchIds?: string[];
+            mentorIds?: string[];
+            stageIds?: string[];
+        };
+        CheckedNightDto: {
+            /**
+             * @description The night's day on the club's calendar.
+             * @example 2026-10-20
+             */
+            date: string;
+            /** Format: date-time */
+            startsAt: string;
+            /** Format: date-time */
+            endsAt: string;
+            /** @enum {string} */
+            verdict: "clash" | "clear" | "left out";
+            clashes: components["schemas"]["NightClashDto"][];
+            remedy: components["schemas"]["NightRemedyDto"];
+        };
+        ClearanceDto: {
+            /** Format: date */
+            grantedOn: string;
+            /** Format: date */
+            until: string | null;
+            id: string;
+            personId: string;
+            personName: string;
+            kindId: string;
+            kindName: string;
+            grantedBy: string;
+            /** @description Whether it holds today. */
+            holds: boolean;
+        };
+        ClearancePageDto: {
+            items: components["schemas"]["ClearanceDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
+        ClubDto: {
+            name: string;
+            address: string;
+            contactEmail: string;
+            /**
+             * @description IANA zone of the club's wall clock.
+             * @example Europe/London
+             */
+            timeZone: string;
+            /**
+             * @description ISO 4217
+             * @example GBP
+             */
+            currency: string;
+            /** @description Accounts of the demo club; empty anywhere else. */
+            demoAccounts: components["schemas"]["DemoAccountDto"][];
+        };
+        CreateBookingDto: {
+            /** Format: date-time */
+            startsAt: string;
+            /** Format: date-time */
+            endsAt: string;
+            /** @description Benches and instruments, 1 to 8: all of them are booked, or none. */
+            resourceIds: string[];
+            /**
+             * Format: uuid
+             * @description Book it for one of your groups.
+             */
+            groupId?: string;
+            /**
+             * Format: uuid
+             * @description The check of the plan you will work on.
+             */
+            checkId?: string;
+        };
+        DemoAccountDto: {
+            email: string;
+            role: string;
+        };
+        FieldProblemDto: {
+            /**
+             * @description Where in the request.
+             * @example #/endsAt
+             */
+            pointer: string;
+            detail: string;
+        };
+        GrantClearanceDto: {
+            /**
+             * Format: date
+             * @description Last day on which it holds; leave it out for no end.
+             */
+            until?: string;
+            /** Format: uuid */
+            personId: string;
+            /** Format: uuid */
+            kindId: string;
+        };
+        GroupDto: {
+            id: string;
+            name: string;
+            /** @description When and where they usually meet. */
+            about: string;
+            members: components["schemas"]["GroupMemberDto"][];
+            /** @description Whether you are one of them. */
+            mine: boolean;
+        };
+        GroupMemberDto: {
+            personId: string;
+            name: string;
+        };
+        GroupPageDto: {
+            items: components["schemas"]["GroupDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
+        InsteadDto: {
+            /**
+             * Format: date
+             * @description The night's day on the club's calendar.
+             * @example 2026-10-20
+             */
+            date: string;
+            benchIds?: string[];
+            mentorIds?: string[];
+        };
+        InstrumentChangeDto: {
+            /** @enum {string} */
+            changed: "condition" | "calibration";
+            /** @description A condition or a day; null where none was on record. */
+            before: string | null;
+            after: string | null;
+            id: string;
+            /** Format: date-time */
+            changedAt: string;
+            changedBy: string;
+            note: string;
+        };
+        InstrumentDetailDto: {
+            /** @enum {string} */
+            condition: "ready" | "in repair" | "out of use";
+            /**
+             * Format: date
+             * @description Last day on which its calibration holds; null where none is on record.
+             */
+            calibrationDueOn: string | null;
+            /** @description The level that harms its input, dBm. */
+            damageLevelDbm: number | null;
+            /** @description ± limit of its level readings, dB. */
+            amplitudeAccuracyDb: number | null;
+            /** @description Your clearance on its kind, lapsed ones too; null when you have none. */
+            myClearance: components["schemas"]["MyClearanceDto"] | null;
+            id: string;
+            /** @example FR-031 */
+            tag: string;
+            name: string;
+            position: number;
+            kind: components["schemas"]["InstrumentKindDto"];
+            /** @description Why it is not ready, or what to mind. */
+            conditionNote: string;
+            /** @description Whether you may book it for the day asked about. */
+            mayBook: boolean;
+            /** @description Why not; empty when you may. */
+            reasons: components["schemas"]["UseReasonDto"][];
+            /** @description How many members hold a clearance on its kind today. */
+            clearedPeople: number;
+        };
+        InstrumentDto: {
+            /** @enum {string} */
+            condition: "ready" | "in repair" | "out of use";
+            /**
+             * Format: date
+             * @description Last day on which its calibration holds; null where none is on record.
+             */
+            calibrationDueOn: string | null;
+            /** @description The level that harms its input, dBm. */
+            damageLevelDbm: number | null;
+            /** @description ± limit of its level readings, dB. */
+            amplitudeAccuracyDb: number | null;
+            /** @description Your clearance on its kind, lapsed ones too; null when you have none. */
+            myClearance: components["schemas"]["MyClearanceDto"] | null;
+            id: string;
+            /** @example FR-031 */
+            tag: string;
+            name: string;
+            position: number;
+            kind: components["schemas"]["InstrumentKindDto"];
+            /** @description Why it is not ready, or what to mind. */
+            conditionNote: string;
+            /** @description Whether you may book it for the day asked about. */
+            mayBook: boolean;
+            /** @description Why not; empty when you may. */
+            reasons: components["schemas"]["UseReasonDto"][];
+        };
+        InstrumentHistoryDto: {
+            items: components["schemas"]["InstrumentChangeDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
+        InstrumentKindDto: {
+            id: string;
+            name: string;
+            needsClearance: boolean;
+            needsCalibration: boolean;
+        };
+        InstrumentPageDto: {
+            items: components["schemas"]["InstrumentDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
+        MeDto: {
+            id: string;
+            name: string;
+            email: string;
+            roles: ("member" | "mentor" | "steward" | "treasurer" | "organiser")[];
+            /** @description True on a bench tablet. */
+            sharedDevice: boolean;
+        };
+        MyClearanceDto: {
+            /** Format: date */
+            grantedOn: string;
+            /**
+             * Format: date
+             * @description Last day on which it holds; null while nobody set an end.
+             */
+            until: string | null;
+        };
+        NightBenchDto: {
+            id: string;
+            tag: string;
+        };
+        NightClashDto: {
+            /** @enum {string} */
+            kind: "mentor" | "bench";
+            detail: string;
+        };
+        NightGuestDto: {
+            id: string;
+            name: string;
+            /**
+             * Format: date-time
+             * @description When they said that they are coming.
+             */
+            saidAt: string;
+        };
+        NightPersonDto: {
+            id: string;
+            name: string;
+        };
+        NightRemedyDto: {
+            benchIds?: string[];
+            mentorIds?: string[];
+        };
+        NightSeriesDto: {
+            id: string;
+            title: string;
+            /** @example FREQ=WEEKLY;COUNT=22 */
+            rule: string;
+            /** @description This night's place in the series, from 1. */
+            number: number;
+            /** @description How many nights the series has. */
+            total: number;
+        };
+        NightStageDto: {
+            id: string;
+            /** @example 9 */
+            position: number;
+            /** @example Pre-driver */
+            name: string;
+        };
+        NightStandingDto: {
+            /** @enum {string} */
+            state: "coming" | "waiting" | "on duty";
+            /** @description Place in the waiting list, 1 is next; null unless waiting. */
+            line: number | null;
+        };
+        NightsPreviewDto: {
+            nights: components["schemas"]["CheckedNightDto"][];
+            /** @description How many people would be told by mail. */
+            toTell: number;
+        };
+        NotBookableDto: {
+            refused: components["schemas"]["RefusedResourceDto"][];
+            /**
+             * @description Stable; opened, it explains itself.
+             * @example /problems/invalid-input
+             */
+            type: string;
+            title: string;
+            status: number;
+            /** @description This occurrence, in words for a member. */
+            detail: string;
+            /** @description Names this request in the log. */
+            instance: string;
+            errors?: components["schemas"]["FieldProblemDto"][];
+        };
+        Object: Record<string, never>;
+        PeoplePageDto: {
+            items: components["schemas"]["PersonDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
+        PersonDto: {
+            /** @example 0b6f1c1e-5f0e-4f0b-9d39-0c6a4f6f7f11 */
+            id: string;
+            name: string;
+            roles: ("member" | "mentor" | "steward" | "treasurer" | "organiser")[];
+        };
+        PlanNightsDto: {
+            /**
+             * Format: date-time
+             * @description The first night's beginning; for a series its time on the club's wall is kept.
+             */
+            startsAt: string;
+            /**
+             * Format: date-time
+             * @description The first night's end: 15 minutes to 12 hours later.
+             */
+            endsAt: string;
+            /** @description Days to leave out of the series (EXDATE). A day that is no night of it changes nothing. */
+            skip?: string[];
+            /** @description Left out for a single night. */
+            repeat?: components["schemas"]["RepeatDto"];
+            /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
+            instead?: components["schemas"]["InsteadDto"][];
+            /** @description Benches the night holds; none for an evening without. */
+            benchIds?: string[];
+            /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
+            mentorIds?: string[];
+            /** @description Stages in focus. */
+            stageIds?: string[];
+            title: string;
+            places: number;
+            note?: string;
+            /** @description Tells the people whose build is on one of the stages in focus. */
+            tellByMail?: boolean;
+        };
+        PreviewNightsDto: {
+            /**
+             * Format: date-time
+             * @description The first night's beginning; for a series its time on the club's wall is kept.
+             */
+            startsAt: string;
+            /**
+             * Format: date-time
+             * @description The first night's end: 15 minutes to 12 hours later.
+             */
+            endsAt: string;
+            /** @description Days to leave out of the series (EXDATE). A day that is no night of it changes nothing. */
+            skip?: string[];
+            title?: string;
+            places?: number;
+            note?: string;
+            /** @description Tells the people whose build is on one of the stages in focus. */
+            tellByMail?: boolean;
+            /** @description Left out for a single night. */
+            repeat?: components["schemas"]["RepeatDto"];
+            /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
+            instead?: components["schemas"]["InsteadDto"][];
+            /** @description Benches the night holds; none for an evening without. */
+            benchIds?: string[];
+            /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
+            mentorIds?: string[];
+            /** @description Stages in focus. */
+            stageIds?: string[];
+        };
+        ProblemDto: {
+            /**
+             * @description Stable; opened, it explains itself.
+             * @example /problems/invalid-input
+             */
+            type: string;
+            title: string;
+            status: number;
+            /** @description This occurrence, in words for a member. */
+            detail: string;
+            /** @description Names this request in the log. */
+            instance: string;
+            errors?: components["schemas"]["FieldProblemDto"][];
+        };
+        RefusedResourceDto: {
+            resourceId: string;
+            reasons: components["schemas"]["UseReasonDto"][];
+        };
+        RepeatDto: {
+            /**
+             * @description An RRULE of RFC 5545 without its name: FREQ=WEEKLY with INTERVAL, BYDAY and either COUNT (at most 60) or UNTIL in
+             *     UTC. It is read on the club's wall clock, so that 19:30 stays 19:30 when the clocks change.
+             * @example FREQ=WEEKLY;BYDAY=TU;COUNT=6
+             */
+            rule: string;
+        };
+        ScheduledNightsDto: {
+            nights: components["schemas"]["BuildNightDto"][];
+            /** @description How many people are told by mail. */
+            told: number;
+        };
+        SignInDto: {
+            /**
+             * Format: email
+             * @example member@larkmoor.example
+             */
+            email: string;
+            /** @example larkmoor-demo */
+            password: string;
+            /** @description On a bench tablet the sign-in runs out after ten minutes untouched. */
+            sharedDevice?: boolean;
+        };
+        SpanDto: {
+            /** Format: date-time */
+            startsAt: string;
+            /** Format: date-time */
+            endsAt: string;
+        };
+        TakenDto: {
+            resourceId: string;
+            resourceTag: string;
+            /** @description A person's name, or a build night's title. */
+            by: string;
+            /** Format: date-time */
+            startsAt: string;
+            /** Format: date-time */
+            endsAt: string;
+        };
+        UseReasonDto: {
+            /** @enum {string} */
+            code: "in repair" | "out of use" | "calibration unknown" | "calibration past" | "not cleared" | "clearance past";
+            reason: string;
+            remedy: string;
+        };
     };
-    DemoAccountDto: {
-      email: string;
-      role: string;
-    };
-    FieldProblemDto: {
-      /**
-       * @description Where in the request.
-       * @example #/endsAt
-       */
-      pointer: string;
-      detail: string;
-    };
-    MeDto: {
-      id: string;
-      name: string;
-      email: string;
-      roles: ('member' | 'mentor' | 'steward' | 'treasurer' | 'organiser')[];
-      /** @description True on a bench tablet. */
-      sharedDevice: boolean;
-    };
-    Object: Record<string, never>;
-    PeoplePageDto: {
-      items: components['schemas']['PersonDto'][];
-      total: number;
-      page: number;
-      perPage: number;
-    };
-    PersonDto: {
-      /** @example 0b6f1c1e-5f0e-4f0b-9d39-0c6a4f6f7f11 */
-      id: string;
-      name: string;
-      roles: ('member' | 'mentor' | 'steward' | 'treasurer' | 'organiser')[];
-    };
-    ProblemDto: {
-      /**
-       * @description Stable; opened, it explains itself.
-       * @example /problems/invalid-input
-       */
-      type: string;
-      title: string;
-      status: number;
-      /** @description This occurrence, in words for a member. */
-      detail: string;
-      /** @description Names this request in the log. */
-      instance: string;
-      errors?: components['schemas']['FieldProblemDto'][];
-    };
-    SignInDto: {
-      /**
-       * Format: email
-       * @example member@larkmoor.example
-       */
-      email: string;
-      /** @example larkmoor-demo */
-      password: string;
-      /** @description On a bench tablet the sign-in runs out after ten minutes untouched. */
-      sharedDevice?: boolean;
-    };
-  };
-  responses: never;
-  parameters: never;
-  requestBodies: never;
-  headers: never;
-  pathItems: never;
+    responses: never;
+    parameters: never;
+    requestBodies: never;
+    headers: never;
+    pathItems: never;
 }
 export type $defs = Record<string, never>;
 export interface operations {
-  'Auth.me': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "Auth.me": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MeDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
+    "Auth.refresh": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
         };
-        content: {
-          'application/json': components['schemas']['MeDto'];
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
     };
-  };
-  'Auth.refresh': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "Auth.signIn": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SignInDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MeDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    requestBody?: never;
-    responses: {
-      204: {
-        headers: {
-          [name: string]: unknown;
+    "Auth.signOut": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
         };
-        content?: never;
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
     };
-  };
-  'Auth.signIn': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "Benches.list": {
+        parameters: {
+            query: {
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BenchPageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['SignInDto'];
-      };
+    "Bookings.list": {
+        parameters: {
+            query: {
+                from: string;
+                to: string;
+                /** @description Only bookings that hold this bench or instrument. */
+                resourceId?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BookingDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
+    "Bookings.book": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
         };
-        content: {
-          'application/json': components['schemas']['MeDto'];
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateBookingDto"];
+            };
         };
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BookingDto"];
+                };
+            };
+            /** @description Somebody has it; when else it is free */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BookingOverlapDto"];
+                };
+            };
+            /** @description Not like this; why, and what helps */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["NotBookableDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
     };
-  };
-  'Auth.signOut': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "Bookings.mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BookingDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    requestBody?: never;
-    responses: {
-      204: {
-        headers: {
-          [name: string]: unknown;
+    "Bookings.cancel": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                bookingId: string;
+            };
+            cookie?: never;
         };
-        content?: never;
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
     };
-  };
-  'Club.front': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "BuildNights.list": {
+        parameters: {
+            query: {
+                /** @description Nights that end after this. */
+                from: string;
+                /** @description Nights that begin before this. */
+                to: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightsDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
+    "BuildNights.schedule": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
         };
-        content: {
-          'application/json': components['schemas']['ClubDto'];
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PlanNightsDto"];
+            };
         };
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ScheduledNightsDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
     };
-  };
-  'Health.check': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "BuildNights.preview": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PreviewNightsDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["NightsPreviewDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
+    "BuildNights.show": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
         };
-        content: {
-          'application/json': Record<string, never>;
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
     };
-  };
-  'People.list': {
-    parameters: {
-      query: {
-        /** @description Only holders of this role. */
-        role?: 'member' | 'mentor' | 'steward' | 'treasurer' | 'organiser';
-        /** @description Only names that have these letters in them. */
-        name?: string;
-        page: components['schemas']['Object'];
-        perPage: components['schemas']['Object'];
-      };
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "BuildNights.change": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangeNightDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
+    "BuildNights.cancel": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
         };
-        content: {
-          'application/json': components['schemas']['PeoplePageDto'];
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CancelNightDto"];
+            };
         };
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
     };
-  };
-  'People.show': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        personId: string;
-      };
-      cookie?: never;
+    "BuildNights.come": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
+    "BuildNights.stayAway": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
         };
-        content: {
-          'application/json': components['schemas']['PersonDto'];
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
     };
-  };
+    "Clearances.list": {
+        parameters: {
+            query: {
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+                personId?: string;
+                kindId?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ClearancePageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Clearances.grant": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["GrantClearanceDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ClearanceDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Clearances.mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ClearanceDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Clearances.end": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                clearanceId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Club.front": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ClubDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Groups.list": {
+        parameters: {
+            query: {
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["GroupPageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Groups.mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["GroupDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Health.check": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": Record<string, never>;
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Instruments.list": {
+        parameters: {
+            query: {
+                /** @description For which day the instrument would be used; today unless told. */
+                on?: string;
+                /** @description Only instruments of this kind. */
+                kindId?: string;
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InstrumentPageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Instruments.show": {
+        parameters: {
+            query?: {
+                on?: string;
+            };
+            header?: never;
+            path: {
+                instrumentId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InstrumentDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Instruments.changeCalibration": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                instrumentId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangeCalibrationDto"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Instruments.changeCondition": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                instrumentId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangeConditionDto"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Instruments.history": {
+        parameters: {
+            query: {
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path: {
+                instrumentId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InstrumentHistoryDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "People.list": {
+        parameters: {
+            query: {
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+                /** @description Only holders of this role. */
+                role?: "member" | "mentor" | "steward" | "treasurer" | "organiser";
+                /** @description Only names that have these letters in them. */
+                name?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PeoplePageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "People.show": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                personId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PersonDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
 }
