@@ -2,6 +2,12 @@ import { Session } from '../auth/session.entity';
 import { SignInFailure } from '../auth/sign-in-failure.entity';
 import { Booking } from '../bookings/booking.entity';
 import { BookingItem } from '../bookings/booking-item.entity';
+import { BuildNight } from '../build-nights/build-night.entity';
+import { BuildNightBench } from '../build-nights/build-night-bench.entity';
+import { BuildNightMentor } from '../build-nights/build-night-mentor.entity';
+import { BuildNightPlace } from '../build-nights/build-night-place.entity';
+import { BuildNightSeries } from '../build-nights/build-night-series.entity';
+import { BuildNightStage } from '../build-nights/build-night-stage.entity';
 import { Club } from '../club/club.entity';
 import { BuildGroup, BuildGroupMember } from '../groups/build-group.entity';
 import { Clearance } from '../instruments/clearance.entity';
@@ -23,6 +29,12 @@ export const entities = [
   BookingItem,
   BuildGroup,
   BuildGroupMember,
+  BuildNight,
+  BuildNightBench,
+  BuildNightMentor,
+  BuildNightPlace,
+  BuildNightSeries,
+  BuildNightStage,
   Clearance,
   Club,
   Instrument,

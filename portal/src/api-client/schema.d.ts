@@ -141,6 +141,98 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/build-nights": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The nights of a stretch of time, at most 100 days, earliest first; cancelled ones among them. */
+        get: operations["BuildNights.list"];
+        put?: never;
+        /**
+         * Schedules one night or a series, whole or not at all. When a bench or a mentor is taken on any date, nothing is
+         *     made and the answer is 409 `night-clash` with `clashes`: each date, the reasons, and what would make it clear.
+         *     Send it again with those dates in `skip`, or with other benches or mentors for them in `instead`.
+         */
+        post: operations["BuildNights.schedule"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/build-nights/preview": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** What scheduling this would meet, date by date. Nothing is kept. */
+        post: operations["BuildNights.preview"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/build-nights/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One night with the names of who is coming and who waits. */
+        get: operations["BuildNights.show"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        /** Changes one night; what is left out stays. Other times are told to everybody who is coming or waiting. */
+        patch: operations["BuildNights.change"];
+        trace?: never;
+    };
+    "/api/build-nights/{id}/cancel": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Cancels one night with a word, which goes to everybody who was coming, waiting or on duty. */
+        post: operations["BuildNights.cancel"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/build-nights/{id}/coming": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Says that the caller is coming: a place, or the end of the waiting list when the night is full. */
+        post: operations["BuildNights.come"];
+        /** Says that the caller is not coming after all; the first in the waiting list moves up. */
+        delete: operations["BuildNights.stayAway"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/clearances": {
         parameters: {
             query?: never;
@@ -445,6 +537,62 @@ export interface components {
             instance: string;
             errors?: components["schemas"]["FieldProblemDto"][];
         };
+        BuildNightDetailDto: {
+            id: string;
+            title: string;
+            series: components["schemas"]["NightSeriesDto"] | null;
+            /** Format: date-time */
+            startsAt: string;
+            /** Format: date-time */
+            endsAt: string;
+            places: number;
+            /** @description How many are coming. */
+            coming: number;
+            /** @description How many wait for a place. */
+            waiting: number;
+            note: string;
+            benches: components["schemas"]["NightBenchDto"][];
+            mentors: components["schemas"]["NightPersonDto"][];
+            stages: components["schemas"]["NightStageDto"][];
+            /** @description null: not said anything. */
+            mine: components["schemas"]["NightStandingDto"] | null;
+            /** Format: date-time */
+            cancelledAt: string | null;
+            cancelledReason: string | null;
+            /** @description In the order in which they said so. */
+            comingPeople: components["schemas"]["NightGuestDto"][];
+            /** @description In the order in which they move up. */
+            waitingPeople: components["schemas"]["NightGuestDto"][];
+        };
+        BuildNightDto: {
+            id: string;
+            title: string;
+            series: components["schemas"]["NightSeriesDto"] | null;
+            /** Format: date-time */
+            startsAt: string;
+            /** Format: date-time */
+            endsAt: string;
+            places: number;
+            /** @description How many are coming. */
+            coming: number;
+            /** @description How many wait for a place. */
+            waiting: number;
+            note: string;
+            benches: components["schemas"]["NightBenchDto"][];
+            mentors: components["schemas"]["NightPersonDto"][];
+            stages: components["schemas"]["NightStageDto"][];
+            /** @description null: not said anything. */
+            mine: components["schemas"]["NightStandingDto"] | null;
+            /** Format: date-time */
+            cancelledAt: string | null;
+            cancelledReason: string | null;
+        };
+        BuildNightsDto: {
+            items: components["schemas"]["BuildNightDto"][];
+        };
+        CancelNightDto: {
+            reason: string;
+        };
         ChangeCalibrationDto: {
             /**
              * Format: date
@@ -459,6 +607,34 @@ export interface components {
             condition: "ready" | "in repair" | "out of use";
             /** @description What is wrong, or what was put right; members read it. */
             note: string;
+        };
+        ChangeNightDto: {
+            /** Format: date-time */
+            startsAt?: string;
+            /** Format: date-time */
+            endsAt?: string;
+            title?: string;
+            /** @description Not fewer than are coming. More moves the waiting list up. */
+            places?: number;
+            note?: string;
+            benchIds?: string[];
+            mentorIds?: string[];
+            stageIds?: string[];
+        };
+        CheckedNightDto: {
+            /**
+             * @description The night's day on the club's calendar.
+             * @example 2026-10-20
+             */
+            date: string;
+            /** Format: date-time */
+            startsAt: string;
+            /** Format: date-time */
+            endsAt: string;
+            /** @enum {string} */
+            verdict: "clash" | "clear" | "left out";
+            clashes: components["schemas"]["NightClashDto"][];
+            remedy: components["schemas"]["NightRemedyDto"];
         };
         ClearanceDto: {
             /** Format: date */
@@ -556,6 +732,16 @@ export interface components {
             total: number;
             page: number;
             perPage: number;
+        };
+        InsteadDto: {
+            /**
+             * Format: date
+             * @description The night's day on the club's calendar.
+             * @example 2026-10-20
+             */
+            date: string;
+            benchIds?: string[];
+            mentorIds?: string[];
         };
         InstrumentChangeDto: {
             /** @enum {string} */
@@ -660,6 +846,60 @@ export interface components {
              */
             until: string | null;
         };
+        NightBenchDto: {
+            id: string;
+            tag: string;
+        };
+        NightClashDto: {
+            /** @enum {string} */
+            kind: "mentor" | "bench";
+            detail: string;
+        };
+        NightGuestDto: {
+            id: string;
+            name: string;
+            /**
+             * Format: date-time
+             * @description When they said that they are coming.
+             */
+            saidAt: string;
+        };
+        NightPersonDto: {
+            id: string;
+            name: string;
+        };
+        NightRemedyDto: {
+            benchIds?: string[];
+            mentorIds?: string[];
+        };
+        NightSeriesDto: {
+            id: string;
+            title: string;
+            /** @example FREQ=WEEKLY;COUNT=22 */
+            rule: string;
+            /** @description This night's place in the series, from 1. */
+            number: number;
+            /** @description How many nights the series has. */
+            total: number;
+        };
+        NightStageDto: {
+            id: string;
+            /** @example 9 */
+            position: number;
+            /** @example Pre-driver */
+            name: string;
+        };
+        NightStandingDto: {
+            /** @enum {string} */
+            state: "coming" | "waiting" | "on duty";
+            /** @description Place in the waiting list, 1 is next; null unless waiting. */
+            line: number | null;
+        };
+        NightsPreviewDto: {
+            nights: components["schemas"]["CheckedNightDto"][];
+            /** @description How many people would be told by mail. */
+            toTell: number;
+        };
         NotBookableDto: {
             refused: components["schemas"]["RefusedResourceDto"][];
             /**
@@ -688,6 +928,64 @@ export interface components {
             name: string;
             roles: ("member" | "mentor" | "steward" | "treasurer" | "organiser")[];
         };
+        PlanNightsDto: {
+            /**
+             * Format: date-time
+             * @description The first night's beginning; for a series its time on the club's wall is kept.
+             */
+            startsAt: string;
+            /**
+             * Format: date-time
+             * @description The first night's end: 15 minutes to 12 hours later.
+             */
+            endsAt: string;
+            /** @description Days to leave out of the series (EXDATE). A day that is no night of it changes nothing. */
+            skip?: string[];
+            /** @description Left out for a single night. */
+            repeat?: components["schemas"]["RepeatDto"];
+            /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
+            instead?: components["schemas"]["InsteadDto"][];
+            /** @description Benches the night holds; none for an evening without. */
+            benchIds?: string[];
+            /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
+            mentorIds?: string[];
+            /** @description Stages in focus. */
+            stageIds?: string[];
+            title: string;
+            places: number;
+            note?: string;
+            /** @description Tells the people whose build is on one of the stages in focus. */
+            tellByMail?: boolean;
+        };
+        PreviewNightsDto: {
+            /**
+             * Format: date-time
+             * @description The first night's beginning; for a series its time on the club's wall is kept.
+             */
+            startsAt: string;
+            /**
+             * Format: date-time
+             * @description The first night's end: 15 minutes to 12 hours later.
+             */
+            endsAt: string;
+            /** @description Days to leave out of the series (EXDATE). A day that is no night of it changes nothing. */
+            skip?: string[];
+            title?: string;
+            places?: number;
+            note?: string;
+            /** @description Tells the people whose build is on one of the stages in focus. */
+            tellByMail?: boolean;
+            /** @description Left out for a single night. */
+            repeat?: components["schemas"]["RepeatDto"];
+            /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
+            instead?: components["schemas"]["InsteadDto"][];
+            /** @description Benches the night holds; none for an evening without. */
+            benchIds?: string[];
+            /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
+            mentorIds?: string[];
+            /** @description Stages in focus. */
+            stageIds?: string[];
+        };
         ProblemDto: {
             /**
              * @description Stable; opened, it explains itself.
@@ -705,6 +1003,19 @@ export interface components {
         RefusedResourceDto: {
             resourceId: string;
             reasons: components["schemas"]["UseReasonDto"][];
+        };
+        RepeatDto: {
+            /**
+             * @description An RRULE of RFC 5545 without its name: FREQ=WEEKLY with INTERVAL, BYDAY and either COUNT (at most 60) or UNTIL in
+             *     UTC. It is read on the club's wall clock, so that 19:30 stays 19:30 when the clocks change.
+             * @example FREQ=WEEKLY;BYDAY=TU;COUNT=6
+             */
+            rule: string;
+        };
+        ScheduledNightsDto: {
+            nights: components["schemas"]["BuildNightDto"][];
+            /** @description How many people are told by mail. */
+            told: number;
         };
         SignInDto: {
             /**
@@ -1018,6 +1329,261 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "BuildNights.list": {
+        parameters: {
+            query: {
+                /** @description Nights that end after this. */
+                from: string;
+                /** @description Nights that begin before this. */
+                to: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightsDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "BuildNights.schedule": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PlanNightsDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ScheduledNightsDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "BuildNights.preview": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PreviewNightsDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["NightsPreviewDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "BuildNights.show": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "BuildNights.change": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangeNightDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "BuildNights.cancel": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CancelNightDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "BuildNights.come": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "BuildNights.stayAway": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightDetailDto"];
+                };
             };
             /** @description A problem document */
             default: {
