@@ -1,10 +1,19 @@
 import { Session } from '../auth/session.entity';
 import { SignInFailure } from '../auth/sign-in-failure.entity';
 import { Club } from '../club/club.entity';
+import { Checkout } from '../dues/checkout.entity';
+import { Invoice } from '../dues/invoice.entity';
+import { PaymentAllocation } from '../dues/payment-allocation.entity';
+import { PaymentEvent } from '../dues/payment-event.entity';
+import { Payment } from '../dues/payment.entity';
+import { PersonTier, Tier } from '../dues/tier.entity';
 import { BuildGroup, BuildGroupMember } from '../groups/build-group.entity';
 import { Instrument } from '../instruments/instrument.entity';
 import { InstrumentKind } from '../instruments/instrument-kind.entity';
 import { Resource } from '../instruments/resource.entity';
+import { Account } from '../ledger/account.entity';
+import { Entry } from '../ledger/entry.entity';
+import { Posting } from '../ledger/posting.entity';
 import { Mail } from '../mail/mail.entity';
 import { Person } from '../people/person.entity';
 import { LevelPoint } from '../plans/level-point.entity';
@@ -12,22 +21,38 @@ import { Plan } from '../plans/plan.entity';
 import { PlanCheck } from '../plans/plan-check.entity';
 import { PlanEdition } from '../plans/plan-edition.entity';
 import { Stage } from '../plans/stage.entity';
+import { BankStatement } from '../reconciliation/bank-statement.entity';
+import { LineMatch } from '../reconciliation/line-match.entity';
+import { StatementLine } from '../reconciliation/statement-line.entity';
 
 /** Every table that has a class. */
 export const entities = [
+  Account,
+  BankStatement,
   BuildGroup,
   BuildGroupMember,
+  Checkout,
   Club,
+  Entry,
   Instrument,
   InstrumentKind,
+  Invoice,
   LevelPoint,
+  LineMatch,
   Mail,
+  Payment,
+  PaymentAllocation,
+  PaymentEvent,
   Person,
+  PersonTier,
   Plan,
   PlanCheck,
   PlanEdition,
+  Posting,
   Resource,
   Session,
   SignInFailure,
   Stage,
+  StatementLine,
+  Tier,
 ];
