@@ -94,6 +94,7 @@ export function initialsOf(clubName: string): string {
   const words =
     clubName
       .normalize('NFD')
+      .replaceAll(/\p{M}/gu, '')
       .toUpperCase()
       .match(/[A-Z0-9]+/g) ?? [];
   return words

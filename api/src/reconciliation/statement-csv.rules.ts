@@ -149,7 +149,7 @@ function readAmount(line: number, column: 'amount' | 'balance', text: string, di
   const minor = readDecimal(text, digits);
   if (minor !== undefined) return minor;
   const example = digits === 0 ? '-12' : `-12.${'5'.padEnd(digits, '0')}`;
-  throw new BadLine(line, `“${shortened(text)}” is not a ${column} such as ${example}.`);
+  throw new BadLine(line, `“${shortened(text)}” is no ${column} such as ${example}.`);
 }
 
 /** Oldest first, whichever way round the file is: the balances tell. */
