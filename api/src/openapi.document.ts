@@ -18,10 +18,17 @@ export function describeApi(app: INestApplication): OpenAPIObject {
       description: 'A problem document',
       content: { 'application/problem+json': { schema: { $ref: '#/components/schemas/ProblemDto' } } },
     });
-  return SwaggerModule.createDocument(app, builder.build(), {
+  const document = SwaggerModule.createDocument(app, builder.build(), {
     extraModels: [ProblemDto],
     operationIdFactory: (controller, method) => `${controller.replace(/Controller$/, '')}.${method}`,
   });
+  // By name, so that the order in which modules are wired changes nothing in the file under version control.
+  const schemas = byName(document.components?.schemas ?? {});
+  return { ...document, paths: byName(document.paths), components: { ...document.components, schemas } };
+}
+
+function byName<T>(record: Record<string, T>): Record<string, T> {
+  return Object.fromEntries(Object.entries(record).sort(([a], [b]) => (a < b ? -1 : 1)));
 }
 
 export function setUpDocumentation(app: INestApplication): void {

@@ -4,7 +4,7 @@ import supertest from 'supertest';
 import { DataSource } from 'typeorm';
 import { AppModule } from '../src/app.module';
 import { setUpApp } from '../src/app.setup';
-import { Clock, SettableClock } from '../src/common/clock';
+import { SettableClock } from '../src/common/clock';
 import { Environment, readEnvironment } from '../src/config/environment';
 import { createDatabase } from './database';
 
@@ -28,11 +28,9 @@ export async function startTestApp(overrides: Partial<Environment> = {}): Promis
   const database = await createDatabase();
   const clock = new SettableClock(TEST_NOW);
   const environment = readEnvironment({ ...testEnvironment(database.url), ...overrides });
-  const module = await Test.createTestingModule({ imports: [AppModule] })
+  const module = await Test.createTestingModule({ imports: [AppModule.on(clock)] })
     .overrideProvider(Environment)
     .useValue(environment)
-    .overrideProvider(Clock)
-    .useValue(clock)
     .compile();
   const app = module.createNestApplication<NestExpressApplication>({ rawBody: true });
   setUpApp(app);
@@ -66,5 +64,6 @@ function testEnvironment(databaseUrl: string): Record<string, string> {
     SMTP_URL: 'smtp://127.0.0.1:9',
     PORTAL_DIST: '/nowhere',
     LOG_LEVEL: 'silent',
+    FERRITE_JOBS: 'off',
   };
 }

@@ -89,7 +89,7 @@ export function voltsPeakToPeakFromDbm(level: Dbm, resistance: Ohms): Volts {
  * Level of a sine from its peak-to-peak voltage across a resistance.
  *
  * @throws OutOfDomainError when the voltage is zero.
- * @example dbmFromVoltsPeakToPeak(volts(0.66), ohms(50)) //=> 0.370528
+ * @example dbmFromVoltsPeakToPeak(volts(0.66), ohms(50)) //=> 0.370279
  */
 export function dbmFromVoltsPeakToPeak(voltsPeakToPeak: Volts, resistance: Ohms): Dbm {
   return dbmFromVoltsRms(voltsRmsFromPeakToPeak(voltsPeakToPeak), resistance);

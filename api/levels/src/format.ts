@@ -63,7 +63,7 @@ export function formatReading(
 /**
  * The least of the shown numbers that is no less than the value: safe for "… or more would pass".
  *
- * @example formatAtLeast(0.392885, 2) //=> '+0.40'
+ * @example formatAtLeast(0.392903, 2) //=> '+0.40'
  */
 export function formatAtLeast(value: number, decimals: number): string {
   return formatSigned(towards(Math.ceil, value, decimals), decimals);

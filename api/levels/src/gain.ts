@@ -66,7 +66,7 @@ export interface GainInput {
  * gainReading({
  *   output: oscilloscopeReading({ voltsPerDivision: 0.02, divisionsPeakToPeak: 3.3, readToDivisions: 0.1, probeRatio: 10, loadOhms: 50 }),
  *   input: analyzerReading({ referenceLevelDbm: 0, divisionsDown: 1.94, dbPerDivision: 10, readToDivisions: 0.02, padsInLineDb: 0, amplitudeAccuracyDb: 0.4 }),
- * }).value //=> 19.770528
+ * }).value //=> 19.770279
  * @see JCGM 100:2008, 5.1.2
  */
 export function gainReading({ output, input }: GainInput): LevelReading {

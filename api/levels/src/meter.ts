@@ -20,7 +20,7 @@ export interface MeterInput {
  *
  * @returns value and uncertainties in `unit`; two components, rectangular: reading resolution and accuracy.
  * @throws OutOfDomainError naming the input.
- * @example meterReading({ value: 22.4, unit: 'mA', readToValue: 0.1, accuracyRel: 0.01 }).expandedUncertainty //=> 0.283246
+ * @example meterReading({ value: 22.4, unit: 'mA', readToValue: 0.1, accuracyRel: 0.01 }).expandedUncertainty //=> 0.283257
  * @see JCGM 100:2008 (GUM), 4.3.7 and 5.1.2
  */
 export function meterReading(input: MeterInput): LevelReading {

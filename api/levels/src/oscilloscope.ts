@@ -54,8 +54,8 @@ export interface OscilloscopeInput {
  * @returns dBm; uncertainties in dB; four components; volts peak to peak at the load; watts.
  * @throws OutOfDomainError naming the input: a trace higher than the screen or lower than four times what it was read
  *   to, a probe that is neither 1 nor 10, a resistance of zero or less, a tolerance above 0.25.
- * @example oscilloscopeReading({ voltsPerDivision: 0.02, divisionsPeakToPeak: 3.3, readToDivisions: 0.1, probeRatio: 10, loadOhms: 50 }).value //=> 0.370528
- * @example oscilloscopeReading({ voltsPerDivision: 0.02, divisionsPeakToPeak: 3.3, readToDivisions: 0.1, probeRatio: 10, loadOhms: 50 }).expandedUncertainty //=> 0.473028
+ * @example oscilloscopeReading({ voltsPerDivision: 0.02, divisionsPeakToPeak: 3.3, readToDivisions: 0.1, probeRatio: 10, loadOhms: 50 }).value //=> 0.370279
+ * @example oscilloscopeReading({ voltsPerDivision: 0.02, divisionsPeakToPeak: 3.3, readToDivisions: 0.1, probeRatio: 10, loadOhms: 50 }).expandedUncertainty //=> 0.473045
  * @example oscilloscopeReading({ voltsPerDivision: 0.02, divisionsPeakToPeak: 33, readToDivisions: 0.1, probeRatio: 10, loadOhms: 50 }) //=> throws OutOfDomainError
  * @see JCGM 100:2008 (GUM), 5.1.2; IEC 60027-3
  */

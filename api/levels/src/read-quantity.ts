@@ -45,7 +45,8 @@ export function readQuantity(text: string, unit: QuantityUnit, input = 'quantity
   if (suffix.kind === 'impossible prefix') throw impossiblePrefix(text, unit, input, digits, suffix.prefix);
   const prefix = suffix.kind === 'none' ? target.prefix : suffix.prefix;
   const power = exponent + powerOf(prefix) - powerOf(target.prefix);
-  const value = Number(`${sign === '-' ? '-' : ''}${digits}e${power}`);
+  // Adding zero turns −0 into 0: nobody means a negative nothing.
+  const value = Number(`${sign === '-' ? '-' : ''}${digits}e${power}`) + 0;
   requireRepresentable(value, digits, text, unit, input);
   const isPlain = !number.isUnusual && coded === undefined && (suffix.kind === 'none' || suffix.isWritten);
   const inFieldUnit = target.prefix === undefined || prefix === target.prefix;

@@ -30,7 +30,7 @@ export interface TighterScale {
  * @returns undefined when no smaller setting fits.
  * @throws OutOfDomainError as `oscilloscopeReading` and `verdictOf`.
  * @example tighterScale({ voltsPerDivision: 0.02, divisionsPeakToPeak: 3.3, readToDivisions: 0.1, probeRatio: 10, loadOhms: 50 }, { low: 0, high: 3 }).voltsPerDivision //=> 0.01
- * @example tighterScale({ voltsPerDivision: 0.02, divisionsPeakToPeak: 3.3, readToDivisions: 0.1, probeRatio: 10, loadOhms: 50 }, { low: 0, high: 3 }).passesFrom //=> 0.392885
+ * @example tighterScale({ voltsPerDivision: 0.02, divisionsPeakToPeak: 3.3, readToDivisions: 0.1, probeRatio: 10, loadOhms: 50 }, { low: 0, high: 3 }).passesFrom //=> 0.392903
  * @example tighterScale({ voltsPerDivision: 0.01, divisionsPeakToPeak: 6.6, readToDivisions: 0.1, probeRatio: 10, loadOhms: 50 }, { low: 0, high: 3 }) //=> undefined
  */
 export function tighterScale(

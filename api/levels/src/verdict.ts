@@ -40,7 +40,7 @@ export interface StraddledEnd {
  * @example verdictOf(0.5, 0.39, { low: 0, high: 3 }) //=> 'pass'
  * @example verdictOf(0.37, 0.47, { low: 0, high: 3 }) //=> 'too close to call'
  * @example verdictOf(-0.6, 0.47, { low: 0, high: 3 }) //=> 'not yet'
- * @see ILAC-G8:09/2019, 4.2.2 (guard band equal to the expanded uncertainty); ISO 14253-1
+ * @see ILAC-G8:09/2019, 4.2.3 (guard band equal to the expanded uncertainty, three outcomes)
  */
 export function verdictOf(value: number, expandedUncertainty: number, window: VerdictWindow): Verdict {
   const { low, high, least, most } = judged(value, expandedUncertainty, window);

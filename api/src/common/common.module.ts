@@ -1,7 +1,11 @@
-import { Global, Module } from '@nestjs/common';
+import { Global, Module, type DynamicModule } from '@nestjs/common';
 import { Clock } from './clock';
 import { ProblemsController } from './problems.controller';
 
 @Global()
-@Module({ controllers: [ProblemsController], providers: [Clock], exports: [Clock] })
-export class CommonModule {}
+@Module({ controllers: [ProblemsController] })
+export class CommonModule {
+  static on(clock: Clock): DynamicModule {
+    return { module: CommonModule, providers: [{ provide: Clock, useValue: clock }], exports: [Clock] };
+  }
+}

@@ -60,6 +60,10 @@ export class Environment {
   @IsIn(['fatal', 'error', 'warn', 'info', 'debug', 'silent'])
   LOG_LEVEL: 'fatal' | 'error' | 'warn' | 'info' | 'debug' | 'silent' = 'info';
 
+  /** 'off' where nothing may happen by itself: in tests and while seeding. */
+  @IsIn(['on', 'off'])
+  FERRITE_JOBS: 'on' | 'off' = 'on';
+
   /** '1' on the demo club only: the sign-in page then lists its accounts. */
   @IsIn(['0', '1'])
   FERRITE_DEMO: '0' | '1' = '0';

@@ -1,5 +1,7 @@
 import { Session } from '../auth/session.entity';
 import { SignInFailure } from '../auth/sign-in-failure.entity';
+import { BookingItem } from '../bookings/booking-item.entity';
+import { Booking } from '../bookings/booking.entity';
 import { Club } from '../club/club.entity';
 import { Checkout } from '../dues/checkout.entity';
 import { Invoice } from '../dues/invoice.entity';
@@ -8,8 +10,10 @@ import { PaymentEvent } from '../dues/payment-event.entity';
 import { Payment } from '../dues/payment.entity';
 import { PersonTier, Tier } from '../dues/tier.entity';
 import { BuildGroup, BuildGroupMember } from '../groups/build-group.entity';
-import { Instrument } from '../instruments/instrument.entity';
+import { Clearance } from '../instruments/clearance.entity';
+import { InstrumentChange } from '../instruments/instrument-change.entity';
 import { InstrumentKind } from '../instruments/instrument-kind.entity';
+import { Instrument } from '../instruments/instrument.entity';
 import { Resource } from '../instruments/resource.entity';
 import { Account } from '../ledger/account.entity';
 import { Entry } from '../ledger/entry.entity';
@@ -17,9 +21,9 @@ import { Posting } from '../ledger/posting.entity';
 import { Mail } from '../mail/mail.entity';
 import { Person } from '../people/person.entity';
 import { LevelPoint } from '../plans/level-point.entity';
-import { Plan } from '../plans/plan.entity';
 import { PlanCheck } from '../plans/plan-check.entity';
 import { PlanEdition } from '../plans/plan-edition.entity';
+import { Plan } from '../plans/plan.entity';
 import { Stage } from '../plans/stage.entity';
 import { BankStatement } from '../reconciliation/bank-statement.entity';
 import { LineMatch } from '../reconciliation/line-match.entity';
@@ -29,12 +33,16 @@ import { StatementLine } from '../reconciliation/statement-line.entity';
 export const entities = [
   Account,
   BankStatement,
+  Booking,
+  BookingItem,
   BuildGroup,
   BuildGroupMember,
   Checkout,
+  Clearance,
   Club,
   Entry,
   Instrument,
+  InstrumentChange,
   InstrumentKind,
   Invoice,
   LevelPoint,

@@ -4,34 +4,17 @@
  */
 
 export interface paths {
-  '/api/health': {
+  '/api/auth/me': {
     parameters: {
       query?: never;
       header?: never;
       path?: never;
       cookie?: never;
     };
-    /** Answers 200 when the process can reach its database. */
-    get: operations['Health.check'];
+    /** Who is signed in. */
+    get: operations['Auth.me'];
     put?: never;
     post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/auth/sign-in': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    get?: never;
-    put?: never;
-    /** Starts a session. The tokens come as httpOnly cookies; scripts never see them. */
-    post: operations['Auth.signIn'];
     delete?: never;
     options?: never;
     head?: never;
@@ -55,6 +38,23 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
+  '/api/auth/sign-in': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    get?: never;
+    put?: never;
+    /** Starts a session. The tokens come as httpOnly cookies; scripts never see them. */
+    post: operations['Auth.signIn'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
   '/api/auth/sign-out': {
     parameters: {
       query?: never;
@@ -72,15 +72,32 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
-  '/api/auth/me': {
+  '/api/club': {
     parameters: {
       query?: never;
       header?: never;
       path?: never;
       cookie?: never;
     };
-    /** Who is signed in. */
-    get: operations['Auth.me'];
+    /** The club's name, zone and currency. */
+    get: operations['Club.front'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/health': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    /** Answers 200 when the process can reach its database. */
+    get: operations['Health.check'];
     put?: never;
     post?: never;
     delete?: never;
@@ -122,63 +139,10 @@ export interface paths {
     patch?: never;
     trace?: never;
   };
-  '/api/club': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    /** The club's name, zone and currency. */
-    get: operations['Club.front'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
 }
 export type webhooks = Record<string, never>;
 export interface components {
   schemas: {
-    SignInDto: {
-      /**
-       * Format: email
-       * @example member@larkmoor.example
-       */
-      email: string;
-      /** @example larkmoor-demo */
-      password: string;
-      /** @description On a bench tablet the sign-in runs out after ten minutes untouched. */
-      sharedDevice?: boolean;
-    };
-    MeDto: {
-      id: string;
-      name: string;
-      email: string;
-      roles: ('member' | 'mentor' | 'steward' | 'treasurer' | 'organiser')[];
-      /** @description True on a bench tablet. */
-      sharedDevice: boolean;
-    };
-    Object: Record<string, never>;
-    PersonDto: {
-      /** @example 0b6f1c1e-5f0e-4f0b-9d39-0c6a4f6f7f11 */
-      id: string;
-      name: string;
-      roles: ('member' | 'mentor' | 'steward' | 'treasurer' | 'organiser')[];
-    };
-    PeoplePageDto: {
-      items: components['schemas']['PersonDto'][];
-      total: number;
-      page: number;
-      perPage: number;
-    };
-    DemoAccountDto: {
-      email: string;
-      role: string;
-    };
     ClubDto: {
       name: string;
       address: string;
@@ -196,6 +160,10 @@ export interface components {
       /** @description Accounts of the demo club; empty anywhere else. */
       demoAccounts: components['schemas']['DemoAccountDto'][];
     };
+    DemoAccountDto: {
+      email: string;
+      role: string;
+    };
     FieldProblemDto: {
       /**
        * @description Where in the request.
@@ -203,6 +171,27 @@ export interface components {
        */
       pointer: string;
       detail: string;
+    };
+    MeDto: {
+      id: string;
+      name: string;
+      email: string;
+      roles: ('member' | 'mentor' | 'steward' | 'treasurer' | 'organiser')[];
+      /** @description True on a bench tablet. */
+      sharedDevice: boolean;
+    };
+    Object: Record<string, never>;
+    PeoplePageDto: {
+      items: components['schemas']['PersonDto'][];
+      total: number;
+      page: number;
+      perPage: number;
+    };
+    PersonDto: {
+      /** @example 0b6f1c1e-5f0e-4f0b-9d39-0c6a4f6f7f11 */
+      id: string;
+      name: string;
+      roles: ('member' | 'mentor' | 'steward' | 'treasurer' | 'organiser')[];
     };
     ProblemDto: {
       /**
@@ -218,6 +207,17 @@ export interface components {
       instance: string;
       errors?: components['schemas']['FieldProblemDto'][];
     };
+    SignInDto: {
+      /**
+       * Format: email
+       * @example member@larkmoor.example
+       */
+      email: string;
+      /** @example larkmoor-demo */
+      password: string;
+      /** @description On a bench tablet the sign-in runs out after ten minutes untouched. */
+      sharedDevice?: boolean;
+    };
   };
   responses: never;
   parameters: never;
@@ -227,7 +227,7 @@ export interface components {
 }
 export type $defs = Record<string, never>;
 export interface operations {
-  'Health.check': {
+  'Auth.me': {
     parameters: {
       query?: never;
       header?: never;
@@ -235,38 +235,6 @@ export interface operations {
       cookie?: never;
     };
     requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': Record<string, never>;
-        };
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  'Auth.signIn': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['SignInDto'];
-      };
-    };
     responses: {
       200: {
         headers: {
@@ -313,6 +281,38 @@ export interface operations {
       };
     };
   };
+  'Auth.signIn': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SignInDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['MeDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
   'Auth.signOut': {
     parameters: {
       query?: never;
@@ -339,7 +339,7 @@ export interface operations {
       };
     };
   };
-  'Auth.me': {
+  'Club.front': {
     parameters: {
       query?: never;
       header?: never;
@@ -353,7 +353,35 @@ export interface operations {
           [name: string]: unknown;
         };
         content: {
-          'application/json': components['schemas']['MeDto'];
+          'application/json': components['schemas']['ClubDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Health.check': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': Record<string, never>;
         };
       };
       /** @description A problem document */
@@ -419,34 +447,6 @@ export interface operations {
         };
         content: {
           'application/json': components['schemas']['PersonDto'];
-        };
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
-    };
-  };
-  'Club.front': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
-    };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/json': components['schemas']['ClubDto'];
         };
       };
       /** @description A problem document */

@@ -1,0 +1,44 @@
+import { Passwords } from '@ferrite-row/api/auth/passwords';
+import { ClubService } from '@ferrite-row/api/club/club.service';
+import type { Actor } from '@ferrite-row/api/common/actor';
+import type { SettableClock } from '@ferrite-row/api/common/clock';
+import type { ServiceContext } from '@ferrite-row/api/context';
+import { PeopleService } from '@ferrite-row/api/people/people.service';
+import { seedBookings } from './bookings';
+import { calendarAround } from './calendar';
+import { CLUB } from './club';
+import { seedGroups } from './groups';
+import { seedInventory } from './inventory';
+import { PEOPLE } from './people';
+import { found, type StageSet } from './stage-set';
+
+const PASSWORD = 'larkmoor-demo';
+
+/** How many of what were written, for the line that says so. */
+export type Counts = Record<string, number>;
+
+/**
+ * Lays the demo club around the clock's present, through the services, so that it obeys every rule of the product.
+ * The same on every run but for the dates. Leaves the clock where it found it.
+ */
+export async function seedDemoClub(context: ServiceContext, clock: SettableClock): Promise<Counts> {
+  const calendar = calendarAround(clock.now(), CLUB.timeZone);
+  clock.set(calendar.at(calendar.today.subtract({ days: 400 }), 10));
+  const people = await seedPeople(context);
+  const set: StageSet = { context, clock, calendar, as: (key) => found(people, key) };
+  const inventory = await seedInventory(set);
+  const groups = await seedGroups(set);
+  const bookings = await seedBookings(set, inventory);
+  clock.set(calendar.now);
+  await context.get(ClubService).set(CLUB);
+  return { people: people.size, groups, bookings };
+}
+
+async function seedPeople(context: ServiceContext): Promise<Map<string, Actor>> {
+  const passwordHash = await context.get(Passwords).hash(PASSWORD);
+  const enrolled = await context
+    .get(PeopleService)
+    .enrol(PEOPLE.map(({ name, email, roles }) => ({ name, email, roles, passwordHash })));
+  const actors = enrolled.map(({ id: personId, name, roles }) => ({ personId, name, roles }));
+  return new Map(PEOPLE.map(({ key }, index) => [key, actors[index] as Actor]));
+}
