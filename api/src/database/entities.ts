@@ -1,5 +1,11 @@
 import { Session } from '../auth/session.entity';
 import { SignInFailure } from '../auth/sign-in-failure.entity';
+import { Build } from '../builds/build.entity';
+import { BuildStage } from '../builds/build-stage.entity';
+import { BuildStageEvent } from '../builds/build-stage-event.entity';
+import { CheckMark } from '../builds/check-mark.entity';
+import { Photo } from '../builds/photo.entity';
+import { Reading } from '../builds/reading.entity';
 import { Club } from '../club/club.entity';
 import { BuildGroup, BuildGroupMember } from '../groups/build-group.entity';
 import { Instrument } from '../instruments/instrument.entity';
@@ -15,17 +21,23 @@ import { Stage } from '../plans/stage.entity';
 
 /** Every table that has a class. */
 export const entities = [
+  Build,
   BuildGroup,
   BuildGroupMember,
+  BuildStage,
+  BuildStageEvent,
+  CheckMark,
   Club,
   Instrument,
   InstrumentKind,
   LevelPoint,
   Mail,
   Person,
+  Photo,
   Plan,
   PlanCheck,
   PlanEdition,
+  Reading,
   Resource,
   Session,
   SignInFailure,
