@@ -45,6 +45,16 @@ describe('a level from an oscilloscope', () => {
     expect(limits[3]).toBeCloseTo(0.08686, 5);
   });
 
+  it('assumes 3 %, 2 % at ×10 or 0.1 % at ×1, and 0.5 % where nothing is stated', () => {
+    const assumed = (probeRatio: 1 | 10) =>
+      oscilloscopeReading(set({ probeRatio })).components.map(({ limit }) => limit);
+    const perCent = (limit: number | undefined) => ((limit ?? NaN) * Math.LN10) / 0.2;
+    expect(assumed(10).slice(1, 3).map(perCent)).toEqual([expect.closeTo(3, 9), expect.closeTo(2, 9)]);
+    expect(perCent(assumed(1)[2])).toBeCloseTo(0.1, 9);
+    // The load moves the power, half as many decibels.
+    expect(perCent(assumed(10)[3])).toBeCloseTo(0.25, 9);
+  });
+
   it('takes ten times the voltage, 20 dB, at ×10', () => {
     const direct = oscilloscopeReading(set({ probeRatio: 1 })).value;
     expect(oscilloscopeReading(set()).value - direct).toBeCloseTo(20, 9);

@@ -42,6 +42,19 @@ describe('a tighter setting', () => {
     expect(tighterScale(set({ divisionsPeakToPeak: 4.1 }), window)).toBeUndefined();
   });
 
+  it('may fill the screen to its last division', () => {
+    expect(tighterScale(set({ divisionsPeakToPeak: 4 }), window)?.divisionsPeakToPeak).toBe(8);
+  });
+
+  it('names the greatest level that passes under a high end', () => {
+    const high = 0.7;
+    const upTo = tighterScale(set(), { high })?.passesUpTo ?? NaN;
+    expect(verdictOf(upTo - 1e-9, uncertaintyOf(set(), 0.01, upTo - 1e-9), { high })).toBe('pass');
+    expect(verdictOf(upTo + 1e-6, uncertaintyOf(set(), 0.01, upTo + 1e-6), { high })).toBe(
+      'too close to call',
+    );
+  });
+
   it('is not offered below what the instrument has', () => {
     const small = set({ voltsPerDivision: 0.002, divisionsPeakToPeak: 2 });
     expect(tighterScale(small, window)).toBeUndefined();
@@ -95,6 +108,13 @@ describe('too close to call, in words', () => {
 
   it('says when the same level would pass at the tighter setting', () => {
     expect(words(set({ divisionsPeakToPeak: 3.32 }), window)).toContain('and this level would pass.');
+  });
+
+  it('names the level to stay under at a high end', () => {
+    expect(words(set(), { high: 0.7 })).toBe(
+      'The high end of your reading is +0.84 dBm, 0.14 dB over the window. ' +
+        'At 10 mV/div it tightens to ± 0.39, and +0.30 or less would pass.',
+    );
   });
 
   it('falls back on the level that passes as it is read, when no setting helps', () => {

@@ -4,460 +4,460 @@
  */
 
 export interface paths {
-    "/api/auth/me": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Who is signed in. */
-        get: operations["Auth.me"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+  '/api/auth/me': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/auth/refresh": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Exchanges the refresh cookie for the next pair. */
-        post: operations["Auth.refresh"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** Who is signed in. */
+    get: operations['Auth.me'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/auth/refresh': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/auth/sign-in": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Starts a session. The tokens come as httpOnly cookies; scripts never see them. */
-        post: operations["Auth.signIn"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Exchanges the refresh cookie for the next pair. */
+    post: operations['Auth.refresh'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/auth/sign-in': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/auth/sign-out": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Ends the session on the server. Safe to repeat. */
-        post: operations["Auth.signOut"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Starts a session. The tokens come as httpOnly cookies; scripts never see them. */
+    post: operations['Auth.signIn'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/auth/sign-out': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/club": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** The club's name, zone and currency. */
-        get: operations["Club.front"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Ends the session on the server. Safe to repeat. */
+    post: operations['Auth.signOut'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/club': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/health": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Answers 200 when the process can reach its database. */
-        get: operations["Health.check"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** The club's name, zone and currency. */
+    get: operations['Club.front'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/health': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/people": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Everybody of the club, by name. */
-        get: operations["People.list"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** Answers 200 when the process can reach its database. */
+    get: operations['Health.check'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/people': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/people/{personId}": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get: operations["People.show"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** Everybody of the club, by name. */
+    get: operations['People.list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/people/{personId}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
+    get: operations['People.show'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
 }
 export type webhooks = Record<string, never>;
 export interface components {
-    schemas: {
-        ClubDto: {
-            name: string;
-            address: string;
-            contactEmail: string;
-            /**
-             * @description IANA zone of the club's wall clock.
-             * @example Europe/London
-             */
-            timeZone: string;
-            /**
-             * @description ISO 4217
-             * @example GBP
-             */
-            currency: string;
-            /** @description Accounts of the demo club; empty anywhere else. */
-            demoAccounts: components["schemas"]["DemoAccountDto"][];
-        };
-        DemoAccountDto: {
-            email: string;
-            role: string;
-        };
-        FieldProblemDto: {
-            /**
-             * @description Where in the request.
-             * @example #/endsAt
-             */
-            pointer: string;
-            detail: string;
-        };
-        MeDto: {
-            id: string;
-            name: string;
-            email: string;
-            roles: ("member" | "mentor" | "steward" | "treasurer" | "organiser")[];
-            /** @description True on a bench tablet. */
-            sharedDevice: boolean;
-        };
-        Object: Record<string, never>;
-        PeoplePageDto: {
-            items: components["schemas"]["PersonDto"][];
-            total: number;
-            page: number;
-            perPage: number;
-        };
-        PersonDto: {
-            /** @example 0b6f1c1e-5f0e-4f0b-9d39-0c6a4f6f7f11 */
-            id: string;
-            name: string;
-            roles: ("member" | "mentor" | "steward" | "treasurer" | "organiser")[];
-        };
-        ProblemDto: {
-            /**
-             * @description Stable; opened, it explains itself.
-             * @example /problems/invalid-input
-             */
-            type: string;
-            title: string;
-            status: number;
-            /** @description This occurrence, in words for a member. */
-            detail: string;
-            /** @description Names this request in the log. */
-            instance: string;
-            errors?: components["schemas"]["FieldProblemDto"][];
-        };
-        SignInDto: {
-            /**
-             * Format: email
-             * @example member@larkmoor.example
-             */
-            email: string;
-            /** @example larkmoor-demo */
-            password: string;
-            /** @description On a bench tablet the sign-in runs out after ten minutes untouched. */
-            sharedDevice?: boolean;
-        };
+  schemas: {
+    ClubDto: {
+      name: string;
+      address: string;
+      contactEmail: string;
+      /**
+       * @description IANA zone of the club's wall clock.
+       * @example Europe/London
+       */
+      timeZone: string;
+      /**
+       * @description ISO 4217
+       * @example GBP
+       */
+      currency: string;
+      /** @description Accounts of the demo club; empty anywhere else. */
+      demoAccounts: components['schemas']['DemoAccountDto'][];
     };
-    responses: never;
-    parameters: never;
-    requestBodies: never;
-    headers: never;
-    pathItems: never;
+    DemoAccountDto: {
+      email: string;
+      role: string;
+    };
+    FieldProblemDto: {
+      /**
+       * @description Where in the request.
+       * @example #/endsAt
+       */
+      pointer: string;
+      detail: string;
+    };
+    MeDto: {
+      id: string;
+      name: string;
+      email: string;
+      roles: ('member' | 'mentor' | 'steward' | 'treasurer' | 'organiser')[];
+      /** @description True on a bench tablet. */
+      sharedDevice: boolean;
+    };
+    Object: Record<string, never>;
+    PeoplePageDto: {
+      items: components['schemas']['PersonDto'][];
+      total: number;
+      page: number;
+      perPage: number;
+    };
+    PersonDto: {
+      /** @example 0b6f1c1e-5f0e-4f0b-9d39-0c6a4f6f7f11 */
+      id: string;
+      name: string;
+      roles: ('member' | 'mentor' | 'steward' | 'treasurer' | 'organiser')[];
+    };
+    ProblemDto: {
+      /**
+       * @description Stable; opened, it explains itself.
+       * @example /problems/invalid-input
+       */
+      type: string;
+      title: string;
+      status: number;
+      /** @description This occurrence, in words for a member. */
+      detail: string;
+      /** @description Names this request in the log. */
+      instance: string;
+      errors?: components['schemas']['FieldProblemDto'][];
+    };
+    SignInDto: {
+      /**
+       * Format: email
+       * @example member@larkmoor.example
+       */
+      email: string;
+      /** @example larkmoor-demo */
+      password: string;
+      /** @description On a bench tablet the sign-in runs out after ten minutes untouched. */
+      sharedDevice?: boolean;
+    };
+  };
+  responses: never;
+  parameters: never;
+  requestBodies: never;
+  headers: never;
+  pathItems: never;
 }
 export type $defs = Record<string, never>;
 export interface operations {
-    "Auth.me": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["MeDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
+  'Auth.me': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "Auth.refresh": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
         };
-        requestBody?: never;
-        responses: {
-            204: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
+        content: {
+          'application/json': components['schemas']['MeDto'];
         };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
     };
-    "Auth.signIn": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["SignInDto"];
-            };
-        };
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["MeDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
+  };
+  'Auth.refresh': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "Auth.signOut": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
         };
-        requestBody?: never;
-        responses: {
-            204: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
+        content?: never;
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
         };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
     };
-    "Club.front": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["ClubDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
+  };
+  'Auth.signIn': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "Health.check": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": Record<string, never>;
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SignInDto'];
+      };
     };
-    "People.list": {
-        parameters: {
-            query: {
-                /** @description Only holders of this role. */
-                role?: "member" | "mentor" | "steward" | "treasurer" | "organiser";
-                /** @description Only names that have these letters in them. */
-                name?: string;
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
-            };
-            header?: never;
-            path?: never;
-            cookie?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
         };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["PeoplePageDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
+        content: {
+          'application/json': components['schemas']['MeDto'];
         };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
     };
-    "People.show": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                personId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["PersonDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
+  };
+  'Auth.signOut': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Club.front': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ClubDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Health.check': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': Record<string, never>;
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'People.list': {
+    parameters: {
+      query: {
+        /** @description Only holders of this role. */
+        role?: 'member' | 'mentor' | 'steward' | 'treasurer' | 'organiser';
+        /** @description Only names that have these letters in them. */
+        name?: string;
+        page: components['schemas']['Object'];
+        perPage: components['schemas']['Object'];
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PeoplePageDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'People.show': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        personId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PersonDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
 }

@@ -12,7 +12,13 @@ const HIDDEN: CSSProperties = {
   border: 0,
 };
 
+interface VisuallyHiddenProps {
+  children: ReactNode;
+  /** `div` for a whole table or list. */
+  as?: 'span' | 'div';
+}
+
 /** Read aloud, not shown. */
-export function VisuallyHidden({ children }: { children: ReactNode }) {
-  return <span style={HIDDEN}>{children}</span>;
+export function VisuallyHidden({ children, as: Element = 'span' }: VisuallyHiddenProps) {
+  return <Element style={HIDDEN}>{children}</Element>;
 }

@@ -6,13 +6,15 @@ import { ProblemAlert } from '../../shared-ui/problem-alert';
 export function SignOutButton() {
   const signOut = useSignOut();
   const navigate = useNavigate();
+  // Not through the mutation's own callbacks: the frame and this button are gone by the time they would run.
+  const leave = () =>
+    void signOut.mutateAsync().then(
+      () => navigate('/sign-in', { replace: true }),
+      () => undefined,
+    );
   return (
     <>
-      <Button
-        fullWidth
-        loading={signOut.isPending}
-        onClick={() => signOut.mutate(undefined, { onSuccess: () => void navigate('/sign-in') })}
-      >
+      <Button fullWidth loading={signOut.isPending} onClick={leave}>
         Sign out
       </Button>
       {signOut.isError && <ProblemAlert error={signOut.error} title="You are still signed in here." />}

@@ -1,22 +1,35 @@
 import type { CSSProperties } from 'react';
 
-interface OwnVariants<T> {
-  display: T;
-  reading: T;
-  value: T;
-  small: T;
-  least: T;
-  label: T;
-  tag: T;
-}
-
 declare module '@mui/material/styles' {
-  interface TypographyVariants extends OwnVariants<CSSProperties> {}
-  interface TypographyVariantsOptions extends Partial<OwnVariants<CSSProperties>> {}
+  interface TypographyVariants {
+    display: CSSProperties;
+    reading: CSSProperties;
+    value: CSSProperties;
+    small: CSSProperties;
+    least: CSSProperties;
+    label: CSSProperties;
+    tag: CSSProperties;
+  }
+  interface TypographyVariantsOptions {
+    display?: CSSProperties;
+    reading?: CSSProperties;
+    value?: CSSProperties;
+    small?: CSSProperties;
+    least?: CSSProperties;
+    label?: CSSProperties;
+    tag?: CSSProperties;
+  }
 }
 
 declare module '@mui/material/Typography' {
-  interface TypographyPropsVariantOverrides extends OwnVariants<true> {
+  interface TypographyPropsVariantOverrides {
+    display: true;
+    reading: true;
+    value: true;
+    small: true;
+    least: true;
+    label: true;
+    tag: true;
     h4: false;
     h5: false;
     h6: false;

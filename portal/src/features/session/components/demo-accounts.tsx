@@ -1,0 +1,34 @@
+import Box from '@mui/material/Box';
+import Button from '@mui/material/Button';
+import Typography from '@mui/material/Typography';
+import type { Club } from '../../../api-client/club';
+
+/** Every account of the demo club has it; a club that is not a demo lists no accounts. */
+const DEMO_PASSWORD = 'larkmoor-demo';
+
+interface DemoAccountsProps {
+  accounts: Club['demoAccounts'];
+  onChoose: (email: string, password: string) => void;
+}
+
+/** In the demo club only: its accounts, one press to fill the form. */
+export function DemoAccounts({ accounts, onChoose }: DemoAccountsProps) {
+  if (accounts.length === 0) return null;
+  return (
+    <Box component="section" aria-labelledby="demo-accounts" sx={{ mt: '20px' }}>
+      <Typography variant="h3" component="h2" id="demo-accounts">
+        Demo club
+      </Typography>
+      <Typography variant="small" component="p" sx={{ m: '0 0 8px', color: 'token.ink2' }}>
+        Choose an account to fill the form. Every password is {DEMO_PASSWORD}.
+      </Typography>
+      <Box sx={{ display: 'flex', flexWrap: 'wrap', gap: '8px' }}>
+        {accounts.map(({ email, role }) => (
+          <Button key={email} size="small" title={email} onClick={() => onChoose(email, DEMO_PASSWORD)}>
+            {role}
+          </Button>
+        ))}
+      </Box>
+    </Box>
+  );
+}

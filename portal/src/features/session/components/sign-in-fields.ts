@@ -1,0 +1,5 @@
+export interface SignInFields {
+  email: string;
+  password: string;
+  sharedDevice: boolean;
+}
