@@ -1,7 +1,7 @@
 import { applyDecorators } from '@nestjs/common';
 import { ApiProperty } from '@nestjs/swagger';
 import { Transform } from 'class-transformer';
-import { IsISO8601, IsString, Matches, MaxLength, MinLength } from 'class-validator';
+import { IsISO8601, IsString, Matches, MaxLength, MinLength, ValidateBy } from 'class-validator';
 
 /** An instant on the wire: ISO 8601 with an offset or Z, because a wall time alone names no instant. */
 export function IsInstant(): PropertyDecorator {
@@ -14,6 +14,14 @@ export function IsInstant(): PropertyDecorator {
     ),
     Matches(/T\d{2}:\d{2}.*(Z|[+-]\d{2}:?\d{2})$/, {
       message: '$property needs its offset from UTC, such as Z or +01:00',
+    }),
+    // ISO 8601 allows more than the calendar of this machine: a leap second, hour 24, an offset of 30 hours.
+    ValidateBy({
+      name: 'isOnTheCalendar',
+      validator: {
+        validate: (value) => typeof value === 'string' && !Number.isNaN(Date.parse(value)),
+        defaultMessage: () => '$property is not an instant of the calendar',
+      },
     }),
   );
 }

@@ -6,9 +6,13 @@ import { BuildStageEvent } from '../builds/build-stage-event.entity';
 import { CheckMark } from '../builds/check-mark.entity';
 import { Photo } from '../builds/photo.entity';
 import { Reading } from '../builds/reading.entity';
+import { Booking } from '../bookings/booking.entity';
+import { BookingItem } from '../bookings/booking-item.entity';
 import { Club } from '../club/club.entity';
 import { BuildGroup, BuildGroupMember } from '../groups/build-group.entity';
+import { Clearance } from '../instruments/clearance.entity';
 import { Instrument } from '../instruments/instrument.entity';
+import { InstrumentChange } from '../instruments/instrument-change.entity';
 import { InstrumentKind } from '../instruments/instrument-kind.entity';
 import { Resource } from '../instruments/resource.entity';
 import { Mail } from '../mail/mail.entity';
@@ -27,8 +31,14 @@ export const entities = [
   BuildStage,
   BuildStageEvent,
   CheckMark,
+  Booking,
+  BookingItem,
+  BuildGroup,
+  BuildGroupMember,
+  Clearance,
   Club,
   Instrument,
+  InstrumentChange,
   InstrumentKind,
   LevelPoint,
   Mail,

@@ -1,0 +1,69 @@
+import { ApiProperty } from '@nestjs/swagger';
+import { IsOptional, IsUUID } from 'class-validator';
+import { PageQueryDto } from '../../common/paging.dto';
+import { IsDay } from '../../common/validators';
+import type { Clearance } from '../clearance.entity';
+
+export class GrantClearanceDto {
+  @IsUUID()
+  personId: string;
+
+  @IsUUID()
+  kindId: string;
+
+  /** Last day on which it holds; leave it out for no end. */
+  @IsOptional()
+  @IsDay()
+  until?: string;
+}
+
+export class ListClearancesQueryDto extends PageQueryDto {
+  @IsOptional()
+  @IsUUID()
+  personId?: string;
+
+  @IsOptional()
+  @IsUUID()
+  kindId?: string;
+}
+
+/** Who may use a kind of instrument, by whose word, until when. */
+export class ClearanceDto {
+  id: string;
+  personId: string;
+  /** @example Tamsin Ardley */
+  personName: string;
+  kindId: string;
+  /** @example Spectrum analyzer */
+  kindName: string;
+  /** @example Oona Reyes */
+  grantedBy: string;
+  @ApiProperty({ format: 'date' })
+  grantedOn: string;
+  @ApiProperty({ type: String, format: 'date', nullable: true })
+  until: string | null;
+  /** Whether it holds today. */
+  holds: boolean;
+}
+
+export class ClearancePageDto {
+  items: ClearanceDto[];
+  total: number;
+  page: number;
+  perPage: number;
+}
+
+export function clearanceDto(clearance: Clearance, today: string): ClearanceDto {
+  const { id, personId, person, kindId, kind, grantedBy, grantedOn, until } = clearance;
+  return {
+    id,
+    personId,
+    personName: person.name,
+    kindId,
+    kindName: kind.name,
+    grantedBy: grantedBy.name,
+    grantedOn,
+    until,
+    holds: until === null || until >= today,
+  };
+}
