@@ -25,16 +25,14 @@ import { Stage } from '../plans/stage.entity';
 
 /** Every table that has a class. */
 export const entities = [
+  Booking,
+  BookingItem,
   Build,
   BuildGroup,
   BuildGroupMember,
   BuildStage,
   BuildStageEvent,
   CheckMark,
-  Booking,
-  BookingItem,
-  BuildGroup,
-  BuildGroupMember,
   Clearance,
   Club,
   Instrument,
