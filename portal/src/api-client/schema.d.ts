@@ -4,460 +4,2630 @@
  */
 
 export interface paths {
-  '/api/auth/me': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/auth/me": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Who is signed in. */
+        get: operations["Auth.me"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Who is signed in. */
-    get: operations['Auth.me'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/auth/refresh': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/auth/refresh": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Exchanges the refresh cookie for the next pair. */
+        post: operations["Auth.refresh"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Exchanges the refresh cookie for the next pair. */
-    post: operations['Auth.refresh'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/auth/sign-in': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/auth/sign-in": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Starts a session. The tokens come as httpOnly cookies; scripts never see them. */
+        post: operations["Auth.signIn"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Starts a session. The tokens come as httpOnly cookies; scripts never see them. */
-    post: operations['Auth.signIn'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/auth/sign-out': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/auth/sign-out": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Ends the session on the server. Safe to repeat. */
+        post: operations["Auth.signOut"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get?: never;
-    put?: never;
-    /** Ends the session on the server. Safe to repeat. */
-    post: operations['Auth.signOut'];
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/club': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/benches": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The benches that can be booked, in the order they stand. */
+        get: operations["Benches.list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** The club's name, zone and currency. */
-    get: operations['Club.front'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/health': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/bookings": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Who has what in a stretch of at most 62 days. */
+        get: operations["Bookings.list"];
+        put?: never;
+        /** Books benches and instruments together: all of them, or nothing. */
+        post: operations["Bookings.book"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Answers 200 when the process can reach its database. */
-    get: operations['Health.check'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/people': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/bookings/mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Your own sessions that are not over. */
+        get: operations["Bookings.mine"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    /** Everybody of the club, by name. */
-    get: operations['People.list'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
-  '/api/people/{personId}': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "/api/bookings/{bookingId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        /** Cancels it, or ends it now when it runs already. Cancelling twice is no error. */
+        delete: operations["Bookings.cancel"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
     };
-    get: operations['People.show'];
-    put?: never;
-    post?: never;
-    delete?: never;
-    options?: never;
-    head?: never;
-    patch?: never;
-    trace?: never;
-  };
+    "/api/builds": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Begins a build to the newest edition of a plan. */
+        post: operations["Builds.start"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One's own builds with everything in them, the newest first. */
+        get: operations["Builds.mine"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** A build, for its builder and for mentors. */
+        get: operations["Builds.show"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/checks/{checkId}/instruments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Instruments of the kind the check asks for, with the reason against those that cannot be chosen. */
+        get: operations["Checks.listInstruments"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/checks/{checkId}/marks": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Ticks the check, acknowledges it by name, or says that a mentor has seen it. */
+        post: operations["Checks.mark"];
+        delete: operations["Checks.takeBackMark"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/checks/{checkId}/photos": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Adds a picture of at most 6 MB to a check that asks for one. */
+        post: operations["Photos.add"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/checks/{checkId}/readings": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Keeps a reading as typed; the answer says what it comes to and how it is judged. */
+        post: operations["Checks.keepReading"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/licence": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Says that the builder's licence was seen, which opens the last stage. */
+        post: operations["Builds.seeLicence"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/photos/{photoId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The picture itself. */
+        get: operations["Photos.show"];
+        put?: never;
+        post?: never;
+        /** Takes a picture back while the stage is still in its builder's hands. */
+        delete: operations["Photos.takeBack"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/stages/{stageId}/send-back": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Sends the stage back to its builder with a word. */
+        post: operations["Stages.sendBack"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/stages/{stageId}/sign-off": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Stages.signOff"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/stages/{stageId}/submit": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Sends the stage to a mentor, with a note. */
+        post: operations["Stages.submit"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/stages/{stageId}/withdraw": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Takes the stage back from the mentor. */
+        post: operations["Stages.withdraw"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/clearances": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Who is cleared on what. */
+        get: operations["Clearances.list"];
+        put?: never;
+        /** Clears somebody on a kind of instrument, or renews what they have. */
+        post: operations["Clearances.grant"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/clearances/mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Clearances.mine"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/clearances/{clearanceId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete: operations["Clearances.end"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/club": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The club's name, zone and currency. */
+        get: operations["Club.front"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/groups": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Every group of the club with its members. */
+        get: operations["Groups.list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/groups/mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Groups.mine"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/health": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Answers 200 when the process can reach its database. */
+        get: operations["Health.check"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/instruments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Every instrument of the club, and whether you may book it on the day asked about. */
+        get: operations["Instruments.list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/instruments/{instrumentId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Instruments.show"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/instruments/{instrumentId}/calibration": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Sets the last day on which its calibration holds. */
+        post: operations["Instruments.changeCalibration"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/instruments/{instrumentId}/condition": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Puts it in repair, out of use, or back in use. */
+        post: operations["Instruments.changeCondition"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/instruments/{instrumentId}/history": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Who changed what on it, and when, the latest first. */
+        get: operations["Instruments.history"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/people": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Everybody of the club, by name. */
+        get: operations["People.list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/people/{personId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["People.show"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/plans": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The club's plans, by name. */
+        get: operations["Plans.list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/plans/{planId}/editions/{number}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One published edition, whole; it never changes. */
+        get: operations["Plans.show"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/reviews": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What waits for a mentor, the longest waiting first. */
+        get: operations["Reviews.list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
 }
 export type webhooks = Record<string, never>;
 export interface components {
-  schemas: {
-    ClubDto: {
-      name: string;
-      address: string;
-      contactEmail: string;
-      /**
-       * @description IANA zone of the club's wall clock.
-       * @example Europe/London
-       */
-      timeZone: string;
-      /**
-       * @description ISO 4217
-       * @example GBP
-       */
-      currency: string;
-      /** @description Accounts of the demo club; empty anywhere else. */
-      demoAccounts: components['schemas']['DemoAccountDto'][];
+    schemas: {
+        BenchDto: {
+            id: string;
+            tag: string;
+            name: string;
+            /** @description Order on the page. */
+            position: number;
+        };
+        BenchPageDto: {
+            items: components["schemas"]["BenchDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
+        BookedResourceDto: {
+            /** @enum {string} */
+            kind: "bench" | "instrument";
+            id: string;
+            /** @example FR-031 */
+            tag: string;
+            name: string;
+        };
+        BookingDto: {
+            /** @enum {string} */
+            kind: "session" | "build night";
+            /** Format: uuid */
+            groupId: string | null;
+            groupName: string | null;
+            /**
+             * Format: uuid
+             * @description What it was made for: on your own only.
+             */
+            checkId: string | null;
+            id: string;
+            /** @description Of a build night; empty for a session. */
+            title: string;
+            personId: string;
+            personName: string;
+            /** @description Whether it is your session. */
+            mine: boolean;
+            resources: components["schemas"]["BookedResourceDto"][];
+            /** Format: date-time */
+            startsAt: string;
+            /** Format: date-time */
+            endsAt: string;
+            /** Format: date-time */
+            madeAt: string;
+            /** @description Whether you may cancel it now. */
+            mayCancel: boolean;
+        };
+        BookingOverlapDto: {
+            takenBy: components["schemas"]["TakenDto"][];
+            /** @description Up to three times at which everything wanted is free for as long, the nearest first. */
+            nearestFree: components["schemas"]["SpanDto"][];
+            /**
+             * @description Stable; opened, it explains itself.
+             * @example /problems/invalid-input
+             */
+            type: string;
+            title: string;
+            status: number;
+            /** @description This occurrence, in words for a member. */
+            detail: string;
+            /** @description Names this request in the log. */
+            instance: string;
+            errors?: components["schemas"]["FieldProblemDto"][];
+        };
+        BuildCheckDto: {
+            /** @enum {string} */
+            kind: "tick" | "measure" | "photo" | "safety" | "mentor's eyes";
+            /** @description What the form starts with, in the fields' own units. */
+            defaults: {
+                [key: string]: number;
+            };
+            /** @description There is what the check asks for. */
+            isSettled: boolean;
+            /** @description The newest last; that one is in force, the others stay in the record. */
+            readings: components["schemas"]["ReadingDto"][];
+            mark: components["schemas"]["MarkDto"] | null;
+            photos: components["schemas"]["PhotoDto"][];
+            id: string;
+            /** @description Order on the checklist, from 1. */
+            position: number;
+            title: string;
+            instruction: string;
+            isRequired: boolean;
+            /** @description For a measure: how it is taken; `gain` and `carried` work themselves out. */
+            method: string | null;
+            /** @description Unit of the value and of the window. */
+            unit: string | null;
+            windowLow: number | null;
+            windowHigh: number | null;
+            target: number | null;
+            /** @description For a value that works itself out: the checks it is made of. */
+            fromCheckIds: string[];
+            levelPointId: string | null;
+            instrumentKindId: string | null;
+        };
+        BuildDto: {
+            id: string;
+            builder: components["schemas"]["PersonRefDto"];
+            planId: string;
+            planName: string;
+            editionNumber: number;
+            /** @example 7 */
+            serial: number;
+            /** @example 2026-01-15T19:00:00Z */
+            startedAt: string;
+            endedAt: string | null;
+            /** @description When an organiser saw the licence. */
+            licenceSeenAt: string | null;
+            /** @description The stage its builder is on. */
+            currentStageId: string | null;
+            stages: components["schemas"]["BuildStageDto"][];
+            /** @description In signal order. */
+            levelPoints: components["schemas"]["LevelPointDto"][];
+        };
+        BuildStageDto: {
+            cautions: ("load before power" | "hot parts" | "rf power" | "mains" | "rf exposure" | "licence needed")[];
+            /** @enum {string} */
+            state: "not started" | "on the bench" | "with mentor" | "sent back" | "signed off" | "locked";
+            id: string;
+            position: number;
+            /** @example Pre-driver */
+            name: string;
+            summary: string;
+            /** @description What opens a locked stage. */
+            lockedBecause: string | null;
+            /** @description Checks still to settle before it can be sent to a mentor. */
+            missingToSend: number;
+            /** @description Checks still to settle before it can be signed off. */
+            missingToSignOff: number;
+            settled: number;
+            checks: components["schemas"]["BuildCheckDto"][];
+            /** @description Oldest first. */
+            events: components["schemas"]["StageEventDto"][];
+        };
+        ChangeCalibrationDto: {
+            /**
+             * Format: date
+             * @description Last day on which the calibration holds.
+             */
+            dueOn: string;
+            /** @description Who calibrated it, and what it came out at. */
+            note: string;
+        };
+        ChangeConditionDto: {
+            /** @enum {string} */
+            condition: "ready" | "in repair" | "out of use";
+            /** @description What is wrong, or what was put right; members read it. */
+            note: string;
+        };
+        ClearanceDto: {
+            /** Format: date */
+            grantedOn: string;
+            /** Format: date */
+            until: string | null;
+            id: string;
+            personId: string;
+            personName: string;
+            kindId: string;
+            kindName: string;
+            grantedBy: string;
+            /** @description Whether it holds today. */
+            holds: boolean;
+        };
+        ClearancePageDto: {
+            items: components["schemas"]["ClearanceDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
+        ClubDto: {
+            name: string;
+            address: string;
+            contactEmail: string;
+            /**
+             * @description IANA zone of the club's wall clock.
+             * @example Europe/London
+             */
+            timeZone: string;
+            /**
+             * @description ISO 4217
+             * @example GBP
+             */
+            currency: string;
+            /** @description Accounts of the demo club; empty anywhere else. */
+            demoAccounts: components["schemas"]["DemoAccountDto"][];
+        };
+        CreateBookingDto: {
+            /** Format: date-time */
+            startsAt: string;
+            /** Format: date-time */
+            endsAt: string;
+            /** @description Benches and instruments, 1 to 8: all of them are booked, or none. */
+            resourceIds: string[];
+            /**
+             * Format: uuid
+             * @description Book it for one of your groups.
+             */
+            groupId?: string;
+            /**
+             * Format: uuid
+             * @description The check of the plan you will work on.
+             */
+            checkId?: string;
+        };
+        DemoAccountDto: {
+            email: string;
+            role: string;
+        };
+        FieldProblemDto: {
+            /**
+             * @description Where in the request.
+             * @example #/endsAt
+             */
+            pointer: string;
+            detail: string;
+        };
+        GrantClearanceDto: {
+            /**
+             * Format: date
+             * @description Last day on which it holds; leave it out for no end.
+             */
+            until?: string;
+            /** Format: uuid */
+            personId: string;
+            /** Format: uuid */
+            kindId: string;
+        };
+        GroupDto: {
+            id: string;
+            name: string;
+            /** @description When and where they usually meet. */
+            about: string;
+            members: components["schemas"]["GroupMemberDto"][];
+            /** @description Whether you are one of them. */
+            mine: boolean;
+        };
+        GroupMemberDto: {
+            personId: string;
+            name: string;
+        };
+        GroupPageDto: {
+            items: components["schemas"]["GroupDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
+        InstrumentChangeDto: {
+            /** @enum {string} */
+            changed: "condition" | "calibration";
+            /** @description A condition or a day; null where none was on record. */
+            before: string | null;
+            after: string | null;
+            id: string;
+            /** Format: date-time */
+            changedAt: string;
+            changedBy: string;
+            note: string;
+        };
+        InstrumentChoiceDto: {
+            /** @description Why it cannot be chosen; null when it can. */
+            reason: string | null;
+            id: string;
+            /** @example FR-021 */
+            tag: string;
+            name: string;
+            /** @example Oscilloscope */
+            kind: string;
+            /** @description Last day of its calibration. */
+            calibrationDueOn: string | null;
+            /** @description ± limit of its level readings, dB. */
+            amplitudeAccuracyDb: number | null;
+        };
+        InstrumentDetailDto: {
+            /** @enum {string} */
+            condition: "ready" | "in repair" | "out of use";
+            /**
+             * Format: date
+             * @description Last day on which its calibration holds; null where none is on record.
+             */
+            calibrationDueOn: string | null;
+            /** @description The level that harms its input, dBm. */
+            damageLevelDbm: number | null;
+            /** @description ± limit of its level readings, dB. */
+            amplitudeAccuracyDb: number | null;
+            /** @description Your clearance on its kind, lapsed ones too; null when you have none. */
+            myClearance: components["schemas"]["MyClearanceDto"] | null;
+            id: string;
+            /** @example FR-031 */
+            tag: string;
+            name: string;
+            position: number;
+            kind: components["schemas"]["InstrumentKindDto"];
+            /** @description Why it is not ready, or what to mind. */
+            conditionNote: string;
+            /** @description Whether you may book it for the day asked about. */
+            mayBook: boolean;
+            /** @description Why not; empty when you may. */
+            reasons: components["schemas"]["UseReasonDto"][];
+            /** @description How many members hold a clearance on its kind today. */
+            clearedPeople: number;
+        };
+        InstrumentDto: {
+            /** @enum {string} */
+            condition: "ready" | "in repair" | "out of use";
+            /**
+             * Format: date
+             * @description Last day on which its calibration holds; null where none is on record.
+             */
+            calibrationDueOn: string | null;
+            /** @description The level that harms its input, dBm. */
+            damageLevelDbm: number | null;
+            /** @description ± limit of its level readings, dB. */
+            amplitudeAccuracyDb: number | null;
+            /** @description Your clearance on its kind, lapsed ones too; null when you have none. */
+            myClearance: components["schemas"]["MyClearanceDto"] | null;
+            id: string;
+            /** @example FR-031 */
+            tag: string;
+            name: string;
+            position: number;
+            kind: components["schemas"]["InstrumentKindDto"];
+            /** @description Why it is not ready, or what to mind. */
+            conditionNote: string;
+            /** @description Whether you may book it for the day asked about. */
+            mayBook: boolean;
+            /** @description Why not; empty when you may. */
+            reasons: components["schemas"]["UseReasonDto"][];
+        };
+        InstrumentHistoryDto: {
+            items: components["schemas"]["InstrumentChangeDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
+        InstrumentKindDto: {
+            id: string;
+            name: string;
+            needsClearance: boolean;
+            needsCalibration: boolean;
+        };
+        InstrumentPageDto: {
+            items: components["schemas"]["InstrumentDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
+        KeepReadingDto: {
+            /**
+             * @description Word for word as typed, by field.
+             * @example {
+             *       "voltsPerDivision": "20m",
+             *       "divisionsPeakToPeak": "3.3"
+             *     }
+             */
+            entry: {
+                [key: string]: string;
+            };
+            /**
+             * Format: date-time
+             * @description When it was taken, for one that waited on a device; now where left out.
+             */
+            takenAt?: string;
+            /**
+             * @description How it was taken; the check's own method.
+             * @example oscilloscope
+             */
+            method: string;
+            /** Format: uuid */
+            instrumentId?: string;
+            /** @description The tick beside a grave caution; asked for with every reading of such a stage. */
+            cautionAcknowledged?: boolean;
+        };
+        LevelPointDto: {
+            id: string;
+            stageId: string;
+            name: string;
+            /** @example TP8 */
+            testPoint: string;
+            plannedDbm: number;
+            toleranceDb: number;
+            /** @description What the stage can deliver or the next can take, dBm. */
+            limitDbm: number | null;
+        };
+        MarkDto: {
+            id: string;
+            by: components["schemas"]["PersonRefDto"];
+            /** @example 2026-01-15T19:46:00Z */
+            at: string;
+        };
+        MeDto: {
+            id: string;
+            name: string;
+            email: string;
+            roles: ("member" | "mentor" | "steward" | "treasurer" | "organiser")[];
+            /** @description True on a bench tablet. */
+            sharedDevice: boolean;
+        };
+        MyClearanceDto: {
+            /** Format: date */
+            grantedOn: string;
+            /**
+             * Format: date
+             * @description Last day on which it holds; null while nobody set an end.
+             */
+            until: string | null;
+        };
+        NotBookableDto: {
+            refused: components["schemas"]["RefusedResourceDto"][];
+            /**
+             * @description Stable; opened, it explains itself.
+             * @example /problems/invalid-input
+             */
+            type: string;
+            title: string;
+            status: number;
+            /** @description This occurrence, in words for a member. */
+            detail: string;
+            /** @description Names this request in the log. */
+            instance: string;
+            errors?: components["schemas"]["FieldProblemDto"][];
+        };
+        Object: Record<string, never>;
+        PeoplePageDto: {
+            items: components["schemas"]["PersonDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
+        PersonDto: {
+            /** @example 0b6f1c1e-5f0e-4f0b-9d39-0c6a4f6f7f11 */
+            id: string;
+            name: string;
+            roles: ("member" | "mentor" | "steward" | "treasurer" | "organiser")[];
+        };
+        PersonRefDto: {
+            id: string;
+            name: string;
+        };
+        PhotoDto: {
+            id: string;
+            caption: string;
+            /** @example image/jpeg */
+            contentType: string;
+            /** @example 2026-01-15T19:46:00Z */
+            at: string;
+            /**
+             * @description Where its bytes are.
+             * @example /api/builds/…/photos/…
+             */
+            url: string;
+        };
+        PlanCheckDto: {
+            /** @enum {string} */
+            kind: "tick" | "measure" | "photo" | "safety" | "mentor's eyes";
+            /** @description What the form starts with, in the fields' own units. */
+            defaults: {
+                [key: string]: number;
+            };
+            id: string;
+            /** @description Order on the checklist, from 1. */
+            position: number;
+            title: string;
+            instruction: string;
+            isRequired: boolean;
+            /** @description For a measure: how it is taken; `gain` and `carried` work themselves out. */
+            method: string | null;
+            /** @description Unit of the value and of the window. */
+            unit: string | null;
+            windowLow: number | null;
+            windowHigh: number | null;
+            target: number | null;
+            /** @description For a value that works itself out: the checks it is made of. */
+            fromCheckIds: string[];
+            levelPointId: string | null;
+            instrumentKindId: string | null;
+        };
+        PlanDto: {
+            id: string;
+            name: string;
+            summary: string;
+            /** @description Numbers of its published editions, oldest first. */
+            editions: number[];
+        };
+        PlanEditionDto: {
+            id: string;
+            planId: string;
+            planName: string;
+            number: number;
+            /** @example 2026-01-15T12:00:00Z */
+            publishedAt: string;
+            stages: components["schemas"]["PlanStageDto"][];
+            /** @description In signal order. */
+            levelPoints: components["schemas"]["LevelPointDto"][];
+        };
+        PlanStageDto: {
+            cautions: ("load before power" | "hot parts" | "rf power" | "mains" | "rf exposure" | "licence needed")[];
+            id: string;
+            position: number;
+            /** @example Pre-driver */
+            name: string;
+            summary: string;
+            checks: components["schemas"]["PlanCheckDto"][];
+        };
+        PlansPageDto: {
+            items: components["schemas"]["PlanDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
+        ProblemDto: {
+            /**
+             * @description Stable; opened, it explains itself.
+             * @example /problems/invalid-input
+             */
+            type: string;
+            title: string;
+            status: number;
+            /** @description This occurrence, in words for a member. */
+            detail: string;
+            /** @description Names this request in the log. */
+            instance: string;
+            errors?: components["schemas"]["FieldProblemDto"][];
+        };
+        ReadingDto: {
+            entry: {
+                [key: string]: string;
+            };
+            /** @enum {string} */
+            verdict: "pass" | "too close to call" | "not yet";
+            id: string;
+            checkId: string;
+            /** @example oscilloscope */
+            method: string;
+            /** @description In `unit`, unrounded. */
+            value: number;
+            /** @example dBm */
+            unit: string;
+            /** @description Unit of the uncertainties: dB for dBm and dBc. */
+            uncertaintyUnit: string;
+            /** @description k = 2, about 95 %. */
+            expandedUncertainty: number;
+            components: components["schemas"]["UncertaintyComponentDto"][];
+            voltsPeakToPeak: number | null;
+            watts: number | null;
+            /**
+             * @description Name and version of the calculation.
+             * @example oscilloscope/1
+             */
+            calculation: string;
+            instrumentId: string | null;
+            /** @example FR-021 */
+            instrumentTag: string | null;
+            /** @description Last day of the instrument's calibration, as it was then. */
+            calibrationDueOn: string | null;
+            cautionAcknowledged: boolean;
+            /** @example 2026-01-15T19:46:00Z */
+            takenAt: string;
+            /** @description A later one is in force; this one stays in the record. */
+            isSuperseded: boolean;
+        };
+        RefusedResourceDto: {
+            resourceId: string;
+            reasons: components["schemas"]["UseReasonDto"][];
+        };
+        ReviewDto: {
+            cautions: ("load before power" | "hot parts" | "rf power" | "mains" | "rf exposure" | "licence needed")[];
+            buildId: string;
+            stageId: string;
+            stagePosition: number;
+            stageName: string;
+            builder: components["schemas"]["PersonRefDto"];
+            planName: string;
+            serial: number;
+            /** @example 2026-01-13T21:48:00Z */
+            sentAt: string;
+            /** @description The builder's word. */
+            note: string;
+            /** @description How often it was sent back before. */
+            timesSentBack: number;
+            /** @description The reader's own stage: another mentor decides on it. */
+            isOwn: boolean;
+        };
+        ReviewsPageDto: {
+            /** @description The longest waiting first. */
+            items: components["schemas"]["ReviewDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+            /** @description When any stage was signed off last. */
+            lastSignOffAt: string | null;
+        };
+        SendBackDto: {
+            note: string;
+        };
+        SignInDto: {
+            /**
+             * Format: email
+             * @example member@larkmoor.example
+             */
+            email: string;
+            /** @example larkmoor-demo */
+            password: string;
+            /** @description On a bench tablet the sign-in runs out after ten minutes untouched. */
+            sharedDevice?: boolean;
+        };
+        SpanDto: {
+            /** Format: date-time */
+            startsAt: string;
+            /** Format: date-time */
+            endsAt: string;
+        };
+        StageEventDto: {
+            /** @enum {string} */
+            kind: "sent" | "withdrawn" | "sent back" | "signed off";
+            by: components["schemas"]["PersonRefDto"];
+            /** @example 2026-01-15T21:48:00Z */
+            at: string;
+            note: string;
+        };
+        StageNoteDto: {
+            /** @example Two turns off the output winding brought the gain down. */
+            note?: string;
+        };
+        StartBuildDto: {
+            /** Format: uuid */
+            planId: string;
+        };
+        TakenDto: {
+            resourceId: string;
+            resourceTag: string;
+            /** @description A person's name, or a build night's title. */
+            by: string;
+            /** Format: date-time */
+            startsAt: string;
+            /** Format: date-time */
+            endsAt: string;
+        };
+        UncertaintyComponentDto: {
+            name: string;
+            limit: number;
+            distribution: string;
+            standardUncertainty: number;
+        };
+        UseReasonDto: {
+            /** @enum {string} */
+            code: "in repair" | "out of use" | "calibration unknown" | "calibration past" | "not cleared" | "clearance past";
+            reason: string;
+            remedy: string;
+        };
     };
-    DemoAccountDto: {
-      email: string;
-      role: string;
-    };
-    FieldProblemDto: {
-      /**
-       * @description Where in the request.
-       * @example #/endsAt
-       */
-      pointer: string;
-      detail: string;
-    };
-    MeDto: {
-      id: string;
-      name: string;
-      email: string;
-      roles: ('member' | 'mentor' | 'steward' | 'treasurer' | 'organiser')[];
-      /** @description True on a bench tablet. */
-      sharedDevice: boolean;
-    };
-    Object: Record<string, never>;
-    PeoplePageDto: {
-      items: components['schemas']['PersonDto'][];
-      total: number;
-      page: number;
-      perPage: number;
-    };
-    PersonDto: {
-      /** @example 0b6f1c1e-5f0e-4f0b-9d39-0c6a4f6f7f11 */
-      id: string;
-      name: string;
-      roles: ('member' | 'mentor' | 'steward' | 'treasurer' | 'organiser')[];
-    };
-    ProblemDto: {
-      /**
-       * @description Stable; opened, it explains itself.
-       * @example /problems/invalid-input
-       */
-      type: string;
-      title: string;
-      status: number;
-      /** @description This occurrence, in words for a member. */
-      detail: string;
-      /** @description Names this request in the log. */
-      instance: string;
-      errors?: components['schemas']['FieldProblemDto'][];
-    };
-    SignInDto: {
-      /**
-       * Format: email
-       * @example member@larkmoor.example
-       */
-      email: string;
-      /** @example larkmoor-demo */
-      password: string;
-      /** @description On a bench tablet the sign-in runs out after ten minutes untouched. */
-      sharedDevice?: boolean;
-    };
-  };
-  responses: never;
-  parameters: never;
-  requestBodies: never;
-  headers: never;
-  pathItems: never;
+    responses: never;
+    parameters: never;
+    requestBodies: never;
+    headers: never;
+    pathItems: never;
 }
 export type $defs = Record<string, never>;
 export interface operations {
-  'Auth.me': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "Auth.me": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MeDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
+    "Auth.refresh": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
         };
-        content: {
-          'application/json': components['schemas']['MeDto'];
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
     };
-  };
-  'Auth.refresh': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "Auth.signIn": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SignInDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MeDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    requestBody?: never;
-    responses: {
-      204: {
-        headers: {
-          [name: string]: unknown;
+    "Auth.signOut": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
         };
-        content?: never;
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
     };
-  };
-  'Auth.signIn': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "Benches.list": {
+        parameters: {
+            query: {
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BenchPageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    requestBody: {
-      content: {
-        'application/json': components['schemas']['SignInDto'];
-      };
+    "Bookings.list": {
+        parameters: {
+            query: {
+                from: string;
+                to: string;
+                /** @description Only bookings that hold this bench or instrument. */
+                resourceId?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BookingDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
+    "Bookings.book": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
         };
-        content: {
-          'application/json': components['schemas']['MeDto'];
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateBookingDto"];
+            };
         };
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BookingDto"];
+                };
+            };
+            /** @description Somebody has it; when else it is free */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BookingOverlapDto"];
+                };
+            };
+            /** @description Not like this; why, and what helps */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["NotBookableDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
     };
-  };
-  'Auth.signOut': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "Bookings.mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BookingDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    requestBody?: never;
-    responses: {
-      204: {
-        headers: {
-          [name: string]: unknown;
+    "Bookings.cancel": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                bookingId: string;
+            };
+            cookie?: never;
         };
-        content?: never;
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
     };
-  };
-  'Club.front': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "Builds.start": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["StartBuildDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
+    "Builds.mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
         };
-        content: {
-          'application/json': components['schemas']['ClubDto'];
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
     };
-  };
-  'Health.check': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "Builds.show": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
+    "Checks.listInstruments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                checkId: string;
+            };
+            cookie?: never;
         };
-        content: {
-          'application/json': Record<string, never>;
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InstrumentChoiceDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
     };
-  };
-  'People.list': {
-    parameters: {
-      query: {
-        /** @description Only holders of this role. */
-        role?: 'member' | 'mentor' | 'steward' | 'treasurer' | 'organiser';
-        /** @description Only names that have these letters in them. */
-        name?: string;
-        page: components['schemas']['Object'];
-        perPage: components['schemas']['Object'];
-      };
-      header?: never;
-      path?: never;
-      cookie?: never;
+    "Checks.mark": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                checkId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MarkDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
+    "Checks.takeBackMark": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                checkId: string;
+            };
+            cookie?: never;
         };
-        content: {
-          'application/json': components['schemas']['PeoplePageDto'];
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
-        };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
     };
-  };
-  'People.show': {
-    parameters: {
-      query?: never;
-      header?: never;
-      path: {
-        personId: string;
-      };
-      cookie?: never;
+    "Photos.add": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                checkId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "multipart/form-data": {
+                    /** Format: binary */
+                    photo: string;
+                    caption?: string;
+                };
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PhotoDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
     };
-    requestBody?: never;
-    responses: {
-      200: {
-        headers: {
-          [name: string]: unknown;
+    "Checks.keepReading": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                checkId: string;
+            };
+            cookie?: never;
         };
-        content: {
-          'application/json': components['schemas']['PersonDto'];
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["KeepReadingDto"];
+            };
         };
-      };
-      /** @description A problem document */
-      default: {
-        headers: {
-          [name: string]: unknown;
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ReadingDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
-        content: {
-          'application/problem+json': components['schemas']['ProblemDto'];
-        };
-      };
     };
-  };
+    "Builds.seeLicence": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Photos.show": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                photoId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "image/*": string;
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Photos.takeBack": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                photoId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Stages.sendBack": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                stageId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SendBackDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildStageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Stages.signOff": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                stageId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["StageNoteDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildStageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Stages.submit": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                stageId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["StageNoteDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildStageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Stages.withdraw": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                stageId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildStageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Clearances.list": {
+        parameters: {
+            query: {
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+                personId?: string;
+                kindId?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ClearancePageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Clearances.grant": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["GrantClearanceDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ClearanceDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Clearances.mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ClearanceDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Clearances.end": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                clearanceId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Club.front": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ClubDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Groups.list": {
+        parameters: {
+            query: {
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["GroupPageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Groups.mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["GroupDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Health.check": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": Record<string, never>;
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Instruments.list": {
+        parameters: {
+            query: {
+                /** @description For which day the instrument would be used; today unless told. */
+                on?: string;
+                /** @description Only instruments of this kind. */
+                kindId?: string;
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InstrumentPageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Instruments.show": {
+        parameters: {
+            query?: {
+                on?: string;
+            };
+            header?: never;
+            path: {
+                instrumentId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InstrumentDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Instruments.changeCalibration": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                instrumentId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangeCalibrationDto"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Instruments.changeCondition": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                instrumentId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangeConditionDto"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Instruments.history": {
+        parameters: {
+            query: {
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path: {
+                instrumentId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InstrumentHistoryDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "People.list": {
+        parameters: {
+            query: {
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+                /** @description Only holders of this role. */
+                role?: "member" | "mentor" | "steward" | "treasurer" | "organiser";
+                /** @description Only names that have these letters in them. */
+                name?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PeoplePageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "People.show": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                personId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PersonDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Plans.list": {
+        parameters: {
+            query: {
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PlansPageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Plans.show": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                planId: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PlanEditionDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Reviews.list": {
+        parameters: {
+            query: {
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ReviewsPageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
 }
