@@ -1,11 +1,17 @@
 import { Passwords } from '@ferrite-row/api/auth/passwords';
 import { ClubService } from '@ferrite-row/api/club/club.service';
+import type { Actor } from '@ferrite-row/api/common/actor';
 import type { SettableClock } from '@ferrite-row/api/common/clock';
 import type { ServiceContext } from '@ferrite-row/api/context';
 import { PeopleService } from '@ferrite-row/api/people/people.service';
+import { seedBookings } from './bookings';
 import { calendarAround } from './calendar';
 import { CLUB } from './club';
+import { seedGroups } from './groups';
+import { seedInventory } from './inventory';
+import { seedMoney } from './money/year';
 import { PEOPLE } from './people';
+import { found, type StageSet } from './stage-set';
 
 const PASSWORD = 'larkmoor-demo';
 
@@ -18,16 +24,24 @@ export type Counts = Record<string, number>;
  */
 export async function seedDemoClub(context: ServiceContext, clock: SettableClock): Promise<Counts> {
   const calendar = calendarAround(clock.now(), CLUB.timeZone);
+  clock.set(calendar.at(calendar.today.subtract({ days: 400 }), 10));
+  await context.get(ClubService).set({ ...CLUB, contactEmail: '' });
   const people = await seedPeople(context);
+  const set: StageSet = { context, clock, calendar, as: (key) => found(people, key) };
+  const inventory = await seedInventory(set);
+  const groups = await seedGroups(set);
+  const money = await seedMoney(set);
+  const bookings = await seedBookings(set, inventory);
   clock.set(calendar.now);
   await context.get(ClubService).set(CLUB);
-  return { people: people.size };
+  return { people: people.size, groups, bookings, ...money };
 }
 
-async function seedPeople(context: ServiceContext): Promise<Map<string, string>> {
+async function seedPeople(context: ServiceContext): Promise<Map<string, Actor>> {
   const passwordHash = await context.get(Passwords).hash(PASSWORD);
   const enrolled = await context
     .get(PeopleService)
     .enrol(PEOPLE.map(({ name, email, roles }) => ({ name, email, roles, passwordHash })));
-  return new Map(PEOPLE.map(({ key }, index) => [key, enrolled[index]?.id ?? '']));
+  const actors = enrolled.map(({ id: personId, name, roles }) => ({ personId, name, roles }));
+  return new Map(PEOPLE.map(({ key }, index) => [key, actors[index] as Actor]));
 }

@@ -141,6 +141,98 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/build-nights": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The nights of a stretch of time, at most 100 days, earliest first; cancelled ones among them. */
+        get: operations["BuildNights.list"];
+        put?: never;
+        /**
+         * Schedules one night or a series, whole or not at all. When a bench or a mentor is taken on any date, nothing is
+         *     made and the answer is 409 `night-clash` with `clashes`: each date, the reasons, and what would make it clear.
+         *     Send it again with those dates in `skip`, or with other benches or mentors for them in `instead`.
+         */
+        post: operations["BuildNights.schedule"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/build-nights/preview": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** What scheduling this would meet, date by date. Nothing is kept. */
+        post: operations["BuildNights.preview"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/build-nights/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One night with the names of who is coming and who waits. */
+        get: operations["BuildNights.show"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        /** Changes one night; what is left out stays. Other times are told to everybody who is coming or waiting. */
+        patch: operations["BuildNights.change"];
+        trace?: never;
+    };
+    "/api/build-nights/{id}/cancel": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Cancels one night with a word, which goes to everybody who was coming, waiting or on duty. */
+        post: operations["BuildNights.cancel"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/build-nights/{id}/coming": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Says that the caller is coming: a place, or the end of the waiting list when the night is full. */
+        post: operations["BuildNights.come"];
+        /** Says that the caller is not coming after all; the first in the waiting list moves up. */
+        delete: operations["BuildNights.stayAway"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/builds": {
         parameters: {
             query?: never;
@@ -429,6 +521,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/dues/mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The signed-in person's tier, payments and credit, and where to send a transfer. */
+        get: operations["Dues.mine"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/groups": {
         parameters: {
             query?: never;
@@ -563,6 +672,125 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/invoices": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Everybody's, those due first first. */
+        get: operations["Invoices.list"];
+        put?: never;
+        post: operations["Invoices.raise"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/invoices/mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What the signed-in person owes and has paid. */
+        get: operations["Invoices.mine"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/invoices/{invoiceId}/card-payment": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What became of the last visit to the card page. Asked again and again by the page a person comes back to. */
+        get: operations["Invoices.cardPayment"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/invoices/{invoiceId}/checkout": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Opens the card service's page for what is left to pay. */
+        post: operations["Invoices.open"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/ledger/trial-balance": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Every account with its balance on its side. */
+        get: operations["Ledger.trialBalance"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/payments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Latest first. */
+        get: operations["Payments.list"];
+        put?: never;
+        /** Writes down cash, a cheque or a transfer. */
+        post: operations["Payments.take"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/payments/{paymentId}/take-back": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Payments.takeBack"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/people": {
         parameters: {
             query?: never;
@@ -630,6 +858,89 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/receipts/{paymentId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** A receipt: the payer's own, and the treasurer's. Its id is the payment's. */
+        get: operations["Payments.receipt"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/reconciliation/lines/{lineId}/match": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Settles a line by hand: by invoices, by a payment written down before, or against an account. */
+        post: operations["Reconciliation.match"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/reconciliation/lines/{lineId}/take-back": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Reconciliation.takeBack"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/reconciliation/statements": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Latest first. */
+        get: operations["Reconciliation.list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/reconciliation/statements/{statementId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Reconciliation.show"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/reviews": {
         parameters: {
             query?: never;
@@ -647,10 +958,118 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/statements": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * Imports a statement of the current account: CSV in UTF-8, a heading with date, description, amount and balance,
+         *     at most 1 MB. Taken whole or not at all; a line imported before is not counted again.
+         */
+        post: operations["Reconciliation.import"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/tiers": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Dues.list"];
+        put?: never;
+        post: operations["Dues.create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/tiers/assignments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Sets a person's tier from a day on. */
+        post: operations["Dues.assign"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/treasury/summary": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The four figures, the aged dues, and what the card service said that nobody acted on. */
+        get: operations["Dues.summary"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/webhooks/stripe": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Events of the card service. The signature over the raw body is the proof of who calls. */
+        post: operations["Webhooks.receive"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
 }
 export type webhooks = Record<string, never>;
 export interface components {
     schemas: {
+        AgeBandDto: {
+            /** @enum {string} */
+            age: "not yet due" | "1 to 30 days late" | "31 to 60" | "61 to 90" | "over 90";
+            count: number;
+            openMinor: number;
+        };
+        AssignTierDto: {
+            /** Format: uuid */
+            tierId: string;
+            /**
+             * Format: date
+             * @description The first day it holds.
+             */
+            fromOn: string;
+            /** Format: uuid */
+            personId: string;
+        };
+        BankDetailsDto: {
+            accountName: string;
+            accountNumber: string;
+        };
         BenchDto: {
             id: string;
             tag: string;
@@ -663,6 +1082,19 @@ export interface components {
             total: number;
             page: number;
             perPage: number;
+        };
+        BookItemDto: {
+            /** @enum {string} */
+            kind: "invoice" | "payment" | "account";
+            /** @description Of the invoice or payment; the code of an account. */
+            id: string;
+            /** @example D-0412 */
+            tag: string;
+            name: string;
+            detail: string;
+            amountMinor: number;
+            /** @description The statement's line it belongs to; null while it is open. */
+            lineId: string | null;
         };
         BookedResourceDto: {
             /** @enum {string} */
@@ -767,6 +1199,59 @@ export interface components {
             /** @description In signal order. */
             levelPoints: components["schemas"]["LevelPointDto"][];
         };
+        BuildNightDetailDto: {
+            id: string;
+            title: string;
+            series: components["schemas"]["NightSeriesDto"] | null;
+            /** Format: date-time */
+            startsAt: string;
+            /** Format: date-time */
+            endsAt: string;
+            places: number;
+            /** @description How many are coming. */
+            coming: number;
+            /** @description How many wait for a place. */
+            waiting: number;
+            note: string;
+            benches: components["schemas"]["NightBenchDto"][];
+            mentors: components["schemas"]["NightPersonDto"][];
+            stages: components["schemas"]["NightStageDto"][];
+            /** @description null: not said anything. */
+            mine: components["schemas"]["NightStandingDto"] | null;
+            /** Format: date-time */
+            cancelledAt: string | null;
+            cancelledReason: string | null;
+            /** @description In the order in which they said so. */
+            comingPeople: components["schemas"]["NightGuestDto"][];
+            /** @description In the order in which they move up. */
+            waitingPeople: components["schemas"]["NightGuestDto"][];
+        };
+        BuildNightDto: {
+            id: string;
+            title: string;
+            series: components["schemas"]["NightSeriesDto"] | null;
+            /** Format: date-time */
+            startsAt: string;
+            /** Format: date-time */
+            endsAt: string;
+            places: number;
+            /** @description How many are coming. */
+            coming: number;
+            /** @description How many wait for a place. */
+            waiting: number;
+            note: string;
+            benches: components["schemas"]["NightBenchDto"][];
+            mentors: components["schemas"]["NightPersonDto"][];
+            stages: components["schemas"]["NightStageDto"][];
+            /** @description null: not said anything. */
+            mine: components["schemas"]["NightStandingDto"] | null;
+            /** Format: date-time */
+            cancelledAt: string | null;
+            cancelledReason: string | null;
+        };
+        BuildNightsDto: {
+            items: components["schemas"]["BuildNightDto"][];
+        };
         BuildStageDto: {
             cautions: ("load before power" | "hot parts" | "rf power" | "mains" | "rf exposure" | "licence needed")[];
             /** @enum {string} */
@@ -787,6 +1272,26 @@ export interface components {
             /** @description Oldest first. */
             events: components["schemas"]["StageEventDto"][];
         };
+        CancelNightDto: {
+            reason: string;
+        };
+        CardNoteDto: {
+            id: string;
+            receivedAt: string;
+            note: string;
+        };
+        CardPaymentDto: {
+            /**
+             * @description `open`: the page was opened and nothing has come from it yet; `confirming`: the card was taken, the bank has yet
+             *     to confirm; `failed`: no money was taken.
+             * @enum {string}
+             */
+            state: "none" | "open" | "confirming" | "paid" | "failed" | "expired";
+            /** @description Left to pay on the invoice now. */
+            openMinor: number;
+            /** @description The receipt, once it is paid. */
+            receiptId: string | null;
+        };
         ChangeCalibrationDto: {
             /**
              * Format: date
@@ -801,6 +1306,38 @@ export interface components {
             condition: "ready" | "in repair" | "out of use";
             /** @description What is wrong, or what was put right; members read it. */
             note: string;
+        };
+        ChangeNightDto: {
+            /** Format: date-time */
+            startsAt?: string;
+            /** Format: date-time */
+            endsAt?: string;
+            title?: string;
+            /** @description Not fewer than are coming. More moves the waiting list up. */
+            places?: number;
+            note?: string;
+            benchIds?: string[];
+            mentorIds?: string[];
+            stageIds?: string[];
+        };
+        CheckedNightDto: {
+            /**
+             * @description The night's day on the club's calendar.
+             * @example 2026-10-20
+             */
+            date: string;
+            /** Format: date-time */
+            startsAt: string;
+            /** Format: date-time */
+            endsAt: string;
+            /** @enum {string} */
+            verdict: "clash" | "clear" | "left out";
+            clashes: components["schemas"]["NightClashDto"][];
+            remedy: components["schemas"]["NightRemedyDto"];
+        };
+        CheckoutDto: {
+            /** @description The card service's page; the browser goes there. */
+            url: string;
         };
         ClearanceDto: {
             /** Format: date */
@@ -857,6 +1394,20 @@ export interface components {
              */
             checkId?: string;
         };
+        CreateTierDto: {
+            /** @example full */
+            name: string;
+            /**
+             * @description For the whole period.
+             * @example 2400
+             */
+            amountMinor: number;
+            /**
+             * @description The months one invoice covers.
+             * @example 3
+             */
+            months: number;
+        };
         DemoAccountDto: {
             email: string;
             role: string;
@@ -898,6 +1449,29 @@ export interface components {
             total: number;
             page: number;
             perPage: number;
+        };
+        HoldingsDto: {
+            currentAccountMinor: number;
+            /** @description Into the current account in the running month. */
+            inThisMonthMinor: number;
+            /** @description Out of it; nothing or less than nothing. */
+            outThisMonthMinor: number;
+            cashBoxMinor: number;
+            chequesInHandMinor: number;
+            /** @description Paid by card, not yet at the bank. */
+            cardMoneyMinor: number;
+            /** @description Transfers written down that no statement has shown yet. */
+            transfersOnTheWayMinor: number;
+        };
+        InsteadDto: {
+            /**
+             * Format: date
+             * @description The night's day on the club's calendar.
+             * @example 2026-10-20
+             */
+            date: string;
+            benchIds?: string[];
+            mentorIds?: string[];
         };
         InstrumentChangeDto: {
             /** @enum {string} */
@@ -999,6 +1573,39 @@ export interface components {
             page: number;
             perPage: number;
         };
+        InvoiceDto: {
+            id: string;
+            /** @example D-0412 */
+            number: string;
+            /** @enum {string} */
+            kind: "dues" | "course fee" | "kit";
+            description: string;
+            amountMinor: number;
+            paidMinor: number;
+            /** @description Left to pay. */
+            openMinor: number;
+            issuedOn: string;
+            dueOn: string;
+            /** @enum {string} */
+            state: "open" | "paid" | "part paid" | "late";
+            /** @description Days past the due day; 0 unless late. */
+            daysLate: number;
+            /**
+             * @description ISO 11649, without spaces.
+             * @example RF43LRBD0421
+             */
+            reference: string;
+            /** @description The same in fours, as it is printed. */
+            referencePrinted: string;
+        };
+        InvoicesPageDto: {
+            items: components["schemas"]["OpenInvoiceDto"][];
+            total: number;
+            /** @description Left to pay on all that match, not on this page alone. */
+            openMinor: number;
+            page: number;
+            perPage: number;
+        };
         KeepReadingDto: {
             /**
              * @description Word for word as typed, by field.
@@ -1036,11 +1643,30 @@ export interface components {
             /** @description What the stage can deliver or the next can take, dBm. */
             limitDbm: number | null;
         };
+        LineMatchDto: {
+            /** @enum {string} */
+            how: "by itself" | "by hand";
+            matchedAt: string;
+            paymentId: string | null;
+        };
         MarkDto: {
             id: string;
             by: components["schemas"]["PersonRefDto"];
             /** @example 2026-01-15T19:46:00Z */
             at: string;
+        };
+        MatchLineDto: {
+            /** @description Of one person; paid in this order, and what is left over is credit on account. */
+            invoiceIds?: string[];
+            /**
+             * Format: uuid
+             * @description A transfer or cheque of exactly the line's amount.
+             */
+            paymentId?: string;
+            /** @example 5000 */
+            accountCode?: string;
+            /** @description What it was, for the books. */
+            note?: string;
         };
         MeDto: {
             id: string;
@@ -1059,6 +1685,73 @@ export interface components {
              */
             until: string | null;
         };
+        MyDuesDto: {
+            tier: components["schemas"]["TierDto"] | null;
+            currency: string;
+            /** @description Left over from payments; used for the next invoice. */
+            creditMinor: number;
+            /** @description Latest first, those taken back left out. */
+            payments: components["schemas"]["PaymentDto"][];
+            bank: components["schemas"]["BankDetailsDto"];
+            /** @description Who takes cash and cheques. */
+            treasurerName: string;
+            /** @description Writes to the treasurer go here; empty when the club has given no address. */
+            contactEmail: string;
+        };
+        NightBenchDto: {
+            id: string;
+            tag: string;
+        };
+        NightClashDto: {
+            /** @enum {string} */
+            kind: "mentor" | "bench";
+            detail: string;
+        };
+        NightGuestDto: {
+            id: string;
+            name: string;
+            /**
+             * Format: date-time
+             * @description When they said that they are coming.
+             */
+            saidAt: string;
+        };
+        NightPersonDto: {
+            id: string;
+            name: string;
+        };
+        NightRemedyDto: {
+            benchIds?: string[];
+            mentorIds?: string[];
+        };
+        NightSeriesDto: {
+            id: string;
+            title: string;
+            /** @example FREQ=WEEKLY;COUNT=22 */
+            rule: string;
+            /** @description This night's place in the series, from 1. */
+            number: number;
+            /** @description How many nights the series has. */
+            total: number;
+        };
+        NightStageDto: {
+            id: string;
+            /** @example 9 */
+            position: number;
+            /** @example Pre-driver */
+            name: string;
+        };
+        NightStandingDto: {
+            /** @enum {string} */
+            state: "coming" | "waiting" | "on duty";
+            /** @description Place in the waiting list, 1 is next; null unless waiting. */
+            line: number | null;
+        };
+        NightsPreviewDto: {
+            nights: components["schemas"]["CheckedNightDto"][];
+            /** @description How many people would be told by mail. */
+            toTell: number;
+        };
         NotBookableDto: {
             refused: components["schemas"]["RefusedResourceDto"][];
             /**
@@ -1075,6 +1768,63 @@ export interface components {
             errors?: components["schemas"]["FieldProblemDto"][];
         };
         Object: Record<string, never>;
+        OpenInvoiceDto: {
+            id: string;
+            /** @example D-0412 */
+            number: string;
+            /** @enum {string} */
+            kind: "dues" | "course fee" | "kit";
+            description: string;
+            amountMinor: number;
+            paidMinor: number;
+            /** @description Left to pay. */
+            openMinor: number;
+            issuedOn: string;
+            dueOn: string;
+            /** @enum {string} */
+            state: "open" | "paid" | "part paid" | "late";
+            /** @description Days past the due day; 0 unless late. */
+            daysLate: number;
+            /**
+             * @description ISO 11649, without spaces.
+             * @example RF43LRBD0421
+             */
+            reference: string;
+            /** @description The same in fours, as it is printed. */
+            referencePrinted: string;
+            personId: string;
+            personName: string;
+        };
+        PaidShareDto: {
+            invoiceId: string;
+            invoiceNumber: string;
+            description: string;
+            amountMinor: number;
+        };
+        PaymentDto: {
+            id: string;
+            /** @example R-0298 */
+            receiptNumber: string;
+            personId: string;
+            personName: string;
+            /** @enum {string} */
+            method: "card" | "cash" | "cheque" | "transfer";
+            amountMinor: number;
+            receivedOn: string;
+            note: string;
+            /** @description A transfer or cheque that no line of a statement has shown yet. */
+            isBeingMatched: boolean;
+            isTakenBack: boolean;
+            paid: components["schemas"]["PaidShareDto"][];
+            /** @description Left over for later invoices. */
+            creditMinor: number;
+        };
+        PaymentsPageDto: {
+            items: components["schemas"]["PaymentDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
         PeoplePageDto: {
             items: components["schemas"]["PersonDto"][];
             total: number;
@@ -1147,6 +1897,35 @@ export interface components {
             /** @description In signal order. */
             levelPoints: components["schemas"]["LevelPointDto"][];
         };
+        PlanNightsDto: {
+            /**
+             * Format: date-time
+             * @description The first night's beginning; for a series its time on the club's wall is kept.
+             */
+            startsAt: string;
+            /**
+             * Format: date-time
+             * @description The first night's end: 15 minutes to 12 hours later.
+             */
+            endsAt: string;
+            /** @description Days to leave out of the series (EXDATE). A day that is no night of it changes nothing. */
+            skip?: string[];
+            /** @description Left out for a single night. */
+            repeat?: components["schemas"]["RepeatDto"];
+            /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
+            instead?: components["schemas"]["InsteadDto"][];
+            /** @description Benches the night holds; none for an evening without. */
+            benchIds?: string[];
+            /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
+            mentorIds?: string[];
+            /** @description Stages in focus. */
+            stageIds?: string[];
+            title: string;
+            places: number;
+            note?: string;
+            /** @description Tells the people whose build is on one of the stages in focus. */
+            tellByMail?: boolean;
+        };
         PlanStageDto: {
             cautions: ("load before power" | "hot parts" | "rf power" | "mains" | "rf exposure" | "licence needed")[];
             id: string;
@@ -1162,6 +1941,35 @@ export interface components {
             page: number;
             perPage: number;
         };
+        PreviewNightsDto: {
+            /**
+             * Format: date-time
+             * @description The first night's beginning; for a series its time on the club's wall is kept.
+             */
+            startsAt: string;
+            /**
+             * Format: date-time
+             * @description The first night's end: 15 minutes to 12 hours later.
+             */
+            endsAt: string;
+            /** @description Days to leave out of the series (EXDATE). A day that is no night of it changes nothing. */
+            skip?: string[];
+            title?: string;
+            places?: number;
+            note?: string;
+            /** @description Tells the people whose build is on one of the stages in focus. */
+            tellByMail?: boolean;
+            /** @description Left out for a single night. */
+            repeat?: components["schemas"]["RepeatDto"];
+            /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
+            instead?: components["schemas"]["InsteadDto"][];
+            /** @description Benches the night holds; none for an evening without. */
+            benchIds?: string[];
+            /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
+            mentorIds?: string[];
+            /** @description Stages in focus. */
+            stageIds?: string[];
+        };
         ProblemDto: {
             /**
              * @description Stable; opened, it explains itself.
@@ -1175,6 +1983,27 @@ export interface components {
             /** @description Names this request in the log. */
             instance: string;
             errors?: components["schemas"]["FieldProblemDto"][];
+        };
+        QuarterDto: {
+            from: string;
+            to: string;
+            raisedMinor: number;
+            paidMinor: number;
+            count: number;
+            paidCount: number;
+        };
+        RaiseInvoiceDto: {
+            /**
+             * Format: date
+             * @description Not before today.
+             */
+            dueOn: string;
+            /** Format: uuid */
+            personId: string;
+            /** @enum {string} */
+            kind: "dues" | "course fee" | "kit";
+            description: string;
+            amountMinor: number;
         };
         ReadingDto: {
             entry: {
@@ -1213,9 +2042,40 @@ export interface components {
             /** @description A later one is in force; this one stays in the record. */
             isSuperseded: boolean;
         };
+        ReceiptDto: {
+            id: string;
+            /** @example R-0298 */
+            receiptNumber: string;
+            personId: string;
+            personName: string;
+            /** @enum {string} */
+            method: "card" | "cash" | "cheque" | "transfer";
+            amountMinor: number;
+            receivedOn: string;
+            note: string;
+            /** @description A transfer or cheque that no line of a statement has shown yet. */
+            isBeingMatched: boolean;
+            isTakenBack: boolean;
+            paid: components["schemas"]["PaidShareDto"][];
+            /** @description Left over for later invoices. */
+            creditMinor: number;
+            clubName: string;
+            clubAddress: string;
+            currency: string;
+            /** @description Who took it; a treasurer of the club where a machine did. */
+            treasurerName: string;
+        };
         RefusedResourceDto: {
             resourceId: string;
             reasons: components["schemas"]["UseReasonDto"][];
+        };
+        RepeatDto: {
+            /**
+             * @description An RRULE of RFC 5545 without its name: FREQ=WEEKLY with INTERVAL, BYDAY and either COUNT (at most 60) or UNTIL in
+             *     UTC. It is read on the club's wall clock, so that 19:30 stays 19:30 when the clocks change.
+             * @example FREQ=WEEKLY;BYDAY=TU;COUNT=6
+             */
+            rule: string;
         };
         ReviewDto: {
             cautions: ("load before power" | "hot parts" | "rf power" | "mains" | "rf exposure" | "licence needed")[];
@@ -1244,8 +2104,17 @@ export interface components {
             /** @description When any stage was signed off last. */
             lastSignOffAt: string | null;
         };
+        ScheduledNightsDto: {
+            nights: components["schemas"]["BuildNightDto"][];
+            /** @description How many people are told by mail. */
+            told: number;
+        };
         SendBackDto: {
             note: string;
+        };
+        SettlingAccountDto: {
+            code: string;
+            name: string;
         };
         SignInDto: {
             /**
@@ -1280,6 +2149,82 @@ export interface components {
             /** Format: uuid */
             planId: string;
         };
+        StatementDetailDto: {
+            id: string;
+            fileName: string;
+            fromOn: string;
+            toOn: string;
+            openingMinor: number;
+            closingMinor: number;
+            lineCount: number;
+            matchedCount: number;
+            /** @description Sum of the lines that have no match yet. */
+            unmatchedMinor: number;
+            /** @description Lines of the file that an earlier statement had brought, and that were not counted again. */
+            knownLines: number;
+            importedAt: string;
+            currency: string;
+            lines: components["schemas"]["StatementLineDto"][];
+            books: components["schemas"]["BookItemDto"][];
+            /** @description Open items that the list has no room for. */
+            booksLeftOut: number;
+            totals: components["schemas"]["TotalsDto"];
+            /** @description Accounts a line may be settled against by hand. */
+            accounts: components["schemas"]["SettlingAccountDto"][];
+        };
+        StatementDto: {
+            id: string;
+            fileName: string;
+            fromOn: string;
+            toOn: string;
+            openingMinor: number;
+            closingMinor: number;
+            lineCount: number;
+            matchedCount: number;
+            /** @description Sum of the lines that have no match yet. */
+            unmatchedMinor: number;
+            /** @description Lines of the file that an earlier statement had brought, and that were not counted again. */
+            knownLines: number;
+            importedAt: string;
+        };
+        StatementLineDto: {
+            id: string;
+            day: string;
+            description: string;
+            /** @description Money in is positive. */
+            amountMinor: number;
+            /** @enum {string} */
+            state: "matched" | "no match";
+            /** @description Why it is matched, or why it did not match by itself. */
+            reasons: string[];
+            match: components["schemas"]["LineMatchDto"] | null;
+        };
+        StatementsPageDto: {
+            items: components["schemas"]["StatementDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
+        TakePaymentDto: {
+            /**
+             * Format: date
+             * @description Today or before.
+             */
+            receivedOn: string;
+            /** Format: uuid */
+            personId: string;
+            /** @enum {string} */
+            method: "cash" | "cheque" | "transfer";
+            amountMinor: number;
+            /** @description Paid in this order; what is left over is credit on account. */
+            invoiceIds: string[];
+            note?: string;
+            /**
+             * Format: uuid
+             * @description Chosen once by the form: the same key again answers with the payment already taken.
+             */
+            clientKey: string;
+        };
         TakenDto: {
             resourceId: string;
             resourceTag: string;
@@ -1289,6 +2234,54 @@ export interface components {
             startsAt: string;
             /** Format: date-time */
             endsAt: string;
+        };
+        TierDto: {
+            id: string;
+            name: string;
+            amountMinor: number;
+            months: number;
+        };
+        TotalsDto: {
+            openingMinor: number;
+            matchedMinor: number;
+            /** @description The current account by the ledger, after this statement's matches. */
+            booksMinor: number;
+            statementMinor: number;
+            /** @description What earlier statements have left unmatched; part of the difference. */
+            earlierMinor: number;
+            differenceMinor: number;
+        };
+        TreasurySummaryDto: {
+            /** @description The instant these figures are of. */
+            asOf: string;
+            today: string;
+            currency: string;
+            dues: components["schemas"]["QuarterDto"];
+            holdings: components["schemas"]["HoldingsDto"];
+            aged: components["schemas"]["AgeBandDto"][];
+            openCount: number;
+            openMinor: number;
+            lateMinor: number;
+            /** @description People with something late. */
+            latePeople: number;
+            /** @description Owed to members: what their payments left over. */
+            creditMinor: number;
+            cardNotes: components["schemas"]["CardNoteDto"][];
+        };
+        TrialBalanceDto: {
+            asOn: string;
+            accounts: components["schemas"]["TrialBalanceLineDto"][];
+            debitMinor: number;
+            creditMinor: number;
+        };
+        TrialBalanceLineDto: {
+            /** @example 1100 */
+            code: string;
+            name: string;
+            /** @enum {string} */
+            kind: "asset" | "liability" | "income" | "expense" | "equity";
+            debitMinor: number;
+            creditMinor: number;
         };
         UncertaintyComponentDto: {
             name: string;
@@ -1301,6 +2294,15 @@ export interface components {
             code: "in repair" | "out of use" | "calibration unknown" | "calibration past" | "not cleared" | "clearance past";
             reason: string;
             remedy: string;
+        };
+        WebhookDto: {
+            /** @description The event's id. */
+            received: string;
+            /**
+             * @description `known`: it had come before, and nothing was done.
+             * @enum {string}
+             */
+            outcome: "acted" | "noted" | "needs a look" | "known";
         };
     };
     responses: never;
@@ -1581,6 +2583,261 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "BuildNights.list": {
+        parameters: {
+            query: {
+                /** @description Nights that end after this. */
+                from: string;
+                /** @description Nights that begin before this. */
+                to: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightsDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "BuildNights.schedule": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PlanNightsDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ScheduledNightsDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "BuildNights.preview": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PreviewNightsDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["NightsPreviewDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "BuildNights.show": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "BuildNights.change": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangeNightDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "BuildNights.cancel": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CancelNightDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "BuildNights.come": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "BuildNights.stayAway": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildNightDetailDto"];
+                };
             };
             /** @description A problem document */
             default: {
@@ -2221,6 +3478,34 @@ export interface operations {
             };
         };
     };
+    "Dues.mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MyDuesDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
     "Groups.list": {
         parameters: {
             query: {
@@ -2472,6 +3757,286 @@ export interface operations {
             };
         };
     };
+    "Invoices.list": {
+        parameters: {
+            query: {
+                /** @description `open`: anything left to pay, late or not. */
+                state?: "open" | "late" | "paid";
+                personId?: string;
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InvoicesPageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Invoices.raise": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["RaiseInvoiceDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OpenInvoiceDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Invoices.mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InvoiceDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Invoices.cardPayment": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                invoiceId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CardPaymentDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Invoices.open": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                invoiceId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CheckoutDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Ledger.trialBalance": {
+        parameters: {
+            query?: {
+                /** @description The last day that counts; today unless named. */
+                on?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TrialBalanceDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Payments.list": {
+        parameters: {
+            query: {
+                personId?: string;
+                method?: "card" | "cash" | "cheque" | "transfer";
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PaymentsPageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Payments.take": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["TakePaymentDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PaymentDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Payments.takeBack": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                paymentId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PaymentDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
     "People.list": {
         parameters: {
             query: {
@@ -2599,6 +4164,161 @@ export interface operations {
             };
         };
     };
+    "Payments.receipt": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                paymentId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ReceiptDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Reconciliation.match": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                lineId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["MatchLineDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StatementLineDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Reconciliation.takeBack": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                lineId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StatementLineDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Reconciliation.list": {
+        parameters: {
+            query: {
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StatementsPageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Reconciliation.show": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                statementId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StatementDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
     "Reviews.list": {
         parameters: {
             query: {
@@ -2617,6 +4337,189 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["ReviewsPageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Reconciliation.import": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "multipart/form-data": {
+                    /** Format: binary */
+                    file: string;
+                };
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StatementDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Dues.list": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TierDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Dues.create": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateTierDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TierDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Dues.assign": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AssignTierDto"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Dues.summary": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TreasurySummaryDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Webhooks.receive": {
+        parameters: {
+            query?: never;
+            header: {
+                "stripe-signature": string;
+            };
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["WebhookDto"];
                 };
             };
             /** @description A problem document */
