@@ -1413,7 +1413,6 @@ export interface components {
             instance: string;
             errors?: components["schemas"]["FieldProblemDto"][];
         };
-        Object: Record<string, never>;
         OpenInvoiceDto: {
             id: string;
             /** @example D-0412 */
@@ -1967,9 +1966,9 @@ export interface operations {
     };
     "Benches.list": {
         parameters: {
-            query: {
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
+            query?: {
+                page?: number;
+                perPage?: number;
             };
             header?: never;
             path?: never;
@@ -2392,9 +2391,9 @@ export interface operations {
     };
     "Clearances.list": {
         parameters: {
-            query: {
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
+            query?: {
+                page?: number;
+                perPage?: number;
                 personId?: string;
                 kindId?: string;
             };
@@ -2569,9 +2568,9 @@ export interface operations {
     };
     "Groups.list": {
         parameters: {
-            query: {
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
+            query?: {
+                page?: number;
+                perPage?: number;
             };
             header?: never;
             path?: never;
@@ -2656,13 +2655,13 @@ export interface operations {
     };
     "Instruments.list": {
         parameters: {
-            query: {
+            query?: {
+                page?: number;
+                perPage?: number;
                 /** @description For which day the instrument would be used; today unless told. */
                 on?: string;
                 /** @description Only instruments of this kind. */
                 kindId?: string;
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
             };
             header?: never;
             path?: never;
@@ -2787,9 +2786,9 @@ export interface operations {
     };
     "Instruments.history": {
         parameters: {
-            query: {
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
+            query?: {
+                page?: number;
+                perPage?: number;
             };
             header?: never;
             path: {
@@ -2820,12 +2819,12 @@ export interface operations {
     };
     "Invoices.list": {
         parameters: {
-            query: {
+            query?: {
+                page?: number;
+                perPage?: number;
                 /** @description `open`: anything left to pay, late or not. */
                 state?: "open" | "late" | "paid";
                 personId?: string;
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
             };
             header?: never;
             path?: never;
@@ -3005,11 +3004,11 @@ export interface operations {
     };
     "Payments.list": {
         parameters: {
-            query: {
+            query?: {
+                page?: number;
+                perPage?: number;
                 personId?: string;
                 method?: "card" | "cash" | "cheque" | "transfer";
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
             };
             header?: never;
             path?: never;
@@ -3100,9 +3099,9 @@ export interface operations {
     };
     "People.list": {
         parameters: {
-            query: {
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
+            query?: {
+                page?: number;
+                perPage?: number;
                 /** @description Only holders of this role. */
                 role?: "member" | "mentor" | "steward" | "treasurer" | "organiser";
                 /** @description Only names that have these letters in them. */
@@ -3165,9 +3164,9 @@ export interface operations {
     };
     "Plans.list": {
         parameters: {
-            query: {
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
+            query?: {
+                page?: number;
+                perPage?: number;
             };
             header?: never;
             path?: never;
@@ -3321,9 +3320,9 @@ export interface operations {
     };
     "Reconciliation.list": {
         parameters: {
-            query: {
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
+            query?: {
+                page?: number;
+                perPage?: number;
             };
             header?: never;
             path?: never;
