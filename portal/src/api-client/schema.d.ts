@@ -233,6 +233,227 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/builds": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Begins a build to the newest edition of a plan. */
+        post: operations["Builds.start"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One's own builds with everything in them, the newest first. */
+        get: operations["Builds.mine"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** A build, for its builder and for mentors. */
+        get: operations["Builds.show"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/checks/{checkId}/instruments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Instruments of the kind the check asks for, with the reason against those that cannot be chosen. */
+        get: operations["Checks.listInstruments"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/checks/{checkId}/marks": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Ticks the check, acknowledges it by name, or says that a mentor has seen it. */
+        post: operations["Checks.mark"];
+        delete: operations["Checks.takeBackMark"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/checks/{checkId}/photos": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Adds a picture of at most 6 MB to a check that asks for one. */
+        post: operations["Photos.add"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/checks/{checkId}/readings": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Keeps a reading as typed; the answer says what it comes to and how it is judged. */
+        post: operations["Checks.keepReading"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/licence": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Says that the builder's licence was seen, which opens the last stage. */
+        post: operations["Builds.seeLicence"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/photos/{photoId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The picture itself. */
+        get: operations["Photos.show"];
+        put?: never;
+        post?: never;
+        /** Takes a picture back while the stage is still in its builder's hands. */
+        delete: operations["Photos.takeBack"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/stages/{stageId}/send-back": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Sends the stage back to its builder with a word. */
+        post: operations["Stages.sendBack"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/stages/{stageId}/sign-off": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Stages.signOff"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/stages/{stageId}/submit": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Sends the stage to a mentor, with a note. */
+        post: operations["Stages.submit"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/stages/{stageId}/withdraw": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Takes the stage back from the mentor. */
+        post: operations["Stages.withdraw"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/clearances": {
         parameters: {
             query?: never;
@@ -720,6 +941,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/reviews": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What waits for a mentor, the longest waiting first. */
+        get: operations["Reviews.list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/statements": {
         parameters: {
             query?: never;
@@ -911,6 +1149,56 @@ export interface components {
             instance: string;
             errors?: components["schemas"]["FieldProblemDto"][];
         };
+        BuildCheckDto: {
+            /** @enum {string} */
+            kind: "tick" | "measure" | "photo" | "safety" | "mentor's eyes";
+            /** @description What the form starts with, in the fields' own units. */
+            defaults: {
+                [key: string]: number;
+            };
+            /** @description There is what the check asks for. */
+            isSettled: boolean;
+            /** @description The newest last; that one is in force, the others stay in the record. */
+            readings: components["schemas"]["ReadingDto"][];
+            mark: components["schemas"]["MarkDto"] | null;
+            photos: components["schemas"]["PhotoDto"][];
+            id: string;
+            /** @description Order on the checklist, from 1. */
+            position: number;
+            title: string;
+            instruction: string;
+            isRequired: boolean;
+            /** @description For a measure: how it is taken; `gain` and `carried` work themselves out. */
+            method: string | null;
+            /** @description Unit of the value and of the window. */
+            unit: string | null;
+            windowLow: number | null;
+            windowHigh: number | null;
+            target: number | null;
+            /** @description For a value that works itself out: the checks it is made of. */
+            fromCheckIds: string[];
+            levelPointId: string | null;
+            instrumentKindId: string | null;
+        };
+        BuildDto: {
+            id: string;
+            builder: components["schemas"]["PersonRefDto"];
+            planId: string;
+            planName: string;
+            editionNumber: number;
+            /** @example 7 */
+            serial: number;
+            /** @example 2026-01-15T19:00:00Z */
+            startedAt: string;
+            endedAt: string | null;
+            /** @description When an organiser saw the licence. */
+            licenceSeenAt: string | null;
+            /** @description The stage its builder is on. */
+            currentStageId: string | null;
+            stages: components["schemas"]["BuildStageDto"][];
+            /** @description In signal order. */
+            levelPoints: components["schemas"]["LevelPointDto"][];
+        };
         BuildNightDetailDto: {
             id: string;
             title: string;
@@ -963,6 +1251,26 @@ export interface components {
         };
         BuildNightsDto: {
             items: components["schemas"]["BuildNightDto"][];
+        };
+        BuildStageDto: {
+            cautions: ("load before power" | "hot parts" | "rf power" | "mains" | "rf exposure" | "licence needed")[];
+            /** @enum {string} */
+            state: "not started" | "on the bench" | "with mentor" | "sent back" | "signed off" | "locked";
+            id: string;
+            position: number;
+            /** @example Pre-driver */
+            name: string;
+            summary: string;
+            /** @description What opens a locked stage. */
+            lockedBecause: string | null;
+            /** @description Checks still to settle before it can be sent to a mentor. */
+            missingToSend: number;
+            /** @description Checks still to settle before it can be signed off. */
+            missingToSignOff: number;
+            settled: number;
+            checks: components["schemas"]["BuildCheckDto"][];
+            /** @description Oldest first. */
+            events: components["schemas"]["StageEventDto"][];
         };
         CancelNightDto: {
             reason: string;
@@ -1177,6 +1485,20 @@ export interface components {
             changedBy: string;
             note: string;
         };
+        InstrumentChoiceDto: {
+            /** @description Why it cannot be chosen; null when it can. */
+            reason: string | null;
+            id: string;
+            /** @example FR-021 */
+            tag: string;
+            name: string;
+            /** @example Oscilloscope */
+            kind: string;
+            /** @description Last day of its calibration. */
+            calibrationDueOn: string | null;
+            /** @description ± limit of its level readings, dB. */
+            amplitudeAccuracyDb: number | null;
+        };
         InstrumentDetailDto: {
             /** @enum {string} */
             condition: "ready" | "in repair" | "out of use";
@@ -1284,6 +1606,32 @@ export interface components {
             page: number;
             perPage: number;
         };
+        KeepReadingDto: {
+            /**
+             * @description Word for word as typed, by field.
+             * @example {
+             *       "voltsPerDivision": "20m",
+             *       "divisionsPeakToPeak": "3.3"
+             *     }
+             */
+            entry: {
+                [key: string]: string;
+            };
+            /**
+             * Format: date-time
+             * @description When it was taken, for one that waited on a device; now where left out.
+             */
+            takenAt?: string;
+            /**
+             * @description How it was taken; the check's own method.
+             * @example oscilloscope
+             */
+            method: string;
+            /** Format: uuid */
+            instrumentId?: string;
+            /** @description The tick beside a grave caution; asked for with every reading of such a stage. */
+            cautionAcknowledged?: boolean;
+        };
         LevelPointDto: {
             id: string;
             stageId: string;
@@ -1300,6 +1648,12 @@ export interface components {
             how: "by itself" | "by hand";
             matchedAt: string;
             paymentId: string | null;
+        };
+        MarkDto: {
+            id: string;
+            by: components["schemas"]["PersonRefDto"];
+            /** @example 2026-01-15T19:46:00Z */
+            at: string;
         };
         MatchLineDto: {
             /** @description Of one person; paid in this order, and what is left over is credit on account. */
@@ -1482,6 +1836,23 @@ export interface components {
             name: string;
             roles: ("member" | "mentor" | "steward" | "treasurer" | "organiser")[];
         };
+        PersonRefDto: {
+            id: string;
+            name: string;
+        };
+        PhotoDto: {
+            id: string;
+            caption: string;
+            /** @example image/jpeg */
+            contentType: string;
+            /** @example 2026-01-15T19:46:00Z */
+            at: string;
+            /**
+             * @description Where its bytes are.
+             * @example /api/builds/…/photos/…
+             */
+            url: string;
+        };
         PlanCheckDto: {
             /** @enum {string} */
             kind: "tick" | "measure" | "photo" | "safety" | "mentor's eyes";
@@ -1633,6 +2004,43 @@ export interface components {
             description: string;
             amountMinor: number;
         };
+        ReadingDto: {
+            entry: {
+                [key: string]: string;
+            };
+            /** @enum {string} */
+            verdict: "pass" | "too close to call" | "not yet";
+            id: string;
+            checkId: string;
+            /** @example oscilloscope */
+            method: string;
+            /** @description In `unit`, unrounded. */
+            value: number;
+            /** @example dBm */
+            unit: string;
+            /** @description Unit of the uncertainties: dB for dBm and dBc. */
+            uncertaintyUnit: string;
+            /** @description k = 2, about 95 %. */
+            expandedUncertainty: number;
+            components: components["schemas"]["UncertaintyComponentDto"][];
+            voltsPeakToPeak: number | null;
+            watts: number | null;
+            /**
+             * @description Name and version of the calculation.
+             * @example oscilloscope/1
+             */
+            calculation: string;
+            instrumentId: string | null;
+            /** @example FR-021 */
+            instrumentTag: string | null;
+            /** @description Last day of the instrument's calibration, as it was then. */
+            calibrationDueOn: string | null;
+            cautionAcknowledged: boolean;
+            /** @example 2026-01-15T19:46:00Z */
+            takenAt: string;
+            /** @description A later one is in force; this one stays in the record. */
+            isSuperseded: boolean;
+        };
         ReceiptDto: {
             id: string;
             /** @example R-0298 */
@@ -1668,10 +2076,40 @@ export interface components {
              */
             rule: string;
         };
+        ReviewDto: {
+            cautions: ("load before power" | "hot parts" | "rf power" | "mains" | "rf exposure" | "licence needed")[];
+            buildId: string;
+            stageId: string;
+            stagePosition: number;
+            stageName: string;
+            builder: components["schemas"]["PersonRefDto"];
+            planName: string;
+            serial: number;
+            /** @example 2026-01-13T21:48:00Z */
+            sentAt: string;
+            /** @description The builder's word. */
+            note: string;
+            /** @description How often it was sent back before. */
+            timesSentBack: number;
+            /** @description The reader's own stage: another mentor decides on it. */
+            isOwn: boolean;
+        };
+        ReviewsPageDto: {
+            /** @description The longest waiting first. */
+            items: components["schemas"]["ReviewDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+            /** @description When any stage was signed off last. */
+            lastSignOffAt: string | null;
+        };
         ScheduledNightsDto: {
             nights: components["schemas"]["BuildNightDto"][];
             /** @description How many people are told by mail. */
             told: number;
+        };
+        SendBackDto: {
+            note: string;
         };
         SettlingAccountDto: {
             code: string;
@@ -1693,6 +2131,22 @@ export interface components {
             startsAt: string;
             /** Format: date-time */
             endsAt: string;
+        };
+        StageEventDto: {
+            /** @enum {string} */
+            kind: "sent" | "withdrawn" | "sent back" | "signed off";
+            by: components["schemas"]["PersonRefDto"];
+            /** @example 2026-01-15T21:48:00Z */
+            at: string;
+            note: string;
+        };
+        StageNoteDto: {
+            /** @example Two turns off the output winding brought the gain down. */
+            note?: string;
+        };
+        StartBuildDto: {
+            /** Format: uuid */
+            planId: string;
         };
         StatementDetailDto: {
             id: string;
@@ -1827,6 +2281,12 @@ export interface components {
             kind: "asset" | "liability" | "income" | "expense" | "equity";
             debitMinor: number;
             creditMinor: number;
+        };
+        UncertaintyComponentDto: {
+            name: string;
+            limit: number;
+            distribution: string;
+            standardUncertainty: number;
         };
         UseReasonDto: {
             /** @enum {string} */
@@ -2376,6 +2836,485 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["BuildNightDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Builds.start": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["StartBuildDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Builds.mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Builds.show": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Checks.listInstruments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                checkId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InstrumentChoiceDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Checks.mark": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                checkId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MarkDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Checks.takeBackMark": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                checkId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Photos.add": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                checkId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "multipart/form-data": {
+                    /** Format: binary */
+                    photo: string;
+                    caption?: string;
+                };
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PhotoDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Checks.keepReading": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                checkId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["KeepReadingDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ReadingDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Builds.seeLicence": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Photos.show": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                photoId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "image/*": string;
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Photos.takeBack": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                photoId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Stages.sendBack": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                stageId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SendBackDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildStageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Stages.signOff": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                stageId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["StageNoteDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildStageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Stages.submit": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                stageId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["StageNoteDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildStageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Stages.withdraw": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                stageId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildStageDto"];
                 };
             };
             /** @description A problem document */
@@ -3366,6 +4305,37 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["StatementDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Reviews.list": {
+        parameters: {
+            query?: {
+                page?: number;
+                perPage?: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ReviewsPageDto"];
                 };
             };
             /** @description A problem document */
