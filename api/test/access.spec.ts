@@ -50,6 +50,7 @@ describe('access', () => {
       'HealthController.check',
       'ProblemsController.list',
       'ProblemsController.show',
+      'WebhooksController.receive',
     ]);
   });
 });

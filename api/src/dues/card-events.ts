@@ -1,0 +1,126 @@
+import { Injectable } from '@nestjs/common';
+import type Stripe from 'stripe';
+import type { EntityManager } from 'typeorm';
+import { Clock } from '../common/clock';
+import { clubDay } from '../common/club-day';
+import { writeMinor } from '../common/minor-units';
+import { ClubService } from '../club/club.service';
+import { Checkout, type CheckoutState } from './checkout.entity';
+import { Invoice } from './invoice.entity';
+import type { EventOutcome } from './payment-event.entity';
+import { Payment } from './payment.entity';
+import { PaymentsRepository } from './payments.repository';
+import { ReceiptMail } from './receipt-mail';
+import { TillService } from './till.service';
+
+interface Outcome {
+  outcome: EventOutcome;
+  note: string;
+}
+
+const noted = (note: string): Outcome => ({ outcome: 'noted', note });
+const needsALook = (note: string): Outcome => ({ outcome: 'needs a look', note });
+
+/** What an event of the card service does to our books. Events come late, twice and in any order. */
+@Injectable()
+export class CardEvents {
+  constructor(
+    private readonly till: TillService,
+    private readonly payments: PaymentsRepository,
+    private readonly receipts: ReceiptMail,
+    private readonly club: ClubService,
+    private readonly clock: Clock,
+  ) {}
+
+  async act(manager: EntityManager, event: Stripe.Event): Promise<Outcome> {
+    switch (event.type) {
+      case 'checkout.session.completed':
+        return event.data.object.payment_status === 'paid'
+          ? this.settle(manager, event.data.object)
+          : this.move(manager, event.data.object, 'confirming');
+      case 'checkout.session.async_payment_succeeded':
+        return this.settle(manager, event.data.object);
+      case 'checkout.session.async_payment_failed':
+        return this.move(manager, event.data.object, 'failed');
+      case 'checkout.session.expired':
+        return this.move(manager, event.data.object, 'expired');
+      default:
+        return noted('Nothing here acts on this kind of event.');
+    }
+  }
+
+  private async settle(manager: EntityManager, session: Stripe.Checkout.Session): Promise<Outcome> {
+    const checkout = await this.hold(manager, session);
+    if (!checkout) return needsALook(`Paid on a card page that is not one of ours: ${session.id}.`);
+    if (await manager.getRepository(Payment).existsBy({ cardSessionId: session.id }))
+      return noted('Its payment was written down before.');
+    const wrong = mismatch(session, checkout);
+    if (wrong) return needsALook(wrong);
+    const invoice = await manager.getRepository(Invoice).findOneByOrFail({ id: checkout.invoiceId });
+    await this.write(manager, checkout, invoice, session.id);
+    return { outcome: 'acted', note: `${invoice.number} paid by card.` };
+  }
+
+  private async write(
+    manager: EntityManager,
+    checkout: Checkout,
+    invoice: Invoice,
+    cardSessionId: string,
+  ): Promise<void> {
+    const { timeZone } = await this.club.settings(manager);
+    const id = await this.till.record(manager, {
+      personId: invoice.personId,
+      method: 'card',
+      amountMinor: checkout.amountMinor,
+      receivedOn: clubDay(this.clock.now(), timeZone),
+      invoiceIds: [invoice.id],
+      note: '',
+      takenById: null,
+      clientKey: null,
+      cardSessionId,
+    });
+    await this.set(manager, checkout, 'paid');
+    const payment = await this.payments.one({ id }, manager);
+    if (payment) await this.receipts.queue(manager, payment);
+  }
+
+  /** Only a live visit moves: an event that comes after the money changes nothing. */
+  private async move(
+    manager: EntityManager,
+    session: Stripe.Checkout.Session,
+    state: CheckoutState,
+  ): Promise<Outcome> {
+    const checkout = await this.hold(manager, session);
+    if (!checkout) return noted(`No card page of ours: ${session.id}.`);
+    const isLive = checkout.state === 'open' || checkout.state === 'confirming';
+    if (!isLive) return noted(`It came after the end: the visit is ${checkout.state}.`);
+    await this.set(manager, checkout, state);
+    return { outcome: 'acted', note: `The visit is ${state}.` };
+  }
+
+  /** By the id we gave the service: its own session id may not be written down yet when the event is quick. */
+  private async hold(manager: EntityManager, session: Stripe.Checkout.Session): Promise<Checkout | null> {
+    const id = session.metadata?.checkout ?? '';
+    if (!/^[0-9a-f-]{36}$/.test(id)) return null;
+    const checkout = await manager
+      .getRepository(Checkout)
+      .findOne({ where: { id }, lock: { mode: 'for_no_key_update' } });
+    if (!checkout || (checkout.sessionId !== null && checkout.sessionId !== session.id)) return null;
+    if (checkout.sessionId === null)
+      await manager.getRepository(Checkout).update({ id }, { sessionId: session.id });
+    return checkout;
+  }
+
+  private async set(manager: EntityManager, { id }: Checkout, state: CheckoutState): Promise<void> {
+    await manager.getRepository(Checkout).update({ id }, { state, changedAt: this.clock.now() });
+  }
+}
+
+function mismatch(session: Stripe.Checkout.Session, { amountMinor, currency }: Checkout): string | undefined {
+  const paid = session.amount_total ?? 0;
+  const paidIn = (session.currency ?? '').toUpperCase();
+  if (paid === amountMinor && paidIn === currency) return undefined;
+  const asked = `${writeMinor(amountMinor, currency)} ${currency}`;
+  const came = /^[A-Z]{3}$/.test(paidIn) ? `${writeMinor(paid, paidIn)} ${paidIn}` : String(paid);
+  return `${session.id} was opened for ${asked} and paid with ${came}. Nothing was written down as paid.`;
+}

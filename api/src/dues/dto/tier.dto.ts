@@ -1,0 +1,46 @@
+import { ApiProperty } from '@nestjs/swagger';
+import { IsInt, IsUUID, Max, Min } from 'class-validator';
+import { IsDay, IsWords } from '../../common/validators';
+import type { Tier } from '../tier.entity';
+
+export class CreateTierDto {
+  /** @example full */
+  @IsWords(40)
+  name: string;
+
+  /** For the whole period. @example 2400 */
+  @IsInt()
+  @Min(1)
+  @Max(10_000_000)
+  amountMinor: number;
+
+  /** The months one invoice covers. @example 3 */
+  @IsInt()
+  @Min(1)
+  @Max(12)
+  months: number;
+}
+
+export class AssignTierDto {
+  @IsUUID()
+  personId: string;
+
+  @ApiProperty({ format: 'uuid' })
+  @IsUUID()
+  tierId: string;
+
+  /** The first day it holds. */
+  @IsDay()
+  fromOn: string;
+}
+
+export class TierDto {
+  id: string;
+  name: string;
+  amountMinor: number;
+  months: number;
+}
+
+export function tierDto({ id, name, amountMinor, months }: Tier): TierDto {
+  return { id, name, amountMinor, months };
+}
