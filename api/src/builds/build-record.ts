@@ -6,7 +6,7 @@ import type { Build } from './build.entity';
 import type { BuildStageEvent } from './build-stage-event.entity';
 import type { KeptStageState } from './build-stage.entity';
 import type { CheckMark } from './check-mark.entity';
-import { isSettled, type CheckStanding } from './checks.rules';
+import { type CheckStanding } from './checks.rules';
 import type { Photo } from './photo.entity';
 import type { Reading } from './reading.entity';
 import type { Standing } from './stage-states.rules';
@@ -32,7 +32,9 @@ export function stateOf({ states }: Pick<BuildRecord, 'states'>, stageId: string
 }
 
 /** The stages of a build as they stand to each other, in order. */
-export function standingsOf(record: Pick<BuildRecord, 'edition' | 'states'>): (Standing & { stageId: string })[] {
+export function standingsOf(
+  record: Pick<BuildRecord, 'edition' | 'states'>,
+): (Standing & { stageId: string })[] {
   return record.edition.stages.map((stage) => ({
     ...{ stageId: stage.id, position: stage.position, name: stage.name },
     state: stateOf(record, stage.id),
@@ -77,8 +79,4 @@ export function derivedChecks(edition: EditionContent): { stage: Stage; check: P
       .filter(({ method }) => isDerived(method))
       .map((check) => ({ stage, check })),
   );
-}
-
-export function settledCount(record: BuildRecord, stageId: string): number {
-  return standingsOfChecks(record, stageId).filter(isSettled).length;
 }

@@ -1,3 +1,4 @@
+import type { UncertaintyComponent } from '@ferrite-row/levels';
 import {
   Check,
   Column,
@@ -16,14 +17,6 @@ import { BuildStage } from './build-stage.entity';
 
 export const VERDICTS = ['pass', 'too close to call', 'not yet'] as const;
 export type KeptVerdict = (typeof VERDICTS)[number];
-
-/** One part of an uncertainty budget, as it is kept. */
-export interface KeptComponent {
-  name: string;
-  limit: number;
-  distribution: string;
-  standardUncertainty: number;
-}
 
 /**
  * One measured value on a check: what was typed, and what it came to. Never changed and never deleted; a retake adds one.
@@ -109,7 +102,7 @@ export class Reading {
   expandedUncertainty: number;
 
   @Column('jsonb')
-  components: KeptComponent[];
+  components: UncertaintyComponent[];
 
   @Column('double precision', { nullable: true })
   voltsPeakToPeak: number | null;

@@ -13,7 +13,6 @@ import {
   type VerdictWindow,
 } from '@ferrite-row/levels';
 import type { FieldProblem } from '../common/domain-error';
-import type { Condition } from '../instruments/instrument.entity';
 import type { PlanCheck } from '../plans/plan-check.entity';
 import type { Caution } from '../plans/stage.entity';
 
@@ -48,8 +47,8 @@ export function judgeEntry(
   if (strange.length > 0) return { problems: strange.map((name) => strangeField(name, known)) };
   const { inputs, problems } = readEntry(asked.method, entry as Record<string, string>, unit);
   if (problems.length > 0) return { problems: problems.map(entryProblem) };
-  const stated = amplitudeAccuracyDb === undefined ? {} : { amplitudeAccuracyDb };
-  const assumptions = { ...asked.defaults, ...stated };
+  const assumptions: Record<string, number> = { ...asked.defaults };
+  if (amplitudeAccuracyDb !== undefined) assumptions.amplitudeAccuracyDb = amplitudeAccuracyDb;
   try {
     const reading = readingFromInputs(asked.method, inputs, assumptions, unit);
     return { reading, inputs: { ...assumptions, ...inputs }, verdict: judge(reading, asked) };
@@ -64,7 +63,9 @@ function isEntryMethod(method: string | null): method is EntryMethod {
 }
 
 function strangeField(name: string, known: ReadonlySet<string>): FieldProblem {
-  const detail = known.has(name) ? 'Send what was typed, as text.' : `There is no field named ${name.slice(0, 40)}.`;
+  const detail = known.has(name)
+    ? 'Send what was typed, as text.'
+    : `There is no field named ${name.slice(0, 40)}.`;
   return { pointer: `#/entry/${name.slice(0, 40).replaceAll('~', '~0').replaceAll('/', '~1')}`, detail };
 }
 
@@ -76,7 +77,10 @@ function problem(field: string, detail: string): Judgement {
   return { problems: [{ pointer: `#/${field}`, detail }] };
 }
 
-export function windowOf({ windowLow, windowHigh }: Pick<AskedMeasure, 'windowLow' | 'windowHigh'>): VerdictWindow {
+export function windowOf({
+  windowLow,
+  windowHigh,
+}: Pick<AskedMeasure, 'windowLow' | 'windowHigh'>): VerdictWindow {
   return { low: windowLow ?? undefined, high: windowHigh ?? undefined };
 }
 
@@ -102,10 +106,14 @@ export interface SourceReading {
  *
  * @param sources - the readings in force of the checks it is made of, in that order.
  */
-export function judgeDerived(asked: AskedMeasure, sources: readonly SourceReading[]): JudgedReading | undefined {
+export function judgeDerived(
+  asked: AskedMeasure,
+  sources: readonly SourceReading[],
+): JudgedReading | undefined {
   const [first, second] = sources;
   if (!first) return undefined;
-  if (asked.method === 'carried') return { reading: carried(first), inputs: {}, verdict: judge(first, asked) };
+  if (asked.method === 'carried')
+    return { reading: carried(first), inputs: {}, verdict: judge(first, asked) };
   if (asked.method !== 'gain' || !second) return undefined;
   const reading = gainReading({ output: measuredLevel(first), input: measuredLevel(second) });
   return { reading, inputs: {}, verdict: judge(reading, asked) };
@@ -132,35 +140,4 @@ const GRAVE: readonly Caution[] = ['rf power', 'mains', 'rf exposure', 'licence 
 /** Stages that can burn or be heard ask for a tick with every single reading. */
 export function asksForTick(cautions: readonly Caution[]): boolean {
   return cautions.some((caution) => GRAVE.includes(caution));
-}
-
-/** An instrument as the choice of it sees it. */
-export interface InstrumentStanding {
-  tag: string;
-  kindId: string;
-  kindName: string;
-  condition: Condition;
-  conditionNote: string;
-  calibrationDueOn: string | null;
-  isRetired: boolean;
-}
-
-/**
- * Why an instrument cannot be used for a check on a day, in words; null when it can.
- *
- * @param day - the club's day, `2026-10-15`; calibration holds on its last day.
- */
-export function unfitness(
-  instrument: InstrumentStanding,
-  wantedKindId: string | null,
-  day: string,
-): string | null {
-  const { tag, kindId, kindName, condition, conditionNote, calibrationDueOn, isRetired } = instrument;
-  if (isRetired) return `${tag} is no longer in the club.`;
-  if (wantedKindId !== null && kindId !== wantedKindId) return `${tag} is of another kind: ${kindName}.`;
-  const note = conditionNote ? `: ${conditionNote}` : '.';
-  if (condition !== 'ready') return `${tag} is ${condition}${note}`;
-  if (calibrationDueOn !== null && calibrationDueOn < day)
-    return `The calibration of ${tag} ended on ${calibrationDueOn}.`;
-  return null;
 }

@@ -20,6 +20,9 @@ import { planProblems } from './plans.errors';
 import { disagreementsOf, type Disagreement } from './plans.rules';
 import { Stage } from './stage.entity';
 
+/** A number past PostgreSQL's integers is no edition, and must not reach it. */
+const MOST_EDITIONS = 100_000;
+
 @Injectable()
 export class PlansService {
   /** Published editions never change, so each is read once by each server. */
@@ -49,6 +52,7 @@ export class PlansService {
 
   async show(actor: Actor, planId: string, number: number): Promise<PlanEditionDto> {
     requireMember(actor);
+    if (!(number >= 1 && number <= MOST_EDITIONS)) throw notFound('edition of a plan');
     const edition = await this.dataSource
       .getRepository(PlanEdition)
       .findOneBy({ planId, number, publishedAt: Not(IsNull()) });
