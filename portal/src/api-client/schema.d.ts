@@ -233,6 +233,227 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/builds": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Begins a build to the newest edition of a plan. */
+        post: operations["Builds.start"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One's own builds with everything in them, the newest first. */
+        get: operations["Builds.mine"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** A build, for its builder and for mentors. */
+        get: operations["Builds.show"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/checks/{checkId}/instruments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Instruments of the kind the check asks for, with the reason against those that cannot be chosen. */
+        get: operations["Checks.listInstruments"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/checks/{checkId}/marks": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Ticks the check, acknowledges it by name, or says that a mentor has seen it. */
+        post: operations["Checks.mark"];
+        delete: operations["Checks.takeBackMark"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/checks/{checkId}/photos": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Adds a picture of at most 6 MB to a check that asks for one. */
+        post: operations["Photos.add"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/checks/{checkId}/readings": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Keeps a reading as typed; the answer says what it comes to and how it is judged. */
+        post: operations["Checks.keepReading"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/licence": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Says that the builder's licence was seen, which opens the last stage. */
+        post: operations["Builds.seeLicence"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/photos/{photoId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The picture itself. */
+        get: operations["Photos.show"];
+        put?: never;
+        post?: never;
+        /** Takes a picture back while the stage is still in its builder's hands. */
+        delete: operations["Photos.takeBack"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/stages/{stageId}/send-back": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Sends the stage back to its builder with a word. */
+        post: operations["Stages.sendBack"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/stages/{stageId}/sign-off": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Stages.signOff"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/stages/{stageId}/submit": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Sends the stage to a mentor, with a note. */
+        post: operations["Stages.submit"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/stages/{stageId}/withdraw": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Takes the stage back from the mentor. */
+        post: operations["Stages.withdraw"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/clearances": {
         parameters: {
             query?: never;
@@ -292,6 +513,23 @@ export interface paths {
         };
         /** The club's name, zone and currency. */
         get: operations["Club.front"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/dues/mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The signed-in person's tier, payments and credit, and where to send a transfer. */
+        get: operations["Dues.mine"];
         put?: never;
         post?: never;
         delete?: never;
@@ -434,6 +672,125 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/invoices": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Everybody's, those due first first. */
+        get: operations["Invoices.list"];
+        put?: never;
+        post: operations["Invoices.raise"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/invoices/mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What the signed-in person owes and has paid. */
+        get: operations["Invoices.mine"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/invoices/{invoiceId}/card-payment": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What became of the last visit to the card page. Asked again and again by the page a person comes back to. */
+        get: operations["Invoices.cardPayment"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/invoices/{invoiceId}/checkout": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Opens the card service's page for what is left to pay. */
+        post: operations["Invoices.open"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/ledger/trial-balance": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Every account with its balance on its side. */
+        get: operations["Ledger.trialBalance"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/payments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Latest first. */
+        get: operations["Payments.list"];
+        put?: never;
+        /** Writes down cash, a cheque or a transfer. */
+        post: operations["Payments.take"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/payments/{paymentId}/take-back": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Payments.takeBack"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/people": {
         parameters: {
             query?: never;
@@ -467,10 +824,252 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/plans": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The club's plans, by name. */
+        get: operations["Plans.list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/plans/{planId}/editions/{number}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One published edition, whole; it never changes. */
+        get: operations["Plans.show"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/receipts/{paymentId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** A receipt: the payer's own, and the treasurer's. Its id is the payment's. */
+        get: operations["Payments.receipt"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/reconciliation/lines/{lineId}/match": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Settles a line by hand: by invoices, by a payment written down before, or against an account. */
+        post: operations["Reconciliation.match"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/reconciliation/lines/{lineId}/take-back": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["Reconciliation.takeBack"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/reconciliation/statements": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Latest first. */
+        get: operations["Reconciliation.list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/reconciliation/statements/{statementId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Reconciliation.show"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/reviews": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What waits for a mentor, the longest waiting first. */
+        get: operations["Reviews.list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/statements": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * Imports a statement of the current account: CSV in UTF-8, a heading with date, description, amount and balance,
+         *     at most 1 MB. Taken whole or not at all; a line imported before is not counted again.
+         */
+        post: operations["Reconciliation.import"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/tiers": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["Dues.list"];
+        put?: never;
+        post: operations["Dues.create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/tiers/assignments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Sets a person's tier from a day on. */
+        post: operations["Dues.assign"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/treasury/summary": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The four figures, the aged dues, and what the card service said that nobody acted on. */
+        get: operations["Dues.summary"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/webhooks/stripe": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Events of the card service. The signature over the raw body is the proof of who calls. */
+        post: operations["Webhooks.receive"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
 }
 export type webhooks = Record<string, never>;
 export interface components {
     schemas: {
+        AgeBandDto: {
+            /** @enum {string} */
+            age: "not yet due" | "1 to 30 days late" | "31 to 60" | "61 to 90" | "over 90";
+            count: number;
+            openMinor: number;
+        };
+        AssignTierDto: {
+            /** Format: uuid */
+            tierId: string;
+            /**
+             * Format: date
+             * @description The first day it holds.
+             */
+            fromOn: string;
+            /** Format: uuid */
+            personId: string;
+        };
+        BankDetailsDto: {
+            accountName: string;
+            accountNumber: string;
+        };
         BenchDto: {
             id: string;
             tag: string;
@@ -483,6 +1082,19 @@ export interface components {
             total: number;
             page: number;
             perPage: number;
+        };
+        BookItemDto: {
+            /** @enum {string} */
+            kind: "invoice" | "payment" | "account";
+            /** @description Of the invoice or payment; the code of an account. */
+            id: string;
+            /** @example D-0412 */
+            tag: string;
+            name: string;
+            detail: string;
+            amountMinor: number;
+            /** @description The statement's line it belongs to; null while it is open. */
+            lineId: string | null;
         };
         BookedResourceDto: {
             /** @enum {string} */
@@ -537,6 +1149,56 @@ export interface components {
             instance: string;
             errors?: components["schemas"]["FieldProblemDto"][];
         };
+        BuildCheckDto: {
+            /** @enum {string} */
+            kind: "tick" | "measure" | "photo" | "safety" | "mentor's eyes";
+            /** @description What the form starts with, in the fields' own units. */
+            defaults: {
+                [key: string]: number;
+            };
+            /** @description There is what the check asks for. */
+            isSettled: boolean;
+            /** @description The newest last; that one is in force, the others stay in the record. */
+            readings: components["schemas"]["ReadingDto"][];
+            mark: components["schemas"]["MarkDto"] | null;
+            photos: components["schemas"]["PhotoDto"][];
+            id: string;
+            /** @description Order on the checklist, from 1. */
+            position: number;
+            title: string;
+            instruction: string;
+            isRequired: boolean;
+            /** @description For a measure: how it is taken; `gain` and `carried` work themselves out. */
+            method: string | null;
+            /** @description Unit of the value and of the window. */
+            unit: string | null;
+            windowLow: number | null;
+            windowHigh: number | null;
+            target: number | null;
+            /** @description For a value that works itself out: the checks it is made of. */
+            fromCheckIds: string[];
+            levelPointId: string | null;
+            instrumentKindId: string | null;
+        };
+        BuildDto: {
+            id: string;
+            builder: components["schemas"]["PersonRefDto"];
+            planId: string;
+            planName: string;
+            editionNumber: number;
+            /** @example 7 */
+            serial: number;
+            /** @example 2026-01-15T19:00:00Z */
+            startedAt: string;
+            endedAt: string | null;
+            /** @description When an organiser saw the licence. */
+            licenceSeenAt: string | null;
+            /** @description The stage its builder is on. */
+            currentStageId: string | null;
+            stages: components["schemas"]["BuildStageDto"][];
+            /** @description In signal order. */
+            levelPoints: components["schemas"]["LevelPointDto"][];
+        };
         BuildNightDetailDto: {
             id: string;
             title: string;
@@ -590,8 +1252,45 @@ export interface components {
         BuildNightsDto: {
             items: components["schemas"]["BuildNightDto"][];
         };
+        BuildStageDto: {
+            cautions: ("load before power" | "hot parts" | "rf power" | "mains" | "rf exposure" | "licence needed")[];
+            /** @enum {string} */
+            state: "not started" | "on the bench" | "with mentor" | "sent back" | "signed off" | "locked";
+            id: string;
+            position: number;
+            /** @example Pre-driver */
+            name: string;
+            summary: string;
+            /** @description What opens a locked stage. */
+            lockedBecause: string | null;
+            /** @description Checks still to settle before it can be sent to a mentor. */
+            missingToSend: number;
+            /** @description Checks still to settle before it can be signed off. */
+            missingToSignOff: number;
+            settled: number;
+            checks: components["schemas"]["BuildCheckDto"][];
+            /** @description Oldest first. */
+            events: components["schemas"]["StageEventDto"][];
+        };
         CancelNightDto: {
             reason: string;
+        };
+        CardNoteDto: {
+            id: string;
+            receivedAt: string;
+            note: string;
+        };
+        CardPaymentDto: {
+            /**
+             * @description `open`: the page was opened and nothing has come from it yet; `confirming`: the card was taken, the bank has yet
+             *     to confirm; `failed`: no money was taken.
+             * @enum {string}
+             */
+            state: "none" | "open" | "confirming" | "paid" | "failed" | "expired";
+            /** @description Left to pay on the invoice now. */
+            openMinor: number;
+            /** @description The receipt, once it is paid. */
+            receiptId: string | null;
         };
         ChangeCalibrationDto: {
             /**
@@ -635,6 +1334,10 @@ export interface components {
             verdict: "clash" | "clear" | "left out";
             clashes: components["schemas"]["NightClashDto"][];
             remedy: components["schemas"]["NightRemedyDto"];
+        };
+        CheckoutDto: {
+            /** @description The card service's page; the browser goes there. */
+            url: string;
         };
         ClearanceDto: {
             /** Format: date */
@@ -691,6 +1394,20 @@ export interface components {
              */
             checkId?: string;
         };
+        CreateTierDto: {
+            /** @example full */
+            name: string;
+            /**
+             * @description For the whole period.
+             * @example 2400
+             */
+            amountMinor: number;
+            /**
+             * @description The months one invoice covers.
+             * @example 3
+             */
+            months: number;
+        };
         DemoAccountDto: {
             email: string;
             role: string;
@@ -733,6 +1450,19 @@ export interface components {
             page: number;
             perPage: number;
         };
+        HoldingsDto: {
+            currentAccountMinor: number;
+            /** @description Into the current account in the running month. */
+            inThisMonthMinor: number;
+            /** @description Out of it; nothing or less than nothing. */
+            outThisMonthMinor: number;
+            cashBoxMinor: number;
+            chequesInHandMinor: number;
+            /** @description Paid by card, not yet at the bank. */
+            cardMoneyMinor: number;
+            /** @description Transfers written down that no statement has shown yet. */
+            transfersOnTheWayMinor: number;
+        };
         InsteadDto: {
             /**
              * Format: date
@@ -754,6 +1484,20 @@ export interface components {
             changedAt: string;
             changedBy: string;
             note: string;
+        };
+        InstrumentChoiceDto: {
+            /** @description Why it cannot be chosen; null when it can. */
+            reason: string | null;
+            id: string;
+            /** @example FR-021 */
+            tag: string;
+            name: string;
+            /** @example Oscilloscope */
+            kind: string;
+            /** @description Last day of its calibration. */
+            calibrationDueOn: string | null;
+            /** @description ± limit of its level readings, dB. */
+            amplitudeAccuracyDb: number | null;
         };
         InstrumentDetailDto: {
             /** @enum {string} */
@@ -829,6 +1573,101 @@ export interface components {
             page: number;
             perPage: number;
         };
+        InvoiceDto: {
+            id: string;
+            /** @example D-0412 */
+            number: string;
+            /** @enum {string} */
+            kind: "dues" | "course fee" | "kit";
+            description: string;
+            amountMinor: number;
+            paidMinor: number;
+            /** @description Left to pay. */
+            openMinor: number;
+            issuedOn: string;
+            dueOn: string;
+            /** @enum {string} */
+            state: "open" | "paid" | "part paid" | "late";
+            /** @description Days past the due day; 0 unless late. */
+            daysLate: number;
+            /**
+             * @description ISO 11649, without spaces.
+             * @example RF43LRBD0421
+             */
+            reference: string;
+            /** @description The same in fours, as it is printed. */
+            referencePrinted: string;
+        };
+        InvoicesPageDto: {
+            items: components["schemas"]["OpenInvoiceDto"][];
+            total: number;
+            /** @description Left to pay on all that match, not on this page alone. */
+            openMinor: number;
+            page: number;
+            perPage: number;
+        };
+        KeepReadingDto: {
+            /**
+             * @description Word for word as typed, by field.
+             * @example {
+             *       "voltsPerDivision": "20m",
+             *       "divisionsPeakToPeak": "3.3"
+             *     }
+             */
+            entry: {
+                [key: string]: string;
+            };
+            /**
+             * Format: date-time
+             * @description When it was taken, for one that waited on a device; now where left out.
+             */
+            takenAt?: string;
+            /**
+             * @description How it was taken; the check's own method.
+             * @example oscilloscope
+             */
+            method: string;
+            /** Format: uuid */
+            instrumentId?: string;
+            /** @description The tick beside a grave caution; asked for with every reading of such a stage. */
+            cautionAcknowledged?: boolean;
+        };
+        LevelPointDto: {
+            id: string;
+            stageId: string;
+            name: string;
+            /** @example TP8 */
+            testPoint: string;
+            plannedDbm: number;
+            toleranceDb: number;
+            /** @description What the stage can deliver or the next can take, dBm. */
+            limitDbm: number | null;
+        };
+        LineMatchDto: {
+            /** @enum {string} */
+            how: "by itself" | "by hand";
+            matchedAt: string;
+            paymentId: string | null;
+        };
+        MarkDto: {
+            id: string;
+            by: components["schemas"]["PersonRefDto"];
+            /** @example 2026-01-15T19:46:00Z */
+            at: string;
+        };
+        MatchLineDto: {
+            /** @description Of one person; paid in this order, and what is left over is credit on account. */
+            invoiceIds?: string[];
+            /**
+             * Format: uuid
+             * @description A transfer or cheque of exactly the line's amount.
+             */
+            paymentId?: string;
+            /** @example 5000 */
+            accountCode?: string;
+            /** @description What it was, for the books. */
+            note?: string;
+        };
         MeDto: {
             id: string;
             name: string;
@@ -845,6 +1684,19 @@ export interface components {
              * @description Last day on which it holds; null while nobody set an end.
              */
             until: string | null;
+        };
+        MyDuesDto: {
+            tier: components["schemas"]["TierDto"] | null;
+            currency: string;
+            /** @description Left over from payments; used for the next invoice. */
+            creditMinor: number;
+            /** @description Latest first, those taken back left out. */
+            payments: components["schemas"]["PaymentDto"][];
+            bank: components["schemas"]["BankDetailsDto"];
+            /** @description Who takes cash and cheques. */
+            treasurerName: string;
+            /** @description Writes to the treasurer go here; empty when the club has given no address. */
+            contactEmail: string;
         };
         NightBenchDto: {
             id: string;
@@ -916,6 +1768,63 @@ export interface components {
             errors?: components["schemas"]["FieldProblemDto"][];
         };
         Object: Record<string, never>;
+        OpenInvoiceDto: {
+            id: string;
+            /** @example D-0412 */
+            number: string;
+            /** @enum {string} */
+            kind: "dues" | "course fee" | "kit";
+            description: string;
+            amountMinor: number;
+            paidMinor: number;
+            /** @description Left to pay. */
+            openMinor: number;
+            issuedOn: string;
+            dueOn: string;
+            /** @enum {string} */
+            state: "open" | "paid" | "part paid" | "late";
+            /** @description Days past the due day; 0 unless late. */
+            daysLate: number;
+            /**
+             * @description ISO 11649, without spaces.
+             * @example RF43LRBD0421
+             */
+            reference: string;
+            /** @description The same in fours, as it is printed. */
+            referencePrinted: string;
+            personId: string;
+            personName: string;
+        };
+        PaidShareDto: {
+            invoiceId: string;
+            invoiceNumber: string;
+            description: string;
+            amountMinor: number;
+        };
+        PaymentDto: {
+            id: string;
+            /** @example R-0298 */
+            receiptNumber: string;
+            personId: string;
+            personName: string;
+            /** @enum {string} */
+            method: "card" | "cash" | "cheque" | "transfer";
+            amountMinor: number;
+            receivedOn: string;
+            note: string;
+            /** @description A transfer or cheque that no line of a statement has shown yet. */
+            isBeingMatched: boolean;
+            isTakenBack: boolean;
+            paid: components["schemas"]["PaidShareDto"][];
+            /** @description Left over for later invoices. */
+            creditMinor: number;
+        };
+        PaymentsPageDto: {
+            items: components["schemas"]["PaymentDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
         PeoplePageDto: {
             items: components["schemas"]["PersonDto"][];
             total: number;
@@ -927,6 +1836,66 @@ export interface components {
             id: string;
             name: string;
             roles: ("member" | "mentor" | "steward" | "treasurer" | "organiser")[];
+        };
+        PersonRefDto: {
+            id: string;
+            name: string;
+        };
+        PhotoDto: {
+            id: string;
+            caption: string;
+            /** @example image/jpeg */
+            contentType: string;
+            /** @example 2026-01-15T19:46:00Z */
+            at: string;
+            /**
+             * @description Where its bytes are.
+             * @example /api/builds/…/photos/…
+             */
+            url: string;
+        };
+        PlanCheckDto: {
+            /** @enum {string} */
+            kind: "tick" | "measure" | "photo" | "safety" | "mentor's eyes";
+            /** @description What the form starts with, in the fields' own units. */
+            defaults: {
+                [key: string]: number;
+            };
+            id: string;
+            /** @description Order on the checklist, from 1. */
+            position: number;
+            title: string;
+            instruction: string;
+            isRequired: boolean;
+            /** @description For a measure: how it is taken; `gain` and `carried` work themselves out. */
+            method: string | null;
+            /** @description Unit of the value and of the window. */
+            unit: string | null;
+            windowLow: number | null;
+            windowHigh: number | null;
+            target: number | null;
+            /** @description For a value that works itself out: the checks it is made of. */
+            fromCheckIds: string[];
+            levelPointId: string | null;
+            instrumentKindId: string | null;
+        };
+        PlanDto: {
+            id: string;
+            name: string;
+            summary: string;
+            /** @description Numbers of its published editions, oldest first. */
+            editions: number[];
+        };
+        PlanEditionDto: {
+            id: string;
+            planId: string;
+            planName: string;
+            number: number;
+            /** @example 2026-01-15T12:00:00Z */
+            publishedAt: string;
+            stages: components["schemas"]["PlanStageDto"][];
+            /** @description In signal order. */
+            levelPoints: components["schemas"]["LevelPointDto"][];
         };
         PlanNightsDto: {
             /**
@@ -956,6 +1925,21 @@ export interface components {
             note?: string;
             /** @description Tells the people whose build is on one of the stages in focus. */
             tellByMail?: boolean;
+        };
+        PlanStageDto: {
+            cautions: ("load before power" | "hot parts" | "rf power" | "mains" | "rf exposure" | "licence needed")[];
+            id: string;
+            position: number;
+            /** @example Pre-driver */
+            name: string;
+            summary: string;
+            checks: components["schemas"]["PlanCheckDto"][];
+        };
+        PlansPageDto: {
+            items: components["schemas"]["PlanDto"][];
+            total: number;
+            page: number;
+            perPage: number;
         };
         PreviewNightsDto: {
             /**
@@ -1000,6 +1984,87 @@ export interface components {
             instance: string;
             errors?: components["schemas"]["FieldProblemDto"][];
         };
+        QuarterDto: {
+            from: string;
+            to: string;
+            raisedMinor: number;
+            paidMinor: number;
+            count: number;
+            paidCount: number;
+        };
+        RaiseInvoiceDto: {
+            /**
+             * Format: date
+             * @description Not before today.
+             */
+            dueOn: string;
+            /** Format: uuid */
+            personId: string;
+            /** @enum {string} */
+            kind: "dues" | "course fee" | "kit";
+            description: string;
+            amountMinor: number;
+        };
+        ReadingDto: {
+            entry: {
+                [key: string]: string;
+            };
+            /** @enum {string} */
+            verdict: "pass" | "too close to call" | "not yet";
+            id: string;
+            checkId: string;
+            /** @example oscilloscope */
+            method: string;
+            /** @description In `unit`, unrounded. */
+            value: number;
+            /** @example dBm */
+            unit: string;
+            /** @description Unit of the uncertainties: dB for dBm and dBc. */
+            uncertaintyUnit: string;
+            /** @description k = 2, about 95 %. */
+            expandedUncertainty: number;
+            components: components["schemas"]["UncertaintyComponentDto"][];
+            voltsPeakToPeak: number | null;
+            watts: number | null;
+            /**
+             * @description Name and version of the calculation.
+             * @example oscilloscope/1
+             */
+            calculation: string;
+            instrumentId: string | null;
+            /** @example FR-021 */
+            instrumentTag: string | null;
+            /** @description Last day of the instrument's calibration, as it was then. */
+            calibrationDueOn: string | null;
+            cautionAcknowledged: boolean;
+            /** @example 2026-01-15T19:46:00Z */
+            takenAt: string;
+            /** @description A later one is in force; this one stays in the record. */
+            isSuperseded: boolean;
+        };
+        ReceiptDto: {
+            id: string;
+            /** @example R-0298 */
+            receiptNumber: string;
+            personId: string;
+            personName: string;
+            /** @enum {string} */
+            method: "card" | "cash" | "cheque" | "transfer";
+            amountMinor: number;
+            receivedOn: string;
+            note: string;
+            /** @description A transfer or cheque that no line of a statement has shown yet. */
+            isBeingMatched: boolean;
+            isTakenBack: boolean;
+            paid: components["schemas"]["PaidShareDto"][];
+            /** @description Left over for later invoices. */
+            creditMinor: number;
+            clubName: string;
+            clubAddress: string;
+            currency: string;
+            /** @description Who took it; a treasurer of the club where a machine did. */
+            treasurerName: string;
+        };
         RefusedResourceDto: {
             resourceId: string;
             reasons: components["schemas"]["UseReasonDto"][];
@@ -1012,10 +2077,44 @@ export interface components {
              */
             rule: string;
         };
+        ReviewDto: {
+            cautions: ("load before power" | "hot parts" | "rf power" | "mains" | "rf exposure" | "licence needed")[];
+            buildId: string;
+            stageId: string;
+            stagePosition: number;
+            stageName: string;
+            builder: components["schemas"]["PersonRefDto"];
+            planName: string;
+            serial: number;
+            /** @example 2026-01-13T21:48:00Z */
+            sentAt: string;
+            /** @description The builder's word. */
+            note: string;
+            /** @description How often it was sent back before. */
+            timesSentBack: number;
+            /** @description The reader's own stage: another mentor decides on it. */
+            isOwn: boolean;
+        };
+        ReviewsPageDto: {
+            /** @description The longest waiting first. */
+            items: components["schemas"]["ReviewDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+            /** @description When any stage was signed off last. */
+            lastSignOffAt: string | null;
+        };
         ScheduledNightsDto: {
             nights: components["schemas"]["BuildNightDto"][];
             /** @description How many people are told by mail. */
             told: number;
+        };
+        SendBackDto: {
+            note: string;
+        };
+        SettlingAccountDto: {
+            code: string;
+            name: string;
         };
         SignInDto: {
             /**
@@ -1034,6 +2133,98 @@ export interface components {
             /** Format: date-time */
             endsAt: string;
         };
+        StageEventDto: {
+            /** @enum {string} */
+            kind: "sent" | "withdrawn" | "sent back" | "signed off";
+            by: components["schemas"]["PersonRefDto"];
+            /** @example 2026-01-15T21:48:00Z */
+            at: string;
+            note: string;
+        };
+        StageNoteDto: {
+            /** @example Two turns off the output winding brought the gain down. */
+            note?: string;
+        };
+        StartBuildDto: {
+            /** Format: uuid */
+            planId: string;
+        };
+        StatementDetailDto: {
+            id: string;
+            fileName: string;
+            fromOn: string;
+            toOn: string;
+            openingMinor: number;
+            closingMinor: number;
+            lineCount: number;
+            matchedCount: number;
+            /** @description Sum of the lines that have no match yet. */
+            unmatchedMinor: number;
+            /** @description Lines of the file that an earlier statement had brought, and that were not counted again. */
+            knownLines: number;
+            importedAt: string;
+            currency: string;
+            lines: components["schemas"]["StatementLineDto"][];
+            books: components["schemas"]["BookItemDto"][];
+            /** @description Open items that the list has no room for. */
+            booksLeftOut: number;
+            totals: components["schemas"]["TotalsDto"];
+            /** @description Accounts a line may be settled against by hand. */
+            accounts: components["schemas"]["SettlingAccountDto"][];
+        };
+        StatementDto: {
+            id: string;
+            fileName: string;
+            fromOn: string;
+            toOn: string;
+            openingMinor: number;
+            closingMinor: number;
+            lineCount: number;
+            matchedCount: number;
+            /** @description Sum of the lines that have no match yet. */
+            unmatchedMinor: number;
+            /** @description Lines of the file that an earlier statement had brought, and that were not counted again. */
+            knownLines: number;
+            importedAt: string;
+        };
+        StatementLineDto: {
+            id: string;
+            day: string;
+            description: string;
+            /** @description Money in is positive. */
+            amountMinor: number;
+            /** @enum {string} */
+            state: "matched" | "no match";
+            /** @description Why it is matched, or why it did not match by itself. */
+            reasons: string[];
+            match: components["schemas"]["LineMatchDto"] | null;
+        };
+        StatementsPageDto: {
+            items: components["schemas"]["StatementDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
+        TakePaymentDto: {
+            /**
+             * Format: date
+             * @description Today or before.
+             */
+            receivedOn: string;
+            /** Format: uuid */
+            personId: string;
+            /** @enum {string} */
+            method: "cash" | "cheque" | "transfer";
+            amountMinor: number;
+            /** @description Paid in this order; what is left over is credit on account. */
+            invoiceIds: string[];
+            note?: string;
+            /**
+             * Format: uuid
+             * @description Chosen once by the form: the same key again answers with the payment already taken.
+             */
+            clientKey: string;
+        };
         TakenDto: {
             resourceId: string;
             resourceTag: string;
@@ -1044,11 +2235,74 @@ export interface components {
             /** Format: date-time */
             endsAt: string;
         };
+        TierDto: {
+            id: string;
+            name: string;
+            amountMinor: number;
+            months: number;
+        };
+        TotalsDto: {
+            openingMinor: number;
+            matchedMinor: number;
+            /** @description The current account by the ledger, after this statement's matches. */
+            booksMinor: number;
+            statementMinor: number;
+            /** @description What earlier statements have left unmatched; part of the difference. */
+            earlierMinor: number;
+            differenceMinor: number;
+        };
+        TreasurySummaryDto: {
+            /** @description The instant these figures are of. */
+            asOf: string;
+            today: string;
+            currency: string;
+            dues: components["schemas"]["QuarterDto"];
+            holdings: components["schemas"]["HoldingsDto"];
+            aged: components["schemas"]["AgeBandDto"][];
+            openCount: number;
+            openMinor: number;
+            lateMinor: number;
+            /** @description People with something late. */
+            latePeople: number;
+            /** @description Owed to members: what their payments left over. */
+            creditMinor: number;
+            cardNotes: components["schemas"]["CardNoteDto"][];
+        };
+        TrialBalanceDto: {
+            asOn: string;
+            accounts: components["schemas"]["TrialBalanceLineDto"][];
+            debitMinor: number;
+            creditMinor: number;
+        };
+        TrialBalanceLineDto: {
+            /** @example 1100 */
+            code: string;
+            name: string;
+            /** @enum {string} */
+            kind: "asset" | "liability" | "income" | "expense" | "equity";
+            debitMinor: number;
+            creditMinor: number;
+        };
+        UncertaintyComponentDto: {
+            name: string;
+            limit: number;
+            distribution: string;
+            standardUncertainty: number;
+        };
         UseReasonDto: {
             /** @enum {string} */
             code: "in repair" | "out of use" | "calibration unknown" | "calibration past" | "not cleared" | "clearance past";
             reason: string;
             remedy: string;
+        };
+        WebhookDto: {
+            /** @description The event's id. */
+            received: string;
+            /**
+             * @description `known`: it had come before, and nothing was done.
+             * @enum {string}
+             */
+            outcome: "acted" | "noted" | "needs a look" | "known";
         };
     };
     responses: never;
@@ -1596,6 +2850,485 @@ export interface operations {
             };
         };
     };
+    "Builds.start": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["StartBuildDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Builds.mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Builds.show": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Checks.listInstruments": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                checkId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InstrumentChoiceDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Checks.mark": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                checkId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MarkDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Checks.takeBackMark": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                checkId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Photos.add": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                checkId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "multipart/form-data": {
+                    /** Format: binary */
+                    photo: string;
+                    caption?: string;
+                };
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PhotoDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Checks.keepReading": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                checkId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["KeepReadingDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ReadingDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Builds.seeLicence": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Photos.show": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                photoId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "image/*": string;
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Photos.takeBack": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                photoId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Stages.sendBack": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                stageId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SendBackDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildStageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Stages.signOff": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                stageId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["StageNoteDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildStageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Stages.submit": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                stageId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["StageNoteDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildStageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Stages.withdraw": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                stageId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildStageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
     "Clearances.list": {
         parameters: {
             query: {
@@ -1732,6 +3465,34 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["ClubDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Dues.mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MyDuesDto"];
                 };
             };
             /** @description A problem document */
@@ -1996,6 +3757,286 @@ export interface operations {
             };
         };
     };
+    "Invoices.list": {
+        parameters: {
+            query: {
+                /** @description `open`: anything left to pay, late or not. */
+                state?: "open" | "late" | "paid";
+                personId?: string;
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InvoicesPageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Invoices.raise": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["RaiseInvoiceDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OpenInvoiceDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Invoices.mine": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InvoiceDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Invoices.cardPayment": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                invoiceId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CardPaymentDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Invoices.open": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                invoiceId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CheckoutDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Ledger.trialBalance": {
+        parameters: {
+            query?: {
+                /** @description The last day that counts; today unless named. */
+                on?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TrialBalanceDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Payments.list": {
+        parameters: {
+            query: {
+                personId?: string;
+                method?: "card" | "cash" | "cheque" | "transfer";
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PaymentsPageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Payments.take": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["TakePaymentDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PaymentDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Payments.takeBack": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                paymentId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PaymentDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
     "People.list": {
         parameters: {
             query: {
@@ -2048,6 +4089,437 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["PersonDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Plans.list": {
+        parameters: {
+            query: {
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PlansPageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Plans.show": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                planId: string;
+                number: number;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PlanEditionDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Payments.receipt": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                paymentId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ReceiptDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Reconciliation.match": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                lineId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["MatchLineDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StatementLineDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Reconciliation.takeBack": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                lineId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StatementLineDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Reconciliation.list": {
+        parameters: {
+            query: {
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StatementsPageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Reconciliation.show": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                statementId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StatementDetailDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Reviews.list": {
+        parameters: {
+            query: {
+                page: components["schemas"]["Object"];
+                perPage: components["schemas"]["Object"];
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ReviewsPageDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Reconciliation.import": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "multipart/form-data": {
+                    /** Format: binary */
+                    file: string;
+                };
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StatementDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Dues.list": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TierDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Dues.create": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateTierDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TierDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Dues.assign": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AssignTierDto"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Dues.summary": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TreasurySummaryDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Webhooks.receive": {
+        parameters: {
+            query?: never;
+            header: {
+                "stripe-signature": string;
+            };
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["WebhookDto"];
                 };
             };
             /** @description A problem document */
