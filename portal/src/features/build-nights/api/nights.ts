@@ -1,4 +1,10 @@
-import { keepPreviousData, queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
+import {
+  keepPreviousData,
+  queryOptions,
+  skipToken,
+  useMutation,
+  useQueryClient,
+} from '@tanstack/react-query';
 import { api, unwrap } from '../../../api-client/client';
 import type { components } from '../../../api-client/schema';
 
@@ -6,6 +12,8 @@ export type BuildNight = components['schemas']['BuildNightDto'];
 export type NightDetail = components['schemas']['BuildNightDetailDto'];
 export type NightPlan = components['schemas']['PlanNightsDto'];
 export type NightChange = components['schemas']['ChangeNightDto'];
+/** The part of a plan that can clash. */
+export type NightTimes = components['schemas']['PreviewNightsDto'];
 export type CheckedNight = components['schemas']['CheckedNightDto'];
 export type NightRemedy = components['schemas']['NightRemedyDto'];
 
@@ -27,11 +35,10 @@ export const nightQuery = (id: string) =>
   });
 
 /** What a half-typed plan would meet, date by date. */
-export const previewQuery = (plan: NightPlan | undefined) =>
+export const previewQuery = (times: NightTimes | undefined) =>
   queryOptions({
-    queryKey: [KEY, 'preview', plan],
-    queryFn: () => unwrap(api.POST('/api/build-nights/preview', { body: plan as NightPlan })),
-    enabled: plan !== undefined,
+    queryKey: [KEY, 'preview', times],
+    queryFn: times ? () => unwrap(api.POST('/api/build-nights/preview', { body: times })) : skipToken,
     placeholderData: keepPreviousData,
     staleTime: 0,
   });
