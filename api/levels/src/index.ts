@@ -52,3 +52,8 @@ export type { ReadQuantity } from './read-quantity';
 export type { BaseUnit, Prefix, QuantityUnit } from './quantity-units';
 export { decimalsFor, formatAtLeast, formatAtMost, formatFixed, formatReading, formatSigned } from './format';
 export { formatQuantity, formatUnderstood } from './format-quantity';
+
+export { ENTRY_METHODS, entryFields, methodGives } from './entry-fields';
+export type { EntryField, EntryMethod } from './entry-fields';
+export { ASSUMED, meterUnitOf, readEntry, readingFromInputs, scopeInput } from './entry';
+export type { Assumptions, Entry, ReadEntry } from './entry';

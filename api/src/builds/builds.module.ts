@@ -1,4 +1,34 @@
 import { Module } from '@nestjs/common';
+import { InstrumentsModule } from '../instruments/instruments.module';
+import { PeopleModule } from '../people/people.module';
+import { PlansModule } from '../plans/plans.module';
+import { BuildRecordsService } from './build-records.service';
+import { BuildsController } from './builds.controller';
+import { BuildsService } from './builds.service';
+import { ChecksController } from './checks.controller';
+import { InstrumentChoiceService } from './instrument-choice.service';
+import { MarksService } from './marks.service';
+import { PhotosController } from './photos.controller';
+import { PhotosService } from './photos.service';
+import { ReadingsService } from './readings.service';
+import { ReviewsController } from './reviews.controller';
+import { ReviewsService } from './reviews.service';
+import { StageMovesService } from './stage-moves.service';
+import { StagesController } from './stages.controller';
 
-@Module({})
+@Module({
+  imports: [InstrumentsModule, PeopleModule, PlansModule],
+  controllers: [BuildsController, StagesController, ChecksController, PhotosController, ReviewsController],
+  providers: [
+    BuildRecordsService,
+    BuildsService,
+    InstrumentChoiceService,
+    MarksService,
+    PhotosService,
+    ReadingsService,
+    ReviewsService,
+    StageMovesService,
+  ],
+  exports: [BuildsService, MarksService, PhotosService, ReadingsService, StageMovesService],
+})
 export class BuildsModule {}

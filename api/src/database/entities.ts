@@ -2,6 +2,18 @@ import { Session } from '../auth/session.entity';
 import { SignInFailure } from '../auth/sign-in-failure.entity';
 import { BookingItem } from '../bookings/booking-item.entity';
 import { Booking } from '../bookings/booking.entity';
+import { BuildNightBench } from '../build-nights/build-night-bench.entity';
+import { BuildNightMentor } from '../build-nights/build-night-mentor.entity';
+import { BuildNightPlace } from '../build-nights/build-night-place.entity';
+import { BuildNightSeries } from '../build-nights/build-night-series.entity';
+import { BuildNightStage } from '../build-nights/build-night-stage.entity';
+import { BuildNight } from '../build-nights/build-night.entity';
+import { BuildStageEvent } from '../builds/build-stage-event.entity';
+import { BuildStage } from '../builds/build-stage.entity';
+import { Build } from '../builds/build.entity';
+import { CheckMark } from '../builds/check-mark.entity';
+import { Photo } from '../builds/photo.entity';
+import { Reading } from '../builds/reading.entity';
 import { Club } from '../club/club.entity';
 import { Checkout } from '../dues/checkout.entity';
 import { Invoice } from '../dues/invoice.entity';
@@ -35,8 +47,18 @@ export const entities = [
   BankStatement,
   Booking,
   BookingItem,
+  Build,
   BuildGroup,
   BuildGroupMember,
+  BuildNight,
+  BuildNightBench,
+  BuildNightMentor,
+  BuildNightPlace,
+  BuildNightSeries,
+  BuildNightStage,
+  BuildStage,
+  BuildStageEvent,
+  CheckMark,
   Checkout,
   Clearance,
   Club,
@@ -53,10 +75,12 @@ export const entities = [
   PaymentEvent,
   Person,
   PersonTier,
+  Photo,
   Plan,
   PlanCheck,
   PlanEdition,
   Posting,
+  Reading,
   Resource,
   Session,
   SignInFailure,

@@ -18,6 +18,7 @@ export type CheckKind = (typeof CHECK_KINDS)[number];
 /** One line of a stage's checklist. */
 @Entity()
 @Unique('plan_check_position_once', ['stageId', 'position'])
+@Unique('plan_check_of_its_stage', ['id', 'stageId'])
 @Check('plan_check_kind_known', `kind IN ('tick', 'measure', 'photo', 'safety', 'mentor''s eyes')`)
 @Check('plan_check_measure_complete', `(kind = 'measure') = (method IS NOT NULL AND unit IS NOT NULL)`)
 @Check('plan_check_window', `window_low IS NULL OR window_high IS NULL OR window_low < window_high`)

@@ -13,6 +13,7 @@ import { Plan } from './plan.entity';
 /** One numbered edition of a plan. Once published, neither it nor anything in it changes (triggers see to that). */
 @Entity()
 @Unique('plan_edition_number_once', ['planId', 'number'])
+@Unique('plan_edition_of_its_plan', ['id', 'planId'])
 @Check('plan_edition_number_positive', `number > 0`)
 export class PlanEdition {
   @PrimaryGeneratedColumn('uuid')

@@ -1,4 +1,10 @@
 import { Module } from '@nestjs/common';
+import { PlansController } from './plans.controller';
+import { PlansService } from './plans.service';
 
-@Module({})
+@Module({
+  controllers: [PlansController],
+  providers: [PlansService],
+  exports: [PlansService],
+})
 export class PlansModule {}

@@ -36,8 +36,8 @@ export function Banner({ kind, title, children, action }: BannerProps) {
         borderColor: `token.${border}`,
         borderRadius: '3px',
         backgroundColor: 'token.sheet',
-        fontSize: '0.8125rem',
-        lineHeight: '1.1875rem',
+        fontSize: '0.78125rem',
+        lineHeight: '1.125rem',
       }}
     >
       <Box component="span" sx={{ color: `token.${colour}`, pt: '1px' }}>

@@ -64,7 +64,7 @@ export function CautionBox({ kind, name = NAMES[kind], children, tick }: Caution
           {CAUTION_SYMBOLS[kind]}
         </svg>
       </Box>
-      <Box sx={{ px: '11px', py: '7px', fontSize: '0.8125rem', lineHeight: '1.1875rem', color: 'token.ink' }}>
+      <Box sx={{ px: '11px', py: '7px', fontSize: '0.78125rem', lineHeight: '1.125rem', color: 'token.ink' }}>
         <b>{name}</b> {children}
         {tick}
       </Box>

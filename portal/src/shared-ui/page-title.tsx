@@ -21,7 +21,7 @@ export function PageTitle({ tab, children, over, beside, actions }: PageTitlePro
     document.title = `${tab} · Ferrite Row`;
   }, [tab]);
   return (
-    <Box sx={{ display: 'flex', flexWrap: 'wrap', alignItems: 'flex-end', gap: '8px 20px', mb: '16px' }}>
+    <Box sx={{ display: 'flex', flexWrap: 'wrap', alignItems: 'flex-end', gap: '8px 20px', mb: '12px' }}>
       <Box sx={{ minWidth: 0, flex: '1 1 auto' }}>
         {over && <Typography variant="small" component="div" sx={{ color: 'token.ink2' }} children={over} />}
         <Box sx={{ display: 'flex', flexWrap: 'wrap', alignItems: 'baseline', gap: '0 16px' }}>

@@ -23,6 +23,7 @@ export function PersonMark({ name, size = 28 }: PersonMarkProps) {
         borderColor: 'token.edge',
         backgroundColor: 'token.sheet',
         color: 'token.ink2',
+        fontFamily: 'fontFamily',
         fontSize: size >= 28 ? '0.6875rem' : '0.625rem',
         fontWeight: 700,
       }}

@@ -122,7 +122,7 @@ function StageTab({ stage, isOpen, isTabStop, onOpen }: StageTabProps) {
         backgroundColor: GROUND[stage.state] ?? token('sunk'),
         color: isOpen ? 'token.ink' : 'token.ink2',
         font: 'inherit',
-        fontSize: '0.75rem',
+        fontSize: '0.71875rem',
         lineHeight: '0.875rem',
         fontWeight: isOpen ? 700 : 600,
         textAlign: 'left',
@@ -149,7 +149,11 @@ function StageTab({ stage, isOpen, isTabStop, onOpen }: StageTabProps) {
         component="span"
         sx={{ display: '-webkit-box', WebkitBoxOrient: 'vertical', WebkitLineClamp: '2', overflow: 'hidden' }}
       >
-        {stage.name}
+        {stage.name.split(' ').map((word) => (
+          <span key={word} style={{ whiteSpace: 'nowrap' }}>
+            {word}{' '}
+          </span>
+        ))}
       </Box>
       <Box
         component="span"

@@ -9,6 +9,7 @@ export function ThemeChoice({ device = 'device' }: { device?: 'device' | 'phone'
     <ToggleButtonGroup
       exclusive
       fullWidth
+      sx={{ '& .MuiToggleButton-root': { flex: '1 1 auto', px: '8px', whiteSpace: 'nowrap' } }}
       aria-label="Light or dark on this device"
       value={mode ?? 'system'}
       onChange={(_event, next: 'light' | 'dark' | 'system' | null) => next && setMode(next)}

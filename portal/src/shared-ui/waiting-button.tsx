@@ -9,10 +9,11 @@ interface WaitingButtonProps {
   /** A longer reason, read out with the button and said again when it is pressed. */
   reason?: string;
   fullWidth?: boolean;
+  size?: 'small' | 'medium';
 }
 
 /** A button that is not available yet: dashed, still focusable, and it says what is missing. */
-export function WaitingButton({ children, reason, fullWidth }: WaitingButtonProps) {
+export function WaitingButton({ children, reason, fullWidth, size }: WaitingButtonProps) {
   const id = useId();
   const [presses, setPresses] = useState(0);
   return (
@@ -21,6 +22,7 @@ export function WaitingButton({ children, reason, fullWidth }: WaitingButtonProp
         aria-disabled="true"
         aria-describedby={reason ? id : undefined}
         fullWidth={fullWidth}
+        size={size}
         onClick={() => setPresses(presses + 1)}
         sx={{
           '&, &:hover': {

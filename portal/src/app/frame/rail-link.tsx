@@ -14,8 +14,6 @@ const HERE = {
   boxShadow: `inset 3px 0 0 ${token('green')}`,
   color: 'token.ink',
   fontWeight: 700,
-  // Covers the rail's right hairline, so that the entry joins the page.
-  mr: '-1px',
   '& svg': { color: 'token.green' },
 };
 
@@ -29,14 +27,14 @@ export function RailLink({ page, news }: { page: PageLink; news?: RailCount }) {
       sx={{
         display: 'flex',
         alignItems: 'center',
-        gap: '12px',
+        gap: '9px',
         height: 37,
         pl: '20px',
         pr: '14px',
         borderTop: '1px solid transparent',
         borderBottom: '1px solid transparent',
         color: 'token.ink2',
-        fontSize: '0.90625rem',
+        fontSize: '0.84375rem',
         textDecoration: 'none',
         '& svg': { color: 'token.ink3' },
         '&:hover': { color: 'token.ink' },
@@ -44,7 +42,7 @@ export function RailLink({ page, news }: { page: PageLink; news?: RailCount }) {
         ...(isHere && HERE),
       }}
     >
-      <Icon name={page.icon} size={18} />
+      <Icon name={page.icon} size={20} />
       <Box component="span" sx={{ flex: 1 }}>
         {page.words}
       </Box>

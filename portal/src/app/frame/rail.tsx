@@ -1,6 +1,7 @@
 import Box from '@mui/material/Box';
 import Typography from '@mui/material/Typography';
 import { useMe } from '../../api-client/session';
+import { token } from '../../shared-ui/tokens';
 import { OWN_PAGES, ROLE_PAGES } from '../pages';
 import { useRailCounts } from '../rail-counts';
 import { Brand } from './brand';
@@ -25,13 +26,13 @@ export function Rail({ onKeys }: { onKeys: () => void }) {
         width: 220,
         height: '100dvh',
         overflowY: 'auto',
-        borderRight: '1px solid',
-        borderColor: 'token.rule',
+        // An inset line and not a border: the chosen entry paints over it and so joins the page.
+        boxShadow: `inset -1px 0 0 ${token('rule')}`,
         backgroundColor: 'token.sunk',
         '@media print': { display: 'none' },
       }}
     >
-      <Box sx={{ flex: 'none', display: 'flex', alignItems: 'center', height: 75, pl: '18px', pr: '8px' }}>
+      <Box sx={{ flex: 'none', display: 'flex', alignItems: 'center', height: 76, pl: '18px', pr: '8px' }}>
         <Brand withClub />
       </Box>
       <Box sx={{ flex: 1 }}>

@@ -21,7 +21,7 @@ export const controls: Components<Omit<Theme, 'components'>> = {
         lineHeight: '20px',
         transition: 'background-color 120ms, color 120ms',
       },
-      sizeSmall: { minHeight: 36, padding: '6px 13px', [PHONE]: { minHeight: 44 } },
+      sizeSmall: { fontSize: '0.8125rem', minHeight: 36, padding: '6px 13px', [PHONE]: { minHeight: 44 } },
       text: { color: token('green'), '&:hover': { color: token('greenDeep') } },
     },
     variants: [

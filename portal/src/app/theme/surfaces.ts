@@ -25,6 +25,7 @@ export const surfaces: Components<Omit<Theme, 'components'>> = {
       },
       ':focus-visible': FOCUS,
       'b, strong': { fontWeight: 700 },
+      'button, input, select, textarea': { font: 'inherit' },
       '@media (prefers-reduced-motion: reduce)': {
         '*, *::before, *::after': { animation: 'none !important', transition: 'none !important' },
       },
@@ -33,6 +34,15 @@ export const surfaces: Components<Omit<Theme, 'components'>> = {
   MuiPaper: {
     defaultProps: { elevation: 0 },
     styleOverrides: { root: { backgroundImage: 'none', backgroundColor: token('sheet') } },
+  },
+  MuiBackdrop: {
+    styleOverrides: {
+      root: {
+        '&:not(.MuiBackdrop-invisible)': {
+          backgroundColor: `color-mix(in srgb, ${token('paper')} 60%, transparent)`,
+        },
+      },
+    },
   },
   MuiDialog: { styleOverrides: { paper: { ...opened, margin: 16 } } },
   MuiDialogTitle: {

@@ -39,7 +39,10 @@ declare module '@mui/material/Typography' {
   }
 }
 
+const FAMILY = "'Merriweather Sans Variable', system-ui, sans-serif";
+
 const px = (size: number, line: number, fontWeight: number) => ({
+  fontFamily: FAMILY,
   fontSize: `${size / 16}rem`,
   lineHeight: `${line / 16}rem`,
   fontWeight,
@@ -48,18 +51,21 @@ const px = (size: number, line: number, fontWeight: number) => ({
 
 export const PHONE = '@media (max-width:899.95px)';
 
+/** Large text is set a little closer. */
+const TIGHT = { letterSpacing: '-0.02em' };
+
 /** Sizes in rem, so that a browser's own text size is honoured. Nothing is smaller than `least`. */
 export const typography = {
-  fontFamily: "'Merriweather Sans Variable', system-ui, sans-serif",
+  fontFamily: FAMILY,
   fontWeightLight: 300,
   fontWeightRegular: 400,
   fontWeightMedium: 600,
   fontWeightBold: 700,
-  display: { ...px(38, 48, 300), [PHONE]: px(29, 38, 300) },
-  h1: { ...px(31, 40, 300), '& b, & strong': { fontWeight: 700 }, [PHONE]: px(28, 36, 300) },
-  h2: px(16, 22, 700),
+  display: { ...px(38, 48, 300), ...TIGHT, [PHONE]: { ...px(29, 38, 300), ...TIGHT } },
+  h1: { ...px(31, 40, 300), ...TIGHT, [PHONE]: { ...px(28, 36, 300), ...TIGHT } },
+  h2: { ...px(16, 22, 700), ...TIGHT },
   h3: px(13.5, 19, 700),
-  reading: { ...px(33, 36, 700), letterSpacing: '-0.02em' },
+  reading: { ...px(33, 36, 700), ...TIGHT },
   value: px(15, 21, 600),
   body1: px(14, 21, 400),
   body2: px(12.5, 18, 400),

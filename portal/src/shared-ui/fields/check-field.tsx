@@ -8,10 +8,10 @@ import { hintLine } from './hint-line';
 const box = (isChecked: boolean) => (
   <svg width="20" height="20" viewBox="0 0 20 20" fill="none" aria-hidden>
     <rect
-      x="1"
-      y="1"
-      width="18"
-      height="18"
+      x="1.5"
+      y="1.5"
+      width="17"
+      height="17"
       rx="2"
       fill={isChecked ? token('green') : token('sheet')}
       stroke={isChecked ? token('green') : token('edge')}

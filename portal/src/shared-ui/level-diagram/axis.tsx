@@ -12,7 +12,7 @@ interface AxisProps {
 export function Axis({ range, y }: AxisProps) {
   const end = GUTTER - 7;
   return (
-    <svg width={GUTTER} height={HEIGHT} aria-hidden style={{ flex: 'none' }} fontSize="11" textAnchor="end">
+    <svg width={GUTTER} height={HEIGHT} aria-hidden style={{ flex: 'none' }} fontSize="10.5" textAnchor="end">
       <text x={end} y={PLOT.top + 4} fontWeight="600" fill={token('ink3')}>
         dBm
       </text>
@@ -23,12 +23,12 @@ export function Axis({ range, y }: AxisProps) {
             <text x={end} y={y(dbm) + 1} fontWeight="700" fill={token('ink2')}>
               {signed(dbm, 0)}
             </text>
-            <text x={end} y={y(dbm) + 13} fontSize="10.5" fontWeight="600" fill={token('ink3')}>
+            <text x={end} y={y(dbm) + 13} fontWeight="600" fill={token('ink3')}>
               {powerLabel(dbm)}
             </text>
           </g>
         ))}
-      <g fontSize="10.5" fontWeight="600" fill={token('ink3')}>
+      <g fontWeight="600" fill={token('ink3')}>
         <text x={end} y={GAINS.measured}>
           Gain, dB
         </text>

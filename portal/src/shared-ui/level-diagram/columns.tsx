@@ -23,7 +23,6 @@ function Names({ rows, width, currentId }: ColumnsProps) {
       <text
         key={point.id}
         textAnchor="middle"
-        fontSize="11"
         fontWeight={isCurrent ? 700 : 600}
         fill={token(isCurrent ? 'ink' : 'ink2')}
       >
@@ -49,7 +48,7 @@ export function Columns(props: ColumnsProps) {
       width={width}
       height={HEIGHT}
       aria-hidden
-      fontSize="11"
+      fontSize="10.5"
       style={{ display: 'block', overflow: 'visible' }}
     >
       <defs>
@@ -60,7 +59,7 @@ export function Columns(props: ColumnsProps) {
           patternUnits="userSpaceOnUse"
           patternTransform="rotate(45)"
         >
-          <path d="M0 0V5" stroke={token('brassFill')} strokeWidth="1.4" />
+          <path d="M0 0V5" stroke={token('brassFill')} strokeWidth="1.2" strokeOpacity="0.75" />
         </pattern>
       </defs>
       {rows.map(

@@ -10,7 +10,8 @@ const Entry = ({ mark, children }: { mark: ReactNode; children: ReactNode }) => 
       display: 'inline-flex',
       alignItems: 'center',
       gap: '7px',
-      typography: 'small',
+      typography: 'least',
+      fontWeight: 400,
       color: 'token.ink2',
     }}
   >

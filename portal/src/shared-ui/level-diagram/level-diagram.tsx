@@ -26,7 +26,14 @@ export function LevelDiagram({ points, entered, currentId, onOpen }: LevelDiagra
   const rows = useMemo(() => levelRows(points, entered), [points, entered]);
   const isTable = view === 'table';
   return (
-    <Box component="section" aria-label="Level diagram">
+    <Box
+      component="section"
+      aria-label="Level diagram"
+      onKeyDown={(event) => {
+        const isPlainT = event.key.toLowerCase() === 't' && !event.ctrlKey && !event.metaKey && !event.altKey;
+        if (isPlainT) setView(isTable ? 'diagram' : 'table');
+      }}
+    >
       <SectionHeading end={<ViewSwitch value={view} drawing="diagram" words="Diagram" onChange={setView} />}>
         Level diagram
       </SectionHeading>
@@ -35,7 +42,7 @@ export function LevelDiagram({ points, entered, currentId, onOpen }: LevelDiagra
       ) : (
         <>
           <Legend isEntering={entered !== undefined} hasMeasured={rows.some(({ measured }) => measured)} />
-          <LevelDrawing rows={rows} currentId={currentId} onOpen={onOpen} onTable={() => setView('table')} />
+          <LevelDrawing rows={rows} currentId={currentId} onOpen={onOpen} />
           <VisuallyHidden as="div">
             <LevelTable rows={rows} />
           </VisuallyHidden>

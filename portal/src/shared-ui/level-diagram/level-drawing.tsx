@@ -12,7 +12,6 @@ interface LevelDrawingProps {
   rows: readonly LevelRow[];
   currentId?: string;
   onOpen?: (id: string) => void;
-  onTable?: () => void;
 }
 
 const USUAL_WIDTH = 656;
@@ -24,8 +23,8 @@ const nextColumn = (key: string, at: number | undefined, last: number): number |
   return key === 'End' ? last : undefined;
 };
 
-/** The drawing itself: one tab stop, arrows step through the columns, Enter opens one, T shows the table. */
-export function LevelDrawing({ rows, currentId, onOpen, onTable }: LevelDrawingProps) {
+/** The drawing itself: one tab stop, arrows step through the columns, Enter opens one. */
+export function LevelDrawing({ rows, currentId, onOpen }: LevelDrawingProps) {
   const [frame, frameWidth] = useWidth<HTMLDivElement>(USUAL_WIDTH);
   const [focused, setFocused] = useState<number>();
   const range = useMemo(() => rangeOf(rows), [rows]);
@@ -47,7 +46,6 @@ export function LevelDrawing({ rows, currentId, onOpen, onTable }: LevelDrawingP
     const row = focused === undefined ? undefined : rows[focused];
     if (next !== undefined) setFocused(next);
     else if (event.key === 'Enter' && row) onOpen?.(row.point.id);
-    else if (event.key.toLowerCase() === 't') onTable?.();
     else return;
     event.preventDefault();
   };

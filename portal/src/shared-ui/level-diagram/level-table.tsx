@@ -47,7 +47,7 @@ function Cells({ row }: { row: LevelRow }) {
         {headroomDb === undefined ? <Grey>no limit</Grey> : fixed(headroomDb)}
         {isHeadroomLow && ', low'}
       </td>
-      <td>{verdict && <VerdictLine verdict={verdict} />}</td>
+      <td style={{ whiteSpace: 'nowrap' }}>{verdict && <VerdictLine verdict={verdict} />}</td>
     </>
   );
 }

@@ -14,6 +14,7 @@ export function Measured({ rows, width, y }: LayerProps) {
         yHigh={y(levelDbm + expandedUncertaintyDb)}
         yLow={y(levelDbm - expandedUncertaintyDb)}
         kind={dotKind(isBeingEntered, isWithMentor)}
+        cap={6}
       />
     );
   });

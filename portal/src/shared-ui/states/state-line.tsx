@@ -23,7 +23,7 @@ export function StateLine({ shape, colour, children }: StateLineProps) {
         gap: '6px',
         color: `token.${colour}`,
         fontWeight: 600,
-        fontSize: '0.8125rem',
+        fontSize: '0.78125rem',
         lineHeight: '1.125rem',
       }}
     >

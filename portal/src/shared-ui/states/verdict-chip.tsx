@@ -28,7 +28,7 @@ export function VerdictChip({ verdict, narrow = false }: VerdictChipProps) {
         color: `token.${colour}`,
         backgroundColor: `token.${tint}`,
         fontWeight: 600,
-        fontSize: '0.8125rem',
+        fontSize: '0.78125rem',
         whiteSpace: 'nowrap',
       }}
     >

@@ -11,13 +11,15 @@ const SQUARES = `linear-gradient(${token('rule')} 1px, transparent 1px), linear-
 export function ClubPanel({ clubName }: { clubName: string }) {
   return (
     <Box
+      component="aside"
+      aria-label="The club"
       sx={{
         position: 'relative',
         display: 'flex',
         flexDirection: 'column',
         flex: { md: '0 1 880px' },
         minWidth: 0,
-        p: { xs: '20px 16px', md: '48px 60px 28px 60px' },
+        p: { xs: '20px 16px', md: '44px 60px 28px 60px' },
         borderRight: { md: `1.5px solid ${token('ink')}` },
         borderBottom: { xs: `1.5px solid ${token('ink')}`, md: 0 },
         backgroundColor: 'token.sunk',
@@ -43,7 +45,7 @@ export function ClubPanel({ clubName }: { clubName: string }) {
           fontSize: { xs: '1.75rem', md: 'min(2.875rem, 4.2vw)' },
           lineHeight: 1.22,
           fontWeight: 300,
-          letterSpacing: '-0.005em',
+          letterSpacing: '-0.025em',
         }}
       >
         {clubName && `${clubName}, `}

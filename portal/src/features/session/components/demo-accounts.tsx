@@ -2,6 +2,7 @@ import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import Typography from '@mui/material/Typography';
 import type { Club } from '../../../api-client/club';
+import { capital } from '../../../lib/text';
 
 /** Every account of the demo club has it; a club that is not a demo lists no accounts. */
 const DEMO_PASSWORD = 'larkmoor-demo';
@@ -20,12 +21,13 @@ export function DemoAccounts({ accounts, onChoose }: DemoAccountsProps) {
         Demo club
       </Typography>
       <Typography variant="small" component="p" sx={{ m: '0 0 8px', color: 'token.ink2' }}>
-        Choose an account to fill the form. Every password is {DEMO_PASSWORD}.
+        Choose an account to fill the form. The password of each is{' '}
+        <span style={{ whiteSpace: 'nowrap' }}>{DEMO_PASSWORD}</span>.
       </Typography>
       <Box sx={{ display: 'flex', flexWrap: 'wrap', gap: '8px' }}>
         {accounts.map(({ email, role }) => (
           <Button key={email} size="small" title={email} onClick={() => onChoose(email, DEMO_PASSWORD)}>
-            {role}
+            {capital(role)}
           </Button>
         ))}
       </Box>

@@ -1,0 +1,67 @@
+import type { KeptStageState } from './build-stage.entity';
+
+export const STAGE_STATES = [
+  'not started',
+  'on the bench',
+  'with mentor',
+  'sent back',
+  'signed off',
+  'locked',
+] as const;
+export type StageState = (typeof STAGE_STATES)[number];
+
+/** One stage of a build as the stages after it see it. */
+export interface Standing {
+  position: number;
+  name: string;
+  state: KeptStageState;
+  /** On the air: waits for a licence as well. */
+  needsLicence: boolean;
+}
+
+const isPast = ({ state }: Standing): boolean => state === 'with mentor' || state === 'signed off';
+const isSignedOff = ({ state }: Standing): boolean => state === 'signed off';
+const called = ({ position, name }: Standing): string => `stage ${position} ${name}`;
+
+/**
+ * Why a stage cannot be begun, or null when it can.
+ *
+ * A stage opens when every stage before it is with a mentor or signed off: a member who has sent one off may go on while
+ * it is looked at. A stage that needs a licence goes on the air, so it waits until every stage before it is signed off
+ * and an organiser has seen the licence. What was begun stays open, also when an earlier stage is sent back.
+ *
+ * @param before - the stages before it.
+ */
+export function lockOf(stage: Standing, before: readonly Standing[], isLicenceSeen: boolean): string | null {
+  if (stage.state !== 'not started') return null;
+  return waitOf(stage, before, isLicenceSeen);
+}
+
+/** What a stage still waits for before it may be sent to a mentor; the same as opens it, or null. */
+export function waitOf(stage: Standing, before: readonly Standing[], isLicenceSeen: boolean): string | null {
+  const waits = before.find((other) => (stage.needsLicence ? !isSignedOff(other) : !isPast(other)));
+  const until = stage.needsLicence ? 'is signed off' : 'is with a mentor or signed off';
+  if (waits) return `It opens when ${called(waits)} ${until}.`;
+  if (stage.needsLicence && !isLicenceSeen) return 'It opens when an organiser has seen your licence.';
+  return null;
+}
+
+/** Why a stage cannot be signed off yet: those before it feed it, so they are signed off first. */
+export function signOffWaitOf(before: readonly Standing[]): string | null {
+  const waits = before.find((other) => !isSignedOff(other));
+  return waits ? `Sign off ${called(waits)} first.` : null;
+}
+
+export function isInBuildersHands(state: KeptStageState): boolean {
+  return state === 'not started' || state === 'on the bench' || state === 'sent back';
+}
+
+/** The stage a member is on: the first open one that is not settled, or else the last that was sent. */
+export function currentOf<T extends { state: StageState }>(stages: readonly T[]): T | undefined {
+  const open: readonly StageState[] = ['sent back', 'on the bench', 'not started'];
+  return (
+    stages.find(({ state }) => open.includes(state)) ??
+    stages.findLast(({ state }) => state === 'with mentor') ??
+    stages.at(-1)
+  );
+}

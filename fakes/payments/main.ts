@@ -1,0 +1,5 @@
+import { runProgram } from '../common/program';
+import { startPayments } from './server';
+import { readSettings } from './settings';
+
+void runProgram(() => startPayments(readSettings(process.env)));
