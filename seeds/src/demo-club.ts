@@ -9,6 +9,7 @@ import { calendarAround } from './calendar';
 import { CLUB } from './club';
 import { seedGroups } from './groups';
 import { seedInventory } from './inventory';
+import { seedMoney } from './money/year';
 import { PEOPLE } from './people';
 import { found, type StageSet } from './stage-set';
 
@@ -24,14 +25,16 @@ export type Counts = Record<string, number>;
 export async function seedDemoClub(context: ServiceContext, clock: SettableClock): Promise<Counts> {
   const calendar = calendarAround(clock.now(), CLUB.timeZone);
   clock.set(calendar.at(calendar.today.subtract({ days: 400 }), 10));
+  await context.get(ClubService).set({ ...CLUB, contactEmail: '' });
   const people = await seedPeople(context);
   const set: StageSet = { context, clock, calendar, as: (key) => found(people, key) };
   const inventory = await seedInventory(set);
   const groups = await seedGroups(set);
+  const money = await seedMoney(set);
   const bookings = await seedBookings(set, inventory);
   clock.set(calendar.now);
   await context.get(ClubService).set(CLUB);
-  return { people: people.size, groups, bookings };
+  return { people: people.size, groups, bookings, ...money };
 }
 
 async function seedPeople(context: ServiceContext): Promise<Map<string, Actor>> {
