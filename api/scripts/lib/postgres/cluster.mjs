@@ -126,8 +126,7 @@ export async function startCluster(options) {
     mark: name,
     kind: 'postgres',
   });
-  // Ample, for after a power cut it first replays what it had not written out.
-  await untilReady(child, () => isAccepting(data), signal, 120_000);
+  await untilReady(child, () => isAccepting(data), signal);
   const host = `127.0.0.1:${port}`;
   return { adminUrl: `postgres://${SUPERUSER}:${password}@${host}/postgres`, host };
 }
