@@ -47,7 +47,7 @@ export function Decision({ build, stage, isOwn, onDecided }: DecisionProps) {
     setIsWordMissing(note.value.trim() === '');
     if (note.value.trim()) decide('send-back', `Stage ${stage.position} went back to ${build.builder.name}.`);
   };
-  const askToSign = () => canSign && setIsAsking(true);
+  const askToSign = () => setIsAsking(canSign);
   useLetterKeys({ s: askToSign, b: sendBack });
   if (isOwn)
     return (
@@ -71,30 +71,7 @@ export function Decision({ build, stage, isOwn, onDecided }: DecisionProps) {
         hint={note.keptAt && `Kept as you type, ${note.keptAt}`}
       />
       {moving.isError && <ProblemAlert title="Not sent. Your note is kept." error={moving.error} />}
-      <Box
-        sx={{ display: 'grid', gap: '8px', pt: '12px', borderTop: '1px solid', borderColor: 'token.rule' }}
-      >
-        <Typography variant="small" component="p" sx={{ m: 0, color: 'token.ink2' }}>
-          {missingText(stage)} Signing off fixes these readings in the record under your name.
-        </Typography>
-        {canSign ? (
-          <Button variant="contained" onClick={askToSign}>
-            Sign off stage {stage.position}
-          </Button>
-        ) : (
-          <WaitingButton reason={missingText(stage)} fullWidth>
-            Sign off stage {stage.position}
-          </WaitingButton>
-        )}
-        <Button
-          onClick={sendBack}
-          loading={moving.isPending}
-          startIcon={<StateMark name="back" />}
-          sx={{ '&, &:hover': { color: 'token.copper', borderColor: 'token.copper' } }}
-        >
-          Send back
-        </Button>
-      </Box>
+      <WaysOn {...{ stage, canSign, askToSign, sendBack }} isBusy={moving.isPending} />
       <ConfirmDialog
         open={isAsking}
         title={`Sign off stage ${stage.position} ${stage.name}?`}
@@ -107,6 +84,41 @@ export function Decision({ build, stage, isOwn, onDecided }: DecisionProps) {
         {build.builder.name}’s readings stay as they are from now on, under your name.
         {moving.isError && <ProblemAlert error={moving.error} />}
       </ConfirmDialog>
+    </Box>
+  );
+}
+
+interface WaysOnProps {
+  stage: BuildStage;
+  canSign: boolean;
+  isBusy: boolean;
+  askToSign: () => void;
+  sendBack: () => void;
+}
+
+function WaysOn({ stage, canSign, isBusy, askToSign, sendBack }: WaysOnProps) {
+  return (
+    <Box sx={{ display: 'grid', gap: '8px', pt: '12px', borderTop: '1px solid', borderColor: 'token.rule' }}>
+      <Typography variant="small" component="p" sx={{ m: 0, color: 'token.ink2' }}>
+        {missingText(stage)} Signing off fixes these readings in the record under your name.
+      </Typography>
+      {canSign ? (
+        <Button variant="contained" onClick={askToSign}>
+          Sign off stage {stage.position}
+        </Button>
+      ) : (
+        <WaitingButton reason={missingText(stage)} fullWidth>
+          Sign off stage {stage.position}
+        </WaitingButton>
+      )}
+      <Button
+        onClick={sendBack}
+        loading={isBusy}
+        startIcon={<StateMark name="back" />}
+        sx={{ '&, &:hover': { color: 'token.copper', borderColor: 'token.copper' } }}
+      >
+        Send back
+      </Button>
     </Box>
   );
 }

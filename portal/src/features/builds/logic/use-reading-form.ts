@@ -61,6 +61,8 @@ export function useReadingForm(
   const graves = gravesOf(stage.cautions);
   const isTicked = graves.every(({ kind }) => ticks.includes(kind));
   const names = fields.map(({ name }) => name);
+  // A refusal that belongs on no field of the form stands in an alert.
+  const isOnAField = Object.keys(refused).some((name) => names.includes(name));
 
   const errorOf = (name: string): string | undefined => {
     if (refused[name]) return refused[name];
@@ -102,11 +104,7 @@ export function useReadingForm(
     instruments: offered,
     instrumentId: instrument?.id ?? '',
     setInstrument: (instrumentId: string) => draft.setValue({ ...draft.value, instrumentId }),
-    /** The refusal, where it belongs on no field of the form. */
-    problem:
-      keeping.isError && !Object.keys(refused).some((name) => names.includes(name))
-        ? keeping.error
-        : undefined,
+    problem: isOnAField ? undefined : (keeping.error ?? undefined),
     isKeeping: keeping.isPending,
     keptFrom: draft.keptFrom,
     keptAt: draft.keptAt,
