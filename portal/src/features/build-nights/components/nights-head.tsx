@@ -1,0 +1,58 @@
+import Button from '@mui/material/Button';
+import IconButton from '@mui/material/IconButton';
+import { clubDay, monthStart } from '../../../lib/club-time';
+import { monthText } from '../../../lib/club-time-text';
+import { Icon } from '../../../shared-ui/icon';
+import { PageTitle } from '../../../shared-ui/page-title';
+import { PhoneBar } from '../../../shared-ui/phone-bar';
+import { token } from '../../../shared-ui/tokens';
+import type { NightsPlace } from '../use-nights-place';
+
+interface NightsHeadProps {
+  place: NightsPlace;
+  isMentor: boolean;
+  isPhone: boolean;
+}
+
+const STEP = { border: `1px solid ${token('edge')}`, backgroundColor: token('sheet'), width: 38 };
+
+/** Title, the way through the months, the other view, and for mentors the way to plan. */
+export function NightsHead({ place, isMentor, isPhone }: NightsHeadProps) {
+  const { month, view, planning } = place;
+  const other = view === 'month' ? 'list' : 'month';
+  const switchView = (
+    <Button variant={isPhone ? 'text' : 'outlined'} onClick={() => place.show(other)}>
+      {other === 'list' ? 'List' : 'Month'}
+    </Button>
+  );
+  return (
+    <>
+      {isPhone && <PhoneBar title="Build nights" backTo="/" backLabel="Back to Tonight" end={switchView} />}
+      <PageTitle
+        tab="Build nights"
+        actions={
+          <>
+            <IconButton aria-label="Month before" sx={STEP} onClick={() => place.goTo(monthStart(month, -1))}>
+              <Icon name="back" size={16} />
+            </IconButton>
+            <Button onClick={() => place.goTo(monthStart(clubDay()))}>This month</Button>
+            <IconButton aria-label="Month after" sx={STEP} onClick={() => place.goTo(monthStart(month, 1))}>
+              <Icon name="forward" size={16} />
+            </IconButton>
+            {!isPhone && switchView}
+            {isMentor && !planning && (
+              <>
+                <Button onClick={() => place.plan('night')}>Schedule a night</Button>
+                <Button variant="contained" onClick={() => place.plan('series')}>
+                  Plan a series
+                </Button>
+              </>
+            )}
+          </>
+        }
+      >
+        Build nights, <b>{monthText(month)}</b>
+      </PageTitle>
+    </>
+  );
+}
