@@ -33,20 +33,17 @@ export class CardEvents {
   ) {}
 
   async act(manager: EntityManager, event: Stripe.Event): Promise<Outcome> {
-    switch (event.type) {
-      case 'checkout.session.completed':
-        return event.data.object.payment_status === 'paid'
-          ? this.settle(manager, event.data.object)
-          : this.move(manager, event.data.object, 'confirming');
-      case 'checkout.session.async_payment_succeeded':
-        return this.settle(manager, event.data.object);
-      case 'checkout.session.async_payment_failed':
-        return this.move(manager, event.data.object, 'failed');
-      case 'checkout.session.expired':
-        return this.move(manager, event.data.object, 'expired');
-      default:
-        return noted('Nothing here acts on this kind of event.');
-    }
+    if (event.type === 'checkout.session.completed' && event.data.object.payment_status !== 'paid')
+      return this.move(manager, event.data.object, 'confirming');
+    if (
+      event.type === 'checkout.session.completed' ||
+      event.type === 'checkout.session.async_payment_succeeded'
+    )
+      return this.settle(manager, event.data.object);
+    if (event.type === 'checkout.session.async_payment_failed')
+      return this.move(manager, event.data.object, 'failed');
+    if (event.type === 'checkout.session.expired') return this.move(manager, event.data.object, 'expired');
+    return noted('Nothing here acts on this kind of event.');
   }
 
   private async settle(manager: EntityManager, session: Stripe.Checkout.Session): Promise<Outcome> {

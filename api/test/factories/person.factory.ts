@@ -27,6 +27,17 @@ export async function signedInAs(test: TestApp, someone: Person): Promise<supert
   return agent;
 }
 
+/** The session as a `cookie` header, for requests over real sockets. */
+export async function cookiesOf(test: TestApp, someone: Person): Promise<string> {
+  const body = JSON.stringify({ email: someone.email, password: PASSWORD });
+  const headers = { 'content-type': 'application/json' };
+  const answer = await fetch(`${test.baseUrl}/api/auth/sign-in`, { method: 'POST', headers, body });
+  return answer.headers
+    .getSetCookie()
+    .map((cookie) => cookie.split(';')[0])
+    .join('; ');
+}
+
 /** A new person with these roles beside member, and requests that carry their session. */
 export async function someoneWith(
   test: TestApp,

@@ -9,7 +9,7 @@ import { freePorts } from '../processes/ports.mjs';
 import { PlainError } from '../say.mjs';
 
 /** The account that owns the cluster; the portal itself never uses it. */
-export const SUPERUSER = 'ferrite_admin';
+const SUPERUSER = 'ferrite_admin';
 
 const baseSettings = [
   'listen_addresses=127.0.0.1',

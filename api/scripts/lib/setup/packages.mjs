@@ -1,4 +1,4 @@
-import { readFileSync } from 'node:fs';
+import { existsSync, readFileSync } from 'node:fs';
 import path from 'node:path';
 import { isDeepStrictEqual } from 'node:util';
 import { inRoot, root } from '../paths.mjs';
@@ -22,8 +22,9 @@ const isFromRegistry = (place, locked) => place.includes('node_modules/') && !lo
  * of all, so an installation cut short has none. Dates prove nothing here: a fresh clone is newer than everything.
  * @param {Lock} lock package-lock.json
  * @param {Lock | null} installed node_modules/.package-lock.json
+ * @param {(place: string) => boolean} exists a folder on the list may have been deleted since
  */
-export function isInstalled(lock, installed) {
+export function isInstalled(lock, installed, exists) {
   if (installed === null) return false;
   const isWanted = Object.entries(lock.packages).every(
     ([place, locked]) =>
@@ -32,8 +33,9 @@ export function isInstalled(lock, installed) {
       // Optional ones are left out where they are made for another machine.
       (locked.optional && !installed.packages[place]),
   );
-  const isAllLocked = Object.keys(installed.packages).every((place) => place in lock.packages);
-  return isWanted && isAllLocked;
+  return (
+    isWanted && Object.keys(installed.packages).every((place) => place in lock.packages && exists(place))
+  );
 }
 
 /**
@@ -64,7 +66,10 @@ function needsInstall() {
   const isCurrent = workspaces.every((place) =>
     isLocked(readJson(place, 'package.json'), lock.packages[place]),
   );
-  return !isCurrent || !isInstalled(lock, readJson('node_modules/.package-lock.json'));
+  return (
+    !isCurrent ||
+    !isInstalled(lock, readJson('node_modules/.package-lock.json'), (place) => existsSync(inRoot(place)))
+  );
 }
 
 /**

@@ -19,19 +19,28 @@ const installed = () => ({
   }),
 });
 
+const everywhere = () => true;
+
 describe('node_modules', () => {
   it('is complete without optional packages of other machines', () => {
-    assert.equal(isInstalled(lock, installed()), true);
+    assert.equal(isInstalled(lock, installed(), everywhere), true);
   });
 
   it('is stale when there is none, or its installation was cut short', () => {
-    assert.equal(isInstalled(lock, null), false);
+    assert.equal(isInstalled(lock, null, everywhere), false);
+  });
+
+  it('is stale when a folder on its list has been deleted', () => {
+    assert.equal(
+      isInstalled(lock, installed(), (place) => place !== 'node_modules/pg'),
+      false,
+    );
   });
 
   it('is stale when a package is missing', () => {
     const { packages } = installed();
     delete packages['node_modules/pg'];
-    assert.equal(isInstalled(lock, { packages }), false);
+    assert.equal(isInstalled(lock, { packages }, everywhere), false);
   });
 
   it('is stale when a package has another version, or other contents under the same version', () => {
@@ -41,14 +50,14 @@ describe('node_modules', () => {
     ]) {
       const { packages } = installed();
       packages['node_modules/pg'] = other;
-      assert.equal(isInstalled(lock, { packages }), false);
+      assert.equal(isInstalled(lock, { packages }, everywhere), false);
     }
   });
 
   it('is stale when it holds a package the lock no longer names', () => {
     const { packages } = installed();
     packages['node_modules/left-over'] = { version: '1.0.0' };
-    assert.equal(isInstalled(lock, { packages }), false);
+    assert.equal(isInstalled(lock, { packages }, everywhere), false);
   });
 });
 

@@ -22,7 +22,7 @@ export function help(steps) {
  * @param {Step[]} steps
  * @param {string[]} names
  */
-export function choose(steps, names) {
+function choose(steps, names) {
   const unknown = names.filter((name) => !steps.some((step) => step.name === name));
   if (unknown.length > 0) {
     throw new PlainError(`There is no step named ${unknown.join(', ')}.\n\n${help(steps)}`);

@@ -9,7 +9,7 @@
  */
 
 /** @param {Count[]} counts @returns {Count} */
-export function sum(counts) {
+function sum(counts) {
   const total = { passed: 0, failed: 0, skipped: 0 };
   for (const { passed, failed, skipped } of counts) {
     total.passed += passed;

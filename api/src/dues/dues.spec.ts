@@ -1,0 +1,414 @@
+import { randomUUID } from 'node:crypto';
+import type supertest from 'supertest';
+import { startTestApp, TEST_NOW, type TestApp } from '../../test/app';
+import { invoice, payment, paymentFor, treasurer } from '../../test/factories/dues.factory';
+import { person, signedInAs, someoneWith } from '../../test/factories/person.factory';
+import { ClubService } from '../club/club.service';
+import type { Actor } from '../common/actor';
+import { constraintOf } from '../common/constraint';
+import { isCreditorReference } from '../common/creditor-reference.rules';
+import { LedgerService } from '../ledger/ledger.service';
+import type { OpenInvoiceDto } from './dto/invoice.dto';
+import { TiersService } from './tiers.service';
+
+const DAY = 86_400_000;
+
+describe('dues', () => {
+  let test: TestApp;
+  let ines: Actor;
+  /** A treasurer's session, for the whole file: signing in is slow on purpose. */
+  let agent: supertest.Agent;
+  let treasurerId: string;
+  let outsider: supertest.Agent;
+
+  beforeAll(async () => {
+    test = await startTestApp();
+    await test.app.get(ClubService).set({
+      name: 'Larkmoor Radio Builders',
+      address: 'Millbeck Hall, Larkmoor',
+      contactEmail: 'treasurer@larkmoor.example',
+      timeZone: 'Europe/London',
+      currency: 'GBP',
+      accountNumber: '00-41-17 3006 4417',
+      accountName: 'Larkmoor Radio Builders',
+    });
+    ines = await treasurer(test);
+    const signedIn = await someoneWith(test, 'treasurer');
+    agent = signedIn.agent;
+    treasurerId = signedIn.person.id;
+    outsider = (await someoneWith(test, 'mentor', 'steward', 'organiser')).agent;
+  });
+  beforeEach(() => test.clock.set(TEST_NOW));
+  afterAll(() => test.close());
+
+  const owedInBooks = () => test.app.get(LedgerService).balance('1100');
+  const openOnInvoices = async () => {
+    const { body } = await agent.get('/api/invoices?state=open').expect(200);
+    return (body as { openMinor: number }).openMinor;
+  };
+
+  describe('an invoice', () => {
+    it('has a number, a sound reference, and is owed in the books', async () => {
+      const before = await owedInBooks();
+      const someone = await person(test);
+      const raised = await invoice(test, ines, { personId: someone.id });
+      expect(raised).toMatchObject({ amountMinor: 2400, openMinor: 2400, state: 'open', daysLate: 0 });
+      expect(raised.number).toMatch(/^D-\d{4}$/);
+      expect(raised.reference).toContain(`LRB${raised.number.replace('-', '')}`);
+      expect(isCreditorReference(raised.referencePrinted)).toBe(true);
+      expect(await owedInBooks()).toBe(before + 2400);
+      const agent = await signedInAs(test, someone);
+      const { body } = await agent.get('/api/invoices/mine').expect(200);
+      expect(body).toEqual([
+        expect.objectContaining({ id: raised.id, number: raised.number, openMinor: 2400 }),
+      ]);
+    });
+
+    it('is late the day after its day, by the club’s clock and not the server’s', async () => {
+      const someone = await person(test);
+      await invoice(test, ines, { personId: someone.id, dueOn: '2026-06-30', description: 'Summer' });
+      // In summer the club is an hour ahead of UTC: 23:30 UTC is the next day there.
+      test.clock.set(new Date('2026-06-30T22:30:00Z'));
+      const before = await (await signedInAs(test, someone)).get('/api/invoices/mine').expect(200);
+      expect(before.body).toMatchObject([{ state: 'open', daysLate: 0 }]);
+      test.clock.set(new Date('2026-06-30T23:30:00Z'));
+      const after = await (await signedInAs(test, someone)).get('/api/invoices/mine').expect(200);
+      expect(after.body).toMatchObject([{ state: 'late', daysLate: 1 }]);
+    });
+
+    it('is shown to its own person and to no other', async () => {
+      const raised = await invoice(test, ines);
+      const { agent } = await someoneWith(test);
+      const { body } = await agent.get('/api/invoices/mine').expect(200);
+      expect(body).toEqual([]);
+      await agent.post(`/api/invoices/${raised.id}/checkout`).expect(404);
+      await agent.get(`/api/invoices/${raised.id}/card-payment`).expect(404);
+    });
+
+    it('is counted in the treasurer’s pages, with the sum left to pay on all of them', async () => {
+      await invoice(test, ines);
+      await invoice(test, ines);
+      const { body } = await agent.get('/api/invoices?state=open&perPage=1').expect(200);
+      expect(body).toMatchObject({ page: 1, perPage: 1 });
+      expect((body as { items: unknown[] }).items).toHaveLength(1);
+      expect((body as { total: number }).total).toBeGreaterThan(1);
+      const beyond = await agent.get('/api/invoices?state=open&page=999').expect(200);
+      expect(beyond.body).toMatchObject({ items: [], total: (body as { total: number }).total });
+    });
+
+    it.each([
+      ['a due day that is past', { dueOn: '2026-01-14' }, '#/dueOn'],
+      ['a due day that is none', { dueOn: '2026-02-30' }, '#/dueOn'],
+      ['nothing to pay', { amountMinor: 0 }, '#/amountMinor'],
+      ['less than nothing', { amountMinor: -1 }, '#/amountMinor'],
+      ['half a penny', { amountMinor: 12.5 }, '#/amountMinor'],
+      ['an amount in words', { amountMinor: '24.00' }, '#/amountMinor'],
+      ['no number at all', { amountMinor: Number.NaN }, '#/amountMinor'],
+      ['an endless amount', { amountMinor: 1e308 }, '#/amountMinor'],
+      ['an unknown kind', { kind: 'present' }, '#/kind'],
+      ['an overlong description', { description: 'x'.repeat(121) }, '#/description'],
+      ['an empty description', { description: '  ' }, '#/description'],
+      ['nobody', { personId: randomUUID() }, '#/personId'],
+      ['an unknown field', { number: 'D-9999' }, '#/number'],
+    ])('is refused for %s, and nothing is written', async (_what, change, pointer) => {
+      const before = await owedInBooks();
+      const fair = {
+        personId: treasurerId,
+        kind: 'dues',
+        description: 'Dues',
+        amountMinor: 2400,
+        dueOn: '2026-01-31',
+      };
+      const { body } = await agent
+        .post('/api/invoices')
+        .send({ ...fair, ...change })
+        .expect(422);
+      expect(body).toMatchObject({ type: '/problems/invalid-input', errors: [{ pointer }] });
+      expect(await owedInBooks()).toBe(before);
+    });
+  });
+
+  describe('a payment', () => {
+    let raised: OpenInvoiceDto;
+
+    beforeEach(async () => {
+      raised = await invoice(test, ines);
+    });
+
+    it.each([
+      ['cash', '1000'],
+      ['cheque', '1010'],
+      ['transfer', '1040'],
+    ] as const)(
+      'by %s pays the invoice, bears a receipt, and lies in its account',
+      async (method, account) => {
+        const ledger = test.app.get(LedgerService);
+        const before = await ledger.balance(account);
+        const taken = await payment(test, ines, raised, { method });
+        expect(taken.receiptNumber).toMatch(/^R-\d{4}$/);
+        expect(taken.paid).toEqual([
+          {
+            invoiceId: raised.id,
+            invoiceNumber: raised.number,
+            description: raised.description,
+            amountMinor: 2400,
+          },
+        ]);
+        expect(taken.isBeingMatched).toBe(method !== 'cash');
+        expect(await ledger.balance(account)).toBe(before + 2400);
+        expect(await owedInBooks()).toBe(await openOnInvoices());
+      },
+    );
+
+    it('of a part leaves the rest open', async () => {
+      await payment(test, ines, raised, { amountMinor: 1000 });
+      const { body } = await agent.get(`/api/invoices?personId=${raised.personId}`).expect(200);
+      expect(body).toMatchObject({ items: [{ state: 'part paid', paidMinor: 1000, openMinor: 1400 }] });
+    });
+
+    it('of too much leaves credit, which pays the next invoice first', async () => {
+      const taken = await payment(test, ines, raised, { amountMinor: 3000 });
+      expect(taken).toMatchObject({ amountMinor: 3000, creditMinor: 600 });
+      const next = await invoice(test, ines, { personId: raised.personId, amountMinor: 1000 });
+      expect(next).toMatchObject({ state: 'part paid', paidMinor: 600, openMinor: 400 });
+      expect(await owedInBooks()).toBe(await openOnInvoices());
+      const again = await invoice(test, ines, { personId: raised.personId, amountMinor: 1000 });
+      expect(again).toMatchObject({ state: 'open', paidMinor: 0 });
+    });
+
+    it('pays several invoices in the order named', async () => {
+      const second = await invoice(test, ines, { personId: raised.personId, amountMinor: 3600, kind: 'kit' });
+      expect(second.number).toMatch(/^K-/);
+      const invoiceIds = [second.id, raised.id];
+      const taken = await payment(test, ines, raised, { amountMinor: 5000, invoiceIds });
+      const shares = Object.fromEntries(taken.paid.map((share) => [share.invoiceNumber, share.amountMinor]));
+      expect(shares).toEqual({ [second.number]: 3600, [raised.number]: 1400 });
+    });
+
+    it('can be taken on account, without an invoice', async () => {
+      const taken = await payment(test, ines, raised, { invoiceIds: [] });
+      expect(taken).toMatchObject({ paid: [], creditMinor: 2400 });
+    });
+
+    it('is told to the payer by letter, once', async () => {
+      const someone = await person(test);
+      const own = await invoice(test, ines, { personId: someone.id });
+      const taken = await payment(test, ines, own);
+      const letters = await test.dataSource.query<{ subject: string; text: string }[]>(
+        'SELECT subject, text FROM mail WHERE "to" = $1',
+        [someone.email],
+      );
+      expect(letters).toHaveLength(1);
+      expect(letters[0]?.subject).toBe(`Receipt ${taken.receiptNumber} for 24.00 GBP`);
+      expect(letters[0]?.text).toContain(`${own.number}  Dues, January to March: 24.00`);
+    });
+
+    it('taken back opens the invoice again and leaves both entries in the books', async () => {
+      const ledger = test.app.get(LedgerService);
+      const before = await ledger.balance('1000');
+      const taken = await payment(test, ines, raised);
+      const { body } = await agent.post(`/api/payments/${taken.id}/take-back`).expect(200);
+      expect(body).toMatchObject({ isTakenBack: true, paid: [] });
+      expect(await ledger.balance('1000')).toBe(before);
+      expect(await owedInBooks()).toBe(await openOnInvoices());
+      await agent.post(`/api/payments/${taken.id}/take-back`).expect(409);
+      await agent.get(`/api/receipts/${taken.id}`).expect(404);
+      await payment(test, ines, raised);
+    });
+
+    it('taken back whose credit was used gives that back too', async () => {
+      const taken = await payment(test, ines, raised, { amountMinor: 3000 });
+      const next = await invoice(test, ines, { personId: raised.personId, amountMinor: 600 });
+      expect(next.state).toBe('paid');
+      await agent.post(`/api/payments/${taken.id}/take-back`).expect(200);
+      expect(await owedInBooks()).toBe(await openOnInvoices());
+      const { body } = await agent.get('/api/treasury/summary').expect(200);
+      expect((body as { creditMinor: number }).creditMinor).toBe(
+        -(await test.app.get(LedgerService).balance('2100')),
+      );
+    });
+
+    it.each([
+      ['a day to come', { receivedOn: '2026-01-16' }, '#/receivedOn'],
+      ['a day before the books', { receivedOn: '1999-12-31' }, '#/receivedOn'],
+      ['a card', { method: 'card' }, '#/method'],
+      ['nothing', { amountMinor: 0 }, '#/amountMinor'],
+      ['an endless amount', { amountMinor: 1e12 }, '#/amountMinor'],
+      ['an invoice twice', { invoiceIds: ['d', 'd'] }, '#/invoiceIds'],
+      ['an invoice that is none', { invoiceIds: [randomUUID()] }, '#/invoiceIds'],
+      ['no key', { clientKey: undefined }, '#/clientKey'],
+      ['an overlong note', { note: 'x'.repeat(201) }, '#/note'],
+      ['an unknown field', { receiptNumber: 'R-0001' }, '#/receiptNumber'],
+    ])('is refused for %s', async (_what, change, pointer) => {
+      const { body } = await agent
+        .post('/api/payments')
+        .send({ ...paymentFor(raised), ...change })
+        .expect(422);
+      expect(body).toMatchObject({ errors: [{ pointer }] });
+    });
+
+    it('is refused for another person’s invoice', async () => {
+      const { body } = await agent
+        .post('/api/payments')
+        .send(paymentFor({ personId: treasurerId, id: raised.id }))
+        .expect(422);
+      expect(body).toMatchObject({ errors: [{ pointer: '#/invoiceIds' }] });
+    });
+
+    it('answers the same key with the payment already taken, and another payment under it with a refusal', async () => {
+      const form = paymentFor(raised);
+      const first = await agent.post('/api/payments').send(form).expect(201);
+      const second = await agent.post('/api/payments').send(form).expect(201);
+      expect(second.body).toEqual(first.body);
+      await agent
+        .post('/api/payments')
+        .send({ ...form, amountMinor: 100 })
+        .expect(409)
+        .expect(({ body }) => expect(body).toMatchObject({ type: '/problems/payment-key-used' }));
+    });
+
+    it('is kept by the database from paying an invoice twice over, or another person’s', async () => {
+      const taken = await payment(test, ines, raised, { invoiceIds: [], amountMinor: 9000 });
+      const other = await invoice(test, ines);
+      const allocate = (invoiceId: string, amount: number) =>
+        test.dataSource
+          .query(
+            `INSERT INTO payment_allocation (payment_id, invoice_id, amount_minor, allocated_at) VALUES ($1, $2, $3, now())`,
+            [taken.id, invoiceId, amount],
+          )
+          .catch((error: unknown) => constraintOf(error));
+      expect(await allocate(raised.id, 2401)).toBe('invoice_not_overpaid');
+      expect(await allocate(other.id, 1)).toBe('payment_allocation_same_person');
+      const small = await payment(test, ines, raised, { invoiceIds: [], amountMinor: 1 });
+      const overspent = await test.dataSource
+        .query(
+          `INSERT INTO payment_allocation (payment_id, invoice_id, amount_minor, allocated_at) VALUES ($1, $2, 2, now())`,
+          [small.id, raised.id],
+        )
+        .catch((error: unknown) => constraintOf(error));
+      expect(overspent).toBe('payment_not_overspent');
+    });
+  });
+
+  describe('a receipt', () => {
+    it('says from whom, for what, how and by whom it was taken', async () => {
+      const someone = await person(test, { name: 'Tamsin Ardley' });
+      const own = await invoice(test, ines, { personId: someone.id });
+      const taken = await payment(test, ines, own);
+      const agent = await signedInAs(test, someone);
+      const { body } = await agent.get(`/api/receipts/${taken.id}`).expect(200);
+      expect(body).toMatchObject({
+        personName: 'Tamsin Ardley',
+        treasurerName: 'Ines Calloway',
+        clubName: 'Larkmoor Radio Builders',
+        clubAddress: 'Millbeck Hall, Larkmoor',
+        amountMinor: 2400,
+        method: 'cash',
+      });
+    });
+
+    it('is not shown to somebody else', async () => {
+      const taken = await payment(test, ines, await invoice(test, ines));
+      const { agent } = await someoneWith(test);
+      await agent.get(`/api/receipts/${taken.id}`).expect(404);
+      await agent.get(`/api/receipts/${randomUUID()}`).expect(404);
+    });
+  });
+
+  describe('a member’s own page', () => {
+    it('knows tier, credit, payments and where a transfer goes', async () => {
+      const someone = await person(test);
+      const tier = await test.app
+        .get(TiersService)
+        .create(ines, { name: 'full', amountMinor: 2400, months: 3 });
+      await test.app
+        .get(TiersService)
+        .assign(ines, { personId: someone.id, tierId: tier.id, fromOn: '2026-01-15' });
+      await payment(test, ines, await invoice(test, ines, { personId: someone.id }), { amountMinor: 2500 });
+      const agent = await signedInAs(test, someone);
+      const { body } = await agent.get('/api/dues/mine').expect(200);
+      expect(body).toMatchObject({
+        tier: { name: 'full', amountMinor: 2400, months: 3 },
+        creditMinor: 100,
+        payments: [{ amountMinor: 2500, creditMinor: 100 }],
+        bank: { accountName: 'Larkmoor Radio Builders', accountNumber: '00-41-17 3006 4417' },
+      });
+      expect(Object.values(body as object).join()).not.toContain('password');
+    });
+
+    it('shows the tier of the day, not one to come', async () => {
+      const someone = await person(test);
+      const tiers = test.app.get(TiersService);
+      const tier = await tiers.create(ines, { name: 'junior', amountMinor: 600, months: 3 });
+      await tiers.assign(ines, { personId: someone.id, tierId: tier.id, fromOn: '2026-01-16' });
+      const agent = await signedInAs(test, someone);
+      expect((await agent.get('/api/dues/mine').expect(200)).body).toMatchObject({ tier: null });
+      test.clock.advance(DAY);
+      const next = await signedInAs(test, someone);
+      expect((await next.get('/api/dues/mine').expect(200)).body).toMatchObject({ tier: { name: 'junior' } });
+    });
+  });
+
+  describe('the treasurer’s page', () => {
+    it('shows four figures whose parts add up to the ledger’s', async () => {
+      const { body } = await agent.get('/api/treasury/summary').expect(200);
+      const ledger = test.app.get(LedgerService);
+      expect(body).toMatchObject({
+        today: '2026-01-15',
+        currency: 'GBP',
+        dues: { from: '2026-01-01', to: '2026-03-31' },
+        holdings: {
+          cashBoxMinor: await ledger.balance('1000'),
+          chequesInHandMinor: await ledger.balance('1010'),
+          currentAccountMinor: await ledger.balance('1020'),
+        },
+      });
+      const { aged, openMinor } = body as { aged: { openMinor: number }[]; openMinor: number };
+      expect(aged.reduce((sum, band) => sum + band.openMinor, 0)).toBe(openMinor);
+      expect(openMinor).toBe(await owedInBooks());
+    });
+  });
+
+  describe('tiers', () => {
+    it('have names of their own', async () => {
+      const tier = { name: 'household', amountMinor: 4000, months: 3 };
+      await agent.post('/api/tiers').send(tier).expect(201);
+      await agent.post('/api/tiers').send(tier).expect(409);
+      const { body } = await agent.get('/api/tiers').expect(200);
+      expect(body).toEqual(expect.arrayContaining([expect.objectContaining(tier)]));
+    });
+
+    it('are not given to nobody, nor is a tier that is none', async () => {
+      const fromOn = '2026-01-01';
+      const nobody = { personId: randomUUID(), tierId: randomUUID(), fromOn };
+      await agent.post('/api/tiers/assignments').send(nobody).expect(422);
+      await agent
+        .post('/api/tiers/assignments')
+        .send({ ...nobody, personId: treasurerId })
+        .expect(422);
+    });
+  });
+
+  it.each([
+    ['get', '/api/invoices'],
+    ['post', '/api/invoices'],
+    ['get', '/api/payments'],
+    ['post', '/api/payments'],
+    ['post', `/api/payments/${randomUUID()}/take-back`],
+    ['get', '/api/tiers'],
+    ['post', '/api/tiers'],
+    ['post', '/api/tiers/assignments'],
+    ['get', '/api/treasury/summary'],
+  ] as const)('keeps %s %s to treasurers', async (method, path) => {
+    const { body } = await outsider[method](path).expect(403);
+    expect(body).toMatchObject({ type: '/problems/not-allowed' });
+    await test.http()[method](path).expect(401);
+  });
+
+  it('checks the role in the use case itself, not at the door alone', async () => {
+    const member: Actor = { ...ines, roles: ['member'] };
+    await expect(invoice(test, member)).rejects.toMatchObject({ code: 'not-allowed' });
+    const raised = await invoice(test, ines);
+    await expect(payment(test, member, raised)).rejects.toMatchObject({ code: 'not-allowed' });
+  });
+});
