@@ -34,7 +34,13 @@ export function DockedDrawer({ open, width = 362, ...panel }: DockedDrawerProps)
       slotProps={{
         paper: {
           sx: isPhone
-            ? { maxHeight: '92dvh', borderTop: `1.5px solid ${token('ink')}`, borderRadius: '10px 10px 0 0' }
+            ? {
+                maxHeight: '92dvh',
+                // The bottom bar stays in front of a sheet.
+                pb: 'calc(63px + env(safe-area-inset-bottom))',
+                borderTop: `1.5px solid ${token('ink')}`,
+                borderRadius: '10px 10px 0 0',
+              }
             : { width: Math.max(width, 400), borderLeft: `1.5px solid ${token('ink')}` },
           'aria-label': panel.title,
         },
