@@ -38,7 +38,10 @@ export default tseslint.config(
         'error',
         { allowNumber: true, allowBoolean: true },
       ],
-      '@typescript-eslint/switch-exhaustiveness-check': 'error',
+      '@typescript-eslint/switch-exhaustiveness-check': [
+        'error',
+        { considerDefaultExhaustiveForUnions: true },
+      ],
       'max-lines': ['error', { max: 300, skipBlankLines: true, skipComments: true }],
       'max-lines-per-function': ['error', { max: 80, skipBlankLines: true, skipComments: true }],
       'no-restricted-imports': ['error', { paths: [ICON_BARREL] }],

@@ -25,7 +25,7 @@ describe('plans', () => {
     const { agent } = await someoneWith(test);
     const { body } = await agent.get(`/api/plans/${planId}/editions/1`).expect(200);
     expect(body).toMatchObject({ planName: plan.name, number: 1, publishedAt: '2026-01-15T12:00:00.000Z' });
-    expect(body.stages.map(({ name }: { name: string }) => name)).toEqual([
+    expect((body.stages as { name: string }[]).map(({ name }) => name)).toEqual([
       'Source',
       'Amplifier',
       'On the air',
@@ -45,7 +45,7 @@ describe('plans', () => {
     await published(test, { ...plan, edition: 2 });
     const { agent } = await someoneWith(test);
     const { body } = await agent.get('/api/plans?perPage=200').expect(200);
-    const shown = body.items.find(({ name }: { name: string }) => name === plan.name);
+    const shown = (body.items as { name: string }[]).find(({ name }) => name === plan.name);
     expect(shown).toMatchObject({ editions: [1, 2] });
   });
 

@@ -5,11 +5,13 @@ import type { SettableClock } from '@ferrite-row/api/common/clock';
 import type { ServiceContext } from '@ferrite-row/api/context';
 import { PeopleService } from '@ferrite-row/api/people/people.service';
 import { seedBookings } from './bookings';
+import { publishPlan, seedBuilds } from './builds/builds';
 import { calendarAround } from './calendar';
 import { CLUB } from './club';
 import { seedGroups } from './groups';
 import { seedInventory } from './inventory';
 import { seedMoney } from './money/year';
+import { seedNights } from './nights';
 import { PEOPLE } from './people';
 import { found, type StageSet } from './stage-set';
 
@@ -30,11 +32,21 @@ export async function seedDemoClub(context: ServiceContext, clock: SettableClock
   const set: StageSet = { context, clock, calendar, as: (key) => found(people, key) };
   const inventory = await seedInventory(set);
   const groups = await seedGroups(set);
+  const plan = await publishPlan(set);
+  const stageId = (position: number): string => plan.stages[position - 1]?.stage.id ?? '';
+  const nights = await seedNights(set, inventory, stageId);
+  const { builds, readings } = await seedBuilds(set, inventory, plan);
   const money = await seedMoney(set);
   const bookings = await seedBookings(set, inventory);
   clock.set(calendar.now);
   await context.get(ClubService).set(CLUB);
-  return { people: people.size, groups, bookings, ...money };
+  await sendOldMail(set);
+  return { people: people.size, groups, nights, builds, readings, bookings, ...money };
+}
+
+/** What the past queued was sent in the past; today's mail begins with today's acts. */
+async function sendOldMail({ context }: StageSet): Promise<void> {
+  await context.database.query('UPDATE mail SET sent_at = queued_at, tries = 1 WHERE sent_at IS NULL');
 }
 
 async function seedPeople(context: ServiceContext): Promise<Map<string, Actor>> {

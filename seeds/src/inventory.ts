@@ -23,7 +23,7 @@ const KINDS = [
   kind('Frequency counter', false, true),
   kind('Multimeter', false, true),
   kind('Power attenuator', false, false),
-  kind('Dummy load', false, false),
+  kind('Dummy load and wattmeter', false, false),
 ];
 
 interface DemoInstrument {
@@ -60,7 +60,7 @@ const INSTRUMENTS: readonly DemoInstrument[] = [
   },
   {
     tag: 'FR-060',
-    kind: 'Dummy load',
+    kind: 'Dummy load and wattmeter',
     name: 'Dummy load with tap',
     dueInDays: null,
     damageLevelDbm: 44,
@@ -123,6 +123,8 @@ const CLEARED_ON_SPECTRUM = [
   'orla',
   'petra',
   'mairi',
+  'idris',
+  'ansel',
 ];
 const CLEARED_ON_VECTOR = ['hollis', 'greta', 'oona', 'jonty', 'noor', 'marek', 'orla'];
 /** Days from today; the rest are cleared for the winter. */
@@ -132,7 +134,7 @@ async function seedClearances(
   { context, clock, calendar, as }: StageSet,
   inventory: Inventory,
 ): Promise<void> {
-  clock.set(calendar.at(calendar.today.subtract({ days: 80 }), 19));
+  clock.set(calendar.at(calendar.today.subtract({ days: 200 }), 19));
   const clearances = context.get(ClearancesService);
   const grant =
     (kindName: string) =>

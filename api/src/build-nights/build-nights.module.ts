@@ -1,5 +1,6 @@
 import { Module } from '@nestjs/common';
 import { BookingsModule } from '../bookings/bookings.module';
+import { BuildsModule } from '../builds/builds.module';
 import { ClubModule } from '../club/club.module';
 import { MailModule } from '../mail/mail.module';
 import { PeopleModule } from '../people/people.module';
@@ -15,7 +16,7 @@ import { PlanningService } from './planning.service';
 import { WaitingList } from './waiting-list';
 
 @Module({
-  imports: [BookingsModule, ClubModule, MailModule, PeopleModule],
+  imports: [BookingsModule, BuildsModule, ClubModule, MailModule, PeopleModule],
   controllers: [BuildNightsController],
   providers: [
     BuildNightsRepository,

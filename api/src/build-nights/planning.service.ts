@@ -1,5 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { DataSource, type EntityManager } from 'typeorm';
+import { BuildsService } from '../builds/builds.service';
 import { ClubService } from '../club/club.service';
 import { requireRole, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
@@ -11,6 +12,7 @@ import type { PlanNightsDto, PreviewNightsDto } from './dto/plan-nights.dto';
 import type { NightsPreviewDto, ScheduledNightsDto } from './dto/planned-nights.dto';
 import { NightCheck } from './night-check';
 import { NightDesk } from './night-desk';
+import { scheduledLetter } from './night-letters.rules';
 import { buildNightDto } from './night-view';
 import { NightWriter } from './night-writer';
 import { wantedNights, type WantedNight } from './plan.rules';
@@ -24,6 +26,7 @@ export class PlanningService {
     private readonly looking: NightCheck,
     private readonly writer: NightWriter,
     private readonly desk: NightDesk,
+    private readonly builds: BuildsService,
     private readonly club: ClubService,
     private readonly clock: Clock,
   ) {}
@@ -33,7 +36,11 @@ export class PlanningService {
     requireRole(actor, 'mentor');
     const { timeZone } = await this.club.settings();
     const wanted = wantedNights(plan, timeZone, this.clock.now(), [actor.personId]);
-    return { nights: await this.looking.check(wanted, timeZone), toTell: 0 };
+    const [nights, people] = await Promise.all([
+      this.looking.check(wanted, timeZone),
+      this.peopleToTell(actor, plan.stageIds ?? []),
+    ]);
+    return { nights, toTell: people.length };
   }
 
   /** One night or a series, whole or not at all. */
@@ -50,12 +57,13 @@ export class PlanningService {
     });
     await this.looking.refuseClashes(wanted, timeZone);
     const lostRace = () => this.looking.lostRace(wanted, timeZone);
+    const people = plan.tellByMail ? await this.peopleToTell(actor, plan.stageIds ?? []) : [];
     const made = await translatingConstraints(
-      () => this.dataSource.transaction((manager) => this.write(manager, actor, plan, wanted)),
+      () => this.dataSource.transaction((manager) => this.write(manager, actor, plan, wanted, people)),
       { booking_no_overlap: lostRace, build_night_mentor_on_one_duty: lostRace },
     );
     const records = await this.nights.byIds(made.map(({ id }) => id));
-    return { nights: records.map((record) => buildNightDto(record, actor.personId)), told: 0 };
+    return { nights: records.map((record) => buildNightDto(record, actor.personId)), told: people.length };
   }
 
   private async write(
@@ -63,6 +71,7 @@ export class PlanningService {
     actor: Actor,
     { title, places, note = '', repeat, stageIds = [] }: PlanNightsDto,
     wanted: readonly WantedNight[],
+    people: readonly string[],
   ): Promise<BuildNight[]> {
     const basics = { title, places, note, stageIds, rule: repeat?.rule ?? null };
     const by = { madeById: actor.personId, madeAt: this.clock.now() };
@@ -72,6 +81,16 @@ export class PlanningService {
       actor,
       made.map((night, index) => ({ night, mentorIds: wanted[index]?.mentorIds ?? [] })),
     );
+    const stages = (await this.nights.stages(stageIds)).map(({ position, name }) => `${position} ${name}`);
+    const letter = scheduledLetter(made, stages, await this.desk.hall(manager));
+    await this.desk.write(manager, people, letter);
     return made;
+  }
+
+  /** Everybody whose build is on one of the stages now, but for whoever plans. */
+  private async peopleToTell(actor: Actor, stageIds: readonly string[]): Promise<string[]> {
+    if (stageIds.length === 0) return [];
+    const people = await this.builds.peopleOnStages(stageIds);
+    return people.map(({ personId }) => personId).filter((id) => id !== actor.personId);
   }
 }

@@ -1,5 +1,4 @@
-import { isDerived } from '../plans/plan-description';
-import { checksOf, type EditionContent } from '../plans/edition-content';
+import { checksOf, isDerived, type EditionContent } from '../plans/plans.service';
 import type { PlanCheck } from '../plans/plan-check.entity';
 import type { Stage } from '../plans/stage.entity';
 import type { Build } from './build.entity';

@@ -1,5 +1,5 @@
 import type { EntityManager } from 'typeorm';
-import type { EditionContent } from '../plans/edition-content';
+import type { EditionContent } from '../plans/plans.service';
 import type { PlanCheck } from '../plans/plan-check.entity';
 import { derivedChecks } from './build-record';
 import type { Build } from './build.entity';

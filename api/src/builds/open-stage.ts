@@ -1,6 +1,6 @@
 import type { EntityManager } from 'typeorm';
 import { notFound } from '../common/common.errors';
-import type { EditionContent } from '../plans/edition-content';
+import type { EditionContent } from '../plans/plans.service';
 import type { PlanCheck } from '../plans/plan-check.entity';
 import type { Stage } from '../plans/stage.entity';
 import { findCheck, standingsOf } from './build-record';

@@ -3,7 +3,7 @@ import { DataSource, In, IsNull, type EntityManager } from 'typeorm';
 import { requireMember, requireRole, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { notFound } from '../common/common.errors';
-import { checksOf } from '../plans/edition-content';
+import { checksOf } from '../plans/plans.service';
 import type { Stage } from '../plans/stage.entity';
 import { requireBuilder, requireOtherMentor } from './build-access';
 import { standingsOf, standingsOfChecks, type BuildRecord } from './build-record';

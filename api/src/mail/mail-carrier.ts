@@ -6,7 +6,7 @@ import { DataSource, IsNull, LessThanOrEqual, type EntityManager } from 'typeorm
 import { Clock } from '../common/clock';
 import { Environment } from '../config/environment';
 import { Mail } from './mail.entity';
-import { nextTry } from './mail.rules';
+import { isRefusedForGood, nextTry } from './mail.rules';
 
 /** Sends what waits in the outbox. Every process runs it; a row locked by one is skipped by the others. */
 @Injectable()
@@ -62,11 +62,14 @@ export class MailCarrier implements OnModuleDestroy {
     const now = this.clock.now();
     try {
       const messageId = `<${id}@ferrite-row>`;
-      await this.transport.sendMail({ from: this.environment.MAIL_FROM, to, subject, text, messageId });
+      // Given as one address and not as text, so that a comma in it makes no second receiver.
+      const receiver = { name: '', address: to };
+      const from = this.environment.MAIL_FROM;
+      await this.transport.sendMail({ from, to: receiver, subject, text, messageId });
       await manager.update(Mail, { id }, { sentAt: now, tries: tries + 1 });
     } catch (error) {
       const lastError = error instanceof Error ? error.message.slice(0, 500) : 'unknown';
-      const dueAt = nextTry(tries + 1, now);
+      const dueAt = isRefusedForGood(error) ? undefined : nextTry(tries + 1, now);
       await manager.update(
         Mail,
         { id },

@@ -8,3 +8,9 @@ export function nextTry(tries: number, now: Date): Date | undefined {
   const delay = DELAYS_MS[tries - 1];
   return delay === undefined ? undefined : new Date(now.getTime() + delay);
 }
+
+/** Whether the server said that trying again is of no use: a reply of 5yz, RFC 5321, 4.2.1. */
+export function isRefusedForGood(error: unknown): boolean {
+  if (typeof error !== 'object' || error === null || !('responseCode' in error)) return false;
+  return typeof error.responseCode === 'number' && error.responseCode >= 500;
+}

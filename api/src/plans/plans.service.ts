@@ -20,6 +20,9 @@ import { planProblems } from './plans.errors';
 import { disagreementsOf, type Disagreement } from './plans.rules';
 import { Stage } from './stage.entity';
 
+export { checksOf, type EditionContent } from './edition-content';
+export { isDerived } from './plan-description';
+
 /** A number past PostgreSQL's integers is no edition, and must not reach it. */
 const MOST_EDITIONS = 100_000;
 

@@ -1767,7 +1767,6 @@ export interface components {
             instance: string;
             errors?: components["schemas"]["FieldProblemDto"][];
         };
-        Object: Record<string, never>;
         OpenInvoiceDto: {
             id: string;
             /** @example D-0412 */
@@ -2427,9 +2426,9 @@ export interface operations {
     };
     "Benches.list": {
         parameters: {
-            query: {
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
+            query?: {
+                page?: number;
+                perPage?: number;
             };
             header?: never;
             path?: never;
@@ -3331,9 +3330,9 @@ export interface operations {
     };
     "Clearances.list": {
         parameters: {
-            query: {
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
+            query?: {
+                page?: number;
+                perPage?: number;
                 personId?: string;
                 kindId?: string;
             };
@@ -3508,9 +3507,9 @@ export interface operations {
     };
     "Groups.list": {
         parameters: {
-            query: {
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
+            query?: {
+                page?: number;
+                perPage?: number;
             };
             header?: never;
             path?: never;
@@ -3595,13 +3594,13 @@ export interface operations {
     };
     "Instruments.list": {
         parameters: {
-            query: {
+            query?: {
+                page?: number;
+                perPage?: number;
                 /** @description For which day the instrument would be used; today unless told. */
                 on?: string;
                 /** @description Only instruments of this kind. */
                 kindId?: string;
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
             };
             header?: never;
             path?: never;
@@ -3726,9 +3725,9 @@ export interface operations {
     };
     "Instruments.history": {
         parameters: {
-            query: {
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
+            query?: {
+                page?: number;
+                perPage?: number;
             };
             header?: never;
             path: {
@@ -3759,12 +3758,12 @@ export interface operations {
     };
     "Invoices.list": {
         parameters: {
-            query: {
+            query?: {
+                page?: number;
+                perPage?: number;
                 /** @description `open`: anything left to pay, late or not. */
                 state?: "open" | "late" | "paid";
                 personId?: string;
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
             };
             header?: never;
             path?: never;
@@ -3944,11 +3943,11 @@ export interface operations {
     };
     "Payments.list": {
         parameters: {
-            query: {
+            query?: {
+                page?: number;
+                perPage?: number;
                 personId?: string;
                 method?: "card" | "cash" | "cheque" | "transfer";
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
             };
             header?: never;
             path?: never;
@@ -4039,9 +4038,9 @@ export interface operations {
     };
     "People.list": {
         parameters: {
-            query: {
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
+            query?: {
+                page?: number;
+                perPage?: number;
                 /** @description Only holders of this role. */
                 role?: "member" | "mentor" | "steward" | "treasurer" | "organiser";
                 /** @description Only names that have these letters in them. */
@@ -4104,9 +4103,9 @@ export interface operations {
     };
     "Plans.list": {
         parameters: {
-            query: {
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
+            query?: {
+                page?: number;
+                perPage?: number;
             };
             header?: never;
             path?: never;
@@ -4260,9 +4259,9 @@ export interface operations {
     };
     "Reconciliation.list": {
         parameters: {
-            query: {
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
+            query?: {
+                page?: number;
+                perPage?: number;
             };
             header?: never;
             path?: never;
@@ -4321,9 +4320,9 @@ export interface operations {
     };
     "Reviews.list": {
         parameters: {
-            query: {
-                page: components["schemas"]["Object"];
-                perPage: components["schemas"]["Object"];
+            query?: {
+                page?: number;
+                perPage?: number;
             };
             header?: never;
             path?: never;

@@ -79,3 +79,10 @@ export function readClock(text: string): number | undefined {
   const total = hour * MINUTES_IN_HOUR + minute;
   return minute < MINUTES_IN_HOUR && total <= 24 * MINUTES_IN_HOUR ? total : undefined;
 }
+
+/** Whether the clocks change on a day of the club, and which way. */
+export function clockChange(date: string, zone = clubZone()): 'forward' | 'back' | undefined {
+  const hours = Temporal.PlainDate.from(date).toZonedDateTime(zone).hoursInDay;
+  if (hours === 24) return undefined;
+  return hours < 24 ? 'forward' : 'back';
+}

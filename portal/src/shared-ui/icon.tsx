@@ -61,6 +61,7 @@ const PATHS = {
       <circle cx="18.5" cy="12" r="1.5" fill="currentColor" stroke="none" />
     </>
   ),
+  check: <path d="M4.5 12.5l5 5 10-11" />,
   close: <path d="M5.5 5.5l13 13M18.5 5.5l-13 13" />,
   back: <path d="M14.5 5L7.5 12l7 7" />,
   forward: <path d="M9.5 5l7 7-7 7" />,

@@ -13,9 +13,9 @@ export const PhoneBarSlot = Slot.Provider;
 interface PhoneBarProps {
   title: string;
   subtitle?: string;
-  /** Where the arrow leads. */
-  backTo: string;
-  backLabel: string;
+  /** Where the arrow leads; none on a page of the bottom bar. */
+  backTo?: string;
+  backLabel?: string;
   /** At the right: a state, a unit. */
   end?: ReactNode;
 }
@@ -34,14 +34,23 @@ export function PhoneBar({ title, subtitle, backTo, backLabel, end }: PhoneBarPr
         minWidth: 0,
       }}
     >
-      <Box
-        component={Link}
-        to={backTo}
-        aria-label={backLabel}
-        sx={{ display: 'grid', placeItems: 'center', width: 44, height: 44, ml: '-8px', color: 'token.ink' }}
-      >
-        <Icon name="back" />
-      </Box>
+      {backTo && (
+        <Box
+          component={Link}
+          to={backTo}
+          aria-label={backLabel}
+          sx={{
+            display: 'grid',
+            placeItems: 'center',
+            width: 44,
+            height: 44,
+            ml: '-8px',
+            color: 'token.ink',
+          }}
+        >
+          <Icon name="back" />
+        </Box>
+      )}
       <Box sx={{ flex: 1, minWidth: 0 }}>
         <Typography noWrap sx={{ fontWeight: 700, lineHeight: '18px' }}>
           {title}

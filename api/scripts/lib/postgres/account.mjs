@@ -8,8 +8,6 @@ import { PlainError } from '../say.mjs';
  * @typedef {(command: string, args: string[]) => { command: string, args: string[] }} As
  */
 
-const isRoot = () => process.getuid?.() === 0;
-
 /** Debian makes this account together with the server. @param {'-u' | '-g'} which */
 function idOfPostgres(which) {
   const { status, stdout } = spawnSync('id', [which, 'postgres'], { encoding: 'utf8' });
@@ -17,8 +15,6 @@ function idOfPostgres(which) {
     throw new PlainError('PostgreSQL is installed, but there is no account named postgres to run it.');
   return Number(stdout);
 }
-
-const plain = ['--reuid=postgres', '--regid=postgres', '--init-groups'];
 
 /**
  * A checkout in a closed home folder (/root is one) cannot be walked through by another account. This single capability
@@ -37,32 +33,24 @@ const reaches = (how, folder) =>
   spawnSync('setpriv', [...how, '--', 'ls', folder], { cwd: '/', stdio: 'ignore' }).status === 0;
 
 /**
- * PostgreSQL refuses to run as root. Run by root we hand the folder to Debian's account `postgres` and run as that;
- * run by anybody else, as ourselves.
+ * PostgreSQL refuses to run as root. Run by root we hand a new folder to Debian's account `postgres` and run as that, or
+ * as the user to whom an older one belongs; run by anybody else, as ourselves.
  * @param {string} folder the cluster's folder, which exists
  * @returns {As}
  */
 export function ordinaryUser(folder) {
-  if (!isRoot()) return asOwner(folder);
-  chownSync(folder, idOfPostgres('-u'), idOfPostgres('-g'));
+  if (process.getuid?.() !== 0) return (command, args) => ({ command, args });
+  if (statSync(folder).uid === 0) chownSync(folder, idOfPostgres('-u'), idOfPostgres('-g'));
+  const { uid, gid } = statSync(folder);
+  const plain = [`--reuid=${uid}`, `--regid=${gid}`, '--clear-groups'];
   const how = [plain, [...plain, ...passing]].find((way) => reaches(way, folder));
   if (!how) {
     throw new PlainError(
-      `The account postgres cannot get to ${shown(folder)}. Set FERRITE_DATA_DIR to a folder outside closed ones, ` +
-        'for example FERRITE_DATA_DIR=/var/lib/ferrite-row.',
+      `The account that runs PostgreSQL cannot get to ${shown(folder)}. Set FERRITE_DATA_DIR to a folder outside closed ` +
+        'ones, for example FERRITE_DATA_DIR=/var/lib/ferrite-row.',
     );
   }
   return (command, args) => ({ command: 'setpriv', args: [...how, '--', command, ...args] });
-}
-
-/** @param {string} folder @returns {As} */
-function asOwner(folder) {
-  if (statSync(folder).uid !== process.getuid?.()) {
-    throw new PlainError(
-      `${shown(folder)} belongs to another user. Run as the user who made it, or set FERRITE_DATA_DIR to another folder.`,
-    );
-  }
-  return (command, args) => ({ command, args });
 }
 
 /** Gives a file to whoever runs the cluster. @param {string} file @param {string} folder */

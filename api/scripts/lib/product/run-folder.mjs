@@ -1,8 +1,9 @@
-import { mkdirSync, realpathSync } from 'node:fs';
+import { accessSync, constants, mkdirSync, realpathSync } from 'node:fs';
 import path from 'node:path';
 import { Children } from '../processes/children.mjs';
 import { LockHeld, takeLock } from '../processes/lock.mjs';
 import { stopRecorded } from '../processes/records.mjs';
+import { shown } from '../paths.mjs';
 import { PlainError, say } from '../say.mjs';
 import { keepSecrets } from './secrets.mjs';
 
@@ -18,6 +19,21 @@ import { keepSecrets } from './secrets.mjs';
 
 export const LOCK = 'lock.json';
 export const RECORDS = 'running.json';
+
+/** @param {string} folder @returns {string} the folder's one true name, or its processes would not be known again */
+function makeFolder(folder) {
+  try {
+    // It stays open to be walked through, for the account that PostgreSQL runs as.
+    mkdirSync(folder, { recursive: true });
+    accessSync(folder, constants.W_OK);
+    return realpathSync(folder);
+  } catch (error) {
+    throw new PlainError(
+      `The folder ${shown(folder)} cannot be used (${/** @type {NodeJS.ErrnoException} */ (error).code}). Run as the user ` +
+        'who made it, or set FERRITE_DATA_DIR to another folder.',
+    );
+  }
+}
 
 /** @param {string} file @param {string} address */
 function lockOrTell(file, address) {
@@ -39,9 +55,7 @@ function lockOrTell(file, address) {
  * @returns {Promise<RunFolder>}
  */
 export async function openRunFolder(wanted, address, session) {
-  // The folder itself stays open to be walked through, for the account that PostgreSQL runs as.
-  mkdirSync(wanted, { recursive: true });
-  const folder = realpathSync(wanted); // one folder has one name, or its processes would not be known again
+  const folder = makeFolder(wanted);
   const logs = path.join(folder, 'logs');
   const memory = path.join(folder, 'fakes');
   for (const inner of [logs, memory]) mkdirSync(inner, { recursive: true, mode: 0o700 });

@@ -1,6 +1,6 @@
 import { ApiProperty } from '@nestjs/swagger';
 import type { Person } from '../../people/person.entity';
-import { checksOf } from '../../plans/edition-content';
+import { checksOf } from '../../plans/plans.service';
 import { planCheckDto, PlanCheckDto } from '../../plans/dto/plan-edition.dto';
 import type { PlanCheck } from '../../plans/plan-check.entity';
 import { CAUTIONS, type Caution, type Stage } from '../../plans/stage.entity';

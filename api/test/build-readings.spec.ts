@@ -1,0 +1,167 @@
+import { sendSource, settleAmplifier, SOURCE_ENTRY, startedBuild } from './factories/build.factory';
+import { instrument, kind } from './factories/bench.factory';
+import { smallPlan } from './factories/plan.factory';
+import { startTestApp, TEST_NOW, type TestApp } from './app';
+
+const HOUR = 3_600_000;
+
+let test: TestApp;
+
+beforeAll(async () => {
+  test = await startTestApp();
+});
+beforeEach(() => test.clock.set(TEST_NOW));
+afterAll(() => test.close());
+
+describe('a reading', () => {
+  it('is kept as typed beside what the server works out', async () => {
+    const { agent, checkAt, now } = await startedBuild(test);
+    const { body } = await agent
+      .post(checkAt('Output level at TP1', 'readings'))
+      .send({ method: 'oscilloscope', entry: SOURCE_ENTRY })
+      .expect(201);
+    // 2 mV/div × 3.55 div × 10 = 71 mV peak to peak; 71² / (8 × 50) µW = 12.6 µW = −19.0 dBm.
+    expect(body).toMatchObject({
+      unit: 'dBm',
+      verdict: 'pass',
+      calculation: 'oscilloscope/1',
+      entry: SOURCE_ENTRY,
+    });
+    expect(body.value).toBeCloseTo(-18.995, 3);
+    expect((body.components as { name: string }[]).map(({ name }) => name)).toEqual([
+      'reading resolution',
+      'vertical gain',
+      'probe',
+      'load',
+    ]);
+    const after = await now();
+    expect(after.stages[0]).toMatchObject({ state: 'on the bench', settled: 1 });
+  });
+
+  it('is never overwritten: a retake is in force, the first stays in the record', async () => {
+    const { agent, checkAt, now, check } = await startedBuild(test);
+    const keep = (divisionsPeakToPeak: string) =>
+      agent
+        .post(checkAt('Output level at TP1', 'readings'))
+        .send({ method: 'oscilloscope', entry: { ...SOURCE_ENTRY, divisionsPeakToPeak } })
+        .expect(201);
+    await keep('3.0');
+    test.clock.advance(HOUR);
+    await keep('3.55');
+    const shown = (await now()).stages[0]?.checks.find(({ id }) => id === check('Output level at TP1').id);
+    expect(shown?.readings.map(({ verdict, isSuperseded }) => [verdict, isSuperseded])).toEqual([
+      ['too close to call', true],
+      ['pass', false],
+    ]);
+  });
+
+  it('that waited on a device takes its place in time, not in order of arrival', async () => {
+    const { agent, checkAt, now, check } = await startedBuild(test);
+    test.clock.advance(2 * HOUR);
+    const keep = (divisionsPeakToPeak: string, takenAt?: string) =>
+      agent
+        .post(checkAt('Output level at TP1', 'readings'))
+        .send({ method: 'oscilloscope', entry: { ...SOURCE_ENTRY, divisionsPeakToPeak }, takenAt })
+        .expect(201);
+    await keep('3.55');
+    await keep('3.0', new Date(TEST_NOW.getTime() + HOUR).toISOString());
+    const shown = (await now()).stages[0]?.checks.find(({ id }) => id === check('Output level at TP1').id);
+    expect(shown?.readings.map(({ verdict }) => verdict)).toEqual(['too close to call', 'pass']);
+    expect(shown?.isSettled).toBe(true);
+  });
+
+  it('feeds what works itself out: the next stage’s input, then its gain with both uncertainties', async () => {
+    const started = await startedBuild(test);
+    await sendSource(started);
+    await settleAmplifier(started);
+    const [input, output, gain] = (await started.now()).stages[1]?.checks ?? [];
+    const [inForce, measured, workedOut] = [input, output, gain].map((check) => check?.readings.at(-1));
+    expect(inForce).toMatchObject({
+      method: 'carried',
+      verdict: 'pass',
+      entry: {},
+      calculation: 'oscilloscope/1',
+    });
+    expect(workedOut?.value).toBeCloseTo((measured?.value ?? 0) - (inForce?.value ?? 0), 9);
+    const both = Math.hypot(measured?.expandedUncertainty ?? 0, inForce?.expandedUncertainty ?? 0);
+    expect(workedOut?.expandedUncertainty).toBeCloseTo(both, 9);
+  });
+
+  it('works gains out anew when an input changes, and leaves the record of a stage that was sent', async () => {
+    const started = await startedBuild(test);
+    await sendSource(started);
+    await settleAmplifier(started);
+    await started.agent.post(started.stageAt('Source', 'withdraw')).expect(200);
+    test.clock.advance(HOUR);
+    const reading = { method: 'oscilloscope', entry: { ...SOURCE_ENTRY, divisionsPeakToPeak: '3.6' } };
+    await started.agent.post(started.checkAt('Output level at TP1', 'readings')).send(reading).expect(201);
+    const gainOf = async () => (await started.now()).stages[1]?.checks[2]?.readings.length;
+    expect(await gainOf()).toBe(2);
+    await started.agent.post(started.stageAt('Source', 'submit')).send({}).expect(200);
+    await started.agent.post(started.stageAt('Amplifier', 'submit')).send({}).expect(200);
+    await started.agent.post(started.stageAt('Source', 'withdraw')).expect(200);
+    await started.agent.post(started.checkAt('Output level at TP1', 'readings')).send(reading).expect(201);
+    expect(await gainOf()).toBe(2);
+  });
+});
+
+describe('an instrument', () => {
+  const measured = async () => {
+    const scopes = await kind(test, { name: `Scope ${Math.random()}`, needsCalibration: true });
+    const started = await startedBuild(test, smallPlan({}, scopes.name));
+    const keep = (instrumentId: string, takenAt?: string) =>
+      started.agent
+        .post(started.checkAt('Output level at TP1', 'readings'))
+        .send({ method: 'oscilloscope', entry: SOURCE_ENTRY, instrumentId, takenAt });
+    return { started, scopes, keep };
+  };
+
+  it('is named in the reading with its calibration as it was then', async () => {
+    const { scopes, keep } = await measured();
+    const scope = await instrument(test, { kindId: scopes.id, calibrationDueOn: '2026-01-15' });
+    const { body } = await keep(scope.id).expect(201);
+    expect(body).toMatchObject({ instrumentTag: scope.tag, calibrationDueOn: '2026-01-15' });
+  });
+
+  it('past its calibration on the day it was used is refused with the reason', async () => {
+    const { scopes, keep } = await measured();
+    const scope = await instrument(test, { kindId: scopes.id, calibrationDueOn: '2026-01-14' });
+    const { body } = await keep(scope.id).expect(422);
+    expect(body.errors).toMatchObject([{ pointer: '#/instrumentId' }]);
+    expect(body.detail).toMatch(/calibration of .* ran out on 14 Jan 2026/);
+  });
+
+  it('was good on the day a reading was taken, even if it is past today', async () => {
+    const { scopes, keep } = await measured();
+    const scope = await instrument(test, { kindId: scopes.id, calibrationDueOn: '2026-01-15' });
+    test.clock.advance(30 * HOUR);
+    await keep(scope.id, new Date(TEST_NOW.getTime() + HOUR).toISOString()).expect(201);
+    await keep(scope.id).expect(422);
+  });
+
+  it('in repair, of another kind, or unknown is refused', async () => {
+    const { scopes, keep } = await measured();
+    const broken = await instrument(test, { kindId: scopes.id, calibrationDueOn: '2027-01-01' });
+    await test.dataSource.query(`UPDATE instrument SET condition = 'in repair' WHERE resource_id = $1`, [
+      broken.id,
+    ]);
+    const meter = await instrument(test);
+    for (const id of [broken.id, meter.id, '00000000-0000-4000-8000-000000000000'])
+      expect((await keep(id).expect(422)).body.errors[0].pointer).toBe('#/instrumentId');
+  });
+
+  it('choices come with the reason against those that cannot be chosen', async () => {
+    const { scopes, started } = await measured();
+    const good = await instrument(test, { kindId: scopes.id, calibrationDueOn: '2027-01-01' });
+    const past = await instrument(test, { kindId: scopes.id, calibrationDueOn: '2025-01-01' });
+    const { body } = await started.agent
+      .get(started.checkAt('Output level at TP1', 'instruments'))
+      .expect(200);
+    expect(body).toMatchObject([
+      { tag: good.tag, reason: null },
+      { tag: past.tag, reason: expect.stringContaining('ran out') as string },
+    ]);
+    const none = await started.agent.get(started.checkAt('Board cleaned', 'instruments')).expect(200);
+    expect(none.body).toEqual([]);
+  });
+});

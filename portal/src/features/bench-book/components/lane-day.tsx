@@ -1,0 +1,85 @@
+import Box from '@mui/material/Box';
+import { clubDay } from '../../../lib/club-time';
+import { clockText } from '../../../lib/club-time-text';
+import type { Booking } from '../api/bench-book';
+import type { Block } from '../lanes/blocks';
+import { hatchOf } from '../lanes/hatches';
+import type { Lane } from '../lanes/lane';
+import { hoursText, LaneBlock } from './lane-block';
+import { LaneCursor, LaneHatch, LaneWish, NowLine } from './lane-marks';
+import { useLanePointer } from './use-lane-pointer';
+
+/** A stretch of one lane that is asked for and not booked yet. */
+export interface Wish {
+  date: string;
+  laneId: string;
+  from: number;
+  to: number;
+}
+
+export interface Picked {
+  date: string;
+  lane: Lane;
+  from: number;
+  to: number;
+}
+
+interface LaneDayProps {
+  date: string;
+  lanes: readonly Lane[];
+  blocks: readonly Block[];
+  wishes: readonly Wish[];
+  place: { firstColumn: number; firstRow: number };
+  cursor: { lane: number; slot: number; length: number } | undefined;
+  isWide: boolean;
+  onPick: (picked: Picked) => void;
+  onOpen: (booking: Booking) => void;
+}
+
+/** The drawing of one day over its cells, and what a pointer does there. */
+export function LaneDay(props: LaneDayProps) {
+  const { date, lanes, blocks, wishes, place, cursor, isWide, onPick, onOpen } = props;
+  const laneCount = lanes.length;
+  const pointer = useLanePointer(laneCount, (index, from, to) => {
+    const lane = lanes[index];
+    if (lane) onPick({ date, lane, from, to });
+  });
+  const wishWords = ({ from, to }: { from: number; to: number }) =>
+    isWide ? `${clockText(from)} to ${clockText(to)}` : hoursText(to - from);
+  return (
+    <Box
+      aria-hidden
+      {...pointer.handlers}
+      style={{
+        gridColumn: `${place.firstColumn} / ${place.firstColumn + laneCount}`,
+        gridRow: `${place.firstRow} / ${place.firstRow + 48}`,
+      }}
+      sx={{ position: 'absolute', inset: 0, cursor: 'cell', touchAction: 'pan-y' }}
+    >
+      {lanes.map(({ id, instrument }, index) => {
+        const words = hatchOf(instrument, date, clubDay());
+        return words && <LaneHatch key={id} lane={index} laneCount={laneCount} words={words} />;
+      })}
+      {blocks.map((block) => (
+        <LaneBlock
+          key={block.key}
+          block={block}
+          laneCount={laneCount}
+          isInstrument={lanes[block.lane]?.kind === 'instrument'}
+          isWide={isWide}
+          onOpen={() => onOpen(block.booking)}
+        />
+      ))}
+      {wishes.map(({ laneId, from, to }) => {
+        const lane = lanes.findIndex(({ id }) => id === laneId);
+        if (lane < 0) return null;
+        return <LaneWish key={laneId} {...{ lane, laneCount, from, to }} words={wishWords({ from, to })} />;
+      })}
+      {pointer.drawn && (
+        <LaneWish {...pointer.drawn} laneCount={laneCount} words={wishWords(pointer.drawn)} />
+      )}
+      <NowLine date={date} />
+      {cursor && <LaneCursor {...cursor} laneCount={laneCount} />}
+    </Box>
+  );
+}

@@ -1,0 +1,53 @@
+import Box from '@mui/material/Box';
+import Button from '@mui/material/Button';
+import { PhoneBar } from '../../../shared-ui/phone-bar';
+import { VisuallyHidden } from '../../../shared-ui/visually-hidden';
+import { ViewSwitch } from '../../../shared-ui/view-switch';
+import type { BookView } from '../book-view';
+import type { Lane } from '../lanes/lane';
+import { LaneMenu } from './shown-choice';
+
+interface PhoneBookBarProps {
+  view: BookView;
+  all: readonly Lane[];
+  shown: readonly Lane[];
+  onBook: () => void;
+}
+
+/** The head of the page on a phone: its name and what is shown in the bar, then lanes or list and the form. */
+export function PhoneBookBar({ view, all, shown, onBook }: PhoneBookBarProps) {
+  const isLanes = view.kind === 'lanes';
+  return (
+    <>
+      <VisuallyHidden>
+        <h1>Bench book</h1>
+      </VisuallyHidden>
+      <PhoneBar
+        title="Bench book"
+        end={
+          isLanes && (
+            <LaneMenu
+              all={all}
+              shown={shown}
+              onChange={view.showTags}
+              label={`${shown.length} shown, choose`}
+            >
+              {shown.length} shown
+            </LaneMenu>
+          )
+        }
+      />
+      <Box sx={{ display: 'flex', justifyContent: 'space-between', gap: '8px', mb: '8px' }}>
+        <ViewSwitch
+          value={isLanes ? 'lanes' : 'table'}
+          drawing="lanes"
+          words="Lanes"
+          onChange={(next) => view.showKind(next === 'table' ? 'list' : 'lanes')}
+        />
+        <Button variant="contained" onClick={onBook}>
+          Book a bench
+        </Button>
+      </Box>
+    </>
+  );
+}
