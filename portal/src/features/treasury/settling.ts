@@ -63,3 +63,27 @@ export function nextUnmatched(
   const turned = [...lines.slice(at + 1), ...lines.slice(0, at + 1)];
   return turned.find(({ state }) => state === 'no match')?.id;
 }
+
+/**
+ * What the books show beside a statement: what its lines were matched to, then the open items that may settle the opened
+ * line, those of exactly its amount first; what is chosen never drops out of sight.
+ */
+export function booksShown(
+  books: readonly BookItem[],
+  line: StatementLine | undefined,
+  { items: chosen }: Pick<Choice, 'items'>,
+  { find, most }: { find: string; most: number },
+): { shown: BookItem[]; hidden: number } {
+  const matched = books.filter(({ lineId }) => lineId !== null);
+  const words = find.trim().toLowerCase();
+  const rank = (item: BookItem): number =>
+    chosen.includes(item) ? 0 : item.amountMinor === line?.amountMinor ? 1 : 2;
+  const open = books
+    .filter((item) => item.lineId === null && (chosen.includes(item) || says(item, words)))
+    .toSorted((a, b) => rank(a) - rank(b));
+  const room = Math.max(most - matched.length, chosen.length, 3);
+  return { shown: [...matched, ...open.slice(0, room)], hidden: Math.max(open.length - room, 0) };
+}
+
+const says = ({ tag, name, detail }: BookItem, words: string): boolean =>
+  `${tag} ${name} ${detail}`.toLowerCase().includes(words);

@@ -32,8 +32,7 @@ export function wiresOf(
           : isOpened && item.lineId === null && chosenIds.has(item.id);
       return isJoined ? [row] : [];
     });
-    if (rows.length === 0)
-      return line.state === 'matched' ? [] : [{ key: line.id, kind: 'none', from }];
+    if (rows.length === 0) return line.state === 'matched' ? [] : [{ key: line.id, kind: 'none', from }];
     const kind: WireKind = isOpened ? 'chosen' : 'matched';
     return rows.map((to) => ({ key: `${line.id}:${to}`, kind, from, to }));
   });

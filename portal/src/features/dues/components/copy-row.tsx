@@ -27,9 +27,9 @@ export function CopyRow({ label, children, copies, isMain = false }: CopyRowProp
     <Box
       sx={{
         display: 'grid',
-        gridTemplateColumns: { xs: '86px 1fr auto', md: '100px 1fr auto' },
+        gridTemplateColumns: { xs: '74px 1fr auto', md: '100px 1fr auto' },
         alignItems: 'center',
-        gap: '12px',
+        gap: { xs: '8px', md: '12px' },
         minHeight: { xs: 52, md: 44 },
         mx: isMain ? { xs: '-16px', md: '-20px' } : 0,
         px: isMain ? { xs: '16px', md: '20px' } : 0,
@@ -40,7 +40,9 @@ export function CopyRow({ label, children, copies, isMain = false }: CopyRowProp
       }}
     >
       <Box sx={{ color: isMain ? 'token.green' : 'token.ink2', fontWeight: isMain ? 700 : 400 }}>{label}</Box>
-      <Box sx={{ minWidth: 0, fontWeight: 700 }}>{children}</Box>
+      <Box sx={{ minWidth: 0, fontWeight: 700, fontSize: { xs: '0.8125rem', md: '0.875rem' } }}>
+        {children}
+      </Box>
       {copies && (
         <Button
           size="small"

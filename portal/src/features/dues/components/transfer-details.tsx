@@ -27,7 +27,11 @@ export function TransferDetails({ invoice, bank }: TransferDetailsProps) {
         {formatAmount(openMinor)}
       </CopyRow>
       <CopyRow label="Reference" copies={reference} isMain>
-        <Box sx={{ fontSize: '1.25rem', lineHeight: '1.75rem' }}>{referencePrinted}</Box>
+        <Box
+          sx={{ fontSize: { xs: '1.0625rem', md: '1.25rem' }, lineHeight: '1.75rem', whiteSpace: 'nowrap' }}
+        >
+          {referencePrinted}
+        </Box>
         <Typography variant="small" component="div" sx={{ color: 'token.ink2' }}>
           With it, your payment finds its invoice by itself.
         </Typography>

@@ -67,9 +67,9 @@ const TABLE = {
     borderBottom: `1px solid ${token('rule')}`,
     fontWeight: 400,
   },
-  '& th': { textAlign: 'left' },
+  '& th': { textAlign: 'left', whiteSpace: 'nowrap' },
   '& td:nth-of-type(1), & td:nth-of-type(2), & thead th:not(:first-of-type)': { textAlign: 'right' },
-  '& td:last-child': { width: '34%', pr: 0 },
+  '& td:last-child': { width: '30%', pr: 0 },
   '& thead th, & thead td': {
     height: 28,
     color: 'token.ink2',

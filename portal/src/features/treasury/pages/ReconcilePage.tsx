@@ -6,7 +6,7 @@ import { useQuery } from '@tanstack/react-query';
 import { useState, type KeyboardEvent } from 'react';
 import { Link as RouterLink, useParams } from 'react-router-dom';
 import { formatDate, monthText } from '../../../lib/club-time-text';
-import { capital, counted, countWord } from '../../../lib/text';
+import { counted, countWord } from '../../../lib/text';
 import { EmptyState } from '../../../shared-ui/empty-state';
 import { LoadingBars } from '../../../shared-ui/loading-bars';
 import { PageTitle } from '../../../shared-ui/page-title';
@@ -15,15 +15,24 @@ import { ProblemAlert } from '../../../shared-ui/problem-alert';
 import { SectionHeading } from '../../../shared-ui/section-heading';
 import { usePreference } from '../../../shared-ui/use-preference';
 import { statementQuery, type StatementDetail } from '../api/treasury';
+import { BooksFoot } from '../components/books-foot';
 import { BookRows } from '../components/book-rows';
 import { ImportDrawer } from '../components/import-drawer';
 import { LinePanel } from '../components/line-panel';
 import { StatementRows } from '../components/statement-rows';
 import { TotalsBar } from '../components/totals-bar';
 import { WiresPicture } from '../components/wires-picture';
-import { faultOf } from '../settling';
+import { booksShown, faultOf } from '../settling';
 import { useSettling } from '../use-settling';
 import { wiresOf } from '../wires';
+
+/** However short the statement, the books show this many. */
+const FEWEST_ROWS = 10;
+const GRID = {
+  display: 'grid',
+  gridTemplateColumns: { lg: 'minmax(0, 1fr) auto minmax(0, 1.06fr)' },
+  alignItems: 'start',
+} as const;
 
 export default function ReconcilePage() {
   const { statementId = '' } = useParams();
@@ -63,20 +72,18 @@ function importedText({ lineCount, knownLines, importedAt }: StatementDetail): s
 
 function Reconcile({ detail }: { detail: StatementDetail }) {
   const settling = useSettling(detail);
+  const [find, setFind] = useState('');
+  const [isWhole, setIsWhole] = useState(false);
   const { line, choice } = settling;
-  const { lines, books, matchedCount, lineCount, booksLeftOut } = detail;
+  const { lines, matchedCount, lineCount } = detail;
+  const most = isWhole ? Infinity : Math.max(lines.length, FEWEST_ROWS);
+  const { shown, hidden } = booksShown(detail.books, line, choice, { find, most });
   const chosenIds = new Set(choice.items.map(({ id }) => id));
   const isOpen = line?.state === 'no match';
   const onKey = useKeys({ a: settling.accept, n: settling.next, u: settling.takeBack });
   return (
     <Box onKeyDown={onKey}>
-      <Box
-        sx={{
-          display: 'grid',
-          gridTemplateColumns: { lg: 'minmax(0, 1fr) auto minmax(0, 1.06fr)' },
-          alignItems: 'start',
-        }}
-      >
+      <Box sx={GRID}>
         <section aria-labelledby="on-the-statement">
           <SectionHeading id="on-the-statement" end={`${matchedCount} of ${lineCount} matched`}>
             On the statement
@@ -85,28 +92,29 @@ function Reconcile({ detail }: { detail: StatementDetail }) {
         </section>
         <Box sx={{ pt: '34px' }}>
           <WiresPicture
-            wires={wiresOf(lines, books, line?.id, chosenIds)}
-            rows={Math.max(lines.length, books.length)}
+            wires={wiresOf(lines, shown, line?.id, chosenIds)}
+            rows={Math.max(lines.length, shown.length)}
           />
         </Box>
         <Box component="section" aria-labelledby="in-the-books" sx={{ mt: { xs: '24px', lg: 0 } }}>
           <SectionHeading id="in-the-books" end="Payments and invoices still open">
             In the books
           </SectionHeading>
-          {books.length === 0 && (
+          {shown.length === 0 && (
             <EmptyState title="Nothing is open">Settle the line against an account.</EmptyState>
           )}
           <BookRows
-            books={books}
+            books={shown}
             openedId={line?.id}
             chosenIds={chosenIds}
             onChoose={isOpen ? settling.toggle : undefined}
           />
-          {booksLeftOut > 0 && (
-            <Typography variant="small" component="p">
-              {capital(counted(booksLeftOut, 'item'))} more, due later
-            </Typography>
-          )}
+          <BooksFoot
+            {...{ find, hidden, isWhole }}
+            leftOut={detail.booksLeftOut}
+            onFind={setFind}
+            onWhole={setIsWhole}
+          />
         </Box>
       </Box>
       {line && (
