@@ -16,6 +16,7 @@ export default defineConfig({
     environmentOptions: { jsdom: { url: 'http://127.0.0.1:4782/' } },
     globals: true,
     css: false,
+    testTimeout: 30_000,
     include: ['src/**/*.test.{ts,tsx}'],
     setupFiles: './src/testing/setup.ts',
   },

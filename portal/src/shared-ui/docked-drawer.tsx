@@ -1,14 +1,12 @@
 import Box from '@mui/material/Box';
 import Drawer from '@mui/material/Drawer';
-import type { Theme } from '@mui/material/styles';
-import useMediaQuery from '@mui/material/useMediaQuery';
 import { useEffect, useRef, type ReactNode } from 'react';
 import { createPortal } from 'react-dom';
 import type { DrawerPanelProps } from './drawer-panel';
 import { DrawerPanel } from './drawer-panel';
 import { useDrawerSlot } from './drawer-slot';
 import { token } from './tokens';
-import { usePhone } from './use-phone';
+import { useNarrow, usePhone } from './use-phone';
 
 interface DockedDrawerProps extends Omit<DrawerPanelProps, 'grip'> {
   open: boolean;
@@ -24,7 +22,7 @@ interface DockedDrawerProps extends Omit<DrawerPanelProps, 'grip'> {
 export function DockedDrawer({ open, width = 362, ...panel }: DockedDrawerProps) {
   const slot = useDrawerSlot();
   const isPhone = usePhone();
-  const isNarrow = useMediaQuery<Theme>((theme) => theme.breakpoints.down('lg'));
+  const isNarrow = useNarrow();
   if (!isNarrow) return open ? dock(<Docked width={width} {...panel} />, slot) : null;
   return (
     <Drawer
@@ -35,9 +33,9 @@ export function DockedDrawer({ open, width = 362, ...panel }: DockedDrawerProps)
         paper: {
           sx: isPhone
             ? {
-                maxHeight: '92dvh',
-                // The bottom bar stays in front of a sheet.
-                pb: 'calc(63px + env(safe-area-inset-bottom))',
+                // The bottom bar stays in sight under the sheet.
+                bottom: 62,
+                maxHeight: 'calc(100dvh - 106px)',
                 borderTop: `1.5px solid ${token('ink')}`,
                 borderRadius: '10px 10px 0 0',
               }
