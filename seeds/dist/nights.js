@@ -28,8 +28,9 @@ function courseDays({ calendar }) {
 /** The course's evenings and a few others, and who said they are coming. */
 async function seedNights(set, inventory, stageId) {
     const nightIds = await scheduleCourse(set, inventory);
+    const { days } = courseDays(set);
     for (const [index, nightId] of nightIds.entries())
-        await sayComing(set, nightId, index);
+        await sayComing(set, nightId, howMany(index), days[Math.min(index, NIGHTS_BEHIND)] ?? set.calendar.nextNight);
     await focus(set, nightIds, stageId);
     return nightIds.length + (await seedOneOffs(set, inventory));
 }
@@ -60,17 +61,13 @@ function howMany(index) {
     const ahead = [PLACES, PLACES + 2, 5, 4, 3, 2];
     return ahead[index - NIGHTS_BEHIND] ?? 1;
 }
-async function sayComing({ context, clock, calendar, as }, nightId, index) {
-    const said = courseDaysBefore(calendar.nextNight, index);
-    for (const [order, key] of COMING.slice(0, howMany(index)).entries()) {
-        const at = calendar.at(said.add({ days: Math.floor(order / 2) }), 18, order);
+/** People say so in the ten days before `night`; for nights still far off, in those before the next one. */
+async function sayComing({ context, clock, calendar, as }, nightId, count, night) {
+    for (const [order, key] of COMING.slice(0, count).entries()) {
+        const at = calendar.at(night.subtract({ days: 10 - Math.floor(order / 2) }), 18, order);
         clock.set(at < calendar.now ? at : calendar.now);
         await context.get(places_service_1.PlacesService).come(as(key), nightId);
     }
-}
-/** People say so in the week before; for nights still far off, in the last days. */
-function courseDaysBefore(nextNight, index) {
-    return nextNight.add({ days: 7 * Math.min(0, index - NIGHTS_BEHIND) - 10 });
 }
 async function focus({ context, clock, calendar, as }, nightIds, stageId) {
     clock.set(calendar.now);

@@ -1,6 +1,5 @@
 "use strict";
 Object.defineProperty(exports, "__esModule", { value: true });
-exports.scopeEntry = scopeEntry;
 exports.entryFor = entryFor;
 const levels_1 = require("@ferrite-row/levels");
 const PROBE = 10;

@@ -26,6 +26,8 @@ const WAYS = ['transfer', 'card', 'transfer', 'cash', 'transfer', 'card', 'chequ
 const wayOf = (who) => who === 'tamsin' ? 'card' : (WAYS[people_1.PEOPLE.findIndex(({ key }) => key === who) % WAYS.length] ?? 'cash');
 const MONTH = new Intl.DateTimeFormat('en-GB', { month: 'long', timeZone: 'UTC' });
 const monthName = (day) => MONTH.format(new Date(`${day.toString()}T12:00:00Z`));
+/** They paid the run before this one only last month, so that its statement has something to find. */
+const PAID_LATE = ['noor', 'jonty', 'rhoda', 'sunniva', 'tobias'];
 /** Four runs of dues, a quarter of a year each; the last was raised on the first of this month. */
 function duesBills(today) {
     const firstOfMonth = today.with({ day: 1 });
@@ -38,7 +40,9 @@ function duesBills(today) {
             const isOpen = monthsAgo === 0 && (key === 'tamsin' || key === 'lena');
             const paidOn = isOpen
                 ? null
-                : raisedOn.add({ days: Math.floor((0, dice_1.diceOf)(`${key} ${monthsAgo}`).between(1, 27)) });
+                : (monthsAgo === 3 && PAID_LATE.includes(key) ? firstOfMonth.subtract({ months: 1 }) : raisedOn).add({
+                    days: Math.floor((0, dice_1.diceOf)(`${key} ${monthsAgo}`).between(1, 27)),
+                });
             return {
                 who: key,
                 kind: 'dues',

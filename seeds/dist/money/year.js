@@ -85,9 +85,11 @@ async function payOne(set, bank, bill, raised, index) {
         clientKey: null,
         cardSessionId: way === 'card' ? `cs_demo_${index}_${(0, node_crypto_1.randomUUID)()}` : null,
     };
-    await context.database.transaction((manager) => till.record(manager, payment));
+    const paymentId = await context.database.transaction((manager) => till.record(manager, payment));
     if (way === 'card')
         bank.note({ day: paidOn, description: `CARD SETTLEMENT ${index}`, amountMinor, accountCode: '1030' });
+    if (way === 'cheque')
+        bank.note({ day: paidOn, description: `CHEQUE ${101_200 + index}`, amountMinor, paymentId });
     if (way === 'cash')
         bank.note({ day: paidOn, description: 'CASH PAID IN', amountMinor, accountCode: '1000' });
 }
@@ -109,14 +111,20 @@ async function importOne(set, bank, month, isLast) {
     const file = { originalname: name, buffer: Buffer.from(csv) };
     const statement = await context.get(statement_import_service_1.StatementImportService).import(as('ines'), file);
     const shown = await context.get(reconciliation_service_1.ReconciliationService).show(as('ines'), statement.id);
-    const toSettle = isLast ? [] : shown.lines.filter(({ match }) => match === null);
-    for (const { id, description, amountMinor } of toSettle) {
+    for (const { id, description, amountMinor, match } of shown.lines) {
         const line = lines.find((one) => one.description === description && one.amountMinor === amountMinor);
-        if (!line?.accountCode)
-            throw new Error(`Nothing settles the line ${description} of ${month.toString()}.`);
-        await context
-            .get(reconciliation_service_1.ReconciliationService)
-            .match(as('ines'), id, { accountCode: line.accountCode, note: '' });
+        if (match !== null || !line || (isLast && !HALL.includes(line.accountCode ?? '')))
+            continue;
+        await context.get(reconciliation_service_1.ReconciliationService).match(as('ines'), id, answerTo(line, month));
     }
+}
+/** What the treasurer has settled on the last statement so far: the hall. */
+const HALL = ['5100'];
+function answerTo({ paymentId, accountCode, description }, month) {
+    if (paymentId)
+        return { paymentId };
+    if (accountCode)
+        return { accountCode, note: '' };
+    throw new Error(`Nothing settles the line ${description} of ${month.toString()}.`);
 }
 //# sourceMappingURL=year.js.map

@@ -1,6 +1,6 @@
 "use strict";
 Object.defineProperty(exports, "__esModule", { value: true });
-exports.SCOPE_START = exports.eyes = exports.photo = exports.safety = exports.tick = exports.GAIN_TOLERANCE_DB = exports.KINDS = void 0;
+exports.eyes = exports.photo = exports.safety = exports.tick = exports.KINDS = void 0;
 exports.meter = meter;
 exports.scopeLevel = scopeLevel;
 exports.driveLevel = driveLevel;
@@ -20,7 +20,7 @@ exports.KINDS = {
     load: 'Dummy load and wattmeter',
 };
 /** Half a decibel wider than the gain's own tolerance would leave no room for the uncertainty of two readings. */
-exports.GAIN_TOLERANCE_DB = 1.5;
+const GAIN_TOLERANCE_DB = 1.5;
 const tick = (key, title, instruction) => ({
     key,
     kind: 'tick',
@@ -65,17 +65,17 @@ function scopeLevel(key, point, instruction) {
     return measured(key, `Output level at ${testPoint}`, instruction, {
         ...{ method: 'oscilloscope', unit: 'dBm', levelPoint: testPoint, target: plannedDbm },
         window: around(plannedDbm, toleranceDb),
-        defaults: exports.SCOPE_START,
+        defaults: SCOPE_START,
         instrumentKind: exports.KINDS.scope,
     });
 }
 /** What the scope's form starts with: the probe at ×10 into 50 ohm, read to a tenth of a division. */
-exports.SCOPE_START = { probeRatio: 10, loadOhms: 50, readToDivisions: 0.1 };
+const SCOPE_START = { probeRatio: 10, loadOhms: 50, readToDivisions: 0.1 };
 /** A level that is no column of the level diagram, such as an oscillator's drive. */
 function driveLevel(key, title, instruction, [target, tolerance]) {
     return measured(key, title, instruction, {
         ...{ method: 'oscilloscope', unit: 'dBm', target, window: around(target, tolerance) },
-        defaults: exports.SCOPE_START,
+        defaults: SCOPE_START,
         instrumentKind: exports.KINDS.scope,
     });
 }
@@ -101,7 +101,7 @@ function gain(key, title, [output, input], [before, after], window) {
     const target = tenths(after.plannedDbm - before.plannedDbm);
     return measured(key, title, 'Works itself out from the two levels, with both uncertainties.', {
         ...{ method: 'gain', unit: 'dB', from: [output, input], target },
-        window: window ?? around(target, exports.GAIN_TOLERANCE_DB),
+        window: window ?? around(target, GAIN_TOLERANCE_DB),
     });
 }
 /** Something unwanted, at least so many decibels below the carrier. */
@@ -130,7 +130,7 @@ function decibels(key, title, instruction, window, instrumentKind) {
 function loadPower(key, title, instruction, [low, high, target]) {
     return measured(key, title, instruction, {
         ...{ method: 'dummy-load', unit: 'W', window: { low, high }, target, instrumentKind: exports.KINDS.scope },
-        defaults: exports.SCOPE_START,
+        defaults: SCOPE_START,
     });
 }
 function around(target, tolerance) {
