@@ -4,9 +4,7 @@ var __importDefault = (this && this.__importDefault) || function (mod) {
 };
 Object.defineProperty(exports, "__esModule", { value: true });
 const clock_1 = require("@ferrite-row/api/common/clock");
-const context_1 = require("@ferrite-row/api/context");
 const data_source_1 = __importDefault(require("@ferrite-row/api/database/data-source"));
-const demo_club_1 = require("./demo-club");
 const state_1 = require("./state");
 /** Fills an empty database with the demo club. A database with anybody else in it is left as it is. */
 async function main() {
@@ -16,11 +14,14 @@ async function main() {
         return console.log('The club has people already: nothing is seeded.');
     // Laying out a past must not set off today's jobs, such as sending its mail.
     process.env.FERRITE_JOBS = 'off';
+    // Loaded only now: the whole API takes two seconds to load, which a warm start need not pay.
+    const { openContext } = await import('@ferrite-row/api/context');
+    const { seedDemoClub } = await import('./demo-club');
     const clock = new clock_1.SettableClock(new Date());
-    const context = await (0, context_1.openContext)(clock);
+    const context = await openContext(clock);
     try {
         const began = performance.now();
-        const counts = await (0, demo_club_1.seedDemoClub)(context, clock);
+        const counts = await seedDemoClub(context, clock);
         const seconds = ((performance.now() - began) / 1000).toFixed(1);
         const written = Object.entries(counts).map(([what, n]) => `${n} ${what}`);
         console.log(`Seeded the demo club in ${seconds} s: ${written.join(', ')}.`);
@@ -29,7 +30,7 @@ async function main() {
         await context.close();
     }
 }
-/** Asked with a bare connection: wiring the whole API to hear 'yes' would cost every start two seconds. */
+/** Asked with a bare connection, without wiring the API. */
 async function isInhabited() {
     await data_source_1.default.initialize();
     try {
