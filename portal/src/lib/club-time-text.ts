@@ -21,31 +21,34 @@ const MONTHS = [
 ];
 
 const dayName = (day: Temporal.PlainDate) => DAYS[day.dayOfWeek - 1];
-const monthName = (day: Temporal.PlainDate) => MONTHS[day.month - 1];
+const nameOfMonth = (day: Temporal.PlainDate) => MONTHS[day.month - 1];
 const two = (value: number) => String(value).padStart(2, '0');
 
 /** A calendar day as text: 'Thu 15 Oct'. */
 export function dayText(date: string): string {
   const day = Temporal.PlainDate.from(date);
-  return `${dayName(day).slice(0, 3)} ${day.day} ${monthName(day).slice(0, 3)}`;
+  return `${dayName(day).slice(0, 3)} ${day.day} ${nameOfMonth(day).slice(0, 3)}`;
 }
 
 /** 'Thursday 15 October'. */
 export function longDayText(date: string): string {
   const day = Temporal.PlainDate.from(date);
-  return `${dayName(day)} ${day.day} ${monthName(day)}`;
+  return `${dayName(day)} ${day.day} ${nameOfMonth(day)}`;
 }
 
 /** '9 Dec 2026', for days that may lie in another year. */
 export function dateText(date: string): string {
   const day = Temporal.PlainDate.from(date);
-  return `${day.day} ${monthName(day).slice(0, 3)} ${day.year}`;
+  return `${day.day} ${nameOfMonth(day).slice(0, 3)} ${day.year}`;
 }
+
+/** 'October'. */
+export const monthName = (date: string): string => nameOfMonth(Temporal.PlainDate.from(date));
 
 /** 'October 2026'. */
 export function monthText(date: string): string {
   const day = Temporal.PlainDate.from(date);
-  return `${monthName(day)} ${day.year}`;
+  return `${nameOfMonth(day)} ${day.year}`;
 }
 
 /** Minutes since midnight as '19:30'; 1440 reads '24:00'. */

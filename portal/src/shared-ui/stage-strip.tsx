@@ -150,11 +150,8 @@ function StageTab({ stage, isOpen, isTabStop, onOpen }: StageTabProps) {
         sx={{ display: '-webkit-box', WebkitBoxOrient: 'vertical', WebkitLineClamp: '2', overflow: 'hidden' }}
       >
         {stage.name.split(' ').map((word) => (
-          // The space stands outside, or there would be nowhere to break.
           <Fragment key={word}>
-            <Box component="span" sx={{ whiteSpace: 'nowrap' }}>
-              {word}
-            </Box>{' '}
+            <span style={{ whiteSpace: 'nowrap' }}>{word}</span>{' '}
           </Fragment>
         ))}
       </Box>

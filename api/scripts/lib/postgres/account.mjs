@@ -12,7 +12,7 @@ import { PlainError } from '../say.mjs';
 function idOfPostgres(which) {
   const { status, stdout } = spawnSync('id', [which, 'postgres'], { encoding: 'utf8' });
   if (status !== 0)
-    throw new PlainError('PostgreSQL is installed, but there is no account named postgres to run it.');
+    throw new PlainError('PostgreSQL is here, but there is no account named postgres to run it.');
   return Number(stdout);
 }
 

@@ -114,7 +114,13 @@ export function NeedsYou() {
                 {detail}
               </Typography>
             </div>
-            <Box sx={{ display: 'flex', alignItems: { xs: 'center', md: 'flex-start' }, minHeight: { xs: 44, md: 0 } }}>
+            <Box
+              sx={{
+                display: 'flex',
+                alignItems: { xs: 'center', md: 'flex-start' },
+                minHeight: { xs: 44, md: 0 },
+              }}
+            >
               <Link component={RouterLink} to={path} aria-label={`${act}: ${title}`} sx={{ fontWeight: 700 }}>
                 {act}
               </Link>

@@ -98,7 +98,10 @@ function asLevel({
 
 function LevelsLink({ buildId }: { buildId: string }) {
   return (
-    <Box component="span" sx={{ display: 'inline-flex', alignItems: 'center', gap: '6px', color: 'token.green' }}>
+    <Box
+      component="span"
+      sx={{ display: 'inline-flex', alignItems: 'center', gap: '6px', color: 'token.green' }}
+    >
       <Icon name="levelBench" size={18} />
       <Link component={RouterLink} to={`/build/${buildId}/levels`}>
         Level diagram

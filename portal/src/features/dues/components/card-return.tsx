@@ -1,0 +1,121 @@
+import Box from '@mui/material/Box';
+import Link from '@mui/material/Link';
+import { useQueryClient } from '@tanstack/react-query';
+import { useEffect, useState, type ReactNode } from 'react';
+import { Banner } from '../../../shared-ui/banner';
+import { ProblemAlert } from '../../../shared-ui/problem-alert';
+import { StateMark } from '../../../shared-ui/states/shape';
+import { DUES_KEY, useCardPayment } from '../api/dues';
+
+const PATIENCE_MS = 20_000;
+
+interface CardReturnProps {
+  invoiceId: string;
+  /** Came back after paying, or left the card page without. */
+  how: 'returned' | 'left';
+  onReceipt: (paymentId: string) => void;
+  onDone: () => void;
+}
+
+/** Back from the card page: says that it is checking, then what became of it, in plain words. */
+export function CardReturn({ invoiceId, how, onReceipt, onDone }: CardReturnProps) {
+  const query = useCardPayment(invoiceId);
+  const client = useQueryClient();
+  const isSlow = useAfter(PATIENCE_MS);
+  const { state, receiptId } = query.data ?? {};
+  useEffect(() => {
+    if (state === 'paid') void client.invalidateQueries({ queryKey: DUES_KEY, predicate: isOverview });
+  }, [state, client]);
+  const close = (
+    <Link component="button" onClick={onDone}>
+      Close
+    </Link>
+  );
+  if (query.isError) return <ProblemAlert error={query.error} onRetry={() => void query.refetch()} />;
+  if (state === 'paid' && receiptId)
+    return (
+      <Good title="Paid by card.">
+        <Link component="button" onClick={() => onReceipt(receiptId)}>
+          See the receipt
+        </Link>
+        . {close}
+      </Good>
+    );
+  if (state === 'failed' || state === 'expired' || state === 'none')
+    return (
+      <Banner kind="failed" title="Not paid." action={close}>
+        The card was not charged. Try again, or pay by transfer.
+      </Banner>
+    );
+  if (how === 'left' && state === 'open')
+    return (
+      <Banner kind="not allowed" title="Not paid yet." action={close}>
+        You left the card page. Nothing was taken.
+      </Banner>
+    );
+  return <Checking isSlow={isSlow} isConfirming={state === 'confirming'} />;
+}
+
+/** The lists, not the question that is being asked once a second. */
+const isOverview = ({ queryKey }: { queryKey: readonly unknown[] }): boolean =>
+  queryKey[1] !== 'card-payment';
+
+function useAfter(waitMs: number): boolean {
+  const [isAfter, setIsAfter] = useState(false);
+  useEffect(() => {
+    const timer = setTimeout(() => setIsAfter(true), waitMs);
+    return () => clearTimeout(timer);
+  }, [waitMs]);
+  return isAfter;
+}
+
+function Checking({ isSlow, isConfirming }: { isSlow: boolean; isConfirming: boolean }) {
+  const more = isConfirming
+    ? 'Your bank has yet to confirm the payment. You can leave this page; the receipt comes by mail.'
+    : isSlow
+      ? 'The card service has not answered yet. You can leave this page; it is checked on, and the receipt comes by mail.'
+      : '';
+  return (
+    <Note shape="half" colour="trace" title="Checking.">
+      No money is taken twice. {more}
+    </Note>
+  );
+}
+
+const Good = ({ title, children }: { title: string; children: ReactNode }) => (
+  <Note shape="tick" colour="green" title={title}>
+    {children}
+  </Note>
+);
+
+interface NoteProps {
+  shape: 'half' | 'tick';
+  colour: 'trace' | 'green';
+  title: string;
+  children: ReactNode;
+}
+
+function Note({ shape, colour, title, children }: NoteProps) {
+  return (
+    <Box
+      role="status"
+      sx={{
+        display: 'grid',
+        gridTemplateColumns: '20px 1fr',
+        gap: '10px',
+        p: '11px 16px',
+        border: '1px solid',
+        borderColor: `token.${colour}`,
+        borderRadius: '3px',
+        backgroundColor: `token.${colour}Tint`,
+      }}
+    >
+      <Box sx={{ color: `token.${colour}`, pt: '2px' }}>
+        <StateMark name={shape} size={17} />
+      </Box>
+      <div>
+        <b>{title}</b> {children}
+      </div>
+    </Box>
+  );
+}

@@ -1,0 +1,134 @@
+import Box from '@mui/material/Box';
+import Button from '@mui/material/Button';
+import Typography from '@mui/material/Typography';
+import { useQuery } from '@tanstack/react-query';
+import { useState } from 'react';
+import { useForm, useWatch } from 'react-hook-form';
+import { ProblemError } from '../../../api-client/problem-error';
+import { applyProblemToForm } from '../../../api-client/problem-to-form';
+import { clubDay } from '../../../lib/club-time';
+import { formatAmount, formatMoney } from '../../../lib/money';
+import { DockedDrawer } from '../../../shared-ui/docked-drawer';
+import { FormSelect, FormText, FormToggle } from '../../../shared-ui/form/form-fields';
+import { ProblemAlert } from '../../../shared-ui/problem-alert';
+import { useToast } from '../../../shared-ui/toasts';
+import { useFormDraft } from '../../../shared-ui/use-form-draft';
+import { peopleQuery, useTakeBackPayment, useTakePayment, type OpenInvoice } from '../api/treasury';
+import { InvoiceTicks } from './invoice-ticks';
+import { amountFault, emptyPayment, paymentBody, type PaymentFields } from './payment-fields';
+
+interface PaymentDrawerProps {
+  /** The invoice it was opened on, if it was. */
+  invoice: OpenInvoice | undefined;
+  currency: string;
+  onClose: () => void;
+}
+
+const METHODS = [
+  { value: 'cash', label: 'Cash' },
+  { value: 'cheque', label: 'Cheque' },
+  { value: 'transfer', label: 'Transfer' },
+] as const;
+
+const startOf = (invoice: OpenInvoice | undefined): PaymentFields => ({
+  ...emptyPayment(clubDay(), crypto.randomUUID()),
+  ...(invoice && {
+    personId: invoice.personId,
+    invoiceIds: [invoice.id],
+    amount: formatAmount(invoice.openMinor),
+  }),
+});
+
+/** Writes down cash, a cheque or a transfer. What is typed is kept on the device until it is taken. */
+export function PaymentDrawer({ invoice, currency, onClose }: PaymentDrawerProps) {
+  const [start] = useState(() => startOf(invoice));
+  const form = useForm<PaymentFields>({ defaultValues: start });
+  const { control, handleSubmit, setError, setValue } = form;
+  const draft = useFormDraft(form, `payment:${invoice?.id ?? 'any'}`);
+  const people = useQuery(peopleQuery);
+  const take = useTakePayment();
+  const takeBack = useTakeBackPayment();
+  const say = useToast();
+  const personId = useWatch({ control, name: 'personId' });
+  const submit = handleSubmit((fields) =>
+    take.mutate(paymentBody(fields), {
+      onSuccess: ({ id, receiptNumber, amountMinor, personName }) => {
+        draft.drop();
+        say(`${formatMoney(amountMinor, currency)} from ${personName} taken, ${receiptNumber}.`, () =>
+          takeBack.mutate(id),
+        );
+        onClose();
+      },
+      onError: (error) => {
+        applyProblemToForm(setError, error, ['personId', 'receivedOn', 'note']);
+        if (error instanceof ProblemError && error.is('payment-key-used'))
+          setValue('clientKey', crypto.randomUUID());
+      },
+    }),
+  );
+  return (
+    <DockedDrawer
+      open
+      title="Take a payment"
+      onClose={onClose}
+      footer={
+        <Button variant="contained" fullWidth loading={take.isPending} onClick={() => void submit()}>
+          Take the payment
+        </Button>
+      }
+    >
+      <Box
+        component="form"
+        onSubmit={(event) => void submit(event)}
+        sx={{ display: 'grid', gap: '14px' }}
+        noValidate
+      >
+        {draft.keptFrom && (
+          <Typography variant="small" role="status">
+            {draft.keptFrom}
+          </Typography>
+        )}
+        <FormSelect
+          control={control}
+          name="personId"
+          label="From"
+          rules={{ required: 'Choose who paid.' }}
+          options={[
+            { value: '', label: 'Choose' },
+            ...(people.data?.items ?? []).map(({ id, name }) => ({ value: id, label: name })),
+          ]}
+        />
+        {people.isError && <ProblemAlert error={people.error} onRetry={() => void people.refetch()} />}
+        {personId && (
+          <InvoiceTicks key={personId} control={control} setValue={setValue} personId={personId} />
+        )}
+        <FormToggle control={control} name="method" label="How" options={METHODS} />
+        <FormText
+          control={control}
+          name="amount"
+          label="Amount"
+          inputMode="decimal"
+          end={currency}
+          rules={{ validate: (text) => amountFault(text) ?? true }}
+          hint="More than is open becomes credit for the next invoice."
+        />
+        <FormText
+          control={control}
+          name="receivedOn"
+          label="Received on"
+          type="date"
+          rules={{ required: 'Choose the day.' }}
+        />
+        <FormText
+          control={control}
+          name="note"
+          label="Note"
+          maxLength={200}
+          hint="For the books, such as a cheque’s number."
+        />
+        {take.isError && <ProblemAlert error={take.error} title="The payment was not taken." />}
+        <input type="submit" hidden />
+      </Box>
+    </DockedDrawer>
+  );
+}

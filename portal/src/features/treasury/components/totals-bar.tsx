@@ -1,0 +1,73 @@
+import Box from '@mui/material/Box';
+import { formatMoney } from '../../../lib/money';
+import type { StatementLine, Totals } from '../api/treasury';
+import { afterMatch } from '../settling';
+
+interface TotalsBarProps {
+  totals: Totals;
+  currency: string;
+  /** An open line that is about to be settled. */
+  settling: StatementLine | undefined;
+}
+
+/** The running difference, always in sight. */
+export function TotalsBar({ totals, currency, settling }: TotalsBarProps) {
+  const money = (minor: number) => formatMoney(minor, currency);
+  const { openingMinor, matchedMinor, booksMinor, statementMinor, earlierMinor, differenceMinor } = totals;
+  const isEven = differenceMinor === 0;
+  return (
+    <Box
+      component="section"
+      aria-label="Running difference"
+      sx={{
+        position: 'sticky',
+        bottom: { xs: 64, md: 0 },
+        zIndex: 2,
+        display: 'flex',
+        flexWrap: 'wrap',
+        alignItems: 'center',
+        gap: '6px 28px',
+        m: { xs: '20px -16px 0', md: '20px -32px -40px -34px' },
+        p: { xs: '8px 16px', md: '10px 32px 12px 34px' },
+        borderTop: '1.5px solid',
+        borderColor: 'token.ink',
+        backgroundColor: 'token.sunk',
+      }}
+    >
+      <Part label="Opening balance" value={money(openingMinor)} />
+      <Part label="Matched so far" value={money(matchedMinor)} />
+      {earlierMinor !== 0 && <Part label="Open from earlier" value={money(earlierMinor)} />}
+      <Part label="Books say" value={money(booksMinor)} />
+      <Part label="Statement says" value={money(statementMinor)} />
+      <Box sx={{ ml: 'auto', display: 'flex', alignItems: 'flex-end', gap: '14px' }}>
+        {settling && (
+          <Box sx={{ pb: '4px', typography: 'small' }}>
+            {money(afterMatch(totals, settling))} after this match
+          </Box>
+        )}
+        <Part
+          label="Difference"
+          value={money(differenceMinor)}
+          colour={isEven ? 'token.green' : 'token.copper'}
+          isBig
+        />
+      </Box>
+    </Box>
+  );
+}
+
+interface PartProps {
+  label: string;
+  value: string;
+  colour?: string;
+  isBig?: boolean;
+}
+
+function Part({ label, value, colour = 'token.ink', isBig = false }: PartProps) {
+  return (
+    <Box role="group" aria-label={label} sx={{ textAlign: isBig ? 'right' : 'left', color: colour }}>
+      <Box sx={{ typography: 'least', color: isBig ? colour : 'token.ink2' }}>{label}</Box>
+      <Box sx={{ fontWeight: 700, fontSize: isBig ? '1.5rem' : '1.1875rem', lineHeight: 1.3 }}>{value}</Box>
+    </Box>
+  );
+}
