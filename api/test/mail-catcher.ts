@@ -5,7 +5,7 @@ import { createInterface } from 'node:readline';
 
 const PROGRAM = path.join(__dirname, '../../fakes/dist/mail/main.js');
 
-export interface CaughtMail {
+interface CaughtMail {
   from: string;
   to: string[];
   subject: string;

@@ -8,8 +8,8 @@ async function fill(page: Page, from: string, to: string): Promise<void> {
   await page.getByRole('button', { name: 'Book a bench' }).click();
   await page.getByRole('combobox', { name: 'Bench' }).click();
   await page.getByRole('option', { name: 'Bench 3' }).click();
-  await page.getByLabel('Day').fill(DAY);
-  await page.getByLabel('From').fill(from);
+  await page.getByLabel('Day', { exact: true }).fill(DAY);
+  await page.getByLabel('From', { exact: true }).fill(from);
   await page.getByLabel('To', { exact: true }).fill(to);
   const analyzer = page.getByRole('checkbox', { name: /FR-032/ });
   if (!(await analyzer.isVisible())) await page.getByRole('button', { name: /more instrument/ }).click();
@@ -36,7 +36,7 @@ test('a member books bench and analyzer; the next one is told who has them, take
   const refusal = second.getByRole('alert');
   await expect(refusal).toContainText('The booking was not made.');
   await expect(refusal).toContainText('Bench 3 went to Tamsin Ardley');
-  await expect(second.getByLabel('From')).toHaveValue('15:00');
+  await expect(second.getByLabel('From', { exact: true })).toHaveValue('15:00');
   await refusal.getByRole('button', { name: /16:30 to 18:30/ }).click();
   await expect(second.getByText(/^Booked Bench 3 and FR-032.*16:30 to 18:30/)).toBeVisible();
 

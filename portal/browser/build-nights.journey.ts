@@ -55,7 +55,7 @@ test('a mentor plans a series around a clash; members come, wait, move up and he
   await test.step('one evening is taken by a single night', async () => {
     await mentor.getByRole('button', { name: 'Schedule a night' }).click();
     await typePlan(mentor, { name: taken, first: weeksLater(first, 2), places: '4', bench: 'Bench 2' });
-    await mentor.getByRole('button', { name: 'Schedule the night' }).click();
+    await mentor.getByRole('button', { name: 'Schedule the night', exact: true }).click();
     await expect(mentor.getByRole('status').filter({ hasText: 'is scheduled' })).toBeVisible();
   });
 

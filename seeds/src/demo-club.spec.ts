@@ -102,6 +102,6 @@ describe('the demo club', () => {
 
   it('takes a laid club for inhabited, so that nothing is written twice', async () => {
     const [first] = laid;
-    expect(first && (await stateOfClub(first.context))).toBe('inhabited');
+    expect(first && (await stateOfClub(first.context.database))).toBe('inhabited');
   });
 });

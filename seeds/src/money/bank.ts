@@ -8,6 +8,8 @@ export interface BankLine {
   amountMinor: number;
   /** The account of the books it is settled against by hand; left out when its reference finds it. */
   accountCode?: string;
+  /** The cheque it is, where it is one. */
+  paymentId?: string;
 }
 
 const decimal = (minor: number): string => (minor / 100).toFixed(2);

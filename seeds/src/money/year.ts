@@ -7,7 +7,7 @@ import { StatementImportService } from '@ferrite-row/api/reconciliation/statemen
 import type { Temporal } from 'temporal-polyfill';
 import { PEOPLE } from '../people';
 import { found, type StageSet } from '../stage-set';
-import { Bank, loose, standingLines } from './bank';
+import { Bank, loose, standingLines, type BankLine } from './bank';
 import { billsUntil, tierOf, TIERS, type Bill } from './bills';
 
 const MONTHS = 9;
@@ -105,9 +105,11 @@ async function payOne(
     clientKey: null,
     cardSessionId: way === 'card' ? `cs_demo_${index}_${randomUUID()}` : null,
   };
-  await context.database.transaction((manager) => till.record(manager, payment));
+  const paymentId = await context.database.transaction((manager) => till.record(manager, payment));
   if (way === 'card')
     bank.note({ day: paidOn, description: `CARD SETTLEMENT ${index}`, amountMinor, accountCode: '1030' });
+  if (way === 'cheque')
+    bank.note({ day: paidOn, description: `CHEQUE ${101_200 + index}`, amountMinor, paymentId });
   if (way === 'cash')
     bank.note({ day: paidOn, description: 'CASH PAID IN', amountMinor, accountCode: '1000' });
 }
@@ -135,13 +137,18 @@ async function importOne(
   const file = { originalname: name, buffer: Buffer.from(csv) };
   const statement = await context.get(StatementImportService).import(as('ines'), file);
   const shown = await context.get(ReconciliationService).show(as('ines'), statement.id);
-  const toSettle = isLast ? [] : shown.lines.filter(({ match }) => match === null);
-  for (const { id, description, amountMinor } of toSettle) {
+  for (const { id, description, amountMinor, match } of shown.lines) {
     const line = lines.find((one) => one.description === description && one.amountMinor === amountMinor);
-    if (!line?.accountCode)
-      throw new Error(`Nothing settles the line ${description} of ${month.toString()}.`);
-    await context
-      .get(ReconciliationService)
-      .match(as('ines'), id, { accountCode: line.accountCode, note: '' });
+    if (match !== null || !line || (isLast && !HALL.includes(line.accountCode ?? ''))) continue;
+    await context.get(ReconciliationService).match(as('ines'), id, answerTo(line, month));
   }
+}
+
+/** What the treasurer has settled on the last statement so far: the hall. */
+const HALL = ['5100'];
+
+function answerTo({ paymentId, accountCode, description }: BankLine, month: Temporal.PlainYearMonth) {
+  if (paymentId) return { paymentId };
+  if (accountCode) return { accountCode, note: '' };
+  throw new Error(`Nothing settles the line ${description} of ${month.toString()}.`);
 }

@@ -15,7 +15,7 @@ export function nightName(night: BuildNight, main: BuildNight['series']): string
   return night.series && night.series.id === main?.id ? `Build night ${night.series.number}` : night.title;
 }
 
-export type EntryLook = 'series' | 'one-off' | 'planned' | 'clash' | 'cancelled';
+type EntryLook = 'series' | 'one-off' | 'planned' | 'clash' | 'cancelled';
 
 /** One entry of the month's grid. */
 export interface Entry {

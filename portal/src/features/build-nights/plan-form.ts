@@ -45,7 +45,7 @@ const MOST_PLACES = 100;
 const DAY_MINUTES = 24 * 60;
 
 /** A whole number typed, within its bounds. */
-export function readWhole(text: string, most: number): number | undefined {
+function readWhole(text: string, most: number): number | undefined {
   const isWhole = /^\d{1,4}$/.test(text.trim());
   const value = Number(text);
   return isWhole && value >= 1 && value <= most ? value : undefined;

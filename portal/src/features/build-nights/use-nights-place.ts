@@ -2,8 +2,8 @@ import { useSearchParams } from 'react-router-dom';
 import { clubDay, monthStart } from '../../lib/club-time';
 import type { BuildNight } from './api/nights';
 
-export type NightsViewName = 'month' | 'list';
-export type PlanningKind = 'series' | 'night';
+type NightsViewName = 'month' | 'list';
+type PlanningKind = 'series' | 'night';
 
 /** What the address says: month, view, the night that is open, and the form beside it. */
 export interface NightsPlace {

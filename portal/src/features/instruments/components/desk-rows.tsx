@@ -20,7 +20,7 @@ export function DeskRow({ instrument, isOpen, end, line, onOpen }: DeskRowProps)
       aria-expanded={isOpen}
       sx={{
         display: 'grid',
-        gridTemplateColumns: '70px 1fr auto',
+        gridTemplateColumns: '74px 1fr auto',
         width: '100%',
         minHeight: 52,
         py: '8px',
@@ -32,7 +32,9 @@ export function DeskRow({ instrument, isOpen, end, line, onOpen }: DeskRowProps)
         ...(isOpen && { backgroundColor: 'token.sheet', outline: '1.5px solid', outlineColor: 'token.ink' }),
       }}
     >
-      <AssetTag>{instrument.tag}</AssetTag>
+      <span>
+        <AssetTag>{instrument.tag}</AssetTag>
+      </span>
       <b>{instrument.name}</b>
       {end}
       <Box component="span" sx={{ gridColumn: '2 / -1', typography: 'small', color: 'token.ink2' }}>
