@@ -1,3 +1,7 @@
+import { useMe } from '../api-client/session';
+import { useMyBuilds } from '../features/builds/api/builds';
+import { useReviews } from '../features/builds/api/reviews';
+
 /** What the rail and the More sheet say beside a page. */
 export interface RailCount {
   /** Copper: so many things there need this person. */
@@ -6,10 +10,17 @@ export interface RailCount {
   news?: string;
 }
 
-/**
- * Counts by path, put together here from the hooks of the features, since no feature may know another.
- * @example return { '/dues': useDuesCount(), '/review': useReviewCount() };
- */
+/** Counts by path, put together here from the hooks of the features, since no feature may know another. */
 export function useRailCounts(): Partial<Record<string, RailCount>> {
-  return {};
+  const me = useMe();
+  const builds = useMyBuilds();
+  const reviews = useReviews(me.hasRole('mentor'));
+  const back = (builds.data ?? [])
+    .flatMap(({ stages }) => stages)
+    .filter(({ state }) => state === 'sent back').length;
+  const waiting = (reviews.data?.items ?? []).filter(({ isOwn }) => !isOwn).length;
+  return {
+    ...(back > 0 && { '/build': { count: back, news: 'Sent back' } }),
+    ...(waiting > 0 && { '/review': { count: waiting, news: `${waiting} waiting` } }),
+  };
 }

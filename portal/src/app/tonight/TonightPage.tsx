@@ -47,7 +47,7 @@ export default function TonightPage() {
           <BeforeYouSwitchOn />
         </Box>
       </Box>
-      <Box sx={{ display: 'grid', gap: '28px', mt: '28px' }}>
+      <Box sx={{ display: 'grid', gridTemplateColumns: 'minmax(0, 1fr)', gap: '28px', mt: '28px' }}>
         <BuildStrip />
         <BenchRow day={day} now={now} />
         <ComingUp day={day} />

@@ -114,14 +114,17 @@ export function NeedsYou() {
                 {detail}
               </Typography>
             </div>
-            <Link
-              component={RouterLink}
-              to={path}
-              aria-label={`${act}: ${title}`}
-              sx={{ fontWeight: 700, alignSelf: 'flex-start', minHeight: { xs: 44, md: 0 } }}
+            <Box
+              sx={{
+                display: 'flex',
+                alignItems: { xs: 'center', md: 'flex-start' },
+                minHeight: { xs: 44, md: 0 },
+              }}
             >
-              {act}
-            </Link>
+              <Link component={RouterLink} to={path} aria-label={`${act}: ${title}`} sx={{ fontWeight: 700 }}>
+                {act}
+              </Link>
+            </Box>
           </Box>
         ))}
       </Box>

@@ -18,7 +18,7 @@ const CELL = { py: '8px', px: '6px', borderBottom: '1px solid', borderColor: 'to
 export function Evidence({ stage }: { stage: BuildStage }) {
   const photos = stage.checks.flatMap((check) => check.photos);
   return (
-    <Box sx={{ display: 'grid', gap: '24px' }}>
+    <Box sx={{ display: 'grid', gridTemplateColumns: 'minmax(0, 1fr)', gap: '24px' }}>
       <Readings checks={stage.checks.filter(({ kind }) => kind === 'measure')} />
       <Ticks checks={stage.checks.filter(({ kind }) => kind === 'tick' || kind === 'safety')} />
       {photos.length > 0 && (
@@ -97,7 +97,7 @@ function ReadingRow({ check }: { check: BuildCheck }) {
       <Box component="td" sx={{ ...CELL, whiteSpace: 'nowrap' }}>
         {windowText(check, false)}
       </Box>
-      <Box component="td" sx={{ ...CELL, width: 130 }}>
+      <Box component="td" sx={{ ...CELL, width: 118 }}>
         <WindowBar
           low={check.windowLow ?? undefined}
           high={check.windowHigh ?? undefined}

@@ -1,5 +1,6 @@
 import Box from '@mui/material/Box';
 import Typography from '@mui/material/Typography';
+import { createPortal } from 'react-dom';
 import { VerdictChip } from '../../../shared-ui/states/verdict-chip';
 import { useKeyboardUp } from '../logic/use-keyboard-up';
 import type { ReadingFormState } from '../logic/use-reading-form';
@@ -13,29 +14,26 @@ const BOTTOM_BAR = 62;
 export function PinnedResult({ form }: { form: ReadingFormState }) {
   const hidden = useKeyboardUp();
   const isShort = hidden !== undefined;
-  return (
-    <>
-      <Box aria-hidden sx={{ height: isShort ? 76 : 12 }} />
-      <Box
-        component="section"
-        aria-label="Result"
-        sx={{
-          position: isShort ? 'fixed' : 'sticky',
-          zIndex: isShort ? 'snackbar' : 'appBar',
-          bottom: isShort ? hidden : `calc(${BOTTOM_BAR}px + env(safe-area-inset-bottom))`,
-          left: 0,
-          right: 0,
-          mx: isShort ? 0 : '-16px',
-          px: '16px',
-          py: isShort ? '8px' : '12px',
-          borderTop: '1.5px solid',
-          borderColor: 'token.ink',
-          backgroundColor: 'token.sheet',
-        }}
-      >
-        {isShort ? <ShortForm form={form} /> : <LongForm form={form} />}
-      </Box>
-    </>
+  return createPortal(
+    <Box
+      component="section"
+      aria-label="Result"
+      sx={{
+        position: 'fixed',
+        zIndex: isShort ? 'snackbar' : 'appBar',
+        bottom: isShort ? hidden : `calc(${BOTTOM_BAR}px + env(safe-area-inset-bottom))`,
+        left: 0,
+        right: 0,
+        px: '16px',
+        py: isShort ? '8px' : '12px',
+        borderTop: '1.5px solid',
+        borderColor: 'token.ink',
+        backgroundColor: 'token.sheet',
+      }}
+    >
+      {isShort ? <ShortForm form={form} /> : <LongForm form={form} />}
+    </Box>,
+    document.body,
   );
 }
 

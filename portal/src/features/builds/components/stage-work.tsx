@@ -98,13 +98,15 @@ function asLevel({
 
 function LevelsLink({ buildId }: { buildId: string }) {
   return (
-    <Link
-      component={RouterLink}
-      to={`/build/${buildId}/levels`}
-      sx={{ display: 'inline-flex', alignItems: 'center', gap: '6px', minHeight: 44 }}
+    <Box
+      component="span"
+      sx={{ display: 'inline-flex', alignItems: 'center', gap: '6px', color: 'token.green' }}
     >
-      <Icon name="levelBench" size={18} /> Level diagram
-    </Link>
+      <Icon name="levelBench" size={18} />
+      <Link component={RouterLink} to={`/build/${buildId}/levels`}>
+        Level diagram
+      </Link>
+    </Box>
   );
 }
 

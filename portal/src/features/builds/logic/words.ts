@@ -30,7 +30,9 @@ export function readingWords(reading: Measured, figures: 1 | 2): ReadingWords {
       unit: 'MHz',
       plusMinus: `± ${fixed(expandedUncertainty, 0)} Hz`,
     };
-  const decimals = Math.min(decimalsFor(expandedUncertainty, figures), 3);
+  // A level is always told to a tenth at least, so that a column of them lines up.
+  const least = unit.startsWith('dB') ? figures : 0;
+  const decimals = Math.max(least, Math.min(decimalsFor(expandedUncertainty, figures), 3));
   return {
     value: numberText(value, unit, decimals),
     unit,

@@ -67,7 +67,7 @@ function Queue({ reviews, now }: { reviews: readonly Review[]; now: Date }) {
     <Box
       sx={{
         display: 'grid',
-        gridTemplateColumns: { xs: 'minmax(0, 1fr)', lg: '240px minmax(0, 1fr) 290px' },
+        gridTemplateColumns: { xs: 'minmax(0, 1fr)', lg: '216px minmax(0, 1fr) 280px' },
         gap: '24px',
         alignItems: 'start',
       }}
@@ -118,7 +118,7 @@ function OpenReview({ review, onDecided }: { review: Review; onDecided: () => vo
             component={RouterLink}
             to={`/build/${buildId}/stages/${stageId}`}
             color="inherit"
-            underline="hover"
+            sx={{ textDecoration: 'none', borderBottom: 0 }}
           >
             <b>
               stage {stagePosition} {stageName}

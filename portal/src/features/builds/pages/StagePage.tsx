@@ -17,6 +17,9 @@ import { StageRecord, StageWork } from '../components/stage-work';
 import { findStage, isInHand, isTyped, nextCheck } from '../logic/stage';
 import { serialText } from '../logic/words';
 
+/** Room at the end of a phone's page for the result that is pinned over it. */
+const RESULT_HEIGHT = 240;
+
 /** My build, one stage: is it good, and if not, what would settle it? */
 export default function StagePage() {
   const { buildId = '', stageId = '' } = useParams();
@@ -92,6 +95,7 @@ function Stage({ build, stage }: { build: Build; stage: BuildStage }) {
       </Box>
       <StageBody build={build} stage={stage} isOwn={isOwn} />
       {isPhone && actions && <Box sx={{ mt: '20px', display: 'grid' }}>{actions}</Box>}
+      {isPhone && isOwn && isInHand(stage) && <Box aria-hidden sx={{ height: RESULT_HEIGHT }} />}
     </>
   );
 }
