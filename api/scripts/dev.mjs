@@ -55,7 +55,8 @@ await runSession(async (session) => {
   );
   const vite = ['vite', '--host', settings.host, '--port', String(settings.port), '--strictPort'];
   watch('portal', vite, 'portal', { ...process.env, API_URL: apiAddress });
-  await untilHealthy(api, `${apiAddress}/api/health`, signal);
+  // It compiles everything first.
+  await untilHealthy(api, `${apiAddress}/api/health`, signal, 300_000);
 
   const { address, isProduction } = settings;
   say(readiness({ address, isDemo: !isProduction, ...fakeAddresses(place), logs: run.logs }));

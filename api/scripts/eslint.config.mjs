@@ -1,11 +1,6 @@
 import reactHooks from 'eslint-plugin-react-hooks';
 import tseslint from 'typescript-eslint';
 
-const ICON_BARREL = {
-  name: '@mui/icons-material',
-  message: 'Import one icon: @mui/icons-material/Name (the whole set triples the build).',
-};
-
 export default tseslint.config(
   {
     ignores: [
@@ -44,7 +39,6 @@ export default tseslint.config(
       ],
       'max-lines': ['error', { max: 300, skipBlankLines: true, skipComments: true }],
       'max-lines-per-function': ['error', { max: 80, skipBlankLines: true, skipComments: true }],
-      'no-restricted-imports': ['error', { paths: [ICON_BARREL] }],
     },
   },
   {

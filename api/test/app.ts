@@ -52,7 +52,7 @@ export async function startTestApp(overrides: Partial<Environment> = {}): Promis
   };
 }
 
-function testEnvironment(databaseUrl: string): Record<string, string> {
+export function testEnvironment(databaseUrl: string): Record<string, string> {
   return {
     NODE_ENV: 'test',
     DATABASE_URL: databaseUrl,

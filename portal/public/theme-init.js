@@ -8,7 +8,5 @@
     // Storage may be shut off; then the device decides.
   }
   if (chosen === 'light' || chosen === 'dark') dark = chosen === 'dark';
-  var root = document.documentElement;
-  root.setAttribute('data-theme', dark ? 'dark' : 'light');
-  root.style.backgroundColor = dark ? '#161510' : '#F5F0E4';
+  document.documentElement.setAttribute('data-theme', dark ? 'dark' : 'light');
 })();

@@ -35,7 +35,14 @@ export async function seedNights(
   stageId: (position: number) => string,
 ): Promise<number> {
   const nightIds = await scheduleCourse(set, inventory);
-  for (const [index, nightId] of nightIds.entries()) await sayComing(set, nightId, index);
+  const { days } = courseDays(set);
+  for (const [index, nightId] of nightIds.entries())
+    await sayComing(
+      set,
+      nightId,
+      howMany(index),
+      days[Math.min(index, NIGHTS_BEHIND)] ?? set.calendar.nextNight,
+    );
   await focus(set, nightIds, stageId);
   return nightIds.length + (await seedOneOffs(set, inventory));
 }
@@ -67,22 +74,18 @@ function howMany(index: number): number {
   return ahead[index - NIGHTS_BEHIND] ?? 1;
 }
 
+/** People say so in the ten days before `night`; for nights still far off, in those before the next one. */
 async function sayComing(
   { context, clock, calendar, as }: StageSet,
   nightId: string,
-  index: number,
+  count: number,
+  night: Day,
 ): Promise<void> {
-  const said = courseDaysBefore(calendar.nextNight, index);
-  for (const [order, key] of COMING.slice(0, howMany(index)).entries()) {
-    const at = calendar.at(said.add({ days: Math.floor(order / 2) }), 18, order);
+  for (const [order, key] of COMING.slice(0, count).entries()) {
+    const at = calendar.at(night.subtract({ days: 10 - Math.floor(order / 2) }), 18, order);
     clock.set(at < calendar.now ? at : calendar.now);
     await context.get(PlacesService).come(as(key), nightId);
   }
-}
-
-/** People say so in the week before; for nights still far off, in the last days. */
-function courseDaysBefore(nextNight: Day, index: number): Day {
-  return nextNight.add({ days: 7 * Math.min(0, index - NIGHTS_BEHIND) - 10 });
 }
 
 async function focus(

@@ -12,6 +12,6 @@ async function getClub(): Promise<Club> {
 }
 
 /** The club's public name, zone and currency; it hardly ever changes. */
-export const clubQuery = queryOptions({ queryKey: ['club'], queryFn: getClub, staleTime: Infinity });
+const clubQuery = queryOptions({ queryKey: ['club'], queryFn: getClub, staleTime: Infinity });
 
 export const useClub = () => useQuery(clubQuery);

@@ -4,4532 +4,4544 @@
  */
 
 export interface paths {
-    "/api/auth/me": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Who is signed in. */
-        get: operations["Auth.me"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+  '/api/auth/me': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/auth/refresh": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Exchanges the refresh cookie for the next pair. */
-        post: operations["Auth.refresh"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** Who is signed in. */
+    get: operations['Auth.me'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/auth/refresh': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/auth/sign-in": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Starts a session. The tokens come as httpOnly cookies; scripts never see them. */
-        post: operations["Auth.signIn"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Exchanges the refresh cookie for the next pair. */
+    post: operations['Auth.refresh'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/auth/sign-in': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/auth/sign-out": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Ends the session on the server. Safe to repeat. */
-        post: operations["Auth.signOut"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Starts a session. The tokens come as httpOnly cookies; scripts never see them. */
+    post: operations['Auth.signIn'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/auth/sign-out': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/benches": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** The benches that can be booked, in the order they stand. */
-        get: operations["Benches.list"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Ends the session on the server. Safe to repeat. */
+    post: operations['Auth.signOut'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/benches': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/bookings": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Who has what in a stretch of at most 62 days. */
-        get: operations["Bookings.list"];
-        put?: never;
-        /** Books benches and instruments together: all of them, or nothing. */
-        post: operations["Bookings.book"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** The benches that can be booked, in the order they stand. */
+    get: operations['Benches.list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/bookings': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/bookings/mine": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Your own sessions that are not over. */
-        get: operations["Bookings.mine"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** Who has what in a stretch of at most 62 days. */
+    get: operations['Bookings.list'];
+    put?: never;
+    /** Books benches and instruments together: all of them, or nothing. */
+    post: operations['Bookings.book'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/bookings/mine': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/bookings/{bookingId}": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        post?: never;
-        /** Cancels it, or ends it now when it runs already. Cancelling twice is no error. */
-        delete: operations["Bookings.cancel"];
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** Your own sessions that are not over. */
+    get: operations['Bookings.mine'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/bookings/{bookingId}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/build-nights": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** The nights of a stretch of time, at most 100 days, earliest first; cancelled ones among them. */
-        get: operations["BuildNights.list"];
-        put?: never;
-        /**
-         * Schedules one night or a series, whole or not at all. When a bench or a mentor is taken on any date, nothing is
-         *     made and the answer is 409 `night-clash` with `clashes`: each date, the reasons, and what would make it clear.
-         *     Send it again with those dates in `skip`, or with other benches or mentors for them in `instead`.
-         */
-        post: operations["BuildNights.schedule"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    post?: never;
+    /** Cancels it, or ends it now when it runs already. Cancelling twice is no error. */
+    delete: operations['Bookings.cancel'];
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/build-nights': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/build-nights/preview": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** What scheduling this would meet, date by date. Nothing is kept. */
-        post: operations["BuildNights.preview"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** The nights of a stretch of time, at most 100 days, earliest first; cancelled ones among them. */
+    get: operations['BuildNights.list'];
+    put?: never;
+    /**
+     * Schedules one night or a series, whole or not at all. When a bench or a mentor is taken on any date, nothing is
+     *     made and the answer is 409 `night-clash` with `clashes`: each date, the reasons, and what would make it clear.
+     *     Send it again with those dates in `skip`, or with other benches or mentors for them in `instead`.
+     */
+    post: operations['BuildNights.schedule'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/build-nights/preview': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/build-nights/{id}": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** One night with the names of who is coming and who waits. */
-        get: operations["BuildNights.show"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        /** Changes one night; what is left out stays. Other times are told to everybody who is coming or waiting. */
-        patch: operations["BuildNights.change"];
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** What scheduling this would meet, date by date. Nothing is kept. */
+    post: operations['BuildNights.preview'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/build-nights/{id}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/build-nights/{id}/cancel": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Cancels one night with a word, which goes to everybody who was coming, waiting or on duty. */
-        post: operations["BuildNights.cancel"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** One night with the names of who is coming and who waits. */
+    get: operations['BuildNights.show'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    /** Changes one night; what is left out stays. Other times are told to everybody who is coming or waiting. */
+    patch: operations['BuildNights.change'];
+    trace?: never;
+  };
+  '/api/build-nights/{id}/cancel': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/build-nights/{id}/coming": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Says that the caller is coming: a place, or the end of the waiting list when the night is full. */
-        post: operations["BuildNights.come"];
-        /** Says that the caller is not coming after all; the first in the waiting list moves up. */
-        delete: operations["BuildNights.stayAway"];
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Cancels one night with a word, which goes to everybody who was coming, waiting or on duty. */
+    post: operations['BuildNights.cancel'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/build-nights/{id}/coming': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/builds": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Begins a build to the newest edition of a plan. */
-        post: operations["Builds.start"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Says that the caller is coming: a place, or the end of the waiting list when the night is full. */
+    post: operations['BuildNights.come'];
+    /** Says that the caller is not coming after all; the first in the waiting list moves up. */
+    delete: operations['BuildNights.stayAway'];
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/builds': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/builds/mine": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** One's own builds with everything in them, the newest first. */
-        get: operations["Builds.mine"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Begins a build to the newest edition of a plan. */
+    post: operations['Builds.start'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/builds/mine': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/builds/{buildId}": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** A build, for its builder and for mentors. */
-        get: operations["Builds.show"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** One's own builds with everything in them, the newest first. */
+    get: operations['Builds.mine'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/builds/{buildId}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/builds/{buildId}/checks/{checkId}/instruments": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Instruments of the kind the check asks for, with the reason against those that cannot be chosen. */
-        get: operations["Checks.listInstruments"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** A build, for its builder and for mentors. */
+    get: operations['Builds.show'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/builds/{buildId}/checks/{checkId}/instruments': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/builds/{buildId}/checks/{checkId}/marks": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Ticks the check, acknowledges it by name, or says that a mentor has seen it. */
-        post: operations["Checks.mark"];
-        delete: operations["Checks.takeBackMark"];
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** Instruments of the kind the check asks for, with the reason against those that cannot be chosen. */
+    get: operations['Checks.listInstruments'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/builds/{buildId}/checks/{checkId}/marks': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/builds/{buildId}/checks/{checkId}/photos": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Adds a picture of at most 6 MB to a check that asks for one. */
-        post: operations["Photos.add"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Ticks the check, acknowledges it by name, or says that a mentor has seen it. */
+    post: operations['Checks.mark'];
+    delete: operations['Checks.takeBackMark'];
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/builds/{buildId}/checks/{checkId}/photos': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/builds/{buildId}/checks/{checkId}/readings": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Keeps a reading as typed; the answer says what it comes to and how it is judged. */
-        post: operations["Checks.keepReading"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Adds a picture of at most 6 MB to a check that asks for one. */
+    post: operations['Photos.add'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/builds/{buildId}/checks/{checkId}/readings': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/builds/{buildId}/licence": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Says that the builder's licence was seen, which opens the last stage. */
-        post: operations["Builds.seeLicence"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Keeps a reading as typed; the answer says what it comes to and how it is judged. */
+    post: operations['Checks.keepReading'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/builds/{buildId}/licence': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/builds/{buildId}/photos/{photoId}": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** The picture itself. */
-        get: operations["Photos.show"];
-        put?: never;
-        post?: never;
-        /** Takes a picture back while the stage is still in its builder's hands. */
-        delete: operations["Photos.takeBack"];
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Says that the builder's licence was seen, which opens the last stage. */
+    post: operations['Builds.seeLicence'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/builds/{buildId}/photos/{photoId}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/builds/{buildId}/stages/{stageId}/send-back": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Sends the stage back to its builder with a word. */
-        post: operations["Stages.sendBack"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** The picture itself. */
+    get: operations['Photos.show'];
+    put?: never;
+    post?: never;
+    /** Takes a picture back while the stage is still in its builder's hands. */
+    delete: operations['Photos.takeBack'];
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/builds/{buildId}/stages/{stageId}/send-back': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/builds/{buildId}/stages/{stageId}/sign-off": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        post: operations["Stages.signOff"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Sends the stage back to its builder with a word. */
+    post: operations['Stages.sendBack'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/builds/{buildId}/stages/{stageId}/sign-off': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/builds/{buildId}/stages/{stageId}/submit": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Sends the stage to a mentor, with a note. */
-        post: operations["Stages.submit"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    post: operations['Stages.signOff'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/builds/{buildId}/stages/{stageId}/submit': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/builds/{buildId}/stages/{stageId}/withdraw": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Takes the stage back from the mentor. */
-        post: operations["Stages.withdraw"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Sends the stage to a mentor, with a note. */
+    post: operations['Stages.submit'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/builds/{buildId}/stages/{stageId}/withdraw': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/clearances": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Who is cleared on what. */
-        get: operations["Clearances.list"];
-        put?: never;
-        /** Clears somebody on a kind of instrument, or renews what they have. */
-        post: operations["Clearances.grant"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Takes the stage back from the mentor. */
+    post: operations['Stages.withdraw'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/clearances': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/clearances/mine": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get: operations["Clearances.mine"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** Who is cleared on what. */
+    get: operations['Clearances.list'];
+    put?: never;
+    /** Clears somebody on a kind of instrument, or renews what they have. */
+    post: operations['Clearances.grant'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/clearances/mine': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/clearances/{clearanceId}": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        post?: never;
-        delete: operations["Clearances.end"];
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get: operations['Clearances.mine'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/clearances/{clearanceId}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/club": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** The club's name, zone and currency. */
-        get: operations["Club.front"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    post?: never;
+    delete: operations['Clearances.end'];
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/club': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/dues/mine": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** The signed-in person's tier, payments and credit, and where to send a transfer. */
-        get: operations["Dues.mine"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** The club's name, zone and currency. */
+    get: operations['Club.front'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/dues/mine': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/groups": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Every group of the club with its members. */
-        get: operations["Groups.list"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** The signed-in person's tier, payments and credit, and where to send a transfer. */
+    get: operations['Dues.mine'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/groups': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/groups/mine": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get: operations["Groups.mine"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** Every group of the club with its members. */
+    get: operations['Groups.list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/groups/mine': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/health": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Answers 200 when the process can reach its database. */
-        get: operations["Health.check"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get: operations['Groups.mine'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/health': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/instruments": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Every instrument of the club, and whether you may book it on the day asked about. */
-        get: operations["Instruments.list"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** Answers 200 when the process can reach its database. */
+    get: operations['Health.check'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/instruments': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/instruments/{instrumentId}": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get: operations["Instruments.show"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** Every instrument of the club, and whether you may book it on the day asked about. */
+    get: operations['Instruments.list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/instruments/{instrumentId}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/instruments/{instrumentId}/calibration": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Sets the last day on which its calibration holds. */
-        post: operations["Instruments.changeCalibration"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get: operations['Instruments.show'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/instruments/{instrumentId}/calibration': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/instruments/{instrumentId}/condition": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Puts it in repair, out of use, or back in use. */
-        post: operations["Instruments.changeCondition"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Sets the last day on which its calibration holds. */
+    post: operations['Instruments.changeCalibration'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/instruments/{instrumentId}/condition': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/instruments/{instrumentId}/history": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Who changed what on it, and when, the latest first. */
-        get: operations["Instruments.history"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Puts it in repair, out of use, or back in use. */
+    post: operations['Instruments.changeCondition'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/instruments/{instrumentId}/history': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/invoices": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Everybody's, those due first first. */
-        get: operations["Invoices.list"];
-        put?: never;
-        post: operations["Invoices.raise"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** Who changed what on it, and when, the latest first. */
+    get: operations['Instruments.history'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/invoices': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/invoices/mine": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** What the signed-in person owes and has paid. */
-        get: operations["Invoices.mine"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** Everybody's, those due first first. */
+    get: operations['Invoices.list'];
+    put?: never;
+    post: operations['Invoices.raise'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/invoices/mine': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/invoices/{invoiceId}/card-payment": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** What became of the last visit to the card page. Asked again and again by the page a person comes back to. */
-        get: operations["Invoices.cardPayment"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** What the signed-in person owes and has paid. */
+    get: operations['Invoices.mine'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/invoices/{invoiceId}/card-payment': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/invoices/{invoiceId}/checkout": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Opens the card service's page for what is left to pay. */
-        post: operations["Invoices.open"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** What became of the last visit to the card page. Asked again and again by the page a person comes back to. */
+    get: operations['Invoices.cardPayment'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/invoices/{invoiceId}/checkout': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/ledger/trial-balance": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Every account with its balance on its side. */
-        get: operations["Ledger.trialBalance"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Opens the card service's page for what is left to pay. */
+    post: operations['Invoices.open'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/ledger/trial-balance': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/payments": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Latest first. */
-        get: operations["Payments.list"];
-        put?: never;
-        /** Writes down cash, a cheque or a transfer. */
-        post: operations["Payments.take"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** Every account with its balance on its side. */
+    get: operations['Ledger.trialBalance'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/payments': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/payments/{paymentId}/take-back": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        post: operations["Payments.takeBack"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** Latest first. */
+    get: operations['Payments.list'];
+    put?: never;
+    /** Writes down cash, a cheque or a transfer. */
+    post: operations['Payments.take'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/payments/{paymentId}/take-back': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/people": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Everybody of the club, by name. */
-        get: operations["People.list"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    post: operations['Payments.takeBack'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/people': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/people/{personId}": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get: operations["People.show"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** Everybody of the club, by name. */
+    get: operations['People.list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/people/{personId}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/plans": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** The club's plans, by name. */
-        get: operations["Plans.list"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get: operations['People.show'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/plans': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/plans/{planId}/editions/{number}": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** One published edition, whole; it never changes. */
-        get: operations["Plans.show"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** The club's plans, by name. */
+    get: operations['Plans.list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/plans/{planId}/editions/{number}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/receipts/{paymentId}": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** A receipt: the payer's own, and the treasurer's. Its id is the payment's. */
-        get: operations["Payments.receipt"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** One published edition, whole; it never changes. */
+    get: operations['Plans.show'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/receipts/{paymentId}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/reconciliation/lines/{lineId}/match": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Settles a line by hand: by invoices, by a payment written down before, or against an account. */
-        post: operations["Reconciliation.match"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** A receipt: the payer's own, and the treasurer's. Its id is the payment's. */
+    get: operations['Payments.receipt'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/reconciliation/lines/{lineId}/match': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/reconciliation/lines/{lineId}/take-back": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        post: operations["Reconciliation.takeBack"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Settles a line by hand: by invoices, by a payment written down before, or against an account. */
+    post: operations['Reconciliation.match'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/reconciliation/lines/{lineId}/take-back': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/reconciliation/statements": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Latest first. */
-        get: operations["Reconciliation.list"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    post: operations['Reconciliation.takeBack'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/reconciliation/statements': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/reconciliation/statements/{statementId}": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get: operations["Reconciliation.show"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** Latest first. */
+    get: operations['Reconciliation.list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/reconciliation/statements/{statementId}': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/reviews": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** What waits for a mentor, the longest waiting first. */
-        get: operations["Reviews.list"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get: operations['Reconciliation.show'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/reviews': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/statements": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /**
-         * Imports a statement of the current account: CSV in UTF-8, a heading with date, description, amount and balance,
-         *     at most 1 MB. Taken whole or not at all; a line imported before is not counted again.
-         */
-        post: operations["Reconciliation.import"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** What waits for a mentor, the longest waiting first. */
+    get: operations['Reviews.list'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/statements': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/tiers": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get: operations["Dues.list"];
-        put?: never;
-        post: operations["Dues.create"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /**
+     * Imports a statement of the current account: CSV in UTF-8, a heading with date, description, amount and balance,
+     *     at most 1 MB. Taken whole or not at all; a line imported before is not counted again.
+     */
+    post: operations['Reconciliation.import'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/tiers': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/tiers/assignments": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Sets a person's tier from a day on. */
-        post: operations["Dues.assign"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get: operations['Dues.list'];
+    put?: never;
+    post: operations['Dues.create'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/tiers/assignments': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/treasury/summary": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** The four figures, the aged dues, and what the card service said that nobody acted on. */
-        get: operations["Dues.summary"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    get?: never;
+    put?: never;
+    /** Sets a person's tier from a day on. */
+    post: operations['Dues.assign'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/treasury/summary': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
-    "/api/webhooks/stripe": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Events of the card service. The signature over the raw body is the proof of who calls. */
-        post: operations["Webhooks.receive"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
+    /** The four figures, the aged dues, and what the card service said that nobody acted on. */
+    get: operations['Dues.summary'];
+    put?: never;
+    post?: never;
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
+  '/api/webhooks/stripe': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
     };
+    get?: never;
+    put?: never;
+    /** Events of the card service. The signature over the raw body is the proof of who calls. */
+    post: operations['Webhooks.receive'];
+    delete?: never;
+    options?: never;
+    head?: never;
+    patch?: never;
+    trace?: never;
+  };
 }
 export type webhooks = Record<string, never>;
 export interface components {
-    schemas: {
-        AgeBandDto: {
-            /** @enum {string} */
-            age: "not yet due" | "1 to 30 days late" | "31 to 60" | "61 to 90" | "over 90";
-            count: number;
-            openMinor: number;
-        };
-        AssignTierDto: {
-            /** Format: uuid */
-            tierId: string;
-            /**
-             * Format: date
-             * @description The first day it holds.
-             */
-            fromOn: string;
-            /** Format: uuid */
-            personId: string;
-        };
-        BankDetailsDto: {
-            accountName: string;
-            accountNumber: string;
-        };
-        BenchDto: {
-            id: string;
-            tag: string;
-            name: string;
-            /** @description Order on the page. */
-            position: number;
-        };
-        BenchPageDto: {
-            items: components["schemas"]["BenchDto"][];
-            total: number;
-            page: number;
-            perPage: number;
-        };
-        BookItemDto: {
-            /** @enum {string} */
-            kind: "invoice" | "payment" | "account";
-            /** @description Of the invoice or payment; the code of an account. */
-            id: string;
-            /** @example D-0412 */
-            tag: string;
-            name: string;
-            detail: string;
-            amountMinor: number;
-            /** @description The statement's line it belongs to; null while it is open. */
-            lineId: string | null;
-        };
-        BookedResourceDto: {
-            /** @enum {string} */
-            kind: "bench" | "instrument";
-            id: string;
-            /** @example FR-031 */
-            tag: string;
-            name: string;
-        };
-        BookingDto: {
-            /** @enum {string} */
-            kind: "session" | "build night";
-            /** Format: uuid */
-            groupId: string | null;
-            groupName: string | null;
-            /**
-             * Format: uuid
-             * @description What it was made for: on your own only.
-             */
-            checkId: string | null;
-            id: string;
-            /** @description Of a build night; empty for a session. */
-            title: string;
-            personId: string;
-            personName: string;
-            /** @description Whether it is your session. */
-            mine: boolean;
-            resources: components["schemas"]["BookedResourceDto"][];
-            /** Format: date-time */
-            startsAt: string;
-            /** Format: date-time */
-            endsAt: string;
-            /** Format: date-time */
-            madeAt: string;
-            /** @description Whether you may cancel it now. */
-            mayCancel: boolean;
-        };
-        BookingOverlapDto: {
-            takenBy: components["schemas"]["TakenDto"][];
-            /** @description Up to three times at which everything wanted is free for as long, the nearest first. */
-            nearestFree: components["schemas"]["SpanDto"][];
-            /**
-             * @description Stable; opened, it explains itself.
-             * @example /problems/invalid-input
-             */
-            type: string;
-            title: string;
-            status: number;
-            /** @description This occurrence, in words for a member. */
-            detail: string;
-            /** @description Names this request in the log. */
-            instance: string;
-            errors?: components["schemas"]["FieldProblemDto"][];
-        };
-        BuildCheckDto: {
-            /** @enum {string} */
-            kind: "tick" | "measure" | "photo" | "safety" | "mentor's eyes";
-            /** @description What the form starts with, in the fields' own units. */
-            defaults: {
-                [key: string]: number;
-            };
-            /** @description There is what the check asks for. */
-            isSettled: boolean;
-            /** @description The newest last; that one is in force, the others stay in the record. */
-            readings: components["schemas"]["ReadingDto"][];
-            mark: components["schemas"]["MarkDto"] | null;
-            photos: components["schemas"]["PhotoDto"][];
-            id: string;
-            /** @description Order on the checklist, from 1. */
-            position: number;
-            title: string;
-            instruction: string;
-            isRequired: boolean;
-            /** @description For a measure: how it is taken; `gain` and `carried` work themselves out. */
-            method: string | null;
-            /** @description Unit of the value and of the window. */
-            unit: string | null;
-            windowLow: number | null;
-            windowHigh: number | null;
-            target: number | null;
-            /** @description For a value that works itself out: the checks it is made of. */
-            fromCheckIds: string[];
-            levelPointId: string | null;
-            instrumentKindId: string | null;
-        };
-        BuildDto: {
-            id: string;
-            builder: components["schemas"]["PersonRefDto"];
-            planId: string;
-            planName: string;
-            editionNumber: number;
-            /** @example 7 */
-            serial: number;
-            /** @example 2026-01-15T19:00:00Z */
-            startedAt: string;
-            endedAt: string | null;
-            /** @description When an organiser saw the licence. */
-            licenceSeenAt: string | null;
-            /** @description The stage its builder is on. */
-            currentStageId: string | null;
-            stages: components["schemas"]["BuildStageDto"][];
-            /** @description In signal order. */
-            levelPoints: components["schemas"]["LevelPointDto"][];
-        };
-        BuildNightDetailDto: {
-            id: string;
-            title: string;
-            series: components["schemas"]["NightSeriesDto"] | null;
-            /** Format: date-time */
-            startsAt: string;
-            /** Format: date-time */
-            endsAt: string;
-            places: number;
-            /** @description How many are coming. */
-            coming: number;
-            /** @description How many wait for a place. */
-            waiting: number;
-            note: string;
-            benches: components["schemas"]["NightBenchDto"][];
-            mentors: components["schemas"]["NightPersonDto"][];
-            stages: components["schemas"]["NightStageDto"][];
-            /** @description null: not said anything. */
-            mine: components["schemas"]["NightStandingDto"] | null;
-            /** Format: date-time */
-            cancelledAt: string | null;
-            cancelledReason: string | null;
-            /** @description In the order in which they said so. */
-            comingPeople: components["schemas"]["NightGuestDto"][];
-            /** @description In the order in which they move up. */
-            waitingPeople: components["schemas"]["NightGuestDto"][];
-        };
-        BuildNightDto: {
-            id: string;
-            title: string;
-            series: components["schemas"]["NightSeriesDto"] | null;
-            /** Format: date-time */
-            startsAt: string;
-            /** Format: date-time */
-            endsAt: string;
-            places: number;
-            /** @description How many are coming. */
-            coming: number;
-            /** @description How many wait for a place. */
-            waiting: number;
-            note: string;
-            benches: components["schemas"]["NightBenchDto"][];
-            mentors: components["schemas"]["NightPersonDto"][];
-            stages: components["schemas"]["NightStageDto"][];
-            /** @description null: not said anything. */
-            mine: components["schemas"]["NightStandingDto"] | null;
-            /** Format: date-time */
-            cancelledAt: string | null;
-            cancelledReason: string | null;
-        };
-        BuildNightsDto: {
-            items: components["schemas"]["BuildNightDto"][];
-        };
-        BuildStageDto: {
-            cautions: ("load before power" | "hot parts" | "rf power" | "mains" | "rf exposure" | "licence needed")[];
-            /** @enum {string} */
-            state: "not started" | "on the bench" | "with mentor" | "sent back" | "signed off" | "locked";
-            id: string;
-            position: number;
-            /** @example Pre-driver */
-            name: string;
-            summary: string;
-            /** @description What opens a locked stage. */
-            lockedBecause: string | null;
-            /** @description Checks still to settle before it can be sent to a mentor. */
-            missingToSend: number;
-            /** @description Checks still to settle before it can be signed off. */
-            missingToSignOff: number;
-            settled: number;
-            checks: components["schemas"]["BuildCheckDto"][];
-            /** @description Oldest first. */
-            events: components["schemas"]["StageEventDto"][];
-        };
-        CancelNightDto: {
-            reason: string;
-        };
-        CardNoteDto: {
-            id: string;
-            receivedAt: string;
-            note: string;
-        };
-        CardPaymentDto: {
-            /**
-             * @description `open`: the page was opened and nothing has come from it yet; `confirming`: the card was taken, the bank has yet
-             *     to confirm; `failed`: no money was taken.
-             * @enum {string}
-             */
-            state: "none" | "open" | "confirming" | "paid" | "failed" | "expired";
-            /** @description Left to pay on the invoice now. */
-            openMinor: number;
-            /** @description The receipt, once it is paid. */
-            receiptId: string | null;
-        };
-        ChangeCalibrationDto: {
-            /**
-             * Format: date
-             * @description Last day on which the calibration holds.
-             */
-            dueOn: string;
-            /** @description Who calibrated it, and what it came out at. */
-            note: string;
-        };
-        ChangeConditionDto: {
-            /** @enum {string} */
-            condition: "ready" | "in repair" | "out of use";
-            /** @description What is wrong, or what was put right; members read it. */
-            note: string;
-        };
-        ChangeNightDto: {
-            /** Format: date-time */
-            startsAt?: string;
-            /** Format: date-time */
-            endsAt?: string;
-            title?: string;
-            /** @description Not fewer than are coming. More moves the waiting list up. */
-            places?: number;
-            note?: string;
-            benchIds?: string[];
-            mentorIds?: string[];
-            stageIds?: string[];
-        };
-        CheckedNightDto: {
-            /**
-             * @description The night's day on the club's calendar.
-             * @example 2026-10-20
-             */
-            date: string;
-            /** Format: date-time */
-            startsAt: string;
-            /** Format: date-time */
-            endsAt: string;
-            /** @enum {string} */
-            verdict: "clash" | "clear" | "left out";
-            clashes: components["schemas"]["NightClashDto"][];
-            remedy: components["schemas"]["NightRemedyDto"];
-        };
-        CheckoutDto: {
-            /** @description The card service's page; the browser goes there. */
-            url: string;
-        };
-        ClearanceDto: {
-            /** Format: date */
-            grantedOn: string;
-            /** Format: date */
-            until: string | null;
-            id: string;
-            personId: string;
-            personName: string;
-            kindId: string;
-            kindName: string;
-            grantedBy: string;
-            /** @description Whether it holds today. */
-            holds: boolean;
-        };
-        ClearancePageDto: {
-            items: components["schemas"]["ClearanceDto"][];
-            total: number;
-            page: number;
-            perPage: number;
-        };
-        ClubDto: {
-            name: string;
-            address: string;
-            contactEmail: string;
-            /**
-             * @description IANA zone of the club's wall clock.
-             * @example Europe/London
-             */
-            timeZone: string;
-            /**
-             * @description ISO 4217
-             * @example GBP
-             */
-            currency: string;
-            /** @description Accounts of the demo club; empty anywhere else. */
-            demoAccounts: components["schemas"]["DemoAccountDto"][];
-        };
-        CreateBookingDto: {
-            /** Format: date-time */
-            startsAt: string;
-            /** Format: date-time */
-            endsAt: string;
-            /** @description Benches and instruments, 1 to 8: all of them are booked, or none. */
-            resourceIds: string[];
-            /**
-             * Format: uuid
-             * @description Book it for one of your groups.
-             */
-            groupId?: string;
-            /**
-             * Format: uuid
-             * @description The check of the plan you will work on.
-             */
-            checkId?: string;
-        };
-        CreateTierDto: {
-            /** @example full */
-            name: string;
-            /**
-             * @description For the whole period.
-             * @example 2400
-             */
-            amountMinor: number;
-            /**
-             * @description The months one invoice covers.
-             * @example 3
-             */
-            months: number;
-        };
-        DemoAccountDto: {
-            email: string;
-            role: string;
-        };
-        FieldProblemDto: {
-            /**
-             * @description Where in the request.
-             * @example #/endsAt
-             */
-            pointer: string;
-            detail: string;
-        };
-        GrantClearanceDto: {
-            /**
-             * Format: date
-             * @description Last day on which it holds; leave it out for no end.
-             */
-            until?: string;
-            /** Format: uuid */
-            personId: string;
-            /** Format: uuid */
-            kindId: string;
-        };
-        GroupDto: {
-            id: string;
-            name: string;
-            /** @description When and where they usually meet. */
-            about: string;
-            members: components["schemas"]["GroupMemberDto"][];
-            /** @description Whether you are one of them. */
-            mine: boolean;
-        };
-        GroupMemberDto: {
-            personId: string;
-            name: string;
-        };
-        GroupPageDto: {
-            items: components["schemas"]["GroupDto"][];
-            total: number;
-            page: number;
-            perPage: number;
-        };
-        HoldingsDto: {
-            currentAccountMinor: number;
-            /** @description Into the current account in the running month. */
-            inThisMonthMinor: number;
-            /** @description Out of it; nothing or less than nothing. */
-            outThisMonthMinor: number;
-            cashBoxMinor: number;
-            chequesInHandMinor: number;
-            /** @description Paid by card, not yet at the bank. */
-            cardMoneyMinor: number;
-            /** @description Transfers written down that no statement has shown yet. */
-            transfersOnTheWayMinor: number;
-        };
-        InsteadDto: {
-            /**
-             * Format: date
-             * @description The night's day on the club's calendar.
-             * @example 2026-10-20
-             */
-            date: string;
-            benchIds?: string[];
-            mentorIds?: string[];
-        };
-        InstrumentChangeDto: {
-            /** @enum {string} */
-            changed: "condition" | "calibration";
-            /** @description A condition or a day; null where none was on record. */
-            before: string | null;
-            after: string | null;
-            id: string;
-            /** Format: date-time */
-            changedAt: string;
-            changedBy: string;
-            note: string;
-        };
-        InstrumentChoiceDto: {
-            /** @description Why it cannot be chosen; null when it can. */
-            reason: string | null;
-            id: string;
-            /** @example FR-021 */
-            tag: string;
-            name: string;
-            /** @example Oscilloscope */
-            kind: string;
-            /** @description Last day of its calibration. */
-            calibrationDueOn: string | null;
-            /** @description ± limit of its level readings, dB. */
-            amplitudeAccuracyDb: number | null;
-        };
-        InstrumentDetailDto: {
-            /** @enum {string} */
-            condition: "ready" | "in repair" | "out of use";
-            /**
-             * Format: date
-             * @description Last day on which its calibration holds; null where none is on record.
-             */
-            calibrationDueOn: string | null;
-            /** @description The level that harms its input, dBm. */
-            damageLevelDbm: number | null;
-            /** @description ± limit of its level readings, dB. */
-            amplitudeAccuracyDb: number | null;
-            /** @description Your clearance on its kind, lapsed ones too; null when you have none. */
-            myClearance: components["schemas"]["MyClearanceDto"] | null;
-            id: string;
-            /** @example FR-031 */
-            tag: string;
-            name: string;
-            position: number;
-            kind: components["schemas"]["InstrumentKindDto"];
-            /** @description Why it is not ready, or what to mind. */
-            conditionNote: string;
-            /** @description Whether you may book it for the day asked about. */
-            mayBook: boolean;
-            /** @description Why not; empty when you may. */
-            reasons: components["schemas"]["UseReasonDto"][];
-            /** @description How many members hold a clearance on its kind today. */
-            clearedPeople: number;
-        };
-        InstrumentDto: {
-            /** @enum {string} */
-            condition: "ready" | "in repair" | "out of use";
-            /**
-             * Format: date
-             * @description Last day on which its calibration holds; null where none is on record.
-             */
-            calibrationDueOn: string | null;
-            /** @description The level that harms its input, dBm. */
-            damageLevelDbm: number | null;
-            /** @description ± limit of its level readings, dB. */
-            amplitudeAccuracyDb: number | null;
-            /** @description Your clearance on its kind, lapsed ones too; null when you have none. */
-            myClearance: components["schemas"]["MyClearanceDto"] | null;
-            id: string;
-            /** @example FR-031 */
-            tag: string;
-            name: string;
-            position: number;
-            kind: components["schemas"]["InstrumentKindDto"];
-            /** @description Why it is not ready, or what to mind. */
-            conditionNote: string;
-            /** @description Whether you may book it for the day asked about. */
-            mayBook: boolean;
-            /** @description Why not; empty when you may. */
-            reasons: components["schemas"]["UseReasonDto"][];
-        };
-        InstrumentHistoryDto: {
-            items: components["schemas"]["InstrumentChangeDto"][];
-            total: number;
-            page: number;
-            perPage: number;
-        };
-        InstrumentKindDto: {
-            id: string;
-            name: string;
-            needsClearance: boolean;
-            needsCalibration: boolean;
-        };
-        InstrumentPageDto: {
-            items: components["schemas"]["InstrumentDto"][];
-            total: number;
-            page: number;
-            perPage: number;
-        };
-        InvoiceDto: {
-            id: string;
-            /** @example D-0412 */
-            number: string;
-            /** @enum {string} */
-            kind: "dues" | "course fee" | "kit";
-            description: string;
-            amountMinor: number;
-            paidMinor: number;
-            /** @description Left to pay. */
-            openMinor: number;
-            issuedOn: string;
-            dueOn: string;
-            /** @enum {string} */
-            state: "open" | "paid" | "part paid" | "late";
-            /** @description Days past the due day; 0 unless late. */
-            daysLate: number;
-            /**
-             * @description ISO 11649, without spaces.
-             * @example RF43LRBD0421
-             */
-            reference: string;
-            /** @description The same in fours, as it is printed. */
-            referencePrinted: string;
-        };
-        InvoicesPageDto: {
-            items: components["schemas"]["OpenInvoiceDto"][];
-            total: number;
-            /** @description Left to pay on all that match, not on this page alone. */
-            openMinor: number;
-            page: number;
-            perPage: number;
-        };
-        KeepReadingDto: {
-            /**
-             * @description Word for word as typed, by field.
-             * @example {
-             *       "voltsPerDivision": "20m",
-             *       "divisionsPeakToPeak": "3.3"
-             *     }
-             */
-            entry: {
-                [key: string]: string;
-            };
-            /**
-             * Format: date-time
-             * @description When it was taken, for one that waited on a device; now where left out.
-             */
-            takenAt?: string;
-            /**
-             * @description How it was taken; the check's own method.
-             * @example oscilloscope
-             */
-            method: string;
-            /** Format: uuid */
-            instrumentId?: string;
-            /** @description The tick beside a grave caution; asked for with every reading of such a stage. */
-            cautionAcknowledged?: boolean;
-        };
-        LevelPointDto: {
-            id: string;
-            stageId: string;
-            name: string;
-            /** @example TP8 */
-            testPoint: string;
-            plannedDbm: number;
-            toleranceDb: number;
-            /** @description What the stage can deliver or the next can take, dBm. */
-            limitDbm: number | null;
-        };
-        LineMatchDto: {
-            /** @enum {string} */
-            how: "by itself" | "by hand";
-            matchedAt: string;
-            paymentId: string | null;
-        };
-        MarkDto: {
-            id: string;
-            by: components["schemas"]["PersonRefDto"];
-            /** @example 2026-01-15T19:46:00Z */
-            at: string;
-        };
-        MatchLineDto: {
-            /** @description Of one person; paid in this order, and what is left over is credit on account. */
-            invoiceIds?: string[];
-            /**
-             * Format: uuid
-             * @description A transfer or cheque of exactly the line's amount.
-             */
-            paymentId?: string;
-            /** @example 5000 */
-            accountCode?: string;
-            /** @description What it was, for the books. */
-            note?: string;
-        };
-        MeDto: {
-            id: string;
-            name: string;
-            email: string;
-            roles: ("member" | "mentor" | "steward" | "treasurer" | "organiser")[];
-            /** @description True on a bench tablet. */
-            sharedDevice: boolean;
-        };
-        MyClearanceDto: {
-            /** Format: date */
-            grantedOn: string;
-            /**
-             * Format: date
-             * @description Last day on which it holds; null while nobody set an end.
-             */
-            until: string | null;
-        };
-        MyDuesDto: {
-            tier: components["schemas"]["TierDto"] | null;
-            currency: string;
-            /** @description Left over from payments; used for the next invoice. */
-            creditMinor: number;
-            /** @description Latest first, those taken back left out. */
-            payments: components["schemas"]["PaymentDto"][];
-            bank: components["schemas"]["BankDetailsDto"];
-            /** @description Who takes cash and cheques. */
-            treasurerName: string;
-            /** @description Writes to the treasurer go here; empty when the club has given no address. */
-            contactEmail: string;
-        };
-        NightBenchDto: {
-            id: string;
-            tag: string;
-        };
-        NightClashDto: {
-            /** @enum {string} */
-            kind: "mentor" | "bench";
-            detail: string;
-        };
-        NightGuestDto: {
-            id: string;
-            name: string;
-            /**
-             * Format: date-time
-             * @description When they said that they are coming.
-             */
-            saidAt: string;
-        };
-        NightPersonDto: {
-            id: string;
-            name: string;
-        };
-        NightRemedyDto: {
-            benchIds?: string[];
-            mentorIds?: string[];
-        };
-        NightSeriesDto: {
-            id: string;
-            title: string;
-            /** @example FREQ=WEEKLY;COUNT=22 */
-            rule: string;
-            /** @description This night's place in the series, from 1. */
-            number: number;
-            /** @description How many nights the series has. */
-            total: number;
-        };
-        NightStageDto: {
-            id: string;
-            /** @example 9 */
-            position: number;
-            /** @example Pre-driver */
-            name: string;
-        };
-        NightStandingDto: {
-            /** @enum {string} */
-            state: "coming" | "waiting" | "on duty";
-            /** @description Place in the waiting list, 1 is next; null unless waiting. */
-            line: number | null;
-        };
-        NightsPreviewDto: {
-            nights: components["schemas"]["CheckedNightDto"][];
-            /** @description How many people would be told by mail. */
-            toTell: number;
-        };
-        NotBookableDto: {
-            refused: components["schemas"]["RefusedResourceDto"][];
-            /**
-             * @description Stable; opened, it explains itself.
-             * @example /problems/invalid-input
-             */
-            type: string;
-            title: string;
-            status: number;
-            /** @description This occurrence, in words for a member. */
-            detail: string;
-            /** @description Names this request in the log. */
-            instance: string;
-            errors?: components["schemas"]["FieldProblemDto"][];
-        };
-        OpenInvoiceDto: {
-            id: string;
-            /** @example D-0412 */
-            number: string;
-            /** @enum {string} */
-            kind: "dues" | "course fee" | "kit";
-            description: string;
-            amountMinor: number;
-            paidMinor: number;
-            /** @description Left to pay. */
-            openMinor: number;
-            issuedOn: string;
-            dueOn: string;
-            /** @enum {string} */
-            state: "open" | "paid" | "part paid" | "late";
-            /** @description Days past the due day; 0 unless late. */
-            daysLate: number;
-            /**
-             * @description ISO 11649, without spaces.
-             * @example RF43LRBD0421
-             */
-            reference: string;
-            /** @description The same in fours, as it is printed. */
-            referencePrinted: string;
-            personId: string;
-            personName: string;
-        };
-        PaidShareDto: {
-            invoiceId: string;
-            invoiceNumber: string;
-            description: string;
-            amountMinor: number;
-        };
-        PaymentDto: {
-            id: string;
-            /** @example R-0298 */
-            receiptNumber: string;
-            personId: string;
-            personName: string;
-            /** @enum {string} */
-            method: "card" | "cash" | "cheque" | "transfer";
-            amountMinor: number;
-            receivedOn: string;
-            note: string;
-            /** @description A transfer or cheque that no line of a statement has shown yet. */
-            isBeingMatched: boolean;
-            isTakenBack: boolean;
-            paid: components["schemas"]["PaidShareDto"][];
-            /** @description Left over for later invoices. */
-            creditMinor: number;
-        };
-        PaymentsPageDto: {
-            items: components["schemas"]["PaymentDto"][];
-            total: number;
-            page: number;
-            perPage: number;
-        };
-        PeoplePageDto: {
-            items: components["schemas"]["PersonDto"][];
-            total: number;
-            page: number;
-            perPage: number;
-        };
-        PersonDto: {
-            /** @example 0b6f1c1e-5f0e-4f0b-9d39-0c6a4f6f7f11 */
-            id: string;
-            name: string;
-            roles: ("member" | "mentor" | "steward" | "treasurer" | "organiser")[];
-        };
-        PersonRefDto: {
-            id: string;
-            name: string;
-        };
-        PhotoDto: {
-            id: string;
-            caption: string;
-            /** @example image/jpeg */
-            contentType: string;
-            /** @example 2026-01-15T19:46:00Z */
-            at: string;
-            /**
-             * @description Where its bytes are.
-             * @example /api/builds/…/photos/…
-             */
-            url: string;
-        };
-        PlanCheckDto: {
-            /** @enum {string} */
-            kind: "tick" | "measure" | "photo" | "safety" | "mentor's eyes";
-            /** @description What the form starts with, in the fields' own units. */
-            defaults: {
-                [key: string]: number;
-            };
-            id: string;
-            /** @description Order on the checklist, from 1. */
-            position: number;
-            title: string;
-            instruction: string;
-            isRequired: boolean;
-            /** @description For a measure: how it is taken; `gain` and `carried` work themselves out. */
-            method: string | null;
-            /** @description Unit of the value and of the window. */
-            unit: string | null;
-            windowLow: number | null;
-            windowHigh: number | null;
-            target: number | null;
-            /** @description For a value that works itself out: the checks it is made of. */
-            fromCheckIds: string[];
-            levelPointId: string | null;
-            instrumentKindId: string | null;
-        };
-        PlanDto: {
-            id: string;
-            name: string;
-            summary: string;
-            /** @description Numbers of its published editions, oldest first. */
-            editions: number[];
-        };
-        PlanEditionDto: {
-            id: string;
-            planId: string;
-            planName: string;
-            number: number;
-            /** @example 2026-01-15T12:00:00Z */
-            publishedAt: string;
-            stages: components["schemas"]["PlanStageDto"][];
-            /** @description In signal order. */
-            levelPoints: components["schemas"]["LevelPointDto"][];
-        };
-        PlanNightsDto: {
-            /**
-             * Format: date-time
-             * @description The first night's beginning; for a series its time on the club's wall is kept.
-             */
-            startsAt: string;
-            /**
-             * Format: date-time
-             * @description The first night's end: 15 minutes to 12 hours later.
-             */
-            endsAt: string;
-            /** @description Days to leave out of the series (EXDATE). A day that is no night of it changes nothing. */
-            skip?: string[];
-            /** @description Left out for a single night. */
-            repeat?: components["schemas"]["RepeatDto"];
-            /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
-            instead?: components["schemas"]["InsteadDto"][];
-            /** @description Benches the night holds; none for an evening without. */
-            benchIds?: string[];
-            /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
-            mentorIds?: string[];
-            /** @description Stages in focus. */
-            stageIds?: string[];
-            title: string;
-            places: number;
-            note?: string;
-            /** @description Tells the people whose build is on one of the stages in focus. */
-            tellByMail?: boolean;
-        };
-        PlanStageDto: {
-            cautions: ("load before power" | "hot parts" | "rf power" | "mains" | "rf exposure" | "licence needed")[];
-            id: string;
-            position: number;
-            /** @example Pre-driver */
-            name: string;
-            summary: string;
-            checks: components["schemas"]["PlanCheckDto"][];
-        };
-        PlansPageDto: {
-            items: components["schemas"]["PlanDto"][];
-            total: number;
-            page: number;
-            perPage: number;
-        };
-        PreviewNightsDto: {
-            /**
-             * Format: date-time
-             * @description The first night's beginning; for a series its time on the club's wall is kept.
-             */
-            startsAt: string;
-            /**
-             * Format: date-time
-             * @description The first night's end: 15 minutes to 12 hours later.
-             */
-            endsAt: string;
-            /** @description Days to leave out of the series (EXDATE). A day that is no night of it changes nothing. */
-            skip?: string[];
-            title?: string;
-            places?: number;
-            note?: string;
-            /** @description Tells the people whose build is on one of the stages in focus. */
-            tellByMail?: boolean;
-            /** @description Left out for a single night. */
-            repeat?: components["schemas"]["RepeatDto"];
-            /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
-            instead?: components["schemas"]["InsteadDto"][];
-            /** @description Benches the night holds; none for an evening without. */
-            benchIds?: string[];
-            /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
-            mentorIds?: string[];
-            /** @description Stages in focus. */
-            stageIds?: string[];
-        };
-        ProblemDto: {
-            /**
-             * @description Stable; opened, it explains itself.
-             * @example /problems/invalid-input
-             */
-            type: string;
-            title: string;
-            status: number;
-            /** @description This occurrence, in words for a member. */
-            detail: string;
-            /** @description Names this request in the log. */
-            instance: string;
-            errors?: components["schemas"]["FieldProblemDto"][];
-        };
-        QuarterDto: {
-            from: string;
-            to: string;
-            raisedMinor: number;
-            paidMinor: number;
-            count: number;
-            paidCount: number;
-        };
-        RaiseInvoiceDto: {
-            /**
-             * Format: date
-             * @description Not before today.
-             */
-            dueOn: string;
-            /** Format: uuid */
-            personId: string;
-            /** @enum {string} */
-            kind: "dues" | "course fee" | "kit";
-            description: string;
-            amountMinor: number;
-        };
-        ReadingDto: {
-            entry: {
-                [key: string]: string;
-            };
-            /** @enum {string} */
-            verdict: "pass" | "too close to call" | "not yet";
-            id: string;
-            checkId: string;
-            /** @example oscilloscope */
-            method: string;
-            /** @description In `unit`, unrounded. */
-            value: number;
-            /** @example dBm */
-            unit: string;
-            /** @description Unit of the uncertainties: dB for dBm and dBc. */
-            uncertaintyUnit: string;
-            /** @description k = 2, about 95 %. */
-            expandedUncertainty: number;
-            components: components["schemas"]["UncertaintyComponentDto"][];
-            voltsPeakToPeak: number | null;
-            watts: number | null;
-            /**
-             * @description Name and version of the calculation.
-             * @example oscilloscope/1
-             */
-            calculation: string;
-            instrumentId: string | null;
-            /** @example FR-021 */
-            instrumentTag: string | null;
-            /** @description Last day of the instrument's calibration, as it was then. */
-            calibrationDueOn: string | null;
-            cautionAcknowledged: boolean;
-            /** @example 2026-01-15T19:46:00Z */
-            takenAt: string;
-            /** @description A later one is in force; this one stays in the record. */
-            isSuperseded: boolean;
-        };
-        ReceiptDto: {
-            id: string;
-            /** @example R-0298 */
-            receiptNumber: string;
-            personId: string;
-            personName: string;
-            /** @enum {string} */
-            method: "card" | "cash" | "cheque" | "transfer";
-            amountMinor: number;
-            receivedOn: string;
-            note: string;
-            /** @description A transfer or cheque that no line of a statement has shown yet. */
-            isBeingMatched: boolean;
-            isTakenBack: boolean;
-            paid: components["schemas"]["PaidShareDto"][];
-            /** @description Left over for later invoices. */
-            creditMinor: number;
-            clubName: string;
-            clubAddress: string;
-            currency: string;
-            /** @description Who took it; a treasurer of the club where a machine did. */
-            treasurerName: string;
-        };
-        RefusedResourceDto: {
-            resourceId: string;
-            reasons: components["schemas"]["UseReasonDto"][];
-        };
-        RepeatDto: {
-            /**
-             * @description An RRULE of RFC 5545 without its name: FREQ=WEEKLY with INTERVAL, BYDAY and either COUNT (at most 60) or UNTIL in
-             *     UTC. It is read on the club's wall clock, so that 19:30 stays 19:30 when the clocks change.
-             * @example FREQ=WEEKLY;BYDAY=TU;COUNT=6
-             */
-            rule: string;
-        };
-        ReviewDto: {
-            cautions: ("load before power" | "hot parts" | "rf power" | "mains" | "rf exposure" | "licence needed")[];
-            buildId: string;
-            stageId: string;
-            stagePosition: number;
-            stageName: string;
-            builder: components["schemas"]["PersonRefDto"];
-            planName: string;
-            serial: number;
-            /** @example 2026-01-13T21:48:00Z */
-            sentAt: string;
-            /** @description The builder's word. */
-            note: string;
-            /** @description How often it was sent back before. */
-            timesSentBack: number;
-            /** @description The reader's own stage: another mentor decides on it. */
-            isOwn: boolean;
-        };
-        ReviewsPageDto: {
-            /** @description The longest waiting first. */
-            items: components["schemas"]["ReviewDto"][];
-            total: number;
-            page: number;
-            perPage: number;
-            /** @description When any stage was signed off last. */
-            lastSignOffAt: string | null;
-        };
-        ScheduledNightsDto: {
-            nights: components["schemas"]["BuildNightDto"][];
-            /** @description How many people are told by mail. */
-            told: number;
-        };
-        SendBackDto: {
-            note: string;
-        };
-        SettlingAccountDto: {
-            code: string;
-            name: string;
-        };
-        SignInDto: {
-            /**
-             * Format: email
-             * @example member@larkmoor.example
-             */
-            email: string;
-            /** @example larkmoor-demo */
-            password: string;
-            /** @description On a bench tablet the sign-in runs out after ten minutes untouched. */
-            sharedDevice?: boolean;
-        };
-        SpanDto: {
-            /** Format: date-time */
-            startsAt: string;
-            /** Format: date-time */
-            endsAt: string;
-        };
-        StageEventDto: {
-            /** @enum {string} */
-            kind: "sent" | "withdrawn" | "sent back" | "signed off";
-            by: components["schemas"]["PersonRefDto"];
-            /** @example 2026-01-15T21:48:00Z */
-            at: string;
-            note: string;
-        };
-        StageNoteDto: {
-            /** @example Two turns off the output winding brought the gain down. */
-            note?: string;
-        };
-        StartBuildDto: {
-            /** Format: uuid */
-            planId: string;
-        };
-        StatementDetailDto: {
-            id: string;
-            fileName: string;
-            fromOn: string;
-            toOn: string;
-            openingMinor: number;
-            closingMinor: number;
-            lineCount: number;
-            matchedCount: number;
-            /** @description Sum of the lines that have no match yet. */
-            unmatchedMinor: number;
-            /** @description Lines of the file that an earlier statement had brought, and that were not counted again. */
-            knownLines: number;
-            importedAt: string;
-            currency: string;
-            lines: components["schemas"]["StatementLineDto"][];
-            books: components["schemas"]["BookItemDto"][];
-            /** @description Open items that the list has no room for. */
-            booksLeftOut: number;
-            totals: components["schemas"]["TotalsDto"];
-            /** @description Accounts a line may be settled against by hand. */
-            accounts: components["schemas"]["SettlingAccountDto"][];
-        };
-        StatementDto: {
-            id: string;
-            fileName: string;
-            fromOn: string;
-            toOn: string;
-            openingMinor: number;
-            closingMinor: number;
-            lineCount: number;
-            matchedCount: number;
-            /** @description Sum of the lines that have no match yet. */
-            unmatchedMinor: number;
-            /** @description Lines of the file that an earlier statement had brought, and that were not counted again. */
-            knownLines: number;
-            importedAt: string;
-        };
-        StatementLineDto: {
-            id: string;
-            day: string;
-            description: string;
-            /** @description Money in is positive. */
-            amountMinor: number;
-            /** @enum {string} */
-            state: "matched" | "no match";
-            /** @description Why it is matched, or why it did not match by itself. */
-            reasons: string[];
-            match: components["schemas"]["LineMatchDto"] | null;
-        };
-        StatementsPageDto: {
-            items: components["schemas"]["StatementDto"][];
-            total: number;
-            page: number;
-            perPage: number;
-        };
-        TakePaymentDto: {
-            /**
-             * Format: date
-             * @description Today or before.
-             */
-            receivedOn: string;
-            /** Format: uuid */
-            personId: string;
-            /** @enum {string} */
-            method: "cash" | "cheque" | "transfer";
-            amountMinor: number;
-            /** @description Paid in this order; what is left over is credit on account. */
-            invoiceIds: string[];
-            note?: string;
-            /**
-             * Format: uuid
-             * @description Chosen once by the form: the same key again answers with the payment already taken.
-             */
-            clientKey: string;
-        };
-        TakenDto: {
-            resourceId: string;
-            resourceTag: string;
-            /** @description A person's name, or a build night's title. */
-            by: string;
-            /** Format: date-time */
-            startsAt: string;
-            /** Format: date-time */
-            endsAt: string;
-        };
-        TierDto: {
-            id: string;
-            name: string;
-            amountMinor: number;
-            months: number;
-        };
-        TotalsDto: {
-            openingMinor: number;
-            matchedMinor: number;
-            /** @description The current account by the ledger, after this statement's matches. */
-            booksMinor: number;
-            statementMinor: number;
-            /** @description What earlier statements have left unmatched; part of the difference. */
-            earlierMinor: number;
-            differenceMinor: number;
-        };
-        TreasurySummaryDto: {
-            /** @description The instant these figures are of. */
-            asOf: string;
-            today: string;
-            currency: string;
-            dues: components["schemas"]["QuarterDto"];
-            holdings: components["schemas"]["HoldingsDto"];
-            aged: components["schemas"]["AgeBandDto"][];
-            openCount: number;
-            openMinor: number;
-            lateMinor: number;
-            /** @description People with something late. */
-            latePeople: number;
-            /** @description Owed to members: what their payments left over. */
-            creditMinor: number;
-            cardNotes: components["schemas"]["CardNoteDto"][];
-        };
-        TrialBalanceDto: {
-            asOn: string;
-            accounts: components["schemas"]["TrialBalanceLineDto"][];
-            debitMinor: number;
-            creditMinor: number;
-        };
-        TrialBalanceLineDto: {
-            /** @example 1100 */
-            code: string;
-            name: string;
-            /** @enum {string} */
-            kind: "asset" | "liability" | "income" | "expense" | "equity";
-            debitMinor: number;
-            creditMinor: number;
-        };
-        UncertaintyComponentDto: {
-            name: string;
-            limit: number;
-            distribution: string;
-            standardUncertainty: number;
-        };
-        UseReasonDto: {
-            /** @enum {string} */
-            code: "in repair" | "out of use" | "calibration unknown" | "calibration past" | "not cleared" | "clearance past";
-            reason: string;
-            remedy: string;
-        };
-        WebhookDto: {
-            /** @description The event's id. */
-            received: string;
-            /**
-             * @description `known`: it had come before, and nothing was done.
-             * @enum {string}
-             */
-            outcome: "acted" | "noted" | "needs a look" | "known";
-        };
+  schemas: {
+    AgeBandDto: {
+      /** @enum {string} */
+      age: 'not yet due' | '1 to 30 days late' | '31 to 60' | '61 to 90' | 'over 90';
+      count: number;
+      openMinor: number;
     };
-    responses: never;
-    parameters: never;
-    requestBodies: never;
-    headers: never;
-    pathItems: never;
+    AssignTierDto: {
+      /** Format: uuid */
+      tierId: string;
+      /**
+       * Format: date
+       * @description The first day it holds.
+       */
+      fromOn: string;
+      /** Format: uuid */
+      personId: string;
+    };
+    BankDetailsDto: {
+      accountName: string;
+      accountNumber: string;
+    };
+    BenchDto: {
+      id: string;
+      tag: string;
+      name: string;
+      /** @description Order on the page. */
+      position: number;
+    };
+    BenchPageDto: {
+      items: components['schemas']['BenchDto'][];
+      total: number;
+      page: number;
+      perPage: number;
+    };
+    BookItemDto: {
+      /** @enum {string} */
+      kind: 'invoice' | 'payment' | 'account';
+      /** @description Of the invoice or payment; the code of an account. */
+      id: string;
+      /** @example D-0412 */
+      tag: string;
+      name: string;
+      detail: string;
+      amountMinor: number;
+      /** @description The statement's line it belongs to; null while it is open. */
+      lineId: string | null;
+    };
+    BookedResourceDto: {
+      /** @enum {string} */
+      kind: 'bench' | 'instrument';
+      id: string;
+      /** @example FR-031 */
+      tag: string;
+      name: string;
+    };
+    BookingDto: {
+      /** @enum {string} */
+      kind: 'session' | 'build night';
+      /** Format: uuid */
+      groupId: string | null;
+      groupName: string | null;
+      /**
+       * Format: uuid
+       * @description What it was made for: on your own only.
+       */
+      checkId: string | null;
+      id: string;
+      /** @description Of a build night; empty for a session. */
+      title: string;
+      personId: string;
+      personName: string;
+      /** @description Whether it is your session. */
+      mine: boolean;
+      resources: components['schemas']['BookedResourceDto'][];
+      /** Format: date-time */
+      startsAt: string;
+      /** Format: date-time */
+      endsAt: string;
+      /** Format: date-time */
+      madeAt: string;
+      /** @description Whether you may cancel it now. */
+      mayCancel: boolean;
+    };
+    BookingOverlapDto: {
+      takenBy: components['schemas']['TakenDto'][];
+      /** @description Up to three times at which everything wanted is free for as long, the nearest first. */
+      nearestFree: components['schemas']['SpanDto'][];
+      /**
+       * @description Stable; opened, it explains itself.
+       * @example /problems/invalid-input
+       */
+      type: string;
+      title: string;
+      status: number;
+      /** @description This occurrence, in words for a member. */
+      detail: string;
+      /** @description Names this request in the log. */
+      instance: string;
+      errors?: components['schemas']['FieldProblemDto'][];
+    };
+    BuildCheckDto: {
+      /** @enum {string} */
+      kind: 'tick' | 'measure' | 'photo' | 'safety' | "mentor's eyes";
+      /** @description What the form starts with, in the fields' own units. */
+      defaults: {
+        [key: string]: number;
+      };
+      /** @description There is what the check asks for. */
+      isSettled: boolean;
+      /** @description The newest last; that one is in force, the others stay in the record. */
+      readings: components['schemas']['ReadingDto'][];
+      mark: components['schemas']['MarkDto'] | null;
+      photos: components['schemas']['PhotoDto'][];
+      id: string;
+      /** @description Order on the checklist, from 1. */
+      position: number;
+      title: string;
+      instruction: string;
+      isRequired: boolean;
+      /** @description For a measure: how it is taken; `gain` and `carried` work themselves out. */
+      method: string | null;
+      /** @description Unit of the value and of the window. */
+      unit: string | null;
+      windowLow: number | null;
+      windowHigh: number | null;
+      target: number | null;
+      /** @description For a value that works itself out: the checks it is made of. */
+      fromCheckIds: string[];
+      levelPointId: string | null;
+      instrumentKindId: string | null;
+    };
+    BuildDto: {
+      id: string;
+      builder: components['schemas']['PersonRefDto'];
+      planId: string;
+      planName: string;
+      editionNumber: number;
+      /** @example 7 */
+      serial: number;
+      /** @example 2026-01-15T19:00:00Z */
+      startedAt: string;
+      endedAt: string | null;
+      /** @description When an organiser saw the licence. */
+      licenceSeenAt: string | null;
+      /** @description The stage its builder is on. */
+      currentStageId: string | null;
+      stages: components['schemas']['BuildStageDto'][];
+      /** @description In signal order. */
+      levelPoints: components['schemas']['LevelPointDto'][];
+    };
+    BuildNightDetailDto: {
+      id: string;
+      title: string;
+      series: components['schemas']['NightSeriesDto'] | null;
+      /** Format: date-time */
+      startsAt: string;
+      /** Format: date-time */
+      endsAt: string;
+      places: number;
+      /** @description How many are coming. */
+      coming: number;
+      /** @description How many wait for a place. */
+      waiting: number;
+      note: string;
+      benches: components['schemas']['NightBenchDto'][];
+      mentors: components['schemas']['NightPersonDto'][];
+      stages: components['schemas']['NightStageDto'][];
+      /** @description null: not said anything. */
+      mine: components['schemas']['NightStandingDto'] | null;
+      /** Format: date-time */
+      cancelledAt: string | null;
+      cancelledReason: string | null;
+      /** @description In the order in which they said so. */
+      comingPeople: components['schemas']['NightGuestDto'][];
+      /** @description In the order in which they move up. */
+      waitingPeople: components['schemas']['NightGuestDto'][];
+    };
+    BuildNightDto: {
+      id: string;
+      title: string;
+      series: components['schemas']['NightSeriesDto'] | null;
+      /** Format: date-time */
+      startsAt: string;
+      /** Format: date-time */
+      endsAt: string;
+      places: number;
+      /** @description How many are coming. */
+      coming: number;
+      /** @description How many wait for a place. */
+      waiting: number;
+      note: string;
+      benches: components['schemas']['NightBenchDto'][];
+      mentors: components['schemas']['NightPersonDto'][];
+      stages: components['schemas']['NightStageDto'][];
+      /** @description null: not said anything. */
+      mine: components['schemas']['NightStandingDto'] | null;
+      /** Format: date-time */
+      cancelledAt: string | null;
+      cancelledReason: string | null;
+    };
+    BuildNightsDto: {
+      items: components['schemas']['BuildNightDto'][];
+    };
+    BuildStageDto: {
+      cautions: (
+        'load before power' | 'hot parts' | 'rf power' | 'mains' | 'rf exposure' | 'licence needed'
+      )[];
+      /** @enum {string} */
+      state: 'not started' | 'on the bench' | 'with mentor' | 'sent back' | 'signed off' | 'locked';
+      id: string;
+      position: number;
+      /** @example Pre-driver */
+      name: string;
+      summary: string;
+      /** @description What opens a locked stage. */
+      lockedBecause: string | null;
+      /** @description Checks still to settle before it can be sent to a mentor. */
+      missingToSend: number;
+      /** @description Checks still to settle before it can be signed off. */
+      missingToSignOff: number;
+      settled: number;
+      checks: components['schemas']['BuildCheckDto'][];
+      /** @description Oldest first. */
+      events: components['schemas']['StageEventDto'][];
+    };
+    CancelNightDto: {
+      reason: string;
+    };
+    CardNoteDto: {
+      id: string;
+      receivedAt: string;
+      note: string;
+    };
+    CardPaymentDto: {
+      /**
+       * @description `open`: the page was opened and nothing has come from it yet; `confirming`: the card was taken, the bank has yet
+       *     to confirm; `failed`: no money was taken.
+       * @enum {string}
+       */
+      state: 'none' | 'open' | 'confirming' | 'paid' | 'failed' | 'expired';
+      /** @description Left to pay on the invoice now. */
+      openMinor: number;
+      /** @description The receipt, once it is paid. */
+      receiptId: string | null;
+    };
+    ChangeCalibrationDto: {
+      /**
+       * Format: date
+       * @description Last day on which the calibration holds.
+       */
+      dueOn: string;
+      /** @description Who calibrated it, and what it came out at. */
+      note: string;
+    };
+    ChangeConditionDto: {
+      /** @enum {string} */
+      condition: 'ready' | 'in repair' | 'out of use';
+      /** @description What is wrong, or what was put right; members read it. */
+      note: string;
+    };
+    ChangeNightDto: {
+      /** Format: date-time */
+      startsAt?: string;
+      /** Format: date-time */
+      endsAt?: string;
+      title?: string;
+      /** @description Not fewer than are coming. More moves the waiting list up. */
+      places?: number;
+      note?: string;
+      benchIds?: string[];
+      mentorIds?: string[];
+      stageIds?: string[];
+    };
+    CheckedNightDto: {
+      /**
+       * @description The night's day on the club's calendar.
+       * @example 2026-10-20
+       */
+      date: string;
+      /** Format: date-time */
+      startsAt: string;
+      /** Format: date-time */
+      endsAt: string;
+      /** @enum {string} */
+      verdict: 'clash' | 'clear' | 'left out';
+      clashes: components['schemas']['NightClashDto'][];
+      remedy: components['schemas']['NightRemedyDto'];
+    };
+    CheckoutDto: {
+      /** @description The card service's page; the browser goes there. */
+      url: string;
+    };
+    ClearanceDto: {
+      /** Format: date */
+      grantedOn: string;
+      /** Format: date */
+      until: string | null;
+      id: string;
+      personId: string;
+      personName: string;
+      kindId: string;
+      kindName: string;
+      grantedBy: string;
+      /** @description Whether it holds today. */
+      holds: boolean;
+    };
+    ClearancePageDto: {
+      items: components['schemas']['ClearanceDto'][];
+      total: number;
+      page: number;
+      perPage: number;
+    };
+    ClubDto: {
+      name: string;
+      address: string;
+      contactEmail: string;
+      /**
+       * @description IANA zone of the club's wall clock.
+       * @example Europe/London
+       */
+      timeZone: string;
+      /**
+       * @description ISO 4217
+       * @example GBP
+       */
+      currency: string;
+      /** @description Accounts of the demo club; empty anywhere else. */
+      demoAccounts: components['schemas']['DemoAccountDto'][];
+    };
+    CreateBookingDto: {
+      /** Format: date-time */
+      startsAt: string;
+      /** Format: date-time */
+      endsAt: string;
+      /** @description Benches and instruments, 1 to 8: all of them are booked, or none. */
+      resourceIds: string[];
+      /**
+       * Format: uuid
+       * @description Book it for one of your groups.
+       */
+      groupId?: string;
+      /**
+       * Format: uuid
+       * @description The check of the plan you will work on.
+       */
+      checkId?: string;
+    };
+    CreateTierDto: {
+      /** @example full */
+      name: string;
+      /**
+       * @description For the whole period.
+       * @example 2400
+       */
+      amountMinor: number;
+      /**
+       * @description The months one invoice covers.
+       * @example 3
+       */
+      months: number;
+    };
+    DemoAccountDto: {
+      email: string;
+      role: string;
+    };
+    FieldProblemDto: {
+      /**
+       * @description Where in the request.
+       * @example #/endsAt
+       */
+      pointer: string;
+      detail: string;
+    };
+    GrantClearanceDto: {
+      /**
+       * Format: date
+       * @description Last day on which it holds; leave it out for no end.
+       */
+      until?: string;
+      /** Format: uuid */
+      personId: string;
+      /** Format: uuid */
+      kindId: string;
+    };
+    GroupDto: {
+      id: string;
+      name: string;
+      /** @description When and where they usually meet. */
+      about: string;
+      members: components['schemas']['GroupMemberDto'][];
+      /** @description Whether you are one of them. */
+      mine: boolean;
+    };
+    GroupMemberDto: {
+      personId: string;
+      name: string;
+    };
+    GroupPageDto: {
+      items: components['schemas']['GroupDto'][];
+      total: number;
+      page: number;
+      perPage: number;
+    };
+    HoldingsDto: {
+      currentAccountMinor: number;
+      /** @description Into the current account in the running month. */
+      inThisMonthMinor: number;
+      /** @description Out of it; nothing or less than nothing. */
+      outThisMonthMinor: number;
+      cashBoxMinor: number;
+      chequesInHandMinor: number;
+      /** @description Paid by card, not yet at the bank. */
+      cardMoneyMinor: number;
+      /** @description Transfers written down that no statement has shown yet. */
+      transfersOnTheWayMinor: number;
+    };
+    InsteadDto: {
+      /**
+       * Format: date
+       * @description The night's day on the club's calendar.
+       * @example 2026-10-20
+       */
+      date: string;
+      benchIds?: string[];
+      mentorIds?: string[];
+    };
+    InstrumentChangeDto: {
+      /** @enum {string} */
+      changed: 'condition' | 'calibration';
+      /** @description A condition or a day; null where none was on record. */
+      before: string | null;
+      after: string | null;
+      id: string;
+      /** Format: date-time */
+      changedAt: string;
+      changedBy: string;
+      note: string;
+    };
+    InstrumentChoiceDto: {
+      /** @description Why it cannot be chosen; null when it can. */
+      reason: string | null;
+      id: string;
+      /** @example FR-021 */
+      tag: string;
+      name: string;
+      /** @example Oscilloscope */
+      kind: string;
+      /** @description Last day of its calibration. */
+      calibrationDueOn: string | null;
+      /** @description ± limit of its level readings, dB. */
+      amplitudeAccuracyDb: number | null;
+    };
+    InstrumentDetailDto: {
+      /** @enum {string} */
+      condition: 'ready' | 'in repair' | 'out of use';
+      /**
+       * Format: date
+       * @description Last day on which its calibration holds; null where none is on record.
+       */
+      calibrationDueOn: string | null;
+      /** @description The level that harms its input, dBm. */
+      damageLevelDbm: number | null;
+      /** @description ± limit of its level readings, dB. */
+      amplitudeAccuracyDb: number | null;
+      /** @description Your clearance on its kind, lapsed ones too; null when you have none. */
+      myClearance: components['schemas']['MyClearanceDto'] | null;
+      id: string;
+      /** @example FR-031 */
+      tag: string;
+      name: string;
+      position: number;
+      kind: components['schemas']['InstrumentKindDto'];
+      /** @description Why it is not ready, or what to mind. */
+      conditionNote: string;
+      /** @description Whether you may book it for the day asked about. */
+      mayBook: boolean;
+      /** @description Why not; empty when you may. */
+      reasons: components['schemas']['UseReasonDto'][];
+      /** @description How many members hold a clearance on its kind today. */
+      clearedPeople: number;
+    };
+    InstrumentDto: {
+      /** @enum {string} */
+      condition: 'ready' | 'in repair' | 'out of use';
+      /**
+       * Format: date
+       * @description Last day on which its calibration holds; null where none is on record.
+       */
+      calibrationDueOn: string | null;
+      /** @description The level that harms its input, dBm. */
+      damageLevelDbm: number | null;
+      /** @description ± limit of its level readings, dB. */
+      amplitudeAccuracyDb: number | null;
+      /** @description Your clearance on its kind, lapsed ones too; null when you have none. */
+      myClearance: components['schemas']['MyClearanceDto'] | null;
+      id: string;
+      /** @example FR-031 */
+      tag: string;
+      name: string;
+      position: number;
+      kind: components['schemas']['InstrumentKindDto'];
+      /** @description Why it is not ready, or what to mind. */
+      conditionNote: string;
+      /** @description Whether you may book it for the day asked about. */
+      mayBook: boolean;
+      /** @description Why not; empty when you may. */
+      reasons: components['schemas']['UseReasonDto'][];
+    };
+    InstrumentHistoryDto: {
+      items: components['schemas']['InstrumentChangeDto'][];
+      total: number;
+      page: number;
+      perPage: number;
+    };
+    InstrumentKindDto: {
+      id: string;
+      name: string;
+      needsClearance: boolean;
+      needsCalibration: boolean;
+    };
+    InstrumentPageDto: {
+      items: components['schemas']['InstrumentDto'][];
+      total: number;
+      page: number;
+      perPage: number;
+    };
+    InvoiceDto: {
+      id: string;
+      /** @example D-0412 */
+      number: string;
+      /** @enum {string} */
+      kind: 'dues' | 'course fee' | 'kit';
+      description: string;
+      amountMinor: number;
+      paidMinor: number;
+      /** @description Left to pay. */
+      openMinor: number;
+      issuedOn: string;
+      dueOn: string;
+      /** @enum {string} */
+      state: 'open' | 'paid' | 'part paid' | 'late';
+      /** @description Days past the due day; 0 unless late. */
+      daysLate: number;
+      /**
+       * @description ISO 11649, without spaces.
+       * @example RF43LRBD0421
+       */
+      reference: string;
+      /** @description The same in fours, as it is printed. */
+      referencePrinted: string;
+    };
+    InvoicesPageDto: {
+      items: components['schemas']['OpenInvoiceDto'][];
+      total: number;
+      /** @description Left to pay on all that match, not on this page alone. */
+      openMinor: number;
+      page: number;
+      perPage: number;
+    };
+    KeepReadingDto: {
+      /**
+       * @description Word for word as typed, by field.
+       * @example {
+       *       "voltsPerDivision": "20m",
+       *       "divisionsPeakToPeak": "3.3"
+       *     }
+       */
+      entry: {
+        [key: string]: string;
+      };
+      /**
+       * Format: date-time
+       * @description When it was taken, for one that waited on a device; now where left out.
+       */
+      takenAt?: string;
+      /**
+       * @description How it was taken; the check's own method.
+       * @example oscilloscope
+       */
+      method: string;
+      /** Format: uuid */
+      instrumentId?: string;
+      /** @description The tick beside a grave caution; asked for with every reading of such a stage. */
+      cautionAcknowledged?: boolean;
+    };
+    LevelPointDto: {
+      id: string;
+      stageId: string;
+      name: string;
+      /** @example TP8 */
+      testPoint: string;
+      plannedDbm: number;
+      toleranceDb: number;
+      /** @description What the stage can deliver or the next can take, dBm. */
+      limitDbm: number | null;
+    };
+    LineMatchDto: {
+      /** @enum {string} */
+      how: 'by itself' | 'by hand';
+      matchedAt: string;
+      paymentId: string | null;
+    };
+    MarkDto: {
+      id: string;
+      by: components['schemas']['PersonRefDto'];
+      /** @example 2026-01-15T19:46:00Z */
+      at: string;
+    };
+    MatchLineDto: {
+      /** @description Of one person; paid in this order, and what is left over is credit on account. */
+      invoiceIds?: string[];
+      /**
+       * Format: uuid
+       * @description A transfer or cheque of exactly the line's amount.
+       */
+      paymentId?: string;
+      /** @example 5000 */
+      accountCode?: string;
+      /** @description What it was, for the books. */
+      note?: string;
+    };
+    MeDto: {
+      id: string;
+      name: string;
+      email: string;
+      roles: ('member' | 'mentor' | 'steward' | 'treasurer' | 'organiser')[];
+      /** @description True on a bench tablet. */
+      sharedDevice: boolean;
+    };
+    MyClearanceDto: {
+      /** Format: date */
+      grantedOn: string;
+      /**
+       * Format: date
+       * @description Last day on which it holds; null while nobody set an end.
+       */
+      until: string | null;
+    };
+    MyDuesDto: {
+      tier: components['schemas']['TierDto'] | null;
+      currency: string;
+      /** @description Left over from payments; used for the next invoice. */
+      creditMinor: number;
+      /** @description Latest first, those taken back left out. */
+      payments: components['schemas']['PaymentDto'][];
+      bank: components['schemas']['BankDetailsDto'];
+      /** @description Who takes cash and cheques. */
+      treasurerName: string;
+      /** @description Writes to the treasurer go here; empty when the club has given no address. */
+      contactEmail: string;
+    };
+    NightBenchDto: {
+      id: string;
+      tag: string;
+    };
+    NightClashDto: {
+      /** @enum {string} */
+      kind: 'mentor' | 'bench';
+      detail: string;
+    };
+    NightGuestDto: {
+      id: string;
+      name: string;
+      /**
+       * Format: date-time
+       * @description When they said that they are coming.
+       */
+      saidAt: string;
+    };
+    NightPersonDto: {
+      id: string;
+      name: string;
+    };
+    NightRemedyDto: {
+      benchIds?: string[];
+      mentorIds?: string[];
+    };
+    NightSeriesDto: {
+      id: string;
+      title: string;
+      /** @example FREQ=WEEKLY;COUNT=22 */
+      rule: string;
+      /** @description This night's place in the series, from 1. */
+      number: number;
+      /** @description How many nights the series has. */
+      total: number;
+    };
+    NightStageDto: {
+      id: string;
+      /** @example 9 */
+      position: number;
+      /** @example Pre-driver */
+      name: string;
+    };
+    NightStandingDto: {
+      /** @enum {string} */
+      state: 'coming' | 'waiting' | 'on duty';
+      /** @description Place in the waiting list, 1 is next; null unless waiting. */
+      line: number | null;
+    };
+    NightsPreviewDto: {
+      nights: components['schemas']['CheckedNightDto'][];
+      /** @description How many people would be told by mail. */
+      toTell: number;
+    };
+    NotBookableDto: {
+      refused: components['schemas']['RefusedResourceDto'][];
+      /**
+       * @description Stable; opened, it explains itself.
+       * @example /problems/invalid-input
+       */
+      type: string;
+      title: string;
+      status: number;
+      /** @description This occurrence, in words for a member. */
+      detail: string;
+      /** @description Names this request in the log. */
+      instance: string;
+      errors?: components['schemas']['FieldProblemDto'][];
+    };
+    OpenInvoiceDto: {
+      id: string;
+      /** @example D-0412 */
+      number: string;
+      /** @enum {string} */
+      kind: 'dues' | 'course fee' | 'kit';
+      description: string;
+      amountMinor: number;
+      paidMinor: number;
+      /** @description Left to pay. */
+      openMinor: number;
+      issuedOn: string;
+      dueOn: string;
+      /** @enum {string} */
+      state: 'open' | 'paid' | 'part paid' | 'late';
+      /** @description Days past the due day; 0 unless late. */
+      daysLate: number;
+      /**
+       * @description ISO 11649, without spaces.
+       * @example RF43LRBD0421
+       */
+      reference: string;
+      /** @description The same in fours, as it is printed. */
+      referencePrinted: string;
+      personId: string;
+      personName: string;
+    };
+    PaidShareDto: {
+      invoiceId: string;
+      invoiceNumber: string;
+      description: string;
+      amountMinor: number;
+    };
+    PaymentDto: {
+      id: string;
+      /** @example R-0298 */
+      receiptNumber: string;
+      personId: string;
+      personName: string;
+      /** @enum {string} */
+      method: 'card' | 'cash' | 'cheque' | 'transfer';
+      amountMinor: number;
+      receivedOn: string;
+      note: string;
+      /** @description A transfer or cheque that no line of a statement has shown yet. */
+      isBeingMatched: boolean;
+      isTakenBack: boolean;
+      paid: components['schemas']['PaidShareDto'][];
+      /** @description Left over for later invoices. */
+      creditMinor: number;
+    };
+    PaymentsPageDto: {
+      items: components['schemas']['PaymentDto'][];
+      total: number;
+      page: number;
+      perPage: number;
+    };
+    PeoplePageDto: {
+      items: components['schemas']['PersonDto'][];
+      total: number;
+      page: number;
+      perPage: number;
+    };
+    PersonDto: {
+      /** @example 0b6f1c1e-5f0e-4f0b-9d39-0c6a4f6f7f11 */
+      id: string;
+      name: string;
+      roles: ('member' | 'mentor' | 'steward' | 'treasurer' | 'organiser')[];
+    };
+    PersonRefDto: {
+      id: string;
+      name: string;
+    };
+    PhotoDto: {
+      id: string;
+      caption: string;
+      /** @example image/jpeg */
+      contentType: string;
+      /** @example 2026-01-15T19:46:00Z */
+      at: string;
+      /**
+       * @description Where its bytes are.
+       * @example /api/builds/…/photos/…
+       */
+      url: string;
+    };
+    PlanCheckDto: {
+      /** @enum {string} */
+      kind: 'tick' | 'measure' | 'photo' | 'safety' | "mentor's eyes";
+      /** @description What the form starts with, in the fields' own units. */
+      defaults: {
+        [key: string]: number;
+      };
+      id: string;
+      /** @description Order on the checklist, from 1. */
+      position: number;
+      title: string;
+      instruction: string;
+      isRequired: boolean;
+      /** @description For a measure: how it is taken; `gain` and `carried` work themselves out. */
+      method: string | null;
+      /** @description Unit of the value and of the window. */
+      unit: string | null;
+      windowLow: number | null;
+      windowHigh: number | null;
+      target: number | null;
+      /** @description For a value that works itself out: the checks it is made of. */
+      fromCheckIds: string[];
+      levelPointId: string | null;
+      instrumentKindId: string | null;
+    };
+    PlanDto: {
+      id: string;
+      name: string;
+      summary: string;
+      /** @description Numbers of its published editions, oldest first. */
+      editions: number[];
+    };
+    PlanEditionDto: {
+      id: string;
+      planId: string;
+      planName: string;
+      number: number;
+      /** @example 2026-01-15T12:00:00Z */
+      publishedAt: string;
+      stages: components['schemas']['PlanStageDto'][];
+      /** @description In signal order. */
+      levelPoints: components['schemas']['LevelPointDto'][];
+    };
+    PlanNightsDto: {
+      /**
+       * Format: date-time
+       * @description The first night's beginning; for a series its time on the club's wall is kept.
+       */
+      startsAt: string;
+      /**
+       * Format: date-time
+       * @description The first night's end: 15 minutes to 12 hours later.
+       */
+      endsAt: string;
+      /** @description Days to leave out of the series (EXDATE). A day that is no night of it changes nothing. */
+      skip?: string[];
+      /** @description Left out for a single night. */
+      repeat?: components['schemas']['RepeatDto'];
+      /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
+      instead?: components['schemas']['InsteadDto'][];
+      /** @description Benches the night holds; none for an evening without. */
+      benchIds?: string[];
+      /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
+      mentorIds?: string[];
+      /** @description Stages in focus. */
+      stageIds?: string[];
+      title: string;
+      places: number;
+      note?: string;
+      /** @description Tells the people whose build is on one of the stages in focus. */
+      tellByMail?: boolean;
+    };
+    PlanStageDto: {
+      cautions: (
+        'load before power' | 'hot parts' | 'rf power' | 'mains' | 'rf exposure' | 'licence needed'
+      )[];
+      id: string;
+      position: number;
+      /** @example Pre-driver */
+      name: string;
+      summary: string;
+      checks: components['schemas']['PlanCheckDto'][];
+    };
+    PlansPageDto: {
+      items: components['schemas']['PlanDto'][];
+      total: number;
+      page: number;
+      perPage: number;
+    };
+    PreviewNightsDto: {
+      /**
+       * Format: date-time
+       * @description The first night's beginning; for a series its time on the club's wall is kept.
+       */
+      startsAt: string;
+      /**
+       * Format: date-time
+       * @description The first night's end: 15 minutes to 12 hours later.
+       */
+      endsAt: string;
+      /** @description Days to leave out of the series (EXDATE). A day that is no night of it changes nothing. */
+      skip?: string[];
+      title?: string;
+      places?: number;
+      note?: string;
+      /** @description Tells the people whose build is on one of the stages in focus. */
+      tellByMail?: boolean;
+      /** @description Left out for a single night. */
+      repeat?: components['schemas']['RepeatDto'];
+      /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
+      instead?: components['schemas']['InsteadDto'][];
+      /** @description Benches the night holds; none for an evening without. */
+      benchIds?: string[];
+      /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
+      mentorIds?: string[];
+      /** @description Stages in focus. */
+      stageIds?: string[];
+    };
+    ProblemDto: {
+      /**
+       * @description Stable; opened, it explains itself.
+       * @example /problems/invalid-input
+       */
+      type: string;
+      title: string;
+      status: number;
+      /** @description This occurrence, in words for a member. */
+      detail: string;
+      /** @description Names this request in the log. */
+      instance: string;
+      errors?: components['schemas']['FieldProblemDto'][];
+    };
+    QuarterDto: {
+      from: string;
+      to: string;
+      raisedMinor: number;
+      paidMinor: number;
+      count: number;
+      paidCount: number;
+    };
+    RaiseInvoiceDto: {
+      /**
+       * Format: date
+       * @description Not before today.
+       */
+      dueOn: string;
+      /** Format: uuid */
+      personId: string;
+      /** @enum {string} */
+      kind: 'dues' | 'course fee' | 'kit';
+      description: string;
+      amountMinor: number;
+    };
+    ReadingDto: {
+      entry: {
+        [key: string]: string;
+      };
+      /** @enum {string} */
+      verdict: 'pass' | 'too close to call' | 'not yet';
+      id: string;
+      checkId: string;
+      /** @example oscilloscope */
+      method: string;
+      /** @description In `unit`, unrounded. */
+      value: number;
+      /** @example dBm */
+      unit: string;
+      /** @description Unit of the uncertainties: dB for dBm and dBc. */
+      uncertaintyUnit: string;
+      /** @description k = 2, about 95 %. */
+      expandedUncertainty: number;
+      components: components['schemas']['UncertaintyComponentDto'][];
+      voltsPeakToPeak: number | null;
+      watts: number | null;
+      /**
+       * @description Name and version of the calculation.
+       * @example oscilloscope/1
+       */
+      calculation: string;
+      instrumentId: string | null;
+      /** @example FR-021 */
+      instrumentTag: string | null;
+      /** @description Last day of the instrument's calibration, as it was then. */
+      calibrationDueOn: string | null;
+      cautionAcknowledged: boolean;
+      /** @example 2026-01-15T19:46:00Z */
+      takenAt: string;
+      /** @description A later one is in force; this one stays in the record. */
+      isSuperseded: boolean;
+    };
+    ReceiptDto: {
+      id: string;
+      /** @example R-0298 */
+      receiptNumber: string;
+      personId: string;
+      personName: string;
+      /** @enum {string} */
+      method: 'card' | 'cash' | 'cheque' | 'transfer';
+      amountMinor: number;
+      receivedOn: string;
+      note: string;
+      /** @description A transfer or cheque that no line of a statement has shown yet. */
+      isBeingMatched: boolean;
+      isTakenBack: boolean;
+      paid: components['schemas']['PaidShareDto'][];
+      /** @description Left over for later invoices. */
+      creditMinor: number;
+      clubName: string;
+      clubAddress: string;
+      currency: string;
+      /** @description Who took it; a treasurer of the club where a machine did. */
+      treasurerName: string;
+    };
+    RefusedResourceDto: {
+      resourceId: string;
+      reasons: components['schemas']['UseReasonDto'][];
+    };
+    RepeatDto: {
+      /**
+       * @description An RRULE of RFC 5545 without its name: FREQ=WEEKLY with INTERVAL, BYDAY and either COUNT (at most 60) or UNTIL in
+       *     UTC. It is read on the club's wall clock, so that 19:30 stays 19:30 when the clocks change.
+       * @example FREQ=WEEKLY;BYDAY=TU;COUNT=6
+       */
+      rule: string;
+    };
+    ReviewDto: {
+      cautions: (
+        'load before power' | 'hot parts' | 'rf power' | 'mains' | 'rf exposure' | 'licence needed'
+      )[];
+      buildId: string;
+      stageId: string;
+      stagePosition: number;
+      stageName: string;
+      builder: components['schemas']['PersonRefDto'];
+      planName: string;
+      serial: number;
+      /** @example 2026-01-13T21:48:00Z */
+      sentAt: string;
+      /** @description The builder's word. */
+      note: string;
+      /** @description How often it was sent back before. */
+      timesSentBack: number;
+      /** @description The reader's own stage: another mentor decides on it. */
+      isOwn: boolean;
+    };
+    ReviewsPageDto: {
+      /** @description The longest waiting first. */
+      items: components['schemas']['ReviewDto'][];
+      total: number;
+      page: number;
+      perPage: number;
+      /** @description When any stage was signed off last. */
+      lastSignOffAt: string | null;
+    };
+    ScheduledNightsDto: {
+      nights: components['schemas']['BuildNightDto'][];
+      /** @description How many people are told by mail. */
+      told: number;
+    };
+    SendBackDto: {
+      note: string;
+    };
+    SettlingAccountDto: {
+      code: string;
+      name: string;
+    };
+    SignInDto: {
+      /**
+       * Format: email
+       * @example member@larkmoor.example
+       */
+      email: string;
+      /** @example larkmoor-demo */
+      password: string;
+      /** @description On a bench tablet the sign-in runs out after ten minutes untouched. */
+      sharedDevice?: boolean;
+    };
+    SpanDto: {
+      /** Format: date-time */
+      startsAt: string;
+      /** Format: date-time */
+      endsAt: string;
+    };
+    StageEventDto: {
+      /** @enum {string} */
+      kind: 'sent' | 'withdrawn' | 'sent back' | 'signed off';
+      by: components['schemas']['PersonRefDto'];
+      /** @example 2026-01-15T21:48:00Z */
+      at: string;
+      note: string;
+    };
+    StageNoteDto: {
+      /** @example Two turns off the output winding brought the gain down. */
+      note?: string;
+    };
+    StartBuildDto: {
+      /** Format: uuid */
+      planId: string;
+    };
+    StatementDetailDto: {
+      id: string;
+      fileName: string;
+      fromOn: string;
+      toOn: string;
+      openingMinor: number;
+      closingMinor: number;
+      lineCount: number;
+      matchedCount: number;
+      /** @description Sum of the lines that have no match yet. */
+      unmatchedMinor: number;
+      /** @description Lines of the file that an earlier statement had brought, and that were not counted again. */
+      knownLines: number;
+      importedAt: string;
+      currency: string;
+      lines: components['schemas']['StatementLineDto'][];
+      books: components['schemas']['BookItemDto'][];
+      /** @description Open items that the list has no room for. */
+      booksLeftOut: number;
+      totals: components['schemas']['TotalsDto'];
+      /** @description Accounts a line may be settled against by hand. */
+      accounts: components['schemas']['SettlingAccountDto'][];
+    };
+    StatementDto: {
+      id: string;
+      fileName: string;
+      fromOn: string;
+      toOn: string;
+      openingMinor: number;
+      closingMinor: number;
+      lineCount: number;
+      matchedCount: number;
+      /** @description Sum of the lines that have no match yet. */
+      unmatchedMinor: number;
+      /** @description Lines of the file that an earlier statement had brought, and that were not counted again. */
+      knownLines: number;
+      importedAt: string;
+    };
+    StatementLineDto: {
+      id: string;
+      day: string;
+      description: string;
+      /** @description Money in is positive. */
+      amountMinor: number;
+      /** @enum {string} */
+      state: 'matched' | 'no match';
+      /** @description Why it is matched, or why it did not match by itself. */
+      reasons: string[];
+      match: components['schemas']['LineMatchDto'] | null;
+    };
+    StatementsPageDto: {
+      items: components['schemas']['StatementDto'][];
+      total: number;
+      page: number;
+      perPage: number;
+    };
+    TakePaymentDto: {
+      /**
+       * Format: date
+       * @description Today or before.
+       */
+      receivedOn: string;
+      /** Format: uuid */
+      personId: string;
+      /** @enum {string} */
+      method: 'cash' | 'cheque' | 'transfer';
+      amountMinor: number;
+      /** @description Paid in this order; what is left over is credit on account. */
+      invoiceIds: string[];
+      note?: string;
+      /**
+       * Format: uuid
+       * @description Chosen once by the form: the same key again answers with the payment already taken.
+       */
+      clientKey: string;
+    };
+    TakenDto: {
+      resourceId: string;
+      resourceTag: string;
+      /** @description A person's name, or a build night's title. */
+      by: string;
+      /** Format: date-time */
+      startsAt: string;
+      /** Format: date-time */
+      endsAt: string;
+    };
+    TierDto: {
+      id: string;
+      name: string;
+      amountMinor: number;
+      months: number;
+    };
+    TotalsDto: {
+      openingMinor: number;
+      matchedMinor: number;
+      /** @description The current account by the ledger, after this statement's matches. */
+      booksMinor: number;
+      statementMinor: number;
+      /** @description What earlier statements have left unmatched; part of the difference. */
+      earlierMinor: number;
+      differenceMinor: number;
+    };
+    TreasurySummaryDto: {
+      /** @description The instant these figures are of. */
+      asOf: string;
+      today: string;
+      currency: string;
+      dues: components['schemas']['QuarterDto'];
+      holdings: components['schemas']['HoldingsDto'];
+      aged: components['schemas']['AgeBandDto'][];
+      openCount: number;
+      openMinor: number;
+      lateMinor: number;
+      /** @description People with something late. */
+      latePeople: number;
+      /** @description Owed to members: what their payments left over. */
+      creditMinor: number;
+      cardNotes: components['schemas']['CardNoteDto'][];
+    };
+    TrialBalanceDto: {
+      asOn: string;
+      accounts: components['schemas']['TrialBalanceLineDto'][];
+      debitMinor: number;
+      creditMinor: number;
+    };
+    TrialBalanceLineDto: {
+      /** @example 1100 */
+      code: string;
+      name: string;
+      /** @enum {string} */
+      kind: 'asset' | 'liability' | 'income' | 'expense' | 'equity';
+      debitMinor: number;
+      creditMinor: number;
+    };
+    UncertaintyComponentDto: {
+      name: string;
+      limit: number;
+      distribution: string;
+      standardUncertainty: number;
+    };
+    UseReasonDto: {
+      /** @enum {string} */
+      code:
+        | 'in repair'
+        | 'out of use'
+        | 'calibration unknown'
+        | 'calibration past'
+        | 'not cleared'
+        | 'clearance past';
+      reason: string;
+      remedy: string;
+    };
+    WebhookDto: {
+      /** @description The event's id. */
+      received: string;
+      /**
+       * @description `known`: it had come before, and nothing was done.
+       * @enum {string}
+       */
+      outcome: 'acted' | 'noted' | 'needs a look' | 'known';
+    };
+  };
+  responses: never;
+  parameters: never;
+  requestBodies: never;
+  headers: never;
+  pathItems: never;
 }
 export type $defs = Record<string, never>;
 export interface operations {
-    "Auth.me": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["MeDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Auth.refresh": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            204: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Auth.signIn": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["SignInDto"];
-            };
-        };
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["MeDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Auth.signOut": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            204: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Benches.list": {
-        parameters: {
-            query?: {
-                page?: number;
-                perPage?: number;
-            };
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BenchPageDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Bookings.list": {
-        parameters: {
-            query: {
-                from: string;
-                to: string;
-                /** @description Only bookings that hold this bench or instrument. */
-                resourceId?: string;
-            };
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BookingDto"][];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Bookings.book": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["CreateBookingDto"];
-            };
-        };
-        responses: {
-            201: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BookingDto"];
-                };
-            };
-            /** @description Somebody has it; when else it is free */
-            409: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BookingOverlapDto"];
-                };
-            };
-            /** @description Not like this; why, and what helps */
-            422: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["NotBookableDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Bookings.mine": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BookingDto"][];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Bookings.cancel": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                bookingId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            204: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "BuildNights.list": {
-        parameters: {
-            query: {
-                /** @description Nights that end after this. */
-                from: string;
-                /** @description Nights that begin before this. */
-                to: string;
-            };
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BuildNightsDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "BuildNights.schedule": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["PlanNightsDto"];
-            };
-        };
-        responses: {
-            201: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["ScheduledNightsDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "BuildNights.preview": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["PreviewNightsDto"];
-            };
-        };
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["NightsPreviewDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "BuildNights.show": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                id: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BuildNightDetailDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "BuildNights.change": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                id: string;
-            };
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["ChangeNightDto"];
-            };
-        };
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BuildNightDetailDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "BuildNights.cancel": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                id: string;
-            };
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["CancelNightDto"];
-            };
-        };
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BuildNightDetailDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "BuildNights.come": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                id: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BuildNightDetailDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "BuildNights.stayAway": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                id: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BuildNightDetailDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Builds.start": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["StartBuildDto"];
-            };
-        };
-        responses: {
-            201: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BuildDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Builds.mine": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BuildDto"][];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Builds.show": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                buildId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BuildDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Checks.listInstruments": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                buildId: string;
-                checkId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["InstrumentChoiceDto"][];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Checks.mark": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                buildId: string;
-                checkId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            201: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["MarkDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Checks.takeBackMark": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                buildId: string;
-                checkId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            204: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Photos.add": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                buildId: string;
-                checkId: string;
-            };
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "multipart/form-data": {
-                    /** Format: binary */
-                    photo: string;
-                    caption?: string;
-                };
-            };
-        };
-        responses: {
-            201: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["PhotoDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Checks.keepReading": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                buildId: string;
-                checkId: string;
-            };
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["KeepReadingDto"];
-            };
-        };
-        responses: {
-            201: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["ReadingDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Builds.seeLicence": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                buildId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            204: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Photos.show": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                buildId: string;
-                photoId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "image/*": string;
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Photos.takeBack": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                buildId: string;
-                photoId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            204: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Stages.sendBack": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                buildId: string;
-                stageId: string;
-            };
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["SendBackDto"];
-            };
-        };
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BuildStageDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Stages.signOff": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                buildId: string;
-                stageId: string;
-            };
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["StageNoteDto"];
-            };
-        };
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BuildStageDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Stages.submit": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                buildId: string;
-                stageId: string;
-            };
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["StageNoteDto"];
-            };
-        };
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BuildStageDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Stages.withdraw": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                buildId: string;
-                stageId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BuildStageDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Clearances.list": {
-        parameters: {
-            query?: {
-                page?: number;
-                perPage?: number;
-                personId?: string;
-                kindId?: string;
-            };
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["ClearancePageDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Clearances.grant": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["GrantClearanceDto"];
-            };
-        };
-        responses: {
-            201: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["ClearanceDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Clearances.mine": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["ClearanceDto"][];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Clearances.end": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                clearanceId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            204: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Club.front": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["ClubDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Dues.mine": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["MyDuesDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Groups.list": {
-        parameters: {
-            query?: {
-                page?: number;
-                perPage?: number;
-            };
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["GroupPageDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Groups.mine": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["GroupDto"][];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Health.check": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": Record<string, never>;
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Instruments.list": {
-        parameters: {
-            query?: {
-                page?: number;
-                perPage?: number;
-                /** @description For which day the instrument would be used; today unless told. */
-                on?: string;
-                /** @description Only instruments of this kind. */
-                kindId?: string;
-            };
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["InstrumentPageDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Instruments.show": {
-        parameters: {
-            query?: {
-                on?: string;
-            };
-            header?: never;
-            path: {
-                instrumentId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["InstrumentDetailDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Instruments.changeCalibration": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                instrumentId: string;
-            };
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["ChangeCalibrationDto"];
-            };
-        };
-        responses: {
-            204: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Instruments.changeCondition": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                instrumentId: string;
-            };
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["ChangeConditionDto"];
-            };
-        };
-        responses: {
-            204: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Instruments.history": {
-        parameters: {
-            query?: {
-                page?: number;
-                perPage?: number;
-            };
-            header?: never;
-            path: {
-                instrumentId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["InstrumentHistoryDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Invoices.list": {
-        parameters: {
-            query?: {
-                page?: number;
-                perPage?: number;
-                /** @description `open`: anything left to pay, late or not. */
-                state?: "open" | "late" | "paid";
-                personId?: string;
-            };
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["InvoicesPageDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Invoices.raise": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["RaiseInvoiceDto"];
-            };
-        };
-        responses: {
-            201: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["OpenInvoiceDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Invoices.mine": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["InvoiceDto"][];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Invoices.cardPayment": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                invoiceId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["CardPaymentDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Invoices.open": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                invoiceId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["CheckoutDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Ledger.trialBalance": {
-        parameters: {
-            query?: {
-                /** @description The last day that counts; today unless named. */
-                on?: string;
-            };
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["TrialBalanceDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Payments.list": {
-        parameters: {
-            query?: {
-                page?: number;
-                perPage?: number;
-                personId?: string;
-                method?: "card" | "cash" | "cheque" | "transfer";
-            };
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["PaymentsPageDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Payments.take": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["TakePaymentDto"];
-            };
-        };
-        responses: {
-            201: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["PaymentDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Payments.takeBack": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                paymentId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["PaymentDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "People.list": {
-        parameters: {
-            query?: {
-                page?: number;
-                perPage?: number;
-                /** @description Only holders of this role. */
-                role?: "member" | "mentor" | "steward" | "treasurer" | "organiser";
-                /** @description Only names that have these letters in them. */
-                name?: string;
-            };
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["PeoplePageDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "People.show": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                personId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["PersonDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Plans.list": {
-        parameters: {
-            query?: {
-                page?: number;
-                perPage?: number;
-            };
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["PlansPageDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Plans.show": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                planId: string;
-                number: number;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["PlanEditionDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Payments.receipt": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                paymentId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["ReceiptDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Reconciliation.match": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                lineId: string;
-            };
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["MatchLineDto"];
-            };
-        };
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["StatementLineDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Reconciliation.takeBack": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                lineId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["StatementLineDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Reconciliation.list": {
-        parameters: {
-            query?: {
-                page?: number;
-                perPage?: number;
-            };
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["StatementsPageDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Reconciliation.show": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                statementId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["StatementDetailDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Reviews.list": {
-        parameters: {
-            query?: {
-                page?: number;
-                perPage?: number;
-            };
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["ReviewsPageDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Reconciliation.import": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "multipart/form-data": {
-                    /** Format: binary */
-                    file: string;
-                };
-            };
-        };
-        responses: {
-            201: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["StatementDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Dues.list": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["TierDto"][];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Dues.create": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["CreateTierDto"];
-            };
-        };
-        responses: {
-            201: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["TierDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Dues.assign": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["AssignTierDto"];
-            };
-        };
-        responses: {
-            204: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Dues.summary": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["TreasurySummaryDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Webhooks.receive": {
-        parameters: {
-            query?: never;
-            header: {
-                "stripe-signature": string;
-            };
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["WebhookDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
+  'Auth.me': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['MeDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Auth.refresh': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Auth.signIn': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SignInDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['MeDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Auth.signOut': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Benches.list': {
+    parameters: {
+      query?: {
+        page?: number;
+        perPage?: number;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BenchPageDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Bookings.list': {
+    parameters: {
+      query: {
+        from: string;
+        to: string;
+        /** @description Only bookings that hold this bench or instrument. */
+        resourceId?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BookingDto'][];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Bookings.book': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['CreateBookingDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BookingDto'];
+        };
+      };
+      /** @description Somebody has it; when else it is free */
+      409: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BookingOverlapDto'];
+        };
+      };
+      /** @description Not like this; why, and what helps */
+      422: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['NotBookableDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Bookings.mine': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BookingDto'][];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Bookings.cancel': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        bookingId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'BuildNights.list': {
+    parameters: {
+      query: {
+        /** @description Nights that end after this. */
+        from: string;
+        /** @description Nights that begin before this. */
+        to: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BuildNightsDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'BuildNights.schedule': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['PlanNightsDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ScheduledNightsDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'BuildNights.preview': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['PreviewNightsDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['NightsPreviewDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'BuildNights.show': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BuildNightDetailDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'BuildNights.change': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ChangeNightDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BuildNightDetailDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'BuildNights.cancel': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['CancelNightDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BuildNightDetailDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'BuildNights.come': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BuildNightDetailDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'BuildNights.stayAway': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        id: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BuildNightDetailDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Builds.start': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['StartBuildDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BuildDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Builds.mine': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BuildDto'][];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Builds.show': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        buildId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BuildDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Checks.listInstruments': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        buildId: string;
+        checkId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['InstrumentChoiceDto'][];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Checks.mark': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        buildId: string;
+        checkId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['MarkDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Checks.takeBackMark': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        buildId: string;
+        checkId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Photos.add': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        buildId: string;
+        checkId: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'multipart/form-data': {
+          /** Format: binary */
+          photo: string;
+          caption?: string;
+        };
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PhotoDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Checks.keepReading': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        buildId: string;
+        checkId: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['KeepReadingDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ReadingDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Builds.seeLicence': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        buildId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Photos.show': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        buildId: string;
+        photoId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'image/*': string;
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Photos.takeBack': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        buildId: string;
+        photoId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Stages.sendBack': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        buildId: string;
+        stageId: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['SendBackDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BuildStageDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Stages.signOff': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        buildId: string;
+        stageId: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['StageNoteDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BuildStageDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Stages.submit': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        buildId: string;
+        stageId: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['StageNoteDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BuildStageDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Stages.withdraw': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        buildId: string;
+        stageId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['BuildStageDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Clearances.list': {
+    parameters: {
+      query?: {
+        page?: number;
+        perPage?: number;
+        personId?: string;
+        kindId?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ClearancePageDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Clearances.grant': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['GrantClearanceDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ClearanceDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Clearances.mine': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ClearanceDto'][];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Clearances.end': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        clearanceId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Club.front': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ClubDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Dues.mine': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['MyDuesDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Groups.list': {
+    parameters: {
+      query?: {
+        page?: number;
+        perPage?: number;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['GroupPageDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Groups.mine': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['GroupDto'][];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Health.check': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': Record<string, never>;
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Instruments.list': {
+    parameters: {
+      query?: {
+        page?: number;
+        perPage?: number;
+        /** @description For which day the instrument would be used; today unless told. */
+        on?: string;
+        /** @description Only instruments of this kind. */
+        kindId?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['InstrumentPageDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Instruments.show': {
+    parameters: {
+      query?: {
+        on?: string;
+      };
+      header?: never;
+      path: {
+        instrumentId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['InstrumentDetailDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Instruments.changeCalibration': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        instrumentId: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ChangeCalibrationDto'];
+      };
+    };
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Instruments.changeCondition': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        instrumentId: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['ChangeConditionDto'];
+      };
+    };
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Instruments.history': {
+    parameters: {
+      query?: {
+        page?: number;
+        perPage?: number;
+      };
+      header?: never;
+      path: {
+        instrumentId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['InstrumentHistoryDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Invoices.list': {
+    parameters: {
+      query?: {
+        page?: number;
+        perPage?: number;
+        /** @description `open`: anything left to pay, late or not. */
+        state?: 'open' | 'late' | 'paid';
+        personId?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['InvoicesPageDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Invoices.raise': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['RaiseInvoiceDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['OpenInvoiceDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Invoices.mine': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['InvoiceDto'][];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Invoices.cardPayment': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        invoiceId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['CardPaymentDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Invoices.open': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        invoiceId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['CheckoutDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Ledger.trialBalance': {
+    parameters: {
+      query?: {
+        /** @description The last day that counts; today unless named. */
+        on?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['TrialBalanceDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Payments.list': {
+    parameters: {
+      query?: {
+        page?: number;
+        perPage?: number;
+        personId?: string;
+        method?: 'card' | 'cash' | 'cheque' | 'transfer';
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PaymentsPageDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Payments.take': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['TakePaymentDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PaymentDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Payments.takeBack': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        paymentId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PaymentDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'People.list': {
+    parameters: {
+      query?: {
+        page?: number;
+        perPage?: number;
+        /** @description Only holders of this role. */
+        role?: 'member' | 'mentor' | 'steward' | 'treasurer' | 'organiser';
+        /** @description Only names that have these letters in them. */
+        name?: string;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PeoplePageDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'People.show': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        personId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PersonDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Plans.list': {
+    parameters: {
+      query?: {
+        page?: number;
+        perPage?: number;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PlansPageDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Plans.show': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        planId: string;
+        number: number;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['PlanEditionDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Payments.receipt': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        paymentId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ReceiptDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Reconciliation.match': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        lineId: string;
+      };
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['MatchLineDto'];
+      };
+    };
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['StatementLineDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Reconciliation.takeBack': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        lineId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['StatementLineDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Reconciliation.list': {
+    parameters: {
+      query?: {
+        page?: number;
+        perPage?: number;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['StatementsPageDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Reconciliation.show': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path: {
+        statementId: string;
+      };
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['StatementDetailDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Reviews.list': {
+    parameters: {
+      query?: {
+        page?: number;
+        perPage?: number;
+      };
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['ReviewsPageDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Reconciliation.import': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'multipart/form-data': {
+          /** Format: binary */
+          file: string;
+        };
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['StatementDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Dues.list': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['TierDto'][];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Dues.create': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['CreateTierDto'];
+      };
+    };
+    responses: {
+      201: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['TierDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Dues.assign': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody: {
+      content: {
+        'application/json': components['schemas']['AssignTierDto'];
+      };
+    };
+    responses: {
+      204: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content?: never;
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Dues.summary': {
+    parameters: {
+      query?: never;
+      header?: never;
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['TreasurySummaryDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
+  'Webhooks.receive': {
+    parameters: {
+      query?: never;
+      header: {
+        'stripe-signature': string;
+      };
+      path?: never;
+      cookie?: never;
+    };
+    requestBody?: never;
+    responses: {
+      200: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/json': components['schemas']['WebhookDto'];
+        };
+      };
+      /** @description A problem document */
+      default: {
+        headers: {
+          [name: string]: unknown;
+        };
+        content: {
+          'application/problem+json': components['schemas']['ProblemDto'];
+        };
+      };
+    };
+  };
 }

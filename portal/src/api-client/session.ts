@@ -19,7 +19,7 @@ async function getMe(): Promise<Me | null> {
 }
 
 /** Who is signed in; null when nobody is. */
-export const meQuery = queryOptions({ queryKey: ME_KEY, queryFn: getMe, staleTime: 5 * 60_000 });
+const meQuery = queryOptions({ queryKey: ME_KEY, queryFn: getMe, staleTime: 5 * 60_000 });
 
 /** `me` is undefined while it is being asked, null when nobody is signed in. */
 export function useSession() {

@@ -1,6 +1,6 @@
 import Box from '@mui/material/Box';
 import { Fragment } from 'react';
-import type { Column, DataTableProps } from './data-table';
+import type { Column, DataTableProps } from './data-table-types';
 
 function place<T>(column: Column<T>, index: number): NonNullable<Column<T>['phone']> {
   return column.phone ?? (index === 0 ? 'first' : 'second');

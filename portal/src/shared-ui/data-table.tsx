@@ -1,34 +1,8 @@
 import Box from '@mui/material/Box';
-import type { ReactNode } from 'react';
 import { DataRows } from './data-rows';
+import type { Column, DataTableProps } from './data-table-types';
 import { token } from './tokens';
 import { usePhone } from './use-phone';
-
-export interface Column<T> {
-  key: string;
-  header: string;
-  cell: (row: T) => ReactNode;
-  /** Money and readings stand at the right. */
-  align?: 'left' | 'right';
-  width?: string | number;
-  /** On a phone: in the row's first line, at its right end, in the second line (the default), or left out. */
-  phone?: 'first' | 'end' | 'second' | 'hidden';
-  sort?: { direction: 'ascending' | 'descending' | 'none'; onSort: () => void };
-}
-
-export interface DataTableProps<T> {
-  /** What the table lists, for a screen reader. */
-  label: string;
-  /** The first one is the name you would say aloud. */
-  columns: readonly Column<T>[];
-  rows: readonly T[];
-  rowKey: (row: T) => string;
-  /** Opens a row; the name in its first cell becomes the button. */
-  onOpen?: (row: T) => void;
-  openKey?: string;
-  /** States the whole: "48 people, 3 shown". */
-  footer?: ReactNode;
-}
 
 const ARROWS = { ascending: 'M2 7l3-4 3 4', descending: 'M2 3l3 4 3-4', none: '' } as const;
 

@@ -32,7 +32,13 @@ export function DockedDrawer({ open, width = 362, ...panel }: DockedDrawerProps)
       slotProps={{
         paper: {
           sx: isPhone
-            ? { maxHeight: '92dvh', borderTop: `1.5px solid ${token('ink')}`, borderRadius: '10px 10px 0 0' }
+            ? {
+                // The bottom bar stays in sight under the sheet.
+                bottom: 62,
+                maxHeight: 'calc(100dvh - 106px)',
+                borderTop: `1.5px solid ${token('ink')}`,
+                borderRadius: '10px 10px 0 0',
+              }
             : { width: Math.max(width, 400), borderLeft: `1.5px solid ${token('ink')}` },
           'aria-label': panel.title,
         },

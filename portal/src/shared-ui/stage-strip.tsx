@@ -1,5 +1,5 @@
 import Box from '@mui/material/Box';
-import { useEffect, useRef, type KeyboardEvent } from 'react';
+import { Fragment, useEffect, useRef, type KeyboardEvent } from 'react';
 import { StateMark } from './states/shape';
 import { STAGE_STATES, type StageState } from './states/state-words';
 import { token } from './tokens';
@@ -150,9 +150,9 @@ function StageTab({ stage, isOpen, isTabStop, onOpen }: StageTabProps) {
         sx={{ display: '-webkit-box', WebkitBoxOrient: 'vertical', WebkitLineClamp: '2', overflow: 'hidden' }}
       >
         {stage.name.split(' ').map((word) => (
-          <span key={word} style={{ whiteSpace: 'nowrap' }}>
-            {word}{' '}
-          </span>
+          <Fragment key={word}>
+            <span style={{ whiteSpace: 'nowrap' }}>{word}</span>{' '}
+          </Fragment>
         ))}
       </Box>
       <Box

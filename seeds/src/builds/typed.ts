@@ -13,7 +13,7 @@ const TALLEST = 7.6;
 const typedVolts = (volts: number): string => (volts < 0.1 ? `${Math.round(volts * 1000)}m` : String(volts));
 
 /** What somebody types who sees this level on the oscilloscope through a ×10 probe across 50 ohm. */
-export function scopeEntry(levelDbm: number): Entry {
+function scopeEntry(levelDbm: number): Entry {
   const shown = voltsPeakToPeakFromDbm(dBm(levelDbm), ohms(LOAD)) / PROBE;
   const step = STEPS.find((volts) => shown / volts <= TALLEST) ?? 5;
   return {

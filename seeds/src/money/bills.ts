@@ -4,7 +4,7 @@ import { PEOPLE } from '../people';
 
 type Day = Temporal.PlainDate;
 
-export type Way = 'card' | 'transfer' | 'cash' | 'cheque';
+type Way = 'card' | 'transfer' | 'cash' | 'cheque';
 
 /** One invoice of the demo club, and how and when it was paid, if it was. */
 export interface Bill {

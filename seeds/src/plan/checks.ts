@@ -14,7 +14,7 @@ export const KINDS = {
 } as const;
 
 /** Half a decibel wider than the gain's own tolerance would leave no room for the uncertainty of two readings. */
-export const GAIN_TOLERANCE_DB = 1.5;
+const GAIN_TOLERANCE_DB = 1.5;
 
 export const tick = (key: string, title: string, instruction: string): CheckDescription => ({
   key,
@@ -78,7 +78,7 @@ export function scopeLevel(key: string, point: LevelPointDescription, instructio
 }
 
 /** What the scope's form starts with: the probe at ×10 into 50 ohm, read to a tenth of a division. */
-export const SCOPE_START = { probeRatio: 10, loadOhms: 50, readToDivisions: 0.1 };
+const SCOPE_START = { probeRatio: 10, loadOhms: 50, readToDivisions: 0.1 };
 
 /** A level that is no column of the level diagram, such as an oscillator's drive. */
 export function driveLevel(

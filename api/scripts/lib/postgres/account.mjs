@@ -11,8 +11,7 @@ import { PlainError } from '../say.mjs';
 /** Debian makes this account together with the server. @param {'-u' | '-g'} which */
 function idOfPostgres(which) {
   const { status, stdout } = spawnSync('id', [which, 'postgres'], { encoding: 'utf8' });
-  if (status !== 0)
-    throw new PlainError('PostgreSQL is installed, but there is no account named postgres to run it.');
+  if (status !== 0) throw new PlainError('There is no account named postgres to run the server.');
   return Number(stdout);
 }
 

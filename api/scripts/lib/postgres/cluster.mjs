@@ -11,20 +11,11 @@ import { PlainError } from '../say.mjs';
 /** The account that owns the cluster; the portal itself never uses it. */
 const SUPERUSER = 'ferrite_admin';
 
-const baseSettings = [
-  'listen_addresses=127.0.0.1',
-  'unix_socket_directories=',
-  'timezone=UTC',
-  'log_timezone=UTC',
-];
+/** No socket file: it would need a place that both accounts may use, with a short path. */
+const always = ['listen_addresses=127.0.0.1', 'unix_socket_directories=', 'timezone=UTC', 'log_timezone=UTC'];
 
 /** Nothing in the test cluster outlives the run, so it need not survive a power cut; Jest's workers share it. */
-const throwAwaySettings = [
-  'fsync=off',
-  'synchronous_commit=off',
-  'full_page_writes=off',
-  'max_connections=250',
-];
+const throwAway = ['fsync=off', 'synchronous_commit=off', 'full_page_writes=off', 'max_connections=250'];
 
 /**
  * @typedef {object} ClusterOptions
@@ -61,16 +52,10 @@ async function initialize({ folder, log, password, isThrowAway, children, signal
   writeFileSync(passwordFile, password, { mode: 0o600 });
   handOver(passwordFile, folder);
   const args = [
-    '-D',
-    making,
-    '-U',
-    SUPERUSER,
-    '--auth=scram-sha-256',
-    `--pwfile=${passwordFile}`,
-    '-E',
-    'UTF8',
+    ...['-D', making, '-E', 'UTF8', '--locale=C.UTF-8'],
+    ...['-U', SUPERUSER, '--auth=scram-sha-256', `--pwfile=${passwordFile}`],
+    ...['--no-instructions', ...(isThrowAway ? ['--no-sync'] : [])],
   ];
-  args.push('--locale=C.UTF-8', '--no-instructions', ...(isThrowAway ? ['--no-sync'] : []));
   try {
     const initdb = as(postgresProgram(versionFor(data), 'initdb'), args);
     await children.mustRun(
@@ -101,33 +86,19 @@ function isAccepting(data) {
 export async function startCluster(options) {
   const { folder, log, password, isThrowAway, children, signal } = options;
   const data = dataIn(folder);
-  const name = nameOf(folder);
+  const mark = nameOf(folder);
   mkdirSync(folder, { recursive: true });
   const as = ordinaryUser(folder);
   await clearCluster(folder);
   if (!existsSync(data)) await initialize(options, data, as);
+
   const [port] = await freePorts(1);
-  const settings = [
-    ...baseSettings,
-    `port=${port}`,
-    `cluster_name=${name}`,
-    ...(isThrowAway ? throwAwaySettings : []),
-  ];
-  const server = as(postgresProgram(versionFor(data), 'postgres'), [
-    ...['-D', data],
-    ...settings.flatMap((setting) => ['-c', setting]),
-  ]);
+  const settings = [...always, `port=${port}`, `cluster_name=${mark}`, ...(isThrowAway ? throwAway : [])];
+  const args = ['-D', data, ...settings.flatMap((setting) => ['-c', setting])];
+  const server = as(postgresProgram(versionFor(data), 'postgres'), args);
   // The server runs as our own child: we hear of its end at once, and SIGINT is its fast shutdown.
-  const child = children.start({
-    name: 'PostgreSQL',
-    ...server,
-    cwd: '/',
-    log,
-    mark: name,
-    kind: 'postgres',
-  });
-  // Ample, for after a power cut it first replays what it had not written out.
-  await untilReady(child, () => isAccepting(data), signal, 120_000);
+  const child = children.start({ name: 'PostgreSQL', ...server, cwd: '/', log, mark, kind: 'postgres' });
+  await untilReady(child, () => isAccepting(data), signal);
   const host = `127.0.0.1:${port}`;
   return { adminUrl: `postgres://${SUPERUSER}:${password}@${host}/postgres`, host };
 }

@@ -46,8 +46,10 @@ export class Children {
     signal?.removeEventListener('abort', stop);
     clearTimeout(timer);
     signal?.throwIfAborted();
-    const late = child.isStopping ? `\n(It was stopped: not finished within ${limitMs} ms.)\n` : '';
-    return { isOk: ending.code === 0 && !late, ending, output: child.output() + late };
+    const isOk = ending.code === 0 && !child.isStopping;
+    const how = child.isStopping ? `was stopped: not finished within ${limitMs} ms` : describeEnding(ending);
+    // A failure is never silent, even if the command was.
+    return { isOk, output: isOk ? child.output() : `${child.output().trimEnd()}\n\n${spec.name} ${how}.` };
   }
 
   /**
@@ -56,9 +58,8 @@ export class Children {
    * @param {AbortSignal} [signal]
    */
   async mustRun(spec, signal) {
-    const { isOk, ending, output } = await this.run(spec, { signal });
-    if (!isOk) throw new PlainError(`${tail(output, 60)}\n\n${spec.name} ${describeEnding(ending)}.`);
-    return output;
+    const { isOk, output } = await this.run(spec, { signal });
+    if (!isOk) throw new PlainError(tail(output, 60));
   }
 
   /** Never returns, unless a child that is meant to go on has ended by itself: then it throws. */

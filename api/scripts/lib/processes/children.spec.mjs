@@ -36,7 +36,7 @@ describe('children', () => {
   it('returns what a command printed and whether it succeeded', async () => {
     const { isOk, output } = await children.run(program('fails', 'console.error("why"); process.exit(3)'));
     assert.equal(isOk, false);
-    assert.equal(output, 'why\n');
+    assert.equal(output, 'why\n\nfails ended with code 3.');
   });
 
   it('stops a command that takes longer than it is given, and says so', async () => {

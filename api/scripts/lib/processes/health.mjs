@@ -20,10 +20,10 @@ function answers(url) {
  * @param {import('./child.mjs').Child} child
  * @param {() => boolean | Promise<boolean>} isReady
  * @param {AbortSignal} signal
- * @param {number} [limitMs]
+ * @param {number} [limitMs] ample by default: another program may be keeping the machine busy
  * @throws {PlainError} with the end of its log, when it ends or takes too long
  */
-export async function untilReady(child, isReady, signal, limitMs = 60_000) {
+export async function untilReady(child, isReady, signal, limitMs = 120_000) {
   /** @type {import('./child.mjs').Ending | undefined} */
   let ending;
   void child.ended.then((how) => (ending = how));
@@ -43,5 +43,7 @@ export async function untilReady(child, isReady, signal, limitMs = 60_000) {
  * @param {import('./child.mjs').Child} child
  * @param {string} url answers 200 when the child is ready
  * @param {AbortSignal} signal
+ * @param {number} [limitMs]
  */
-export const untilHealthy = (child, url, signal) => untilReady(child, () => answers(url), signal);
+export const untilHealthy = (child, url, signal, limitMs) =>
+  untilReady(child, () => answers(url), signal, limitMs);

@@ -1,6 +1,6 @@
 import { readdirSync, rmSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
-import { npm } from './packages.mjs';
+import { npm, workspace } from './packages.mjs';
 import { inRoot, root } from '../paths.mjs';
 import { sayWhile } from '../say.mjs';
 import { schedule } from './schedule.mjs';
@@ -62,9 +62,9 @@ const folders = (build) => build.outputs.map((folder) => inRoot(folder));
 function clear(build) {
   for (const folder of folders(build)) {
     rmSync(folder, { recursive: true, force: true });
-    const workspace = path.dirname(folder);
-    for (const name of readdirSync(workspace)) {
-      if (name.endsWith('.tsbuildinfo')) rmSync(path.join(workspace, name));
+    const above = path.dirname(folder);
+    for (const name of readdirSync(above)) {
+      if (name.endsWith('.tsbuildinfo')) rmSync(path.join(above, name));
     }
   }
 }
@@ -79,14 +79,14 @@ export async function buildStale(children, logs, signal) {
   const stale = builds.filter((build) => !isFresh(sourcesOf(build), folders(build)));
   if (stale.length === 0) return;
   /** @param {Build} build */
-  async function build(build) {
+  async function make(build) {
     // Taken before building: what is saved while the compiler runs is built the next time.
     const sources = sourcesOf(build);
     clear(build);
     const log = path.join(logs, `build-${build.name}.log`);
     const name = `The build of ${build.name}`;
     await children.mustRun(
-      { name, ...npm(['run', 'build', '-w', build.name === 'api' ? 'api' : build.name]), cwd: root, log },
+      { name, ...npm(['run', 'build', ...workspace(build.name)]), cwd: root, log },
       signal,
     );
     writeFileSync(
@@ -96,5 +96,5 @@ export async function buildStale(children, logs, signal) {
     return true;
   }
   const names = stale.map(({ name }) => name).join(', ');
-  await sayWhile(`Building ${names}`, async () => void (await schedule(stale, 2, build)));
+  await sayWhile(`Building ${names}`, async () => void (await schedule(stale, 2, make)));
 }

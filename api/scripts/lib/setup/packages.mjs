@@ -84,6 +84,12 @@ export function npm(args) {
 }
 
 /**
+ * npm's option for one workspace. By its name: the path `api` would mean `api/levels` as well.
+ * @param {string} name
+ */
+export const workspace = (name) => ['-w', `@ferrite-row/${name}`];
+
+/**
  * @param {import('../processes/children.mjs').Children} children
  * @param {string} logs
  * @param {AbortSignal} signal

@@ -22,7 +22,7 @@ function scratch({ run }) {
 async function allMustPass(bench, commands, remedy) {
   for (const command of commands) {
     const { isOk, output } = await runCommand(bench, command);
-    if (!isOk) return gateOutcome(false, `${output}\n${command.name} failed. ${remedy}`);
+    if (!isOk) return gateOutcome(false, `${output}\n${remedy}`);
   }
   return gateOutcome(true, '');
 }
@@ -44,7 +44,7 @@ function client(bench) {
       },
       { name: 'client drift', ...diff, args: ['-u', 'portal/src/api-client/schema.d.ts', schema] },
     ],
-    'To renew both files: npm run build -w api && npm run openapi -w api && npm run client -w portal',
+    'To renew both files: npm run build -w @ferrite-row/api && npm run openapi -w @ferrite-row/api && npm run client -w portal',
   );
 }
 

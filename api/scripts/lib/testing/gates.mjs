@@ -1,5 +1,5 @@
 import { inRoot } from '../paths.mjs';
-import { npm } from '../setup/packages.mjs';
+import { npm, workspace } from '../setup/packages.mjs';
 import { buildMissing } from '../setup/prepare.mjs';
 import { gateOutcome, npmGate, runCommand } from './step.mjs';
 
@@ -17,7 +17,7 @@ async function types(bench) {
   const checks = [
     ...workspaces.map((name) => ({
       name: `types of ${name}`,
-      ...npm(['run', '--silent', 'typecheck', '-w', name]),
+      ...npm(['run', '--silent', 'typecheck', ...workspace(name)]),
     })),
     {
       name: 'types of scripts',
@@ -30,7 +30,7 @@ async function types(bench) {
   for (const check of checks) {
     const { isOk, output } = await runCommand(bench, check);
     isAllOk &&= isOk;
-    if (!isOk) text += `${check.name}:\n${output}\n`;
+    if (!isOk) text += `${output}\n\n`;
   }
   return gateOutcome(isAllOk, text);
 }

@@ -1,7 +1,7 @@
 import { useSearchParams } from 'react-router-dom';
 import { addDays, clubDay, weekStart } from '../../lib/club-time';
 
-export type BookViewKind = 'lanes' | 'list';
+type BookViewKind = 'lanes' | 'list';
 
 /** What the address says: which week and day, which benches and instruments, lanes or list, and what a check needs. */
 export interface BookView {

@@ -44,7 +44,7 @@ export function LevelDiagram({ points, entered, currentId, onOpen }: LevelDiagra
           <Legend isEntering={entered !== undefined} hasMeasured={rows.some(({ measured }) => measured)} />
           <LevelDrawing rows={rows} currentId={currentId} onOpen={onOpen} />
           <VisuallyHidden as="div">
-            <LevelTable rows={rows} />
+            <LevelTable rows={rows} isSeen={false} />
           </VisuallyHidden>
         </>
       )}

@@ -52,10 +52,24 @@ function Cells({ row }: { row: LevelRow }) {
   );
 }
 
+interface LevelTableProps {
+  rows: readonly LevelRow[];
+  /** False beside the drawing, where only a screen reader meets it. */
+  isSeen?: boolean;
+}
+
+/** Reachable with the keyboard, since it may have to be scrolled sideways. */
+const SCROLLER = {
+  tabIndex: 0,
+  role: 'region',
+  'aria-label': 'Levels as a table',
+  sx: { overflowX: 'auto' },
+};
+
 /** The same rows as the drawing, as a real table. */
-export function LevelTable({ rows }: { rows: readonly LevelRow[] }) {
+export function LevelTable({ rows, isSeen = true }: LevelTableProps) {
   return (
-    <Box sx={{ overflowX: 'auto' }}>
+    <Box {...(isSeen && SCROLLER)}>
       <Box
         component="table"
         sx={{

@@ -6,7 +6,6 @@ import { addDays, instantOf } from '../../../lib/club-time';
 export type Bench = components['schemas']['BenchDto'];
 export type Instrument = components['schemas']['InstrumentDto'];
 export type Booking = components['schemas']['BookingDto'];
-export type Group = components['schemas']['GroupDto'];
 export type BookingWish = components['schemas']['CreateBookingDto'];
 export type FreeTime = components['schemas']['SpanDto'];
 

@@ -54,7 +54,7 @@ export function BookForm(props: BookFormProps) {
           name="benchId"
           label="Bench"
           options={[
-            ...benches.map(({ id, tag, name }) => ({ value: id, label: `${tag}, ${name}` })),
+            ...benches.map(({ id, tag }) => ({ value: id, label: tag })),
             { value: '', label: 'No bench' },
           ]}
           hint={bench && holderWords(bench)}

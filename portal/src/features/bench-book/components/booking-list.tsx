@@ -4,7 +4,8 @@ import { minutesBetween } from '../../../lib/club-time';
 import { formatDay, formatSpan, lengthText } from '../../../lib/club-time-text';
 import { counted } from '../../../lib/text';
 import { AssetTag } from '../../../shared-ui/asset-tag';
-import { DataTable, type Column } from '../../../shared-ui/data-table';
+import { DataTable } from '../../../shared-ui/data-table';
+import type { Column } from '../../../shared-ui/data-table-types';
 import { EmptyState } from '../../../shared-ui/empty-state';
 import type { Booking } from '../api/bench-book';
 

@@ -1,4 +1,4 @@
-import Link from '@mui/material/Link';
+import Button from '@mui/material/Button';
 import { useState } from 'react';
 import { counted } from '../../../lib/text';
 import { SectionHeading } from '../../../shared-ui/section-heading';
@@ -47,14 +47,9 @@ export function InstrumentRows(props: InstrumentRowsProps) {
         />
       ))}
       {more > 0 && (
-        <Link
-          component="button"
-          type="button"
-          onClick={() => setShowsAll(true)}
-          sx={{ minHeight: 44, fontSize: '0.8125rem', fontWeight: 700 }}
-        >
+        <Button variant="text" onClick={() => setShowsAll(true)} sx={{ px: 0, fontSize: '0.8125rem' }}>
           Show {counted(more, 'more instrument')}
-        </Link>
+        </Button>
       )}
     </section>
   );

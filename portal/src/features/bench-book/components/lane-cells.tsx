@@ -1,12 +1,10 @@
-import Box from '@mui/material/Box';
-import { memo } from 'react';
 import { clockText, dayText } from '../../../lib/club-time-text';
+import { VisuallyHidden } from '../../../shared-ui/visually-hidden';
 import type { Block } from '../lanes/blocks';
 import { blockAt } from '../lanes/blocks';
 import { SLOT_MINUTES, SLOTS } from '../lanes/cursor';
 import { hatchOf } from '../lanes/hatches';
 import type { Lane } from '../lanes/lane';
-import { SLOT_PX } from '../lanes/lane-sizes';
 
 interface LaneCellsProps {
   idPrefix: string;
@@ -14,6 +12,10 @@ interface LaneCellsProps {
   lanes: readonly Lane[];
   blocks: readonly Block[];
   today: string;
+  /** The half hour the keyboard is at. */
+  slot: number;
+  /** Rows of heads over the first half hour. */
+  headRows: number;
 }
 
 export const cellId = (prefix: string, column: number, slot: number): string => `${prefix}-${column}-${slot}`;
@@ -22,46 +24,37 @@ export const cellId = (prefix: string, column: number, slot: number): string => 
 export const whoHas = ({ booking }: Pick<Block, 'booking'>): string =>
   booking.kind === 'build night' ? booking.title : booking.mine ? 'You' : booking.personName;
 
-/** The half hours, one row each, with what a screen reader says of every one of them. */
-export const LaneCells = memo(function LaneCells({ idPrefix, dates, lanes, blocks, today }: LaneCellsProps) {
+/**
+ * What a screen reader says of the half hours: who has it until when, why it cannot be had, or that it is free. Only
+ * the rows around the keyboard exist, with their numbers; a thousand cells in three lanes would slow everybody down.
+ */
+export function LaneCells({ idPrefix, dates, lanes, blocks, today, slot, headRows }: LaneCellsProps) {
   const words = (date: string, lane: number, minute: number): string => {
     const block = blockAt(blocks, { date, lane, minute });
     const hatch = hatchOf(lanes[lane]?.instrument, date, today);
     const state = block ? `${whoHas(block)} until ${clockText(block.bottom)}` : (hatch ?? 'free');
     return `${dayText(date)} ${clockText(minute)}, ${lanes[lane]?.tag ?? ''}, ${state}`;
   };
-  return Array.from({ length: SLOTS }, (_, slot) => (
-    <Box key={slot} role="row" sx={{ display: 'contents' }}>
-      <Box role="rowheader" sx={{ ...CLOCK, visibility: slot % 2 === 0 ? 'visible' : 'hidden' }}>
-        {clockText(slot * SLOT_MINUTES)}
-      </Box>
-      {dates.flatMap((date, day) =>
-        lanes.map((lane, index) => (
-          <Box
-            key={`${date}:${lane.id}`}
-            role="gridcell"
-            id={cellId(idPrefix, day * lanes.length + index, slot)}
-            aria-label={words(date, index, slot * SLOT_MINUTES)}
-            sx={{
-              borderLeft: '1px solid',
-              borderLeftColor: index === 0 ? 'token.edge' : 'token.rule',
-              borderTop: slot % 2 === 0 ? '1px solid' : '1px dotted',
-              borderTopColor: slot === 0 ? 'transparent' : 'token.rule',
-            }}
-          />
-        )),
-      )}
-    </Box>
+  const near = [slot - 1, slot, slot + 1].filter((row) => row >= 0 && row < SLOTS);
+  return near.map((row) => (
+    <VisuallyHidden key={row}>
+      <div role="row" aria-rowindex={row + headRows + 1}>
+        <span role="rowheader">{clockText(row * SLOT_MINUTES)}</span>
+        {dates.flatMap((date, day) =>
+          lanes.map((lane, index) => {
+            const column = day * lanes.length + index;
+            return (
+              <span
+                key={lane.id}
+                role="gridcell"
+                id={cellId(idPrefix, column, row)}
+                aria-colindex={column + 2}
+                aria-label={words(date, index, row * SLOT_MINUTES)}
+              />
+            );
+          }),
+        )}
+      </div>
+    </VisuallyHidden>
   ));
-});
-
-const CLOCK = {
-  height: SLOT_PX,
-  pr: '8px',
-  textAlign: 'right',
-  typography: 'small',
-  lineHeight: '1rem',
-  color: 'token.ink2',
-  // The figure stands beside its line, not under it.
-  mt: '-8px',
-} as const;
+}

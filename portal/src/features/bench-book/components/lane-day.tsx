@@ -1,10 +1,13 @@
 import Box from '@mui/material/Box';
 import { clubDay } from '../../../lib/club-time';
 import { clockText } from '../../../lib/club-time-text';
+import { token } from '../../../shared-ui/tokens';
 import type { Booking } from '../api/bench-book';
 import type { Block } from '../lanes/blocks';
+import { SLOTS } from '../lanes/cursor';
 import { hatchOf } from '../lanes/hatches';
 import type { Lane } from '../lanes/lane';
+import { SLOT_PX } from '../lanes/lane-sizes';
 import { hoursText, LaneBlock } from './lane-block';
 import { LaneCursor, LaneHatch, LaneWish, NowLine } from './lane-marks';
 import { useLanePointer } from './use-lane-pointer';
@@ -29,7 +32,6 @@ interface LaneDayProps {
   lanes: readonly Lane[];
   blocks: readonly Block[];
   wishes: readonly Wish[];
-  place: { firstColumn: number; firstRow: number };
   cursor: { lane: number; slot: number; length: number } | undefined;
   isWide: boolean;
   onPick: (picked: Picked) => void;
@@ -38,7 +40,7 @@ interface LaneDayProps {
 
 /** The drawing of one day over its cells, and what a pointer does there. */
 export function LaneDay(props: LaneDayProps) {
-  const { date, lanes, blocks, wishes, place, cursor, isWide, onPick, onOpen } = props;
+  const { date, lanes, blocks, wishes, cursor, isWide, onPick, onOpen } = props;
   const laneCount = lanes.length;
   const pointer = useLanePointer(laneCount, (index, from, to) => {
     const lane = lanes[index];
@@ -50,11 +52,8 @@ export function LaneDay(props: LaneDayProps) {
     <Box
       aria-hidden
       {...pointer.handlers}
-      style={{
-        gridColumn: `${place.firstColumn} / ${place.firstColumn + laneCount}`,
-        gridRow: `${place.firstRow} / ${place.firstRow + 48}`,
-      }}
-      sx={{ position: 'absolute', inset: 0, cursor: 'cell', touchAction: 'pan-y' }}
+      style={{ gridColumn: `span ${laneCount}`, backgroundSize: `${100 / laneCount}% 100%, auto, auto` }}
+      sx={DAY}
     >
       {lanes.map(({ id, instrument }, index) => {
         const words = hatchOf(instrument, date, clubDay());
@@ -83,3 +82,19 @@ export function LaneDay(props: LaneDayProps) {
     </Box>
   );
 }
+
+const LINE = token('rule');
+
+/** Hours ruled, half hours dotted, lanes parted; the day's own edge stands out. Drawn by the background, not by cells. */
+const DAY = {
+  position: 'relative',
+  height: SLOT_PX * SLOTS,
+  borderLeft: `1px solid ${token('edge')}`,
+  cursor: 'cell',
+  touchAction: 'pan-y',
+  backgroundImage: [
+    `linear-gradient(90deg, transparent calc(100% - 1px), ${LINE} 0)`,
+    `repeating-linear-gradient(180deg, ${LINE} 0 1px, transparent 1px ${2 * SLOT_PX}px)`,
+    `repeating-linear-gradient(180deg, transparent 0 ${SLOT_PX}px, color-mix(in srgb, ${LINE} 55%, transparent) ${SLOT_PX}px ${SLOT_PX + 1}px, transparent ${SLOT_PX + 1}px ${2 * SLOT_PX}px)`,
+  ].join(', '),
+} as const;

@@ -20,7 +20,7 @@ export function LaneHeads({ dates, lanes, hasDays }: LaneHeadsProps) {
   return (
     <>
       {hasDays && (
-        <Box role="row" sx={{ display: 'contents' }}>
+        <Box role="row" aria-rowindex={1} sx={{ display: 'contents' }}>
           <Box role="columnheader" aria-label="Time" sx={{ ...STICKY, top: 0 }} />
           {dates.map((date) => (
             <Box
@@ -47,7 +47,7 @@ export function LaneHeads({ dates, lanes, hasDays }: LaneHeadsProps) {
           ))}
         </Box>
       )}
-      <Box role="row" sx={{ display: 'contents' }}>
+      <Box role="row" aria-rowindex={hasDays ? 2 : 1} sx={{ display: 'contents' }}>
         <Box role="columnheader" aria-label="Time" sx={{ ...UNDER, top }} />
         {dates.flatMap((date) =>
           lanes.map((lane, index) => (

@@ -128,7 +128,7 @@ export function LaneCursor({ lane, laneCount, slot, length }: CursorProps) {
     <Box
       aria-hidden
       data-testid="lane-cursor"
-      ref={(element: HTMLElement | null) => element?.scrollIntoView({ block: 'nearest' })}
+      ref={(element: HTMLElement | null) => element?.scrollIntoView?.({ block: 'nearest' })}
       style={{ ...across(lane, laneCount), top: slot * SLOT_PX, height: length * SLOT_PX }}
       sx={{
         ...BOX,

@@ -21,12 +21,20 @@ export function useBookForm(view: BookView, benches: readonly Bench[], instrumen
   useEffect(() => {
     if (hasFilled.current || benches.length === 0 || instruments.length === 0) return;
     hasFilled.current = true;
-    if (!getValues('benchId') && getValues('instrumentIds').length === 0)
-      setValue('benchId', benches[0]?.id ?? '');
-    if (view.check) setValue('checkId', view.check);
-    const needed = view.need && neededOf(instruments, view.need);
-    if (needed) setValue('instrumentIds', [needed.id]);
-  }, [benches, instruments, view.check, view.need, setValue, getValues]);
+    const values = getValues();
+    const needed = view.need ? neededOf(instruments, view.need) : undefined;
+    const isUntouched = values.benchId === '' && values.instrumentIds.length === 0;
+    // By reset and not by setValue: what the page fills in is no draft of the person's.
+    reset(
+      {
+        ...values,
+        ...(isUntouched && { benchId: benches[0]?.id ?? '' }),
+        ...(view.check && { checkId: view.check }),
+        ...(needed && { instrumentIds: [needed.id] }),
+      },
+      { keepDefaultValues: true },
+    );
+  }, [benches, instruments, view.check, view.need, reset, getValues]);
 
   /** A stretch picked in the lanes: its lane joins what is chosen, a bench in place of the one before. */
   const pick = ({ date, lane, from, to }: Picked) => {

@@ -3,11 +3,12 @@ import { useId, useLayoutEffect, useMemo, useRef, useState, type KeyboardEvent }
 import { clubDay } from '../../../lib/club-time';
 import type { Booking } from '../api/bench-book';
 import { blockAt, blocksOf } from '../lanes/blocks';
-import { moved, SLOT_MINUTES, type Cursor } from '../lanes/cursor';
+import { moved, SLOT_MINUTES, SLOTS, type Cursor } from '../lanes/cursor';
 import { firstHour } from '../lanes/first-hour';
 import type { Lane } from '../lanes/lane';
 import { CLOCK_PX, SLOT_PX } from '../lanes/lane-sizes';
 import { cellId, LaneCells } from './lane-cells';
+import { LaneClock } from './lane-clock';
 import { LaneDay, type Picked, type Wish } from './lane-day';
 import { LaneHeads } from './lane-heads';
 
@@ -36,6 +37,7 @@ export function WeekLanes({ dates, lanes, bookings, wishes, hasDays, onPick, onO
   const [cursor, setCursor] = useState<Cursor>();
   const [hasFocus, setHasFocus] = useState(false);
   const columns = dates.length * lanes.length;
+  const headRows = hasDays ? 2 : 1;
   const at: Cursor = cursor ?? {
     column: Math.max(0, dates.indexOf(today)) * lanes.length,
     slot: firstSlot + 4,
@@ -67,7 +69,8 @@ export function WeekLanes({ dates, lanes, bookings, wishes, hasDays, onPick, onO
         role="grid"
         tabIndex={0}
         aria-label="Bench book, benches and instruments by day"
-        aria-rowcount={-1}
+        aria-rowcount={SLOTS + headRows}
+        aria-colcount={columns + 1}
         aria-activedescendant={cellId(id, column, at.slot)}
         onKeyDown={onKeyDown}
         onFocus={(event) => setHasFocus(event.target === event.currentTarget)}
@@ -82,21 +85,21 @@ export function WeekLanes({ dates, lanes, bookings, wishes, hasDays, onPick, onO
         }}
       >
         <LaneHeads dates={dates} lanes={lanes} hasDays={hasDays} />
-        <LaneCells idPrefix={id} dates={dates} lanes={lanes} blocks={blocks} today={today} />
-        {dates.map((day, index) => (
+        <LaneClock />
+        {dates.map((day) => (
           <LaneDay
             key={day}
             date={day}
             lanes={lanes}
             blocks={blocks.filter((block) => block.date === day)}
             wishes={wishes.filter((wish) => wish.date === day)}
-            place={{ firstColumn: index * lanes.length + 2, firstRow: hasDays ? 3 : 2 }}
             cursor={hasFocus && day === date ? { lane, slot: at.slot, length: at.length } : undefined}
             isWide={!hasDays}
             onPick={onPick}
             onOpen={onOpen}
           />
         ))}
+        <LaneCells idPrefix={id} {...{ dates, lanes, blocks, today, headRows }} slot={at.slot} />
       </Box>
     </Box>
   );

@@ -32,7 +32,11 @@ export function DayHead({ day, month, word, usual }: DayHeadProps) {
         }}
       >
         <span>{isEdge ? `${number} ${monthName}` : number}</span>
-        {word && <span>{word}</span>}
+        {word && (
+          <Box component="span" sx={{ display: { xs: 'none', md: 'inline' } }}>
+            {word}
+          </Box>
+        )}
       </Box>
       {change && (
         <Box

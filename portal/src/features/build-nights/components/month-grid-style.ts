@@ -5,7 +5,13 @@ const HATCH = (name: 'rule' | 'oxide') =>
 
 /** Dresses the calendar's own classes in the notebook's look; it brings its rules along and cannot be themed else. */
 export const monthGridStyle = {
-  '& .fc': { '--fc-border-color': token('rule'), '--fc-today-bg-color': 'transparent' },
+  '& .fc': {
+    '--fc-border-color': token('rule'),
+    '--fc-today-bg-color': 'transparent',
+    '--fc-page-bg-color': 'transparent',
+    '--fc-event-text-color': token('ink'),
+    borderBottom: `1px solid ${token('rule')}`,
+  },
   '& .fc .fc-scrollgrid': { border: 0 },
   '& .fc .fc-scroller': { overflow: 'visible !important' },
   '& .fc .fc-scrollgrid-section > td, & .fc .fc-scrollgrid-section > th': { border: 0 },
@@ -22,15 +28,18 @@ export const monthGridStyle = {
   '& .fc .fc-daygrid-day-top': { flexDirection: 'row', opacity: 1 },
   '& .fc .fc-daygrid-day-number': { width: '100%', padding: '0 7px', color: token('ink2') },
   '& .fc .fc-day-other .fc-daygrid-day-number': { color: token('ink3') },
-  '& .fc .fc-day-today': { borderTop: `3px solid ${token('green')}` },
+  // Drawn inside: the table's collapsed borders would take its place.
+  '& .fc .fc-day-today': { boxShadow: `inset 0 3px 0 ${token('green')}` },
+  '& .fc td.fc-daygrid-day:first-of-type': { borderLeft: `1px solid ${token('rule')}` },
+  '& .fc td.fc-daygrid-day:last-of-type': { borderRight: `1px solid ${token('rule')}` },
   '& .fc .fr-picked': {
     backgroundColor: token('sheet'),
     outline: `1.5px solid ${token('ink')}`,
     outlineOffset: '-1.5px',
   },
   '& .fc .fc-daygrid-event': {
-    margin: '2px 5px 0 !important',
-    padding: '1px 5px 2px',
+    margin: { xs: '2px 1px 0 !important', md: '2px 5px 0 !important' },
+    padding: { xs: '1px 2px 2px', md: '1px 4px 2px' },
     minHeight: 36,
     borderRadius: '2px',
     border: `1px solid ${token('edge')}`,

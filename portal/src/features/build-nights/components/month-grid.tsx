@@ -57,6 +57,8 @@ export function MonthGrid({ month, nights, entries, pickedDay, onOpen, onDay, on
         dayMaxEvents={2}
         moreLinkContent={({ num }) => `${num} more`}
         moreLinkClick={onMore}
+        // The library makes it a link that leads nowhere; pressed, it acts.
+        moreLinkDidMount={({ el }) => el.setAttribute('role', 'button')}
         eventDisplay="block"
         eventInteractive
         eventOrder="start,title"

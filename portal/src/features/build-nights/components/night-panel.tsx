@@ -55,7 +55,7 @@ function Opened({ night, onChange }: { night: NightDetail; onChange: (nightId: s
         gridTemplateColumns: {
           xs: 'minmax(0, 1fr)',
           sm: 'repeat(2, minmax(0, 1fr))',
-          md: '218px minmax(0, 1.5fr) minmax(0, 1fr)',
+          md: '236px minmax(0, 1.5fr) minmax(0, 1fr)',
         },
       }}
     >
@@ -72,12 +72,9 @@ function NightFacts({ night, onChange }: { night: NightDetail; onChange: (nightI
   const where = benches.length > 0 ? `, ${benchWords(benches.map(({ tag }) => tag))}` : '';
   return (
     <div>
-      <Box sx={{ display: 'flex', justifyContent: 'space-between', gap: '8px', flexWrap: 'wrap' }}>
-        <Typography variant="small" sx={{ color: 'token.ink2' }}>
-          {over}
-        </Typography>
-        <StandingLine night={night} />
-      </Box>
+      <Typography variant="small" component="div" sx={{ color: 'token.ink2' }}>
+        {over}
+      </Typography>
       <Typography variant="h2" sx={{ fontSize: '1.1875rem', lineHeight: '1.625rem' }}>
         {longDayText(clubDay(night.startsAt)).replace(/^(\w{3})\w*/, '$1')}
       </Typography>
@@ -86,6 +83,9 @@ function NightFacts({ night, onChange }: { night: NightDetail; onChange: (nightI
         {where}
       </Box>
       <PlaceBar night={night} />
+      <Box sx={{ mt: '4px', '&:empty': { display: 'none' } }}>
+        <StandingLine night={night} />
+      </Box>
       {mine?.state === 'waiting' && (
         <Box sx={{ typography: 'small', color: 'token.trace', fontWeight: 600 }}>
           You are {lineWords(mine.line ?? 1)}.

@@ -34,7 +34,11 @@ export function PlanFields({ control, errors, isOneNight = false }: PlanFieldsPr
     <Box sx={{ display: 'grid', gap: '10px' }}>
       <Text {...text} name="title" label="Name" maxLength={80} />
       <Box
-        sx={{ display: 'grid', gap: '10px', gridTemplateColumns: isSeries ? '1fr 1.18fr 68px' : '1fr 1fr' }}
+        sx={{
+          display: 'grid',
+          gap: '10px',
+          gridTemplateColumns: { xs: '1fr 1fr', md: isSeries ? '122px 1fr 56px' : '1fr 1fr' },
+        }}
       >
         {!isOneNight && <Repeats control={control} />}
         <Text {...text} name="first" label={isSeries ? 'First' : 'Day'} type="date" />

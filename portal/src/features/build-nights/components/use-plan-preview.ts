@@ -7,6 +7,8 @@ import { previewQuery } from '../api/nights';
 import { FIELD_OF, timesOf, type PlanForm } from '../plan-form';
 
 const STILL_MS = 250;
+/** One and the same, so that nothing downstream takes it for news. */
+const NO_NIGHTS: readonly CheckedNight[] = [];
 
 export interface PlanPreview {
   nights: readonly CheckedNight[];
@@ -29,7 +31,7 @@ export function usePlanPreview(control: Control<PlanForm>): PlanPreview {
   const errors = query.isError ? fieldErrors(query.error) : {};
   const isReadable = typed !== undefined && !query.isError;
   return {
-    nights: isReadable ? (query.data?.nights ?? []) : [],
+    nights: isReadable ? (query.data?.nights ?? NO_NIGHTS) : NO_NIGHTS,
     toTell: query.data?.toTell ?? 0,
     isStale: query.isPlaceholderData || JSON.stringify(typed) !== JSON.stringify(resting) || !query.data,
     errors,

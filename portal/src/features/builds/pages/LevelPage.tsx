@@ -1,9 +1,54 @@
+import { useNavigate, useParams } from 'react-router-dom';
+import { LevelDiagram } from '../../../shared-ui/level-diagram/level-diagram';
+import { LevelDiagramPhone } from '../../../shared-ui/level-diagram/level-diagram-phone';
+import { LoadingBars } from '../../../shared-ui/loading-bars';
 import { PageTitle } from '../../../shared-ui/page-title';
+import { PhoneBar } from '../../../shared-ui/phone-bar';
+import { ProblemAlert } from '../../../shared-ui/problem-alert';
+import { usePhone } from '../../../shared-ui/use-phone';
+import { useBuild, type Build } from '../api/builds';
+import { checkPath, levelPointsOf } from '../logic/stage';
+import { serialText } from '../logic/words';
 
+/** The level diagram as a page of its own, which is how a phone shows it. */
 export default function LevelPage() {
+  const { buildId = '' } = useParams();
+  const build = useBuild(buildId);
+  if (build.isPending) return <LoadingBars rows={8} label="Opening the level diagram" />;
+  if (build.isError) return <ProblemAlert error={build.error} onRetry={() => void build.refetch()} />;
+  return <Levels build={build.data} />;
+}
+
+function Levels({ build }: { build: Build }) {
+  const navigate = useNavigate();
+  const isPhone = usePhone();
+  const points = levelPointsOf(build);
+  const current = build.levelPoints.filter(({ stageId }) => stageId === build.currentStageId).at(-1);
+  const back = build.currentStageId ? checkPath(build.id, build.currentStageId) : '/build';
+  const open = (pointId: string) => {
+    const stageId = build.levelPoints.find(({ id }) => id === pointId)?.stageId;
+    if (stageId) void navigate(checkPath(build.id, stageId));
+  };
+  const name = `${build.planName}, ${serialText(build.serial)}`;
+  if (isPhone)
+    return (
+      <>
+        <PhoneBar
+          title="Level diagram"
+          subtitle={name}
+          backTo={back}
+          backLabel="Back to the stage"
+          end="dBm"
+        />
+        <LevelDiagramPhone points={points} currentId={current?.id} onOpen={open} />
+      </>
+    );
   return (
-    <PageTitle tab="Level diagram">
-      Level <b>diagram</b>
-    </PageTitle>
+    <>
+      <PageTitle tab="Level diagram" over={name}>
+        Level <b>diagram</b>
+      </PageTitle>
+      <LevelDiagram points={points} currentId={current?.id} onOpen={open} />
+    </>
   );
 }

@@ -1,0 +1,13 @@
+import { useEffect, useState } from 'react';
+
+const MINUTE_MS = 60_000;
+
+/** The present, told anew each minute, so that the now line keeps moving. */
+export function useNow(): Date {
+  const [now, setNow] = useState(() => new Date());
+  useEffect(() => {
+    const timer = setInterval(() => setNow(new Date()), MINUTE_MS);
+    return () => clearInterval(timer);
+  }, []);
+  return now;
+}

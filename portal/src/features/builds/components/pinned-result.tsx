@@ -1,0 +1,104 @@
+import Box from '@mui/material/Box';
+import Typography from '@mui/material/Typography';
+import { VerdictChip } from '../../../shared-ui/states/verdict-chip';
+import { useKeyboardUp } from '../logic/use-keyboard-up';
+import type { ReadingFormState } from '../logic/use-reading-form';
+import { readingWords } from '../logic/words';
+import { KeepButtons } from './keep-buttons';
+import { BigValue, LiveWindow, secondValues, shownLive, uncertaintyText } from './live-result';
+
+const BOTTOM_BAR = 62;
+
+/** The phone's result, within thumb's reach; one row of it while the keyboard is up. */
+export function PinnedResult({ form }: { form: ReadingFormState }) {
+  const hidden = useKeyboardUp();
+  const isShort = hidden !== undefined;
+  return (
+    <>
+      <Box aria-hidden sx={{ height: isShort ? 76 : 12 }} />
+      <Box
+        component="section"
+        aria-label="Result"
+        sx={{
+          position: isShort ? 'fixed' : 'sticky',
+          zIndex: isShort ? 'snackbar' : 'appBar',
+          bottom: isShort ? hidden : `calc(${BOTTOM_BAR}px + env(safe-area-inset-bottom))`,
+          left: 0,
+          right: 0,
+          mx: isShort ? 0 : '-16px',
+          px: '16px',
+          py: isShort ? '8px' : '12px',
+          borderTop: '1.5px solid',
+          borderColor: 'token.ink',
+          backgroundColor: 'token.sheet',
+        }}
+      >
+        {isShort ? <ShortForm form={form} /> : <LongForm form={form} />}
+      </Box>
+    </>
+  );
+}
+
+function LongForm({ form }: { form: ReadingFormState }) {
+  const shown = shownLive(form);
+  return (
+    <>
+      {shown ? (
+        <>
+          <Box sx={{ display: 'flex', justifyContent: 'space-between', gap: '12px' }}>
+            <div>
+              <BigValue {...shown} />
+              <Typography variant="small" component="p" sx={{ m: 0, color: 'token.ink2' }}>
+                {uncertaintyText(shown.read)}
+              </Typography>
+            </div>
+            <Box sx={{ textAlign: 'right', pt: '6px' }}>
+              <VerdictChip verdict={shown.read.verdict} />
+              <Typography variant="small" component="p" sx={{ m: 0, mt: '4px', color: 'token.ink2' }}>
+                {secondValues(shown.read)}
+              </Typography>
+            </Box>
+          </Box>
+          <Box sx={{ my: '8px' }}>
+            <LiveWindow check={form.check} read={shown.read} />
+          </Box>
+          {shown.read.advice && (
+            <Typography variant="small" component="p" sx={{ mt: 0, mb: '8px' }}>
+              {shown.read.advice}
+            </Typography>
+          )}
+        </>
+      ) : (
+        <Typography variant="small" component="p" sx={{ mt: 0, mb: '8px', color: 'token.ink3' }}>
+          The level shows here as you type.
+        </Typography>
+      )}
+      <Box sx={{ display: 'flex', flexWrap: 'wrap', gap: '8px' }}>
+        <KeepButtons form={form} />
+      </Box>
+    </>
+  );
+}
+
+function ShortForm({ form }: { form: ReadingFormState }) {
+  const shown = shownLive(form);
+  const words = shown && readingWords(shown.read.reading, 2);
+  return (
+    <Box sx={{ display: 'flex', alignItems: 'center', justifyContent: 'space-between', gap: '8px' }}>
+      <Typography component="p" noWrap sx={{ m: 0, color: shown?.isStale ? 'token.ink3' : 'token.ink' }}>
+        {words && (
+          <>
+            <b>{words.value}</b>{' '}
+            <Typography variant="small" component="span">
+              {words.plusMinus} {words.unit}
+            </Typography>
+          </>
+        )}
+      </Typography>
+      <Box sx={{ display: 'flex', alignItems: 'center', gap: '8px' }}>
+        {shown && <VerdictChip verdict={shown.read.verdict} narrow />}
+        <KeepButtons form={form} isShort />
+      </Box>
+    </Box>
+  );
+}

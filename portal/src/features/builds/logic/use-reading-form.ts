@@ -1,0 +1,120 @@
+import { useQuery } from '@tanstack/react-query';
+import { useMemo, useState } from 'react';
+import { ProblemError } from '../../../api-client/problem-error';
+import { useDraft } from '../../../shared-ui/use-draft';
+import { useToast } from '../../../shared-ui/toasts';
+import { instrumentsQuery, useKeepReading, type BuildCheck, type BuildStage } from '../api/builds';
+import { gravesOf } from './cautions';
+import { fieldsOf, liveReading, startEntry, type Entry, type Live } from './live-reading';
+import { readingSentence } from './words';
+
+interface ReadingDraft {
+  entry: Entry;
+  /** Empty: whatever is offered first. */
+  instrumentId: string;
+}
+
+const ENTRY_POINTER = '#/entry/';
+
+/** '#/entry/loadOhms' is the field loadOhms; whatever names no field of the form is left to the alert. */
+function fieldErrors(error: unknown): Record<string, string> {
+  if (!(error instanceof ProblemError)) return {};
+  return Object.fromEntries(
+    error.errors.map(({ pointer, detail }) => [
+      pointer.startsWith(ENTRY_POINTER) ? pointer.slice(ENTRY_POINTER.length) : pointer.replace('#/', ''),
+      detail,
+    ]),
+  );
+}
+
+/** The one chosen, or else the first that may be used. */
+const chosenOf = <T extends { id: string; reason: string | null }>(offered: readonly T[], id: string) =>
+  offered.find((instrument) => instrument.id === id) ?? offered.find(({ reason }) => reason === null);
+
+/** The form of one measured check: what is typed, what it comes to, and keeping it. */
+export function useReadingForm(
+  buildId: string,
+  stage: Pick<BuildStage, 'cautions'>,
+  check: BuildCheck,
+  onKept: (verdict: string) => void,
+) {
+  const fields = fieldsOf(check);
+  const draft = useDraft<ReadingDraft>(`reading:${buildId}:${check.id}`, {
+    entry: startEntry(check),
+    instrumentId: '',
+  });
+  const say = useToast();
+  const keeping = useKeepReading(buildId, check.id);
+  const [left, setLeft] = useState<readonly string[]>([]);
+  const [ticks, setTicks] = useState<readonly string[]>([]);
+  const choices = useQuery({ ...instrumentsQuery(buildId, check.id), enabled: fields.length > 0 });
+  const { entry } = draft.value;
+  const offered = choices.data ?? [];
+  const instrument = chosenOf(offered, draft.value.instrumentId);
+  const live = useMemo(
+    () => liveReading(check, entry, instrument?.amplitudeAccuracyDb),
+    [check, entry, instrument?.amplitudeAccuracyDb],
+  );
+  const [lastGood, setLastGood] = useState<Live>();
+  if (live.state === 'read' && live !== lastGood) setLastGood(live);
+  const refused = keeping.isError ? fieldErrors(keeping.error) : {};
+  const graves = gravesOf(stage.cautions);
+  const isTicked = graves.every(({ kind }) => ticks.includes(kind));
+  const names = fields.map(({ name }) => name);
+  // A refusal that belongs on no field of the form stands in an alert.
+  const isOnAField = Object.keys(refused).some((name) => names.includes(name));
+
+  const errorOf = (name: string): string | undefined => {
+    if (refused[name]) return refused[name];
+    const own = live.state === 'incomplete' ? live.problems[name] : undefined;
+    return left.includes(name) ? own : undefined;
+  };
+  const setEntry = (name: string, text: string) => {
+    keeping.reset();
+    draft.setValue({ ...draft.value, entry: { ...entry, [name]: text } });
+  };
+  const keep = () => {
+    if (keeping.isPending) return;
+    setLeft(names);
+    if (live.state !== 'read' || !isTicked) return;
+    keeping.mutate(
+      {
+        method: check.method ?? '',
+        entry,
+        instrumentId: instrument?.id,
+        cautionAcknowledged: graves.length > 0 ? isTicked : undefined,
+      },
+      {
+        onSuccess: (reading) => {
+          draft.drop();
+          setLeft([]);
+          setTicks([]);
+          say(`Reading kept, ${readingSentence(reading)}.`);
+          onKept(reading.verdict);
+        },
+      },
+    );
+  };
+
+  return {
+    ...{ check, fields, entry, setEntry, errorOf, live, lastGood, keep, graves, ticks, isTicked },
+    leave: (name: string) => setLeft((before) => [...new Set([...before, name])]),
+    setTick: (kind: string, isOn: boolean) =>
+      setTicks((before) => (isOn ? [...before, kind] : before.filter((other) => other !== kind))),
+    instruments: offered,
+    instrumentId: instrument?.id ?? '',
+    setInstrument: (instrumentId: string) => draft.setValue({ ...draft.value, instrumentId }),
+    problem: isOnAField ? undefined : (keeping.error ?? undefined),
+    isKeeping: keeping.isPending,
+    keptFrom: draft.keptFrom,
+    keptAt: draft.keptAt,
+    /** Types the setting that would settle it, and leaves the height to be read anew. */
+    takeAgainAt: (voltsPerDivision: string) => {
+      const again = { ...entry, voltsPerDivision, divisionsPeakToPeak: '' };
+      draft.setValue({ ...draft.value, entry: again });
+      setLeft([]);
+    },
+  };
+}
+
+export type ReadingFormState = ReturnType<typeof useReadingForm>;

@@ -1,0 +1,69 @@
+"use strict";
+Object.defineProperty(exports, "__esModule", { value: true });
+exports.scopeEntry = scopeEntry;
+exports.entryFor = entryFor;
+const levels_1 = require("@ferrite-row/levels");
+const PROBE = 10;
+const LOAD = 50;
+/** A scope's usual steps, volts per division: common practice. */
+const STEPS = [0.002, 0.005, 0.01, 0.02, 0.05, 0.1, 0.2, 0.5, 1, 2, 5];
+const TALLEST = 7.6;
+/** Volts as members type them: `20m`, `0.5`. */
+const typedVolts = (volts) => (volts < 0.1 ? `${Math.round(volts * 1000)}m` : String(volts));
+/** What somebody types who sees this level on the oscilloscope through a ×10 probe across 50 ohm. */
+function scopeEntry(levelDbm) {
+    const shown = (0, levels_1.voltsPeakToPeakFromDbm)((0, levels_1.dBm)(levelDbm), (0, levels_1.ohms)(LOAD)) / PROBE;
+    const step = STEPS.find((volts) => shown / volts <= TALLEST) ?? 5;
+    return {
+        voltsPerDivision: typedVolts(step),
+        divisionsPeakToPeak: (shown / step).toFixed(2),
+        readToDivisions: '0.1',
+        probeRatio: String(PROBE),
+        loadOhms: String(LOAD),
+    };
+}
+function analyzerEntry(levelDbm, { defaults }) {
+    const { referenceLevelDbm = 0, dbPerDivision = 10, readToDivisions = 0.02, padsInLineDb = 0 } = defaults;
+    return {
+        referenceLevelDbm: String(referenceLevelDbm),
+        divisionsDown: ((referenceLevelDbm + padsInLineDb - levelDbm) / dbPerDivision).toFixed(2),
+        dbPerDivision: String(dbPerDivision),
+        readToDivisions: String(readToDivisions),
+        padsInLineDb: String(padsInLineDb),
+    };
+}
+function harmonicEntry(levelDbc, { defaults }) {
+    const { dbPerDivision = 10, readToDivisions = 0.05 } = defaults;
+    const carrierDown = 0.5;
+    return {
+        fundamentalDivisionsDown: carrierDown.toFixed(2),
+        harmonicDivisionsDown: (carrierDown - levelDbc / dbPerDivision).toFixed(2),
+        dbPerDivision: String(dbPerDivision),
+        readToDivisions: String(readToDivisions),
+    };
+}
+/** Three figures of a hand-held meter, read to the last of them. */
+function meterEntry(value) {
+    const decimals = Math.max(0, 2 - Math.floor(Math.log10(Math.abs(value) || 1)));
+    return { value: value.toFixed(decimals), readToValue: (10 ** -decimals).toFixed(decimals) };
+}
+/** What somebody types who finds this value, by the check's own method; undefined for what works itself out. */
+function entryFor(check, value) {
+    switch (check.method) {
+        case 'oscilloscope':
+            return scopeEntry(value);
+        case 'dummy-load':
+            return scopeEntry((0, levels_1.dbmFromWatts)((0, levels_1.watts)(value)));
+        case 'analyzer':
+            return analyzerEntry(value, check);
+        case 'harmonic':
+            return harmonicEntry(value, check);
+        case 'counter':
+            return { frequencyMegahertz: (value / 1e6).toFixed(6), gateSeconds: '1' };
+        case 'meter':
+            return meterEntry(value);
+        default:
+            return undefined;
+    }
+}
+//# sourceMappingURL=typed.js.map
