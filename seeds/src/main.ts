@@ -10,7 +10,7 @@ async function main(): Promise<void> {
   process.env.FERRITE_JOBS = 'off';
   // Loaded only now: the whole API takes two seconds to load, which a warm start need not pay.
   const { openContext } = await import('@ferrite-row/api/context');
-  const { seedDemoClub } = await import('./demo-club');
+  const { seedDemoClub } = await import('./demo-club.js');
   const clock = new SettableClock(new Date());
   const context = await openContext(clock);
   try {
