@@ -52,3 +52,24 @@ export type { ReadQuantity } from './read-quantity';
 export type { BaseUnit, Prefix, QuantityUnit } from './quantity-units';
 export { decimalsFor, formatAtLeast, formatAtMost, formatFixed, formatReading, formatSigned } from './format';
 export { formatQuantity, formatUnderstood } from './format-quantity';
+
+export {
+  nearestPreferred,
+  PREFERRED_SERIES,
+  preferredBetween,
+  preferredNeighbours,
+  preferredSignificands,
+} from './pads/preferred-values';
+export type { NearestPreferred, PreferredNeighbours, PreferredSeries } from './pads/preferred-values';
+export { ENOUGH_REL, fittedPart } from './pads/fitted-part';
+export type { FitChoice, FittedPart, PartQuantity } from './pads/fitted-part';
+export { minimumLossDb, padValues } from './pads/pad-values';
+export type { PadInput, PadKind, PadPoint, PadResistor } from './pads/pad-values';
+export { padPerformance } from './pads/pad-performance';
+export type { PadEnds, PadPerformance, PadPort } from './pads/pad-performance';
+export { padWorstCase } from './pads/worst-case';
+export type { PadWorstCase } from './pads/worst-case';
+export { DERATING, ratingToBuy, RESISTOR_RATINGS_WATTS } from './pads/rating';
+export type { ResistorRating } from './pads/rating';
+export { designPad } from './pads/design-pad';
+export type { DesignedResistor, DesignPadInput, PadDesign } from './pads/design-pad';
