@@ -62,12 +62,12 @@ export function requireOneOf<Choice extends string | number>(
  *
  * @throws OutOfDomainError otherwise.
  */
-export function requireSome<Item>(
+export function requireSome(
   { input, label }: Pick<Domain, 'input' | 'label'>,
-  items: readonly Item[],
+  items: ArrayLike<unknown>,
   atMost = 1000,
-): readonly Item[] {
-  if (items.length > 0 && items.length <= atMost) return items;
+): void {
+  if (items.length > 0 && items.length <= atMost) return;
   const permitted = `1 to ${atMost} entries`;
   throw new OutOfDomainError(input, items.length, permitted, `${label}: ${permitted} are needed.`);
 }

@@ -73,3 +73,18 @@ export { DERATING, ratingToBuy, RESISTOR_RATINGS_WATTS } from './pads/rating';
 export type { ResistorRating } from './pads/rating';
 export { designPad } from './pads/design-pad';
 export type { DesignedResistor, DesignPadInput, PadDesign } from './pads/design-pad';
+
+export { GREATEST_ORDER, mixingProducts, productTable } from './mixing/products';
+export type { MixingInput, MixingProduct, ProductSign, ProductTable } from './mixing/products';
+export { convert, receiveImage } from './mixing/conversion';
+export type { Conversion, ReceiveImage, ReceiveInput, WantedProduct } from './mixing/conversion';
+export { scanProducts } from './mixing/scan';
+export type { Scan, ScanInput } from './mixing/scan';
+export { crossovers } from './mixing/crossovers';
+export type { Crossover, CrossoverInput } from './mixing/crossovers';
+export { DIODE_RING, productLevel } from './mixing/product-levels';
+export type { FigureDb, MixerFigures, MixerLevels, ProductLevel } from './mixing/product-levels';
+export { judgeProducts } from './mixing/judge-products';
+export type { JudgedProduct, JudgedProducts, JudgeInput } from './mixing/judge-products';
+export { DRIVE_WINDOW_DB, driveCheck } from './mixing/drive-check';
+export type { DriveCheck, DriveInput } from './mixing/drive-check';
