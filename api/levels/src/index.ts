@@ -88,3 +88,41 @@ export { judgeProducts } from './mixing/judge-products';
 export type { JudgedProduct, JudgedProducts, JudgeInput } from './mixing/judge-products';
 export { DRIVE_WINDOW_DB, driveCheck } from './mixing/drive-check';
 export type { DriveCheck, DriveInput } from './mixing/drive-check';
+
+export { GREATEST_FILTER_ORDER, prototypeOf } from './filters/prototype';
+export type { FilterFamily, Prototype, PrototypeInput } from './filters/prototype';
+export {
+  halfPowerRatio,
+  idealAttenuationDb,
+  leastOrder,
+  returnLossFromRipple,
+  rippleFromReturnLoss,
+} from './filters/attenuation';
+export type { OrderInput } from './filters/attenuation';
+export type { Ladder, LadderElement } from './filters/ladder';
+export { highPassLadder, lowPassLadder } from './filters/ladder-design';
+export type { FirstElement, LadderInput } from './filters/ladder-design';
+export {
+  coupledResonatorBandPass,
+  couplingCoefficients,
+  dissipationLossDb,
+} from './filters/coupled-resonators';
+export type { BandPassInput, CouplingCoefficients } from './filters/coupled-resonators';
+export { frequencyGrid, ladderResponse, PERFECT_RETURN_LOSS_DB } from './filters/response';
+export type { LadderResponse, PartQ } from './filters/response';
+export { ladderMatrix } from './filters/abcd';
+export type { ChainMatrix, Complex } from './filters/abcd';
+export { fitLadder } from './filters/fit-ladder';
+export type { FitLadderInput, FittedElement, FittedLadder } from './filters/fit-ladder';
+export { ladderBuilds, spreadBands } from './filters/spread';
+export type { Builds, SpreadBands, SpreadInput } from './filters/spread';
+export { harmonicRejections, powerShares } from './filters/rejection';
+export type { HarmonicNeed, HarmonicRejection, PowerShares } from './filters/rejection';
+export {
+  alFromMicrohenriesPer100,
+  alFromMillihenriesPer1000,
+  alFromWinding,
+  henriesOfTurns,
+  turnsFor,
+} from './matching/turns';
+export type { Turns } from './matching/turns';

@@ -63,9 +63,11 @@ export function fittedPart(wanted: number, quantity: PartQuantity, choice: FitCh
   return pairs.reduce((best, pair) => (isNearer(pair, best) ? pair : best), one);
 }
 
-/** Nearer by more than binary noise. */
+/** Differences under this are binary noise. */
+const NOISE_REL = 1e-9;
+
 function isNearer(pair: FittedPart, best: FittedPart): boolean {
-  return Math.abs(pair.errorRel) < Math.abs(best.errorRel) - 1e-9;
+  return Math.abs(pair.errorRel) < Math.abs(best.errorRel) - NOISE_REL;
 }
 
 /** Capacitors add in parallel, resistors and coils in series; the other way their reciprocals add. */
@@ -87,7 +89,9 @@ function nearestPair(
     for (const second of [below, above]) {
       const value = together(first, second);
       const errorRel = value / wanted - 1;
-      if (Math.abs(errorRel) < Math.abs(best.errorRel)) best = { parts: [first, second], value, errorRel };
+      // Of pairs as near, the one first met has the more equal parts, which share the load.
+      if (Math.abs(errorRel) < Math.abs(best.errorRel) - NOISE_REL)
+        best = { parts: [first, second], value, errorRel };
     }
   }
   return { ...best, parts: best.parts.sort((a, b) => b - a), arrangement };
