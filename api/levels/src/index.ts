@@ -126,3 +126,31 @@ export {
   turnsFor,
 } from './matching/turns';
 export type { Turns } from './matching/turns';
+export {
+  matchFromImpedance,
+  matchFromReflection,
+  matchFromReturnLoss,
+  matchFromVswr,
+  mismatchBounds,
+} from './matching/match';
+export type { Impedance, Match, MismatchBounds } from './matching/match';
+export { lNetworks } from './matching/l-network';
+export type { LNetwork, LNetworkInput } from './matching/l-network';
+export {
+  capacitiveReactance,
+  coilQ,
+  inductiveReactance,
+  loadedQ,
+  resonantHertz,
+  resonatingFarads,
+  resonatingHenries,
+  resonatorLossDb,
+} from './matching/resonance';
+export {
+  COPPER_OHM_METRES,
+  peakFluxTesla,
+  singleLayerHenries,
+  singleLayerTurns,
+  skinDepthMetres,
+} from './matching/windings';
+export type { FluxInput, SingleLayerCoil } from './matching/windings';
