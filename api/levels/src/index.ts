@@ -154,3 +154,11 @@ export {
   skinDepthMetres,
 } from './matching/windings';
 export type { FluxInput, SingleLayerCoil } from './matching/windings';
+
+export { chainOf } from './chain/chain';
+export type { ChainInput, ChainRow, ChainStage } from './chain/chain';
+export { noiseDbm, noiseKelvin, REFERENCE_KELVIN } from './chain/noise';
+export { secondHarmonicIntercept, twoToneFromIntercept, twoToneOf, twoToneProducts } from './chain/two-tone';
+export type { TwoTone, TwoToneProducts } from './chain/two-tone';
+export { explainShortfall, shortfallText } from './chain/shortfall';
+export type { PlannedStage, Shortfall, StageShare } from './chain/shortfall';

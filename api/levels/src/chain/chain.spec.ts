@@ -1,0 +1,331 @@
+import fc from 'fast-check';
+import table from '../../reference/cascade.json';
+import { errorOf } from '../../testing/error-of';
+import { within, withinRel } from '../../testing/within';
+import {
+  type ChainRow,
+  chainOf,
+  type ChainStage,
+  dBm,
+  explainShortfall,
+  noiseDbm,
+  noiseKelvin,
+  OutOfDomainError,
+  type PlannedStage,
+  secondHarmonicIntercept,
+  shortfallText,
+  twoToneFromIntercept,
+  twoToneOf,
+  twoToneProducts,
+  wattsFromDbm,
+} from '../index';
+
+// Values, tolerances and sources: api/levels/reference/cascade.json, each row with its own source.
+
+interface Printed {
+  n: string;
+  G: number;
+  NF?: number;
+  OIP3?: number | null;
+  OP1?: number;
+}
+
+const stageOf = ({ n, G, NF, OIP3, OP1 }: Printed): ChainStage => {
+  return {
+    name: n,
+    gainDb: G,
+    noiseFigureDb: NF,
+    outputInterceptDbm: OIP3 ?? undefined,
+    outputCompressionDbm: OP1,
+  };
+};
+const rowsOf = (stages: readonly Printed[]) => chainOf({ inputDbm: -30, stages: stages.map(stageOf) });
+const lastOf = (rows: readonly ChainRow[]) => rows[rows.length - 1];
+
+describe('chains against published cascades', () => {
+  it.each(table.noise_figure)('$id: noise figure', ({ inputs, expected, tolerance }) => {
+    const rows = rowsOf(inputs.stages);
+    expected.after_each_stage.forEach(({ G_dB, NF_dB }, index) => {
+      within(rows[index]?.totalGainDb, G_dB, tolerance.dB);
+      within(rows[index]?.noiseFigureDb, NF_dB, tolerance.dB);
+    });
+    within(lastOf(rows)?.noiseFigureDb, expected.NF_dB, tolerance.dB);
+    withinRel(noiseKelvin(lastOf(rows)?.noiseFigureDb ?? NaN), expected.Te_K, 1e-5);
+  });
+
+  it.each(table.intercept)('$id: intercept', ({ inputs, expected, tolerance }) => {
+    const last = lastOf(rowsOf(inputs.stages));
+    within(last?.inputInterceptDbm, expected.IIP3_dBm_coherent, tolerance.dB);
+    within(last?.outputInterceptDbm, expected.OIP3_dBm_coherent, tolerance.dB);
+    within(last?.inputInterceptByPowerDbm, expected.IIP3_dBm_incoherent, tolerance.dB);
+  });
+
+  it.each(table.compression)('$id: compression, an estimate', ({ inputs, expected, tolerance }) => {
+    const last = lastOf(rowsOf(inputs.stages));
+    within(last?.inputCompressionDbm, expected.IP1dB_dBm_approx, tolerance.dB);
+    within(last?.outputCompressionDbm, expected.OP1dB_dBm_approx, tolerance.dB);
+  });
+
+  it.each(table.level_walk)('$id: levels along a chain', ({ inputs, expected, tolerance }) => {
+    const stages = expected.stages.map(({ stage, gain_dB }) => ({ name: stage, gainDb: gain_dB }));
+    const rows = chainOf({ inputDbm: inputs.start_dBm, stages });
+    expected.stages.forEach(({ out_dBm, out_W }, index) => {
+      within(rows[index]?.averageDbm, out_dBm, tolerance.dB);
+      withinRel(wattsFromDbm(dBm(rows[index]?.averageDbm ?? NaN)), out_W, 1e-5);
+    });
+  });
+
+  it.each(table.thermal_noise)('$id: thermal noise', ({ inputs, expected, tolerance }) => {
+    within(noiseDbm(inputs.B_Hz, inputs.NF_dB, inputs.T_K), expected.noise_dBm, tolerance.dB);
+  });
+
+  it.each(table.two_tone)('$id: two equal tones', ({ inputs, expected, tolerance }) => {
+    const found = twoToneOf(inputs.each_tone_dBm, inputs.IM3_below_each_tone_dB);
+    within(found.outputInterceptDbm, expected.OIP3_dBm, tolerance.dB);
+    within(found.intermodulationDbm, expected.IM3_dBm, tolerance.dB);
+    within(found.peakDbm, expected.PEP_dBm, tolerance.dB);
+    within(found.averageDbm, expected.average_dBm, tolerance.dB);
+    within(found.belowPeakDb, expected.IM3_below_PEP_dB, tolerance.dB);
+  });
+
+  it('slope-1 to slope-4: the laws of distortion', () => {
+    const [at20, at21] = [twoToneFromIntercept(20, 40), twoToneFromIntercept(21, 40)];
+    within(at21.intermodulationDbm - at20.intermodulationDbm, 3, 0.01);
+    within(at21.intermodulationDbc - at20.intermodulationDbc, 2, 0.01);
+    within(at20.intermodulationDbm, -20, 1e-3);
+    const { second, third, fifth } = twoToneProducts(14.2e6, 14.2019e6);
+    const published = [0.0019, 28.4019, 14.1981, 14.2038, 14.1962, 14.2057];
+    [...second, ...third, ...fifth].forEach((hertz, index) =>
+      within(hertz / 1e6, published[index] ?? NaN, 1e-7),
+    );
+    within(secondHarmonicIntercept(30, 30), 60, 1e-3);
+  });
+});
+
+const gain = fc.double({ min: -30, max: 30, noNaN: true });
+const stages = fc.array(
+  fc.record({
+    name: fc.constant('stage'),
+    gainDb: gain,
+    noiseFigureDb: fc.double({ min: 0, max: 20, noNaN: true }),
+    outputInterceptDbm: fc.double({ min: -10, max: 60, noNaN: true }),
+    outputCompressionDbm: fc.double({ min: -20, max: 50, noNaN: true }),
+  }),
+  { minLength: 2, maxLength: 8 },
+);
+
+describe('a chain', () => {
+  it('is the same whether two stages are taken apart or as the one they make', () => {
+    fc.assert(
+      fc.property(stages, (list) => {
+        const [first, second, ...others] = list;
+        fc.pre(first !== undefined && second !== undefined);
+        const [, two] = chainOf({ inputDbm: 0, stages: [first, second] });
+        const joined: ChainStage = {
+          name: 'both',
+          gainDb: first.gainDb + second.gainDb,
+          noiseFigureDb: Math.max(two?.noiseFigureDb ?? NaN, 0),
+          outputInterceptDbm: two?.outputInterceptDbm,
+          outputCompressionDbm: two?.outputCompressionDbm,
+        };
+        const apart = lastOf(chainOf({ inputDbm: -40, stages: list }));
+        const together = lastOf(chainOf({ inputDbm: -40, stages: [joined, ...others] }));
+        for (const figure of [
+          'averageDbm',
+          'noiseFigureDb',
+          'outputInterceptDbm',
+          'outputCompressionDbm',
+        ] as const) {
+          expect(together?.[figure]).toBeCloseTo(apart?.[figure] ?? NaN, 6);
+        }
+      }),
+    );
+  });
+
+  it('is never better than its worst stage', () => {
+    fc.assert(
+      fc.property(stages, (list) => {
+        const last = lastOf(chainOf({ inputDbm: -40, stages: list }));
+        expect(last?.noiseFigureDb ?? NaN).toBeGreaterThanOrEqual((list[0]?.noiseFigureDb ?? NaN) - 1e-9);
+        const end = list[list.length - 1]?.outputInterceptDbm ?? NaN;
+        expect(last?.outputInterceptDbm ?? NaN).toBeLessThanOrEqual(end + 1e-9);
+        expect(last?.inputInterceptDbm ?? NaN).toBeLessThanOrEqual(
+          (last?.inputInterceptByPowerDbm ?? NaN) + 1e-9,
+        );
+      }),
+    );
+  });
+
+  it('has no figure it was not told the parts of', () => {
+    const rows = chainOf({
+      inputDbm: -10,
+      stages: [
+        { name: 'filter', gainDb: -3 },
+        { name: 'amplifier', gainDb: 20 },
+        { name: 'pad', gainDb: -6 },
+      ],
+    });
+    expect(rows.map(({ noiseFigureDb }) => noiseFigureDb)).toEqual([
+      expect.closeTo(3, 9),
+      undefined,
+      undefined,
+    ]);
+    const [row] = rows;
+    expect([
+      row?.inputInterceptDbm,
+      row?.outputCompressionDbm,
+      row?.headroomDb,
+      row?.intermodulationDbc,
+    ]).toEqual([undefined, undefined, undefined, undefined]);
+  });
+
+  it('judges headroom by the peaks, and two tones by their peak too', () => {
+    const [row] = chainOf({
+      inputDbm: 17,
+      peakOverAverageDb: 3.0103,
+      stages: [{ name: 'power amplifier', gainDb: 20, limitDbm: 41, outputInterceptDbm: 53.5 }],
+    });
+    within(row?.peakDbm, 40.0103, 1e-9);
+    within(row?.headroomDb, 0.9897, 1e-9);
+    expect(row?.isLow).toBe(true);
+    // As two tones of 33.99 dBm each would measure.
+    within(row?.intermodulationDbc, twoToneFromIntercept(40.0103 - 6.0206, 53.5).intermodulationDbc, 1e-4);
+  });
+});
+
+const planned = (name: string, plannedDbm: number, measuredDbm?: number, toleranceDb = 2): PlannedStage => {
+  return { name, plannedDbm, toleranceDb, measuredDbm, expandedUncertaintyDb: 0.4 };
+};
+
+describe('where a level went', () => {
+  it('is the stage whose gain is off, not those that pass its error on', () => {
+    const found = explainShortfall([
+      planned('Balanced modulator', -18, -18.2),
+      planned('Crystal filter', -24, -27.3),
+      planned('IF amplifier', -10, -13.2, 1.5),
+      planned('Mixer', -16.5, -19.9),
+    ]);
+    within(found.offPlanDb, -3.4, 1e-9);
+    expect(found.causes.map(({ name }) => name)).toEqual(['Crystal filter']);
+    expect(shortfallText(found)).toBe(
+      '3.4 dB are missing at the Mixer. The Crystal filter takes 3.1 dB more than planned; the stage before it is inside.',
+    );
+  });
+
+  it('is told of an amplifier as gain, and of the stages before it together', () => {
+    const found = explainShortfall([
+      planned('Mixer', -16.5, -16.4),
+      planned('Band-pass filter', -19, -19.2),
+      planned('Pre-driver', 1.5, -2.5),
+    ]);
+    expect(shortfallText(found)).toBe(
+      '4.0 dB are missing at the Pre-driver. The Pre-driver gives 3.8 dB less than planned; the stages before it are inside.',
+    );
+  });
+
+  it('may be too much, from several stages, the most first', () => {
+    const found = explainShortfall([
+      planned('Mixer', -16.5, -16.5),
+      planned('Filter', -19, -16),
+      planned('Driver', 1, 6),
+    ]);
+    expect(shortfallText(found)).toBe(
+      '5.0 dB are too much at the Driver. The Filter takes 3.0 dB less than planned; the Driver gives 2.0 dB more than planned; the stage before it is inside.',
+    );
+  });
+
+  it('may be hidden in part by a stage that went the other way', () => {
+    const found = explainShortfall([planned('A', 0, -5), planned('B', 10, 7)]);
+    expect(found.causes.map(({ name }) => name)).toEqual(['A']);
+    expect(found.hiding.map(({ name }) => name)).toEqual(['B']);
+    expect(shortfallText(found)).toContain('The A comes out 5.0 dB low; it is the first one measured.');
+  });
+
+  it('reaches over stages that were not measured, and says so', () => {
+    const found = explainShortfall([planned('A', 0, 0), planned('B', -6), planned('C', -8, -12)]);
+    expect(found.causes[0]?.across).toEqual(['B']);
+    expect(shortfallText(found)).toContain('with what lies before it unmeasured (B), takes 4.0 dB more');
+  });
+
+  it('is left open where the readings’ uncertainty is as large', () => {
+    const wide = { ...planned('B', -3, -5.5), expandedUncertaintyDb: 3 };
+    expect(shortfallText(explainShortfall([planned('A', 0, 0), wide]))).toContain(
+      'which the readings leave open',
+    );
+  });
+
+  it('names the stages outside already, and nobody while the end is inside', () => {
+    const found = explainShortfall([planned('A', 0, -2.5), planned('B', -6, -12)]);
+    expect(shortfallText(found)).toContain('before it, outside already: A.');
+    const inside = explainShortfall([planned('A', 0, -5), planned('B', 10, 9)]);
+    expect([inside.causes, shortfallText(inside)]).toEqual([[], 'The level at the B is inside its window.']);
+  });
+
+  it('is nobody’s in particular when each took a little', () => {
+    const many = ['A', 'B', 'C', 'D', 'E'].map((name, index) => planned(name, 0, -0.6 * (index + 1)));
+    expect(shortfallText(explainShortfall(many))).toContain('No one stage stands out');
+  });
+
+  it('adds up: what the stages changed is what is off at the end', () => {
+    const level = fc.double({ min: -60, max: 40, noNaN: true });
+    fc.assert(
+      fc.property(
+        fc.array(fc.tuple(level, fc.option(level)), { minLength: 1, maxLength: 9 }),
+        level,
+        (pairs, last) => {
+          const list = [
+            ...pairs.map(([plan, found]) => planned('x', plan, found ?? undefined)),
+            planned('end', 0, last),
+          ];
+          const { stages: shares, offPlanDb } = explainShortfall(list);
+          expect(shares.reduce((sum, { changeDb }) => sum + changeDb, 0)).toBeCloseTo(offPlanDb, 6);
+        },
+      ),
+    );
+  });
+});
+
+describe('what a chain is not asked for', () => {
+  const stage = { name: 'amplifier', gainDb: 20 };
+
+  it.each<[string, string, () => unknown]>([
+    ['no stages', 'stages', () => chainOf({ inputDbm: 0, stages: [] })],
+    ['an input that is no number', 'inputDbm', () => chainOf({ inputDbm: NaN, stages: [stage] })],
+    [
+      'a gain that is no number',
+      'stages[1].gainDb',
+      () => chainOf({ inputDbm: 0, stages: [stage, { ...stage, gainDb: Infinity }] }),
+    ],
+    [
+      'a negative noise figure',
+      'stages[0].noiseFigureDb',
+      () => chainOf({ inputDbm: 0, stages: [{ ...stage, noiseFigureDb: -1 }] }),
+    ],
+    [
+      'an intercept that is no number',
+      'stages[0].outputInterceptDbm',
+      () => chainOf({ inputDbm: 0, stages: [{ ...stage, outputInterceptDbm: NaN }] }),
+    ],
+    [
+      'a peak under the average',
+      'peakOverAverageDb',
+      () => chainOf({ inputDbm: 0, peakOverAverageDb: -1, stages: [stage] }),
+    ],
+    [
+      'levels that run away',
+      'level',
+      () => chainOf({ inputDbm: 0, stages: Array.from({ length: 20 }, () => stage) }),
+    ],
+    ['no bandwidth', 'bandwidthHertz', () => noiseDbm(0)],
+    ['nothing colder than cold', 'kelvin', () => noiseDbm(1, 0, 0)],
+    ['products over their tones', 'belowToneDb', () => twoToneOf(0, -3)],
+    ['tones over their intercept', 'eachToneDbm', () => twoToneFromIntercept(41, 40)],
+    ['two tones that are one', 'secondHertz', () => twoToneProducts(14e6, 14e6)],
+    ['a shortfall nobody measured', 'measuredDbm', () => explainShortfall([planned('A', 0)])],
+    ['a negative tolerance', 'stages[0].toleranceDb', () => explainShortfall([planned('A', 0, 0, -1)])],
+  ])('%s is refused by the name of the input', (_title, input, call) => {
+    const error = errorOf(call);
+    expect(error).toBeInstanceOf(OutOfDomainError);
+    expect(error.input).toBe(input);
+  });
+});
