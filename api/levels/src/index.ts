@@ -162,3 +162,53 @@ export { secondHarmonicIntercept, twoToneFromIntercept, twoToneOf, twoToneProduc
 export type { TwoTone, TwoToneProducts } from './chain/two-tone';
 export { explainShortfall, shortfallText } from './chain/shortfall';
 export type { PlannedStage, Shortfall, StageShare } from './chain/shortfall';
+
+export { US_97 } from './rule-sets/us-97';
+export { IARU_REGION_1 } from './rule-sets/iaru-region-1';
+export { MODE_DUTY, US_EXPOSURE } from './rule-sets/exposure-limits';
+export type { ExposureLimits, ExposureRow, ExposureTier } from './rule-sets/exposure-limits';
+export type {
+  BandRow,
+  ChannelRow,
+  ClassRow,
+  EmissionKind,
+  NoteRow,
+  PowerRow,
+  RuleSet,
+  SegmentRow,
+  Span,
+} from './rule-sets/rule-set';
+export type { SpuriousRule, SpuriousRuleId } from './rule-sets/spurious-rules';
+export { occupiedBand } from './guards/occupied';
+export type { EmissionSide, OccupiedBand } from './guards/occupied';
+export { bandsOf } from './guards/bands';
+export type { AmateurBand } from './guards/bands';
+export { checkEmission } from './guards/check-emission';
+export type { EmissionCheck } from './guards/check-emission';
+export type { EmissionInput } from './guards/asked';
+export type { EmissionReason } from './guards/emission-reasons';
+export type { PowerLimit } from './guards/power-limits';
+export { radiatedPower } from './guards/radiated-power';
+export type { PowerInput, RadiatedPower } from './guards/radiated-power';
+export { harmonicFilterFor, judgeSpurs, SPURIOUS_RULE_IDS, spuriousLimit } from './guards/spurious';
+export type {
+  HarmonicFilter,
+  HarmonicFilterInput,
+  JudgedSpur,
+  MeasuredSpur,
+  SpuriousLimit,
+} from './guards/spurious';
+export { GUARD_MARGIN_DB, instrumentGuard } from './guards/instrument-guard';
+export type { GuardInput, GuardPad, GuardResult } from './guards/instrument-guard';
+export {
+  densityAt,
+  exposureDistances,
+  exposureExemption,
+  exposureLimit,
+  onFraction,
+} from './guards/exposure';
+export type { ExposureDistance, ExposureExemption, ExposureInput } from './guards/exposure';
+export { deratedWatts, heatChain, HOT_TO_TOUCH_CELSIUS, sinkNeeded } from './guards/heat-sink';
+export type { HeatChain, HeatPath, SinkNeeded } from './guards/heat-sink';
+export { classBEfficiency, loadForPower, supplyBalance } from './guards/power-stage';
+export type { AmplifierClass, SupplyBalance, SupplyInput } from './guards/power-stage';
