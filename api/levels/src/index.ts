@@ -212,3 +212,35 @@ export { deratedWatts, heatChain, HOT_TO_TOUCH_CELSIUS, sinkNeeded } from './gua
 export type { HeatChain, HeatPath, SinkNeeded } from './guards/heat-sink';
 export { classBEfficiency, loadForPower, supplyBalance } from './guards/power-stage';
 export type { AmplifierClass, SupplyBalance, SupplyInput } from './guards/power-stage';
+
+export { ASSUMED_METER_ACCURACY_REL, logDetectorReading } from './readings/log-detector';
+export type { DetectorLine, DetectorTable, LogDetectorInput } from './readings/log-detector';
+export { diodeProbeReading } from './readings/diode-probe';
+export type { DiodeProbeInput } from './readings/diode-probe';
+export { twoToneEnvelopeReading } from './readings/two-tone-envelope';
+export type { TwoToneEnvelopeReading } from './readings/two-tone-envelope';
+export { intermodulationReading } from './readings/intermodulation';
+export type { IntermodulationInput } from './readings/intermodulation';
+export { dummyLoadTapReading } from './readings/dummy-load-tap';
+export type { DummyLoadTapInput } from './readings/dummy-load-tap';
+export { probeLoading } from './readings/probe-loading';
+export type { ProbeLoading, ProbeLoadingInput } from './readings/probe-loading';
+
+export {
+  dbFromNepers,
+  emfLevelFromMatched,
+  levelFigures,
+  levelFrom,
+  loadedLevel,
+  sumOfLevels,
+  voltageLevel,
+  voltsRmsFromLevel,
+} from './voltage-levels';
+export type {
+  Addition,
+  LevelFigures,
+  LevelQuantity,
+  LoadedLevel,
+  LoadedSource,
+  VoltageLevelUnit,
+} from './voltage-levels';
