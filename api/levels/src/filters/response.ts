@@ -20,6 +20,8 @@ export interface LadderResponse {
 /** Stands for a match without reflection, which has no figure: no bench can see it. */
 export const PERFECT_RETURN_LOSS_DB = 200;
 
+const GREATEST_HERTZ = 1e15;
+
 /** Stands for no transmission at all. */
 const LEAST_GAIN_DB = -1000;
 
@@ -101,11 +103,15 @@ function lossOf(input: string, label: string, q: number | undefined): number {
   return q === undefined ? 0 : 1 / requireWithin({ input, label, atLeast: 1, atMost: 1e9 }, q);
 }
 
-/** Frequencies that can be worked with. */
+/** Frequencies that can be worked with. The bare comparison goes first: there may be thousands. */
 export function requireFrequencies(hertz: Float64Array): void {
   requireSome({ input: 'hertz', label: 'Frequencies' }, hertz, 1e6);
   for (const frequency of hertz) {
-    requireWithin({ input: 'hertz', label: 'Frequency', unit: 'Hz', above: 0, atMost: 1e15 }, frequency);
+    if (frequency > 0 && frequency <= GREATEST_HERTZ) continue;
+    requireWithin(
+      { input: 'hertz', label: 'Frequency', unit: 'Hz', above: 0, atMost: GREATEST_HERTZ },
+      frequency,
+    );
   }
 }
 
@@ -164,8 +170,11 @@ export function fillResponse(
   }
 }
 
+/** The natural logarithm is the faster one, and half of the time goes into it. */
+const DB_PER_NATURAL = 10 / Math.LN10;
+
 /** Held to a finite figure: what lies under `least` is `least`. */
 function decibelsOf(ratio: number, least: number): number {
-  const decibels = 10 * Math.log10(ratio);
+  const decibels = DB_PER_NATURAL * Math.log(ratio);
   return decibels > least ? decibels : least;
 }

@@ -1,8 +1,6 @@
-import fc from 'fast-check';
 import cascade from '../../reference/cascade.json';
 import mixers from '../../reference/mixers.json';
 import { errorOf } from '../../testing/error-of';
-import { simulate } from '../../testing/ngspice';
 import { within } from '../../testing/within';
 import {
   analyzerReading,
@@ -18,7 +16,6 @@ import {
   probeLoading,
   twoToneEnvelopeReading,
   twoToneOf,
-  verdictOf,
 } from '../index';
 
 const RECTANGULAR = Math.sqrt(3);
@@ -33,87 +30,6 @@ const detector: LogDetectorInput = {
   padToleranceDb: 0.3,
 };
 
-describe('a logarithmic detector', () => {
-  it('gives the level its slope and intercept say, before the pads', () => {
-    expect(logDetectorReading(detector).value).toBeCloseTo(-85 + 1.5 / 0.025 + 20, 12);
-  });
-
-  it('has its four limits in its budget, each in decibels', () => {
-    const { components, expandedUncertainty } = logDetectorReading(detector);
-    const limits = [0.005 / 0.025, (0.01 * 1.5) / 0.025, 1, 0.3];
-    components.forEach(({ limit }, index) => within(limit, limits[index] ?? NaN, 1e-12));
-    within(expandedUncertainty, (2 * Math.hypot(...limits)) / RECTANGULAR, 1e-12);
-  });
-
-  it('may fall with level: the slope is negative, the budget is not', () => {
-    const falling = { ...line, voltsPerDb: -0.025, interceptDbm: 15, validFromDbm: -60, validToDbm: 0 };
-    const found = logDetectorReading({ ...detector, volts: 1.25, calibration: falling });
-    within(found.value, -35 + 20, 1e-9);
-    expect(found.components.every(({ limit }) => limit >= 0)).toBe(true);
-  });
-
-  it.each([
-    ['just in', 0.375, true],
-    ['at the top', 2.25, true],
-    ['in the noise', 0.374, false],
-    ['saturated', 2.251, false],
-  ])('%s: %d V is read only where the line holds', (_title, volts, isValid) => {
-    const read = () => logDetectorReading({ ...detector, volts });
-    if (isValid) expect(read().value).toBeLessThan(30);
-    else
-      expect(errorOf(read)).toMatchObject({ input: 'volts', permitted: 'at least 0.375 and at most 2.25 V' });
-  });
-
-  it('reads its own table by straight lines, in any order, and what the line says where the table is that line', () => {
-    const points = [-60, 0, -30].map((dbm) => ({ dbm, volts: (dbm + 85) * 0.025 }));
-    fc.assert(
-      fc.property(fc.double({ min: -60, max: 0, noNaN: true }), (dbm) => {
-        const volts = (dbm + 85) * 0.025;
-        const byTable = logDetectorReading({ ...detector, volts, calibration: { points } });
-        const byLine = logDetectorReading({ ...detector, volts });
-        expect(byTable.value).toBeCloseTo(byLine.value, 9);
-        expect(byTable.expandedUncertainty).toBeCloseTo(byLine.expandedUncertainty, 9);
-      }),
-    );
-  });
-
-  it('takes the slope of the stretch it reads in', () => {
-    const points = [
-      { dbm: -40, volts: 0.5 },
-      { dbm: -20, volts: 1 },
-      { dbm: 0, volts: 2 },
-    ];
-    const at = (volts: number) =>
-      logDetectorReading({ ...detector, volts, padsInLineDb: 0, calibration: { points } });
-    within(at(0.75).value, -30, 1e-9);
-    within(at(1.5).value, -10, 1e-9);
-    within(at(0.75).components[0]?.limit, 0.005 / 0.025, 1e-12);
-    within(at(1.5).components[0]?.limit, 0.005 / 0.05, 1e-12);
-    expect(errorOf(() => at(2.01)).input).toBe('volts');
-  });
-
-  it.each([
-    ['one point', [{ dbm: 0, volts: 1 }]],
-    [
-      'a level twice',
-      [
-        { dbm: 0, volts: 1 },
-        { dbm: 0, volts: 2 },
-      ],
-    ],
-    [
-      'a turn in it',
-      [
-        { dbm: -10, volts: 1 },
-        { dbm: 0, volts: 2 },
-        { dbm: 10, volts: 1.5 },
-      ],
-    ],
-  ])('refuses a table with %s', (_title, points) => {
-    expect(errorOf(() => logDetectorReading({ ...detector, calibration: { points } })).input).toBe('points');
-  });
-});
-
 const probe: DiodeProbeInput = {
   directVolts: 9.7,
   readToVolts: 0.05,
@@ -123,58 +39,6 @@ const probe: DiodeProbeInput = {
   loadOhms: 50,
   loadToleranceRel: 0.01,
 };
-
-describe('a diode probe', () => {
-  it('adds its drop to what the meter shows: 10 V peak in 50 ohm is 1 W', () => {
-    const { value, watts, voltsPeakToPeak } = diodeProbeReading(probe);
-    within(value, 30, 1e-9);
-    within(watts, 1, 1e-9);
-    within(voltsPeakToPeak, 20, 1e-9);
-  });
-
-  it('made to read rms is told so', () => {
-    const found = diodeProbeReading({ ...probe, directVolts: 9.7 / Math.SQRT2, peakPerVolt: Math.SQRT2 });
-    within(found.value, 30, 1e-9);
-  });
-
-  it('has its limits as parts of the peak, and trusts itself less the lower it reads', () => {
-    const { components } = diodeProbeReading(probe);
-    const perPart = 20 / Math.LN10;
-    within(components[0]?.limit, (0.05 / 10) * perPart, 1e-9);
-    within(components[1]?.limit, (0.097 / 10) * perPart, 1e-9);
-    within(components[2]?.limit, (0.1 / 10) * perPart, 1e-9);
-    const low = diodeProbeReading({ ...probe, directVolts: 0.5, readToVolts: 0.005 });
-    expect(low.expandedUncertainty).toBeGreaterThan(3 * diodeProbeReading(probe).expandedUncertainty);
-  });
-
-  it('is refused where the drop’s own spread is over a quarter of the peak', () => {
-    const error = errorOf(() => diodeProbeReading({ ...probe, directVolts: 0.05, readToVolts: 0.001 }));
-    expect(error.input).toBe('diodeDropPlusMinusVolts');
-  });
-});
-
-describe('a diode probe simulated in ngspice', () => {
-  it('shows the peak less a drop that lies where it was assumed, so the level is inside its uncertainty', () => {
-    const { shown = NaN } = simulate(
-      [
-        'V1 emf 0 sin(0 20 7meg)',
-        'RS emf load 50',
-        'RL load 0 50',
-        'C1 load hot 1n',
-        'D1 0 hot probe',
-        'R1 hot out 10k',
-        'C2 out 0 1n',
-        'RM out 0 10meg',
-        '.model probe D(is=1e-7 n=1.1 rs=10 cjo=0.5p)',
-      ],
-      ['tran 2n 120u 110u 2n', 'meas tran shown AVG v(out)'],
-    );
-    const found = diodeProbeReading({ ...probe, directVolts: Math.abs(shown), diodeDropVolts: 0.2 });
-    // 10 V peak at the load: the emf's half.
-    expect(verdictOf(30, found.expandedUncertainty, { low: 29, high: 31 })).toBe('pass');
-    within(found.value, 30, found.expandedUncertainty);
-  });
-});
 
 describe('two tones', () => {
   const scope = {
@@ -262,30 +126,6 @@ describe('the tap of a dummy load', () => {
     const { value, expandedUncertainty } = dummyLoadTapReading(tap);
     const decibels = (2 * Math.hypot(0.5, 1, 0.2, 0.5)) / RECTANGULAR;
     within(expandedUncertainty, (decibels * value * Math.LN10) / 10, 1e-9);
-  });
-});
-
-describe('a probe’s load on a circuit, simulated in ngspice', () => {
-  it.each([
-    [25, 10e6, 10e-12],
-    [25, 1e6, 100e-12],
-    [500, 10e6, 10e-12],
-    [5000, 10e6, 3e-12],
-  ])('%d ohm, probe of %d ohm and %d F', (circuitOhms, probeOhms, probeFarads) => {
-    const { alone = NaN, probed = NaN } = simulate(
-      [
-        'V1 emf 0 ac 1',
-        `R1 emf a ${circuitOhms}`,
-        `R2 emf b ${circuitOhms}`,
-        `RP b 0 ${probeOhms}`,
-        `CP b 0 ${probeFarads}`,
-        'RA a 0 1e12',
-      ],
-      ['ac lin 1 14.1meg 14.1meg', 'let alone = vm(a)', 'let probed = vm(b)', 'print alone probed'],
-    );
-    const { lossDb, source } = probeLoading({ circuitOhms, probeOhms, probeFarads, frequencyHertz: 14.1e6 });
-    within(lossDb, 20 * Math.log10(alone / probed), 1e-3);
-    expect(source).toEqual({ name: 'probe loading', limit: lossDb, distribution: 'rectangular' });
   });
 });
 

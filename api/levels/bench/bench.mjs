@@ -1,0 +1,128 @@
+// Ratios of the package's heavy loops against plain ones, each pair measured turn about in one run, so that a busy
+// machine slows both. Runs on the built package: npm run build -w api/levels && npm run bench -w api/levels
+import { gzipSync } from 'node:zlib';
+import {
+  frequencyGrid,
+  ladderBuilds,
+  ladderResponse,
+  lowPassLadder,
+  productTable,
+  scanProducts,
+  spreadBands,
+} from '../dist/index.js';
+import { plainObjectResponse } from './plain-object-complex.mjs';
+
+const say = (text) => process.stdout.write(`${text}\n`);
+const middle = (values) => [...values].sort((a, b) => a - b)[Math.floor(values.length / 2)];
+
+function timed(work) {
+  const start = performance.now();
+  work();
+  return performance.now() - start;
+}
+
+/** Medians of two pieces of work, measured turn about after both are warm. */
+function compared(ours, other, rounds = 31) {
+  for (let round = 0; round < 5; round++) [ours, other].forEach((work) => work());
+  const times = [[], []];
+  for (let round = 0; round < rounds; round++) {
+    times[0].push(timed(ours));
+    times[1].push(timed(other));
+  }
+  return times.map(middle);
+}
+
+function products() {
+  const settings = frequencyGrid(5e6, 35e6, 10_000);
+  const { lo, if: intermediate } = productTable(15);
+  const frequencies = new Float64Array(settings.length * lo.length);
+  const bare = () => {
+    for (let setting = 0, at = 0; setting < settings.length; setting++) {
+      const frequency = settings[setting];
+      for (let pair = 0; pair < lo.length; pair++, at++) {
+        frequencies[at] = Math.abs(lo[pair] * frequency + intermediate[pair] * 9e6);
+      }
+    }
+  };
+  const input = {
+    loHertz: settings,
+    ifHertz: 9e6,
+    wanted: 'sum',
+    maxOrder: 15,
+    bandLowHertz: 14e6,
+    bandHighHertz: 14.35e6,
+  };
+  const [ours, other] = compared(() => scanProducts(input), bare);
+  say(`Products to order 15, 10,000 settings: ${ours.toFixed(1)} ms, judged against a band`);
+  say(
+    `  bare typed-array loop, frequencies only: ${other.toFixed(1)} ms; ratio ${(ours / other).toFixed(2)} (3 at most)`,
+  );
+}
+
+async function response() {
+  const nine = {
+    family: 'Chebyshev',
+    order: 9,
+    rippleDb: 0.1,
+    cutoffHertz: 15e6,
+    sourceOhms: 50,
+    first: 'series',
+  };
+  const ladder = lowPassLadder(nine);
+  const hertz = frequencyGrid(1e6, 60e6, 2001);
+  const ours = () => ladderResponse(ladder, hertz, { inductorQ: 180 });
+  const against = (name, work) => {
+    const [fast, slow] = compared(ours, work, 15);
+    say(`  ${name}: ${slow.toFixed(2)} ms; ratio ${(slow / fast).toFixed(0)}`);
+  };
+  say(
+    `Response of 9 elements at 2,001 frequencies: ${middle(Array.from({ length: 31 }, () => timed(ours))).toFixed(3)} ms`,
+  );
+  // The library goes first and alone: two kinds of number through one piece of code would slow both.
+  const library = await import('complex.js').catch(() => undefined);
+  if (library === undefined) {
+    say('  complex.js: not installed, so not compared (20 at least is asked for)');
+    against('plain-object complex class (own baseline, no library)', () =>
+      plainObjectResponse(ladder, hertz, 180),
+    );
+  } else {
+    against('complex.js (20 at least)', () => plainObjectResponse(ladder, hertz, 180, library.default));
+  }
+}
+
+function spread() {
+  const seven = {
+    family: 'Chebyshev',
+    order: 7,
+    rippleDb: 0.1,
+    cutoffHertz: 15e6,
+    sourceOhms: 50,
+    first: 'shunt',
+  };
+  const hertz = frequencyGrid(1e6, 60e6, 201);
+  const base = {
+    ladder: lowPassLadder(seven),
+    capacitorToleranceRel: 0.05,
+    inductorToleranceRel: 0.05,
+    inductorQ: 180,
+  };
+  const built = (builds) => () => spreadBands(ladderBuilds({ ...base, builds, seed: 1 }, hertz));
+  const [once, twice] = compared(built(1000), built(2000), 21);
+  say(`Spread of 1,000 builds at 201 frequencies, 7 elements, with percentiles: ${once.toFixed(1)} ms`);
+  say(`  2,000 builds: ${twice.toFixed(1)} ms; ratio ${(twice / once).toFixed(2)} (1.8 to 2.2)`);
+}
+
+async function size() {
+  const rolldown = await import('rolldown').catch(() => undefined);
+  if (rolldown === undefined) return say('Size: no bundler installed, so not measured');
+  const entry = new URL('../src/index.ts', import.meta.url).pathname;
+  const bundle = await rolldown.rolldown({ input: entry });
+  const { output } = await bundle.generate({ format: 'esm', minify: true });
+  const bytes = gzipSync(output[0].code, { level: 9 }).length;
+  say(`Size of the whole package, minified and gzipped: ${(bytes / 1000).toFixed(1)} kB (25 at most)`);
+}
+
+products();
+await response();
+spread();
+await size();
