@@ -13,6 +13,8 @@ import {
 import { plainObjectResponse } from './plain-object-complex.mjs';
 
 const say = (text) => process.stdout.write(`${text}\n`);
+/** A package that may be there or not; what is not installed is not measured, and the output says so. */
+const optional = (name) => import(name).catch(() => undefined);
 const middle = (values) => [...values].sort((a, b) => a - b)[Math.floor(values.length / 2)];
 
 function timed(work) {
@@ -79,7 +81,7 @@ async function response() {
     `Response of 9 elements at 2,001 frequencies: ${middle(Array.from({ length: 31 }, () => timed(ours))).toFixed(3)} ms`,
   );
   // The library goes first and alone: two kinds of number through one piece of code would slow both.
-  const library = await import('complex.js').catch(() => undefined);
+  const library = await optional('complex.js');
   if (library === undefined) {
     say('  complex.js: not installed, so not compared (20 at least is asked for)');
     against('plain-object complex class (own baseline, no library)', () =>
@@ -113,7 +115,7 @@ function spread() {
 }
 
 async function size() {
-  const rolldown = await import('rolldown').catch(() => undefined);
+  const rolldown = await optional('rolldown');
   if (rolldown === undefined) return say('Size: no bundler installed, so not measured');
   const entry = new URL('../src/index.ts', import.meta.url).pathname;
   const bundle = await rolldown.rolldown({ input: entry });

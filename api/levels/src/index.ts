@@ -41,18 +41,6 @@ export type { CounterInput } from './counter';
 export { gainBetween, gainReading, headroomTo, levelAfter, LOW_HEADROOM_DB } from './gain';
 export type { GainInput, Headroom, MeasuredLevel } from './gain';
 
-export { verdictOf, whyTooClose } from './verdict';
-export type { StraddledEnd, Verdict, VerdictWindow } from './verdict';
-export { SMALLEST_VOLTS_PER_DIVISION, tighterScale } from './tighter-scale';
-export type { TighterScale } from './tighter-scale';
-export { tooCloseText } from './too-close';
-
-export { readQuantity } from './read-quantity';
-export type { ReadQuantity } from './read-quantity';
-export type { BaseUnit, Prefix, QuantityUnit } from './quantity-units';
-export { decimalsFor, formatAtLeast, formatAtMost, formatFixed, formatReading, formatSigned } from './format';
-export { formatQuantity, formatUnderstood } from './format-quantity';
-
 export {
   nearestPreferred,
   PREFERRED_SERIES,
@@ -244,3 +232,15 @@ export type {
   LoadedSource,
   VoltageLevelUnit,
 } from './voltage-levels';
+
+export { verdictOf, whyTooClose } from './verdict';
+export type { StraddledEnd, Verdict, VerdictWindow } from './verdict';
+export { SMALLEST_VOLTS_PER_DIVISION, tighterScale } from './tighter-scale';
+export type { TighterScale } from './tighter-scale';
+export { tooCloseText } from './too-close';
+
+export { readQuantity } from './read-quantity';
+export type { ReadQuantity } from './read-quantity';
+export type { BaseUnit, Prefix, QuantityUnit } from './quantity-units';
+export { decimalsFor, formatAtLeast, formatAtMost, formatFixed, formatReading, formatSigned } from './format';
+export { formatQuantity, formatUnderstood } from './format-quantity';
