@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import table from '../reference/levels.json';
+import { between } from '../testing/between';
 import { errorOf } from '../testing/error-of';
 import { within, withinRel } from '../testing/within';
 import {
@@ -85,8 +86,8 @@ describe('voltage levels against ITU-R V.574', () => {
   });
 });
 
-const resistance = fc.double({ min: 0.1, max: 1e5, noNaN: true }).map((value) => ohms(value));
-const level = fc.double({ min: -150, max: 80, noNaN: true }).map((value) => dBm(value));
+const resistance = between(0.1, 1e5).map((value) => ohms(value));
+const level = between(-150, 80).map((value) => dBm(value));
 
 describe('every figure of a level', () => {
   const names: LevelQuantity[] = [
@@ -124,7 +125,7 @@ describe('every figure of a level', () => {
   it('comes back from every unit of voltage level', () => {
     const unit = fc.constantFrom<VoltageLevelUnit>('dBV', 'dBµV', 'dBu');
     fc.assert(
-      fc.property(unit, fc.double({ min: -200, max: 200, noNaN: true }), (name, value) => {
+      fc.property(unit, between(-200, 200), (name, value) => {
         expect(voltageLevel(voltsRmsFromLevel(value, name), name)).toBeCloseTo(value, 8);
       }),
     );

@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import table from '../../reference/cascade.json';
+import { between } from '../../testing/between';
 import { errorOf } from '../../testing/error-of';
 import { within, withinRel } from '../../testing/within';
 import {
@@ -41,14 +42,14 @@ const stageOf = ({ n, G, NF, OIP3, OP1 }: Printed): ChainStage => {
 const rowsOf = (stages: readonly Printed[]) => chainOf({ inputDbm: -30, stages: stages.map(stageOf) });
 const lastOf = (rows: readonly ChainRow[]) => rows[rows.length - 1];
 
-const gain = fc.double({ min: -30, max: 30, noNaN: true });
+const gain = between(-30, 30);
 const stages = fc.array(
   fc.record({
     name: fc.constant('stage'),
     gainDb: gain,
-    noiseFigureDb: fc.double({ min: 0, max: 20, noNaN: true }),
-    outputInterceptDbm: fc.double({ min: -10, max: 60, noNaN: true }),
-    outputCompressionDbm: fc.double({ min: -20, max: 50, noNaN: true }),
+    noiseFigureDb: between(0, 20),
+    outputInterceptDbm: between(-10, 60),
+    outputCompressionDbm: between(-20, 50),
   }),
   { minLength: 2, maxLength: 8 },
 );

@@ -3,18 +3,7 @@ import { within } from '../../testing/within';
 import { explainShortfall, type PlannedStage, shortfallText } from '../index';
 
 // Values, tolerances and sources: api/levels/reference/cascade.json, each row with its own source.
-
-const gain = fc.double({ min: -30, max: 30, noNaN: true });
-const stages = fc.array(
-  fc.record({
-    name: fc.constant('stage'),
-    gainDb: gain,
-    noiseFigureDb: fc.double({ min: 0, max: 20, noNaN: true }),
-    outputInterceptDbm: fc.double({ min: -10, max: 60, noNaN: true }),
-    outputCompressionDbm: fc.double({ min: -20, max: 50, noNaN: true }),
-  }),
-  { minLength: 2, maxLength: 8 },
-);
+import { between } from '../../testing/between';
 
 const planned = (name: string, plannedDbm: number, measuredDbm?: number, toleranceDb = 2): PlannedStage => {
   return { name, plannedDbm, toleranceDb, measuredDbm, expandedUncertaintyDb: 0.4 };
@@ -90,7 +79,7 @@ describe('where a level went', () => {
   });
 
   it('adds up: what the stages changed is what is off at the end', () => {
-    const level = fc.double({ min: -60, max: 40, noNaN: true });
+    const level = between(-60, 40);
     fc.assert(
       fc.property(
         fc.array(fc.tuple(level, fc.option(level)), { minLength: 1, maxLength: 9 }),

@@ -1,32 +1,17 @@
-import fc from 'fast-check';
 import { within, withinRel } from '../../testing/within';
 import {
-  type FilterFamily,
   fitLadder,
   harmonicRejections,
   type Ladder,
   ladderResponse,
   lowPassLadder,
-  type PrototypeInput,
   rippleFromReturnLoss,
 } from '../index';
 
 // Values, tolerances and sources: api/levels/reference/filters.json, each row with its own source.
 
-const familyOf = (type: string): FilterFamily => (type === 'butterworth' ? 'Butterworth' : 'Chebyshev');
-const shapeOf = (inputs: { type: string; n: number; ripple_dB?: number | null }): PrototypeInput => {
-  return { family: familyOf(inputs.type), order: inputs.n, rippleDb: inputs.ripple_dB ?? undefined };
-};
 const gainAt = (ladder: Ladder, hertz: number, inductorQ?: number) =>
   ladderResponse(ladder, Float64Array.of(hertz), { inductorQ }).gainDb[0];
-
-const shapes = fc.record({
-  family: fc.constantFrom('Butterworth' as const, 'Chebyshev' as const),
-  order: fc.integer({ min: 1, max: 11 }),
-  rippleDb: fc.double({ min: 0.001, max: 1, noNaN: true }),
-});
-const first = fc.constantFrom('series' as const, 'shunt' as const);
-const ratios = fc.double({ min: 0.1, max: 3, noNaN: true });
 
 describe('a ladder fitted from real parts', () => {
   const exact = lowPassLadder({

@@ -1,38 +1,19 @@
 import fc from 'fast-check';
+import { between } from '../../testing/between';
 import { within } from '../../testing/within';
-import {
-  type FilterFamily,
-  type Ladder,
-  ladderMatrix,
-  ladderResponse,
-  lowPassLadder,
-  powerShares,
-  type PrototypeInput,
-} from '../index';
+import { type Ladder, ladderMatrix, ladderResponse, lowPassLadder, powerShares } from '../index';
 
 // Values, tolerances and sources: api/levels/reference/filters.json, each row with its own source.
 
-const familyOf = (type: string): FilterFamily => (type === 'butterworth' ? 'Butterworth' : 'Chebyshev');
-const shapeOf = (inputs: { type: string; n: number; ripple_dB?: number | null }): PrototypeInput => {
-  return { family: familyOf(inputs.type), order: inputs.n, rippleDb: inputs.ripple_dB ?? undefined };
-};
 const gainAt = (ladder: Ladder, hertz: number, inductorQ?: number) =>
   ladderResponse(ladder, Float64Array.of(hertz), { inductorQ }).gainDb[0];
-
-const shapes = fc.record({
-  family: fc.constantFrom('Butterworth' as const, 'Chebyshev' as const),
-  order: fc.integer({ min: 1, max: 11 }),
-  rippleDb: fc.double({ min: 0.001, max: 1, noNaN: true }),
-});
-const first = fc.constantFrom('series' as const, 'shunt' as const);
-const ratios = fc.double({ min: 0.1, max: 3, noNaN: true });
 
 const anyLadder = fc
   .array(
     fc.record({
       place: fc.constantFrom('series' as const, 'shunt' as const),
       part: fc.constantFrom('inductor' as const, 'capacitor' as const),
-      scale: fc.double({ min: -1, max: 1, noNaN: true }),
+      scale: between(-1, 1),
     }),
     { minLength: 1, maxLength: 12 },
   )
@@ -42,7 +23,7 @@ const anyLadder = fc
     });
     return { elements, sourceOhms: 50, loadOhms: 75 };
   });
-const frequency = fc.double({ min: 1e6, max: 60e6, noNaN: true });
+const frequency = between(1e6, 60e6);
 
 describe('any loss-free ladder', () => {
   it('is reciprocal: AD − BC is 1', () => {

@@ -5,8 +5,6 @@ import {
   type FilterFamily,
   halfPowerRatio,
   idealAttenuationDb,
-  type Ladder,
-  ladderResponse,
   leastOrder,
   prototypeOf,
   type PrototypeInput,
@@ -20,8 +18,6 @@ const familyOf = (type: string): FilterFamily => (type === 'butterworth' ? 'Butt
 const shapeOf = (inputs: { type: string; n: number; ripple_dB?: number | null }): PrototypeInput => {
   return { family: familyOf(inputs.type), order: inputs.n, rippleDb: inputs.ripple_dB ?? undefined };
 };
-const gainAt = (ladder: Ladder, hertz: number, inductorQ?: number) =>
-  ladderResponse(ladder, Float64Array.of(hertz), { inductorQ }).gainDb[0];
 
 describe('prototypes against published tables', () => {
   it.each(table.prototypes)('$id', ({ inputs, expected, tolerance }) => {

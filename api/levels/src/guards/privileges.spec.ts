@@ -285,6 +285,13 @@ describe('bands of a set', () => {
     expect(bandsOf(IARU_REGION_1, DAY)).toHaveLength(11);
   });
 
+  it('end on the day a row ends', () => {
+    const [row] = US_97.bands;
+    const ending = { ...US_97, bands: row === undefined ? [] : [{ ...row, until: '2026-02-13' }] };
+    expect(bandsOf(ending, '2026-02-12')).toHaveLength(1);
+    expect(bandsOf(ending, '2026-02-13')).toEqual([]);
+  });
+
   it('name where they come from and carry their caution', () => {
     for (const ruleSet of [US_97, IARU_REGION_1]) {
       expect(ruleSet.source).not.toBe('');

@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import cascade from '../../reference/cascade.json';
 import table from '../../reference/inductors.json';
+import { between } from '../../testing/between';
 import { errorOf } from '../../testing/error-of';
 import { simulatedLadder } from '../../testing/simulated-ladder';
 import { within, withinRel } from '../../testing/within';
@@ -62,7 +63,7 @@ describe('matches against published tables', () => {
 
   it('are one match whichever figure it is told by', () => {
     fc.assert(
-      fc.property(fc.double({ min: 1.0001, max: 1000, noNaN: true }), (vswr) => {
+      fc.property(between(1.0001, 1000), (vswr) => {
         const told = matchFromVswr(vswr);
         expect(matchFromReturnLoss(told.returnLossDb ?? NaN).vswr).toBeCloseTo(vswr, 6);
         expect(matchFromReflection(told.reflection)).toEqual(told);
@@ -73,9 +74,9 @@ describe('matches against published tables', () => {
 
 describe('two mismatches facing each other', () => {
   it('bound what any distance between them can do', () => {
-    const size = fc.double({ min: 0, max: 0.95, noNaN: true });
+    const size = between(0, 0.95);
     fc.assert(
-      fc.property(size, size, fc.double({ min: 0, max: 2 * Math.PI, noNaN: true }), (source, load, phase) => {
+      fc.property(size, size, between(0, 2 * Math.PI), (source, load, phase) => {
         const { leastDb, greatestDb } = mismatchBounds(source, load);
         // |1 − ρs·ρl·e^(jφ)|, the factor of the transducer gain that depends on phase.
         const db =
@@ -104,7 +105,7 @@ describe('windings against published values', () => {
   it('are never beaten by one turn more or less', () => {
     const henries = fc.double({ min: 1e-8, max: 1e-3, noNaN: true });
     fc.assert(
-      fc.property(henries, fc.double({ min: 1, max: 1000, noNaN: true }), (wanted, al) => {
+      fc.property(henries, between(1, 1000), (wanted, al) => {
         const { turns, errorRel } = turnsFor(wanted, al);
         for (const other of [turns - 1, turns + 1].filter((count) => count >= 1 && count <= 1e4)) {
           fc.pre(turns <= 1e4);
@@ -204,8 +205,8 @@ function seenInto(elements: readonly LadderElement[], load: { re: number; im: nu
 }
 
 describe('L-networks', () => {
-  const resistance = fc.double({ min: 1, max: 2000, noNaN: true });
-  const reactance = fc.double({ min: -500, max: 500, noNaN: true });
+  const resistance = between(1, 2000);
+  const reactance = between(-500, 500);
 
   it('turn any load into the source, every one of them', () => {
     fc.assert(

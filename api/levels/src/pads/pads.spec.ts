@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import padTable from '../../reference/attenuators.json';
+import { between } from '../../testing/between';
 import { errorOf } from '../../testing/error-of';
 import { simulate } from '../../testing/ngspice';
 import { within, withinRel } from '../../testing/within';
@@ -89,8 +90,8 @@ describe('pads against published formulas and tables', () => {
 });
 
 const kinds = fc.constantFrom('pi' as const, 'tee' as const, 'bridged tee' as const);
-const losses = fc.double({ min: 0.05, max: 60, noNaN: true });
-const impedances = fc.double({ min: 5, max: 1000, noNaN: true });
+const losses = between(0.05, 60);
+const impedances = between(5, 1000);
 
 describe('pads, whatever they are asked for', () => {
   it('realise their attenuation with no reflection at either end', () => {
@@ -122,7 +123,7 @@ describe('pads, whatever they are asked for', () => {
 
   it('add up when one follows another, and improve a return loss by twice their loss', () => {
     fc.assert(
-      fc.property(losses, losses, fc.double({ min: 5, max: 500, noNaN: true }), (first, second, loadOhms) => {
+      fc.property(losses, losses, between(5, 500), (first, second, loadOhms) => {
         fc.pre(first + second < 40);
         const whole = padPerformance(padValues({ kind: 'pi', ...matched(first + second) }), matched(0));
         const behind = padPerformance(padValues({ kind: 'tee', ...matched(second) }), matched(0));
@@ -143,7 +144,7 @@ describe('pads, whatever they are asked for', () => {
   });
 
   it('lose no power: resistors, load and what is reflected take all of it', () => {
-    const parts = fc.array(fc.double({ min: 1, max: 2000, noNaN: true }), { minLength: 3, maxLength: 3 });
+    const parts = fc.array(between(1, 2000), { minLength: 3, maxLength: 3 });
     fc.assert(
       fc.property(kinds, parts, impedances, impedances, (kind, values, sourceOhms, loadOhms) => {
         const resistors = padValues({ kind, ...matched(6) }).map((resistor, index) => {
@@ -158,7 +159,7 @@ describe('pads, whatever they are asked for', () => {
   });
 
   it('stay within their worst case wherever the resistors lie in their tolerance, and reach it', () => {
-    const where = fc.array(fc.double({ min: -1, max: 1, noNaN: true }), { minLength: 4, maxLength: 4 });
+    const where = fc.array(between(-1, 1), { minLength: 4, maxLength: 4 });
     const tolerance = 0.05;
     fc.assert(
       fc.property(kinds, losses, where, (kind, lossDb, places) => {

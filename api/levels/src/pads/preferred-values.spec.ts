@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import table from '../../reference/preferred-values.json';
+import { between } from '../../testing/between';
 import { within } from '../../testing/within';
 import {
   fittedPart,
@@ -63,7 +64,7 @@ describe('a value made up of parts', () => {
 
   it('is as near as trying every pair of E6 values finds', () => {
     fc.assert(
-      fc.property(fc.double({ min: 1, max: 1000, noNaN: true }), (value) => {
+      fc.property(between(1, 1000), (value) => {
         const found = fittedPart(value, 'resistance', { series: 'E6', atMostParts: 2, enoughRel: 0 });
         const byTrial = Math.min(
           bestByTrial(value, (a, b) => a + b),
