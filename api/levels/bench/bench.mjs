@@ -1,5 +1,6 @@
 // Ratios of the package's heavy loops against plain ones, each pair measured turn about in one run, so that a busy
 // machine slows both. Runs on the built package: npm run build -w api/levels && npm run bench -w api/levels
+import { readFileSync } from 'node:fs';
 import { gzipSync } from 'node:zlib';
 import {
   frequencyGrid,
@@ -114,14 +115,42 @@ function spread() {
   say(`  2,000 builds: ${twice.toFixed(1)} ms; ratio ${(twice / once).toFixed(2)} (1.8 to 2.2)`);
 }
 
+/** Names the package offers, by the folder they come from; those at the top level count as the basics. */
+function offeredByFamily() {
+  const index = readFileSync(new URL('../src/index.ts', import.meta.url), 'utf8');
+  const families = new Map();
+  for (const [, names, from] of index.matchAll(/export \{([^}]*)\} from '\.\/([^']+)';/g)) {
+    const family = from.includes('/') ? from.split('/')[0] : 'basics';
+    const offered = names.split(',').map((name) => name.trim());
+    families.set(family, [...(families.get(family) ?? []), ...offered.filter(Boolean)]);
+  }
+  return families;
+}
+
+/** Gzipped bytes of what a page gets that uses these names. */
+async function gzipped({ rolldown }, names) {
+  const index = new URL('../src/index.ts', import.meta.url).pathname;
+  const page = `import { ${names.join(', ')} } from '${index}'; globalThis.used = [${names.join(', ')}];`;
+  const plugin = {
+    name: 'page',
+    resolveId: (id) => (id === 'page' ? id : null),
+    load: (id) => (id === 'page' ? page : null),
+  };
+  const { output } = await (
+    await rolldown({ input: 'page', plugins: [plugin] })
+  ).generate({ format: 'esm', minify: true });
+  return gzipSync(output[0].code, { level: 9 }).length / 1000;
+}
+
 async function size() {
-  const rolldown = await optional('rolldown');
-  if (rolldown === undefined) return say('Size: no bundler installed, so not measured');
-  const entry = new URL('../src/index.ts', import.meta.url).pathname;
-  const bundle = await rolldown.rolldown({ input: entry });
-  const { output } = await bundle.generate({ format: 'esm', minify: true });
-  const bytes = gzipSync(output[0].code, { level: 9 }).length;
-  say(`Size of the whole package, minified and gzipped: ${(bytes / 1000).toFixed(1)} kB (25 at most)`);
+  const bundler = await optional('rolldown');
+  if (bundler === undefined) return say('Size: no bundler installed, so not measured');
+  const families = offeredByFamily();
+  const whole = await gzipped(bundler, [...families.values()].flat());
+  say(`Size of everything, minified and gzipped: ${whole.toFixed(1)} kB (25 at most)`);
+  for (const [family, names] of families) {
+    say(`  ${family} with all it needs: ${(await gzipped(bundler, names)).toFixed(1)} kB`);
+  }
 }
 
 products();
