@@ -211,6 +211,8 @@ export { intermodulationReading } from './readings/intermodulation';
 export type { IntermodulationInput } from './readings/intermodulation';
 export { dummyLoadTapReading } from './readings/dummy-load-tap';
 export type { DummyLoadTapInput } from './readings/dummy-load-tap';
+export { ASSUMED_TIME_BASE_REL, timeBaseReading } from './readings/time-base';
+export type { TimeBaseInput } from './readings/time-base';
 export { probeLoading } from './readings/probe-loading';
 export type { ProbeLoading, ProbeLoadingInput } from './readings/probe-loading';
 

@@ -24,6 +24,7 @@ export type Calculation =
   | 'diode-probe/1'
   | 'meter/1'
   | 'counter/1'
+  | 'time-base/1'
   | 'gain/1';
 
 /** A measured value and how sure it is. Nothing in it is rounded. */

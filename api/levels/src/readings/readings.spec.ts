@@ -1,7 +1,7 @@
 import cascade from '../../reference/cascade.json';
 import mixers from '../../reference/mixers.json';
 import { errorOf } from '../../testing/error-of';
-import { within } from '../../testing/within';
+import { within, withinRel } from '../../testing/within';
 import {
   analyzerReading,
   diodeProbeReading,
@@ -14,6 +14,7 @@ import {
   oscilloscopeReading,
   OutOfDomainError,
   probeLoading,
+  timeBaseReading,
   twoToneEnvelopeReading,
   twoToneOf,
 } from '../index';
@@ -86,6 +87,17 @@ describe('bench readings against published ones', () => {
     within(analyzerReading(padded).value, row('bench-05')?.at_source_dBm ?? NaN, 1e-9);
     const fine = { ...at, referenceLevelDbm: -20, divisionsDown: 3.5, dbPerDivision: 2 };
     within(analyzerReading(fine).value, row('bench-07')?.dBm ?? NaN, 1e-9);
+  });
+
+  it.each([
+    ['bench-03', { cycles: 3, divisions: 4, secondsPerDivision: 2e-7 }],
+    ['bench-09', { cycles: 7, divisions: 5, secondsPerDivision: 1e-7 }],
+  ])('%s: frequency from the time base', (id, seen) => {
+    const found = timeBaseReading({ ...seen, readToDivisions: 0.1, timeBaseToleranceRel: 0.02 });
+    withinRel(found.value, row(id)?.f_Hz ?? NaN, 1e-9);
+    const relative = (2 * Math.hypot(0.1 / seen.divisions, 0.02)) / RECTANGULAR;
+    withinRel(found.expandedUncertainty, found.value * relative, 1e-9);
+    expect([found.unit, found.calculation]).toEqual(['Hz', 'time-base/1']);
   });
 
   it('bench-06, bench-08: a harmonic, and an oscilloscope behind ×10', () => {
@@ -164,6 +176,16 @@ describe('what a reading is not taken from', () => {
       'an unnamed reference',
       'against',
       () => intermodulationReading({ ...tones, against: 'noise' as 'each tone' }),
+    ],
+    [
+      'no cycles',
+      'cycles',
+      () => timeBaseReading({ cycles: 0, divisions: 4, secondsPerDivision: 1e-6, readToDivisions: 0.1 }),
+    ],
+    [
+      'a trace hardly read',
+      'readToDivisions',
+      () => timeBaseReading({ cycles: 1, divisions: 4, secondsPerDivision: 1e-6, readToDivisions: 1.1 }),
     ],
     [
       'a tap that is no number',
