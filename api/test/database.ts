@@ -2,7 +2,7 @@ import { randomBytes } from 'node:crypto';
 import { Client } from 'pg';
 
 /** Where the tests may make databases; `npm test` starts that server, `node api/scripts/database.mjs` does by hand. */
-export function adminUrl(): string {
+function adminUrl(): string {
   const url = process.env.TEST_DATABASE_ADMIN_URL;
   if (!url)
     throw new Error(

@@ -23,9 +23,3 @@ export function typedQuantity(text: string, unit: QuantityUnit, input?: string):
     };
   }
 }
-
-/** The value when the text is one, else undefined. */
-export function quantityValue(text: string, unit: QuantityUnit): number | undefined {
-  const typed = typedQuantity(text, unit);
-  return typed.state === 'read' ? typed.value : undefined;
-}

@@ -4,7 +4,7 @@ import type { ReactNode, Ref } from 'react';
 import { Icon } from '../icon';
 import { hintLine } from './hint-line';
 
-export interface SelectOption {
+interface SelectOption {
   value: string;
   label: ReactNode;
   /** Why it cannot be chosen; shown in the row, which stays visible. */

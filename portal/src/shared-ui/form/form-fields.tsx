@@ -1,7 +1,6 @@
 import type { Control, FieldPathByValue, FieldValues, RegisterOptions } from 'react-hook-form';
 import { useController } from 'react-hook-form';
 import { CheckField, type CheckFieldProps } from '../fields/check-field';
-import { QuantityField, type QuantityFieldProps } from '../fields/quantity-field';
 import { SelectField, type SelectFieldProps } from '../fields/select-field';
 import { TextField, type TextFieldProps } from '../fields/text-field';
 import { ToggleField, type ToggleFieldProps } from '../fields/toggle-field';
@@ -27,13 +26,6 @@ export function FormText<T extends FieldValues>({
   const { field, fieldState } = useController({ control, name, rules });
   const { ref, ...bound } = field;
   return <TextField {...own} {...bound} inputRef={ref} error={fieldState.error?.message} />;
-}
-
-export function FormQuantity<T extends FieldValues>(props: Bound<T, string> & Own<QuantityFieldProps>) {
-  const { control, name, rules, ...own } = props;
-  const { field, fieldState } = useController({ control, name, rules });
-  const { ref, ...bound } = field;
-  return <QuantityField {...own} {...bound} inputRef={ref} error={fieldState.error?.message} />;
 }
 
 export function FormSelect<T extends FieldValues>(props: Bound<T, string> & Own<SelectFieldProps>) {
