@@ -1,3 +1,6 @@
+import { useDuesCount } from '../features/dues/use-dues-count';
+import { useTreasuryCount } from '../features/treasury/use-treasury-count';
+
 /** What the rail and the More sheet say beside a page. */
 export interface RailCount {
   /** Copper: so many things there need this person. */
@@ -11,5 +14,5 @@ export interface RailCount {
  * @example return { '/dues': useDuesCount(), '/review': useReviewCount() };
  */
 export function useRailCounts(): Partial<Record<string, RailCount>> {
-  return {};
+  return { '/dues': useDuesCount(), '/treasury': useTreasuryCount() };
 }

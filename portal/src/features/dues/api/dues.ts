@@ -6,7 +6,7 @@ export type Invoice = components['schemas']['InvoiceDto'];
 export type MyDues = components['schemas']['MyDuesDto'];
 export type Payment = components['schemas']['PaymentDto'];
 export type Receipt = components['schemas']['ReceiptDto'];
-export type CardPayment = components['schemas']['CardPaymentDto'];
+type CardPayment = components['schemas']['CardPaymentDto'];
 
 export const DUES_KEY = ['dues'] as const;
 const POLL_MS = 1000;

@@ -13,7 +13,7 @@ export type TakePayment = components['schemas']['TakePaymentDto'];
 type MatchLine = components['schemas']['MatchLineDto'];
 
 /** Everything of the treasury hangs together: what one act changes, all of it may show. */
-export const TREASURY_KEY = ['treasury'] as const;
+const TREASURY_KEY = ['treasury'] as const;
 const OPEN_PER_PAGE = 25;
 
 export const summaryQuery = queryOptions({
