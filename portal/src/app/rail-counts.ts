@@ -1,6 +1,8 @@
 import { useMe } from '../api-client/session';
 import { useMyBuilds } from '../features/builds/api/builds';
 import { useReviews } from '../features/builds/api/reviews';
+import { useDuesCount } from '../features/dues/use-dues-count';
+import { useTreasuryCount } from '../features/treasury/use-treasury-count';
 
 /** What the rail and the More sheet say beside a page. */
 export interface RailCount {
@@ -14,12 +16,16 @@ export interface RailCount {
 export function useRailCounts(): Partial<Record<string, RailCount>> {
   const me = useMe();
   const builds = useMyBuilds();
+  const dues = useDuesCount();
+  const treasury = useTreasuryCount();
   const reviews = useReviews(me.hasRole('mentor'));
   const back = (builds.data ?? [])
     .flatMap(({ stages }) => stages)
     .filter(({ state }) => state === 'sent back').length;
   const waiting = (reviews.data?.items ?? []).filter(({ isOwn }) => !isOwn).length;
   return {
+    '/dues': dues,
+    '/treasury': treasury,
     ...(back > 0 && { '/build': { count: back, news: 'Sent back' } }),
     ...(waiting > 0 && { '/review': { count: waiting, news: `${waiting} waiting` } }),
   };

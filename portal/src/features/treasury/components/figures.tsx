@@ -84,13 +84,9 @@ function Figure({ label, value, beside, children }: FigureProps) {
         {label}
       </Typography>
       <Box sx={{ display: 'flex', flexWrap: 'wrap', alignItems: 'baseline', gap: '0 8px' }}>
-        <Typography
-          variant="h1"
-          component="b"
-          sx={{ fontSize: '1.5rem', lineHeight: '2rem', fontWeight: 700 }}
-        >
+        <Box component="b" sx={{ fontSize: '1.5rem', lineHeight: '2rem' }}>
           {value}
-        </Typography>
+        </Box>
         {beside && <Box sx={{ fontSize: '0.8125rem', fontWeight: 600, color: 'token.ink2' }}>{beside}</Box>}
       </Box>
       <Typography variant="small" component="div" sx={{ color: 'token.ink2' }}>

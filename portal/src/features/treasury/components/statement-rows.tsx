@@ -24,13 +24,13 @@ export function StatementRows({ lines, openedId, onOpen }: StatementRowsProps) {
             onClick={() => onOpen(id)}
             sx={{
               display: 'grid',
-              gridTemplateColumns: { xs: '50px minmax(0, 1fr) auto', md: '56px minmax(0, 1fr) auto 92px' },
+              gridTemplateColumns: { xs: '58px minmax(0, 1fr) auto', md: '58px minmax(0, 1fr) auto 92px' },
               alignItems: 'center',
               gap: '8px',
               width: '100%',
               height: { md: ROW },
               minHeight: ROW,
-              p: '0 6px 0 0',
+              p: { xs: '6px 6px 6px 0', md: '0 6px 0 0' },
               border: 0,
               borderBottom: '1px solid',
               borderColor: 'token.rule',
@@ -48,7 +48,7 @@ export function StatementRows({ lines, openedId, onOpen }: StatementRowsProps) {
               }),
             }}
           >
-            <Box component="span" sx={{ color: 'token.ink2', pl: '6px' }}>
+            <Box component="span" sx={{ color: 'token.ink2', pl: '6px', whiteSpace: 'nowrap' }}>
               {dayText(day).slice(4)}
             </Box>
             <Box
