@@ -15,6 +15,11 @@ async function figure(page: Page, name: string): Promise<number> {
 
 test('a member pays by card and sees it paid, with the receipt', async ({ page }) => {
   await signIn(page, 'member', '/dues');
+  const mine = await page.request.get('/api/invoices/mine');
+  const owed = ((await mine.json()) as { id: string; openMinor: number }[]).find(
+    ({ openMinor }) => openMinor > 0,
+  );
+  await page.goto(`/dues?invoice=${owed?.id ?? ''}`);
   const pay = page.getByRole('button', { name: /^Pay £[\d,.]+ by card$/ });
   const amount = /£([\d,.]+)/.exec((await pay.textContent()) ?? '')?.[1] ?? '';
   await pay.click();

@@ -1,7 +1,5 @@
 import { SettableClock } from '@ferrite-row/api/common/clock';
-import { openContext } from '@ferrite-row/api/context';
 import dataSource from '@ferrite-row/api/database/data-source';
-import { seedDemoClub } from './demo-club';
 import { stateOfClub, wipe } from './state';
 
 /** Fills an empty database with the demo club. A database with anybody else in it is left as it is. */
@@ -10,6 +8,9 @@ async function main(): Promise<void> {
   if (await isInhabited()) return console.log('The club has people already: nothing is seeded.');
   // Laying out a past must not set off today's jobs, such as sending its mail.
   process.env.FERRITE_JOBS = 'off';
+  // Loaded only now: the whole API takes two seconds to load, which a warm start need not pay.
+  const { openContext } = await import('@ferrite-row/api/context');
+  const { seedDemoClub } = await import('./demo-club.js');
   const clock = new SettableClock(new Date());
   const context = await openContext(clock);
   try {
@@ -23,7 +24,7 @@ async function main(): Promise<void> {
   }
 }
 
-/** Asked with a bare connection: wiring the whole API to hear 'yes' would cost every start two seconds. */
+/** Asked with a bare connection, without wiring the API. */
 async function isInhabited(): Promise<boolean> {
   await dataSource.initialize();
   try {

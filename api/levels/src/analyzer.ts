@@ -89,17 +89,19 @@ export function harmonicReading(input: HarmonicInput): LevelReading {
   ]);
 }
 
-interface Scale {
+/** A decibel scale and how well it was read. */
+export interface DecibelScale {
   dbPerDivision: number;
   readToDivisions: number;
 }
 
-function decibelsDown(seen: Scale & { divisionsDown: number }, input: string): number {
+/** How far below the top line, dB. */
+export function decibelsDown(seen: DecibelScale & { divisionsDown: number }, input: string): number {
   const divisions = { input, label: 'Divisions down', unit: 'div', atLeast: 0, atMost: ANALYZER_DIVISIONS };
   return requireWithin(divisions, seen.divisionsDown) * perDivision(seen);
 }
 
-function perDivision({ dbPerDivision }: Scale): number {
+function perDivision({ dbPerDivision }: DecibelScale): number {
   const domain = {
     input: 'dbPerDivision',
     label: 'Decibels per division',
@@ -110,24 +112,32 @@ function perDivision({ dbPerDivision }: Scale): number {
   return requireWithin(domain, dbPerDivision);
 }
 
-function resolution(name: string, scale: Scale): UncertaintySource {
+/** What reading a scale to part of a division leaves open. */
+export function resolution(name: string, scale: DecibelScale): UncertaintySource {
   const domain = { input: 'readToDivisions', label: 'Read to within', unit: 'div', above: 0, atMost: 2 };
   return rectangular(name, requireWithin(domain, scale.readToDivisions) * perDivision(scale));
 }
 
-function padLimit({ padsInLineDb, padToleranceDb }: AnalyzerInput): number {
+/** Stated limit of the pads in line, or the assumed one; nothing without pads. */
+export function padLimit({
+  padsInLineDb,
+  padToleranceDb,
+}: Pick<AnalyzerInput, 'padsInLineDb' | 'padToleranceDb'>): number {
   const assumed = padsInLineDb === 0 ? 0 : ASSUMED_PAD_TOLERANCE_DB;
   return accuracy('padToleranceDb', 'Pad tolerance', padToleranceDb ?? assumed);
 }
 
-function decibels(input: string, label: string, value: number): number {
+/** A number of decibels that only takes away. */
+export function decibels(input: string, label: string, value: number): number {
   return requireWithin({ input, label, unit: 'dB', atLeast: 0, atMost: 200 }, value);
 }
 
-function accuracy(input: string, label: string, value: number): number {
+/** A stated ± accuracy. */
+export function accuracy(input: string, label: string, value: number): number {
   return requireWithin({ input, label, unit: 'dB', atLeast: 0, atMost: 20 }, value);
 }
 
-function rectangular(name: string, limit: number): UncertaintySource {
+/** A source with a stated limit and nothing known inside it. */
+export function rectangular(name: string, limit: number): UncertaintySource {
   return { name, limit, distribution: 'rectangular' };
 }

@@ -29,6 +29,49 @@ export function requireWithin(domain: Domain, value: number): number {
   throw new OutOfDomainError(domain.input, value, permitted, message, suggestion);
 }
 
+/**
+ * The same for a count.
+ *
+ * @throws OutOfDomainError also when the value is no whole number.
+ */
+export function requireWhole(domain: Domain, value: number): number {
+  requireWithin(domain, value);
+  if (Number.isInteger(value)) return value;
+  const permitted = `a whole number, ${permittedText(domain)}`;
+  const message = `${domain.label}: ${value} is no whole number; needed is ${permitted}.`;
+  throw new OutOfDomainError(domain.input, value, permitted, message);
+}
+
+/**
+ * One of a fixed set of words, for a caller that is not checked by the compiler.
+ *
+ * @throws OutOfDomainError with the set as permitted domain.
+ */
+export function requireOneOf<Choice extends string | number>(
+  { input, label }: Pick<Domain, 'input' | 'label'>,
+  choices: readonly Choice[],
+  value: Choice,
+): Choice {
+  if (choices.includes(value)) return value;
+  const permitted = `one of ${choices.join(', ')}`;
+  throw new OutOfDomainError(input, value, permitted, `${label}: ${String(value)} is not ${permitted}.`);
+}
+
+/**
+ * A list that must not be empty, nor longer than can be meant.
+ *
+ * @throws OutOfDomainError otherwise.
+ */
+export function requireSome(
+  { input, label }: Pick<Domain, 'input' | 'label'>,
+  items: ArrayLike<unknown>,
+  atMost = 1000,
+): void {
+  if (items.length > 0 && items.length <= atMost) return;
+  const permitted = `1 to ${atMost} entries`;
+  throw new OutOfDomainError(input, items.length, permitted, `${label}: ${permitted} are needed.`);
+}
+
 function isWithin({ above, atLeast, below, atMost }: Domain, value: number): boolean {
   return (
     Number.isFinite(value) &&

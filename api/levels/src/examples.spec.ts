@@ -46,7 +46,7 @@ interface DocExample {
 
 /** Every example of the package's docstrings, with the name of what it documents. */
 function documentedExamples(folder: string): DocExample[] {
-  return readdirSync(folder)
+  return readdirSync(folder, { recursive: true, encoding: 'utf8' })
     .filter((file) => file.endsWith('.ts') && !file.endsWith('.spec.ts'))
     .flatMap((file) => examplesIn(readFileSync(join(folder, file), 'utf8')));
 }

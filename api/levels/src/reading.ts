@@ -13,7 +13,19 @@ export type ReadingUnit = 'dBm' | 'dB' | 'dBc' | 'Hz' | MeterUnit;
  * when the same input would give another answer.
  */
 export type Calculation =
-  'oscilloscope/1' | 'dummy-load/1' | 'analyzer/1' | 'harmonic/1' | 'meter/1' | 'counter/1' | 'gain/1';
+  | 'oscilloscope/1'
+  | 'dummy-load/1'
+  | 'dummy-load-tap/1'
+  | 'analyzer/1'
+  | 'harmonic/1'
+  | 'intermodulation/1'
+  | 'two-tone-envelope/1'
+  | 'logarithmic-detector/1'
+  | 'diode-probe/1'
+  | 'meter/1'
+  | 'counter/1'
+  | 'time-base/1'
+  | 'gain/1';
 
 /** A measured value and how sure it is. Nothing in it is rounded. */
 export interface LevelReading extends UncertaintyBudget {

@@ -1,9 +1,10 @@
 import fc from 'fast-check';
+import { between } from '../testing/between';
 import { errorOf } from '../testing/error-of';
 import { OutOfDomainError, verdictOf, type VerdictWindow, whyTooClose } from './index';
 
-const level = fc.double({ min: -100, max: 100, noNaN: true });
-const uncertainty = fc.double({ min: 0, max: 10, noNaN: true });
+const level = between(-100, 100);
+const uncertainty = between(0, 10);
 const window: fc.Arbitrary<VerdictWindow> = fc.oneof(
   fc.tuple(level, level).map(([a, b]) => ({ low: Math.min(a, b), high: Math.max(a, b) })),
   level.map((low) => ({ low })),

@@ -3,7 +3,7 @@ import Button from '@mui/material/Button';
 import Typography from '@mui/material/Typography';
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import { useForm, useWatch } from 'react-hook-form';
+import { useForm, useWatch, type UseFormReturn } from 'react-hook-form';
 import { ProblemError } from '../../../api-client/problem-error';
 import { applyProblemToForm } from '../../../api-client/problem-to-form';
 import { clubDay } from '../../../lib/club-time';
@@ -43,13 +43,11 @@ const startOf = (invoice: OpenInvoice | undefined): PaymentFields => ({
 export function PaymentDrawer({ invoice, currency, onClose }: PaymentDrawerProps) {
   const [start] = useState(() => startOf(invoice));
   const form = useForm<PaymentFields>({ defaultValues: start });
-  const { control, handleSubmit, setError, setValue } = form;
+  const { handleSubmit, setError, setValue } = form;
   const draft = useFormDraft(form, `payment:${invoice?.id ?? 'any'}`);
-  const people = useQuery(peopleQuery);
   const take = useTakePayment();
   const takeBack = useTakeBackPayment();
   const say = useToast();
-  const personId = useWatch({ control, name: 'personId' });
   const submit = handleSubmit((fields) =>
     take.mutate(paymentBody(fields), {
       onSuccess: ({ id, receiptNumber, amountMinor, personName }) => {
@@ -77,58 +75,81 @@ export function PaymentDrawer({ invoice, currency, onClose }: PaymentDrawerProps
         </Button>
       }
     >
-      <Box
-        component="form"
-        onSubmit={(event) => void submit(event)}
-        sx={{ display: 'grid', gap: '14px' }}
-        noValidate
-      >
-        {draft.keptFrom && (
-          <Typography variant="small" role="status">
-            {draft.keptFrom}
-          </Typography>
-        )}
-        <FormSelect
-          control={control}
-          name="personId"
-          label="From"
-          rules={{ required: 'Choose who paid.' }}
-          options={[
-            { value: '', label: 'Choose' },
-            ...(people.data?.items ?? []).map(({ id, name }) => ({ value: id, label: name })),
-          ]}
-        />
-        {people.isError && <ProblemAlert error={people.error} onRetry={() => void people.refetch()} />}
-        {personId && (
-          <InvoiceTicks key={personId} control={control} setValue={setValue} personId={personId} />
-        )}
-        <FormToggle control={control} name="method" label="How" options={METHODS} />
-        <FormText
-          control={control}
-          name="amount"
-          label="Amount"
-          inputMode="decimal"
-          end={currency}
-          rules={{ validate: (text) => amountFault(text) ?? true }}
-          hint="More than is open becomes credit for the next invoice."
-        />
-        <FormText
-          control={control}
-          name="receivedOn"
-          label="Received on"
-          type="date"
-          rules={{ required: 'Choose the day.' }}
-        />
-        <FormText
-          control={control}
-          name="note"
-          label="Note"
-          maxLength={200}
-          hint="For the books, such as a cheque’s number."
-        />
-        {take.isError && <ProblemAlert error={take.error} title="The payment was not taken." />}
-        <input type="submit" hidden />
-      </Box>
+      <PaymentForm
+        form={form}
+        keptFrom={draft.keptFrom}
+        currency={currency}
+        error={take.error}
+        onSubmit={() => void submit()}
+      />
     </DockedDrawer>
+  );
+}
+
+interface PaymentFormProps {
+  form: UseFormReturn<PaymentFields>;
+  keptFrom: string | undefined;
+  currency: string;
+  error: unknown;
+  onSubmit: () => void;
+}
+
+function PaymentForm({ form: { control, setValue }, keptFrom, currency, error, onSubmit }: PaymentFormProps) {
+  const people = useQuery(peopleQuery);
+  const personId = useWatch({ control, name: 'personId' });
+  return (
+    <Box
+      component="form"
+      onSubmit={(event) => {
+        event.preventDefault();
+        onSubmit();
+      }}
+      sx={{ display: 'grid', gap: '14px' }}
+      noValidate
+    >
+      {keptFrom && (
+        <Typography variant="small" role="status">
+          {keptFrom}
+        </Typography>
+      )}
+      <FormSelect
+        control={control}
+        name="personId"
+        label="From"
+        rules={{ required: 'Choose who paid.' }}
+        options={[
+          { value: '', label: 'Choose' },
+          ...(people.data?.items ?? []).map(({ id, name }) => ({ value: id, label: name })),
+        ]}
+      />
+      {people.isError && <ProblemAlert error={people.error} onRetry={() => void people.refetch()} />}
+      {personId && <InvoiceTicks key={personId} control={control} setValue={setValue} personId={personId} />}
+      <FormToggle control={control} name="method" label="How" options={METHODS} />
+      <FormText
+        control={control}
+        name="amount"
+        label="Amount"
+        inputMode="decimal"
+        end={currency}
+        rules={{ validate: (text) => amountFault(text) ?? true }}
+        hint="More than is open becomes credit for the next invoice."
+      />
+      <FormText
+        control={control}
+        name="receivedOn"
+        label="Received on"
+        type="date"
+        rules={{ required: 'Choose the day.' }}
+      />
+      <FormText
+        control={control}
+        name="note"
+        label="Note"
+        maxLength={200}
+        hint="For the books, such as a cheque’s number."
+      />
+      {error !== null && <ProblemAlert error={error} title="The payment was not taken." />}
+      <input type="submit" hidden />
+    </Box>
   );
 }
