@@ -17,7 +17,7 @@ export const SOURCE_ENTRY = {
 };
 
 /** 0.75 V peak to peak across 50 ohm: +1.48 dBm. */
-export const OUTPUT_ENTRY = { ...SOURCE_ENTRY, voltsPerDivision: '10 mV', divisionsPeakToPeak: '7.5' };
+const OUTPUT_ENTRY = { ...SOURCE_ENTRY, voltsPerDivision: '10 mV', divisionsPeakToPeak: '7.5' };
 
 /** The first bytes of a PNG, and something after them. */
 export const PNG = Buffer.concat([

@@ -13,12 +13,12 @@ type KeepReading = components['schemas']['KeepReadingDto'];
 /** Everything about builds; whatever is written to one makes all of it stale. */
 const BUILDS = ['builds'] as const;
 
-export const myBuildsQuery = queryOptions({
+const myBuildsQuery = queryOptions({
   queryKey: [...BUILDS, 'mine'],
   queryFn: () => unwrap(api.GET('/api/builds/mine')),
 });
 
-export const buildQuery = (buildId: string) =>
+const buildQuery = (buildId: string) =>
   queryOptions({
     queryKey: [...BUILDS, buildId],
     queryFn: () => unwrap(api.GET('/api/builds/{buildId}', { params: { path: { buildId } } })),

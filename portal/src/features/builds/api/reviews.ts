@@ -4,7 +4,7 @@ import type { components } from '../../../api-client/schema';
 
 export type Review = components['schemas']['ReviewDto'];
 
-export const reviewsQuery = queryOptions({
+const reviewsQuery = queryOptions({
   queryKey: ['reviews'],
   queryFn: () => unwrap(api.GET('/api/reviews', { params: { query: { perPage: 100 } } })),
 });

@@ -84,7 +84,7 @@ function Value({ check, preview }: Pick<CheckRowProps, 'check' | 'preview'>) {
 }
 
 /** A check's state; a value that works itself out says which checks it waits for. */
-export function CheckState({ check, stage }: Pick<CheckRowProps, 'check' | 'stage'>) {
+function CheckState({ check, stage }: Pick<CheckRowProps, 'check' | 'stage'>) {
   const reading = readingInForce(check);
   if (check.kind === 'measure' && reading)
     return <VerdictLine verdict={reading.verdict}>{VERDICTS[reading.verdict].short}</VerdictLine>;

@@ -111,7 +111,7 @@ function LevelsLink({ buildId }: { buildId: string }) {
 }
 
 /** The level diagram of a build, at the point of this stage; a point opens its stage. */
-export function StageDiagram({
+function StageDiagram({
   build,
   stage,
   entered,

@@ -22,7 +22,7 @@ import type { BuildCheck } from '../api/builds';
 export type Entry = Record<string, string>;
 type Asked = Pick<BuildCheck, 'method' | 'unit' | 'windowLow' | 'windowHigh' | 'defaults'>;
 
-export const entryMethod = ({ method }: Pick<BuildCheck, 'method'>): EntryMethod | undefined =>
+const entryMethod = ({ method }: Pick<BuildCheck, 'method'>): EntryMethod | undefined =>
   ENTRY_METHODS.find((known) => known === method);
 
 export function fieldsOf(check: Pick<BuildCheck, 'method' | 'unit'>): readonly EntryField[] {
@@ -40,7 +40,7 @@ export function startEntry(check: Asked): Entry {
   );
 }
 
-export const windowOf = ({ windowLow, windowHigh }: Asked): VerdictWindow => ({
+const windowOf = ({ windowLow, windowHigh }: Asked): VerdictWindow => ({
   low: windowLow ?? undefined,
   high: windowHigh ?? undefined,
 });
