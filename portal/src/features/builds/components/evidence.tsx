@@ -12,6 +12,10 @@ import { readingInForce } from '../logic/stage';
 import { readingWords, windowText } from '../logic/words';
 import { PhotoList } from './photo-list';
 
+/** Columns a phone has no room for; their news is in the others. */
+const WIDE = { display: { xs: 'none', md: 'table-cell' } };
+const WIDE_HEADERS = ['Against window', 'With'];
+
 const CELL = { py: '8px', px: '6px', borderBottom: '1px solid', borderColor: 'token.rule' };
 
 /** Everything a mentor decides on: readings against their windows, ticks, photos, instruments. */
@@ -55,6 +59,7 @@ function Readings({ checks }: { checks: readonly BuildCheck[] }) {
                     fontWeight: 600,
                     color: 'token.ink2',
                     borderColor: 'token.ink',
+                    ...(WIDE_HEADERS.includes(header) && WIDE),
                   }}
                 >
                   {header}
@@ -97,7 +102,7 @@ function ReadingRow({ check }: { check: BuildCheck }) {
       <Box component="td" sx={{ ...CELL, whiteSpace: 'nowrap' }}>
         {windowText(check, false)}
       </Box>
-      <Box component="td" sx={{ ...CELL, width: 118 }}>
+      <Box component="td" sx={{ ...CELL, ...WIDE, width: 118 }}>
         <WindowBar
           low={check.windowLow ?? undefined}
           high={check.windowHigh ?? undefined}
@@ -106,7 +111,7 @@ function ReadingRow({ check }: { check: BuildCheck }) {
           compact
         />
       </Box>
-      <Box component="td" sx={CELL}>
+      <Box component="td" sx={{ ...CELL, ...WIDE }}>
         {reading?.instrumentTag ? (
           <AssetTag>{reading.instrumentTag}</AssetTag>
         ) : (

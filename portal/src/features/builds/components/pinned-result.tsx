@@ -20,7 +20,8 @@ export function PinnedResult({ form }: { form: ReadingFormState }) {
       aria-label="Result"
       sx={{
         position: 'fixed',
-        zIndex: isShort ? 'snackbar' : 'appBar',
+        // With the keyboard up it stands over the frame's bottom bar, which then has no use.
+        zIndex: isShort ? 1600 : 'appBar',
         bottom: isShort ? hidden : `calc(${BOTTOM_BAR}px + env(safe-area-inset-bottom))`,
         left: 0,
         right: 0,
