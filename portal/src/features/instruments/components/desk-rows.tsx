@@ -21,6 +21,7 @@ export function DeskRow({ instrument, isOpen, end, line, onOpen }: DeskRowProps)
       sx={{
         display: 'grid',
         gridTemplateColumns: '74px 1fr auto',
+        columnGap: '10px',
         width: '100%',
         minHeight: 52,
         py: '8px',
