@@ -1,4 +1,5 @@
 import { queryOptions, useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
+import { useState } from 'react';
 import { api, unwrap } from './client';
 import { ProblemError } from './problem-error';
 import type { components } from './schema';
@@ -33,8 +34,12 @@ export function useSession() {
  */
 export function useMe(): Me & { hasRole: (...roles: Role[]) => boolean } {
   const { data } = useQuery(meQuery);
-  if (!data) throw new Error('useMe is for pages behind the sign-in');
-  return { ...data, hasRole: (...roles) => roles.some((role) => data.roles.includes(role)) };
+  // When the session ends, a page may be drawn once more before the frame leads to sign-in: by whom it was last.
+  const [last, setLast] = useState(data);
+  if (data && data !== last) setLast(data);
+  const me = data ?? last;
+  if (!me) throw new Error('useMe is for pages behind the sign-in');
+  return { ...me, hasRole: (...roles) => roles.some((role) => me.roles.includes(role)) };
 }
 
 /** Signs in, forgets what the person before had loaded, and knows the new person before it resolves. */
