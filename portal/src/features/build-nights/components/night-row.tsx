@@ -5,6 +5,7 @@ import type { BuildNight } from '../api/nights';
 import { nightName } from '../night-view';
 import { lineWords, placesWords } from '../night-words';
 import { ComingButton } from './coming-button';
+import { VisuallyHidden } from '../../../shared-ui/visually-hidden';
 import { StandingLine } from './standing-line';
 
 interface NightRowProps {
@@ -64,12 +65,7 @@ export function NightRow({ night, main, isOpen, onOpen, onError }: NightRowProps
           cursor: 'pointer',
         }}
       >
-        <Box
-          component="span"
-          sx={{ position: 'absolute', width: 1, height: 1, overflow: 'hidden', clipPath: 'inset(50%)' }}
-        >
-          {dayText(clubDay(night.startsAt))},
-        </Box>
+        <VisuallyHidden>{dayText(clubDay(night.startsAt))}, </VisuallyHidden>
         <Box
           component="b"
           sx={{ display: 'block', textDecoration: night.cancelledAt ? 'line-through' : undefined }}
