@@ -121,11 +121,10 @@ test('a mentor plans a series around a clash; members come, wait, move up and he
     await mentor.goto(place);
     await mentor.getByRole('button', { name: 'Cancel the night' }).click();
     await mentor.getByLabel('Why, in a word to everybody').fill('The hall is let.');
-    // The word stands in the form already, so seeing it does not tell that the server has answered.
     const cancelled = mentor.waitForResponse((answer) => answer.url().endsWith('/cancel') && answer.ok());
     await mentor.getByRole('dialog').getByRole('button', { name: 'Cancel the night' }).click();
     await cancelled;
-    await expect(mentor.getByText('The hall is let.')).toBeVisible();
+    await expect(mentor.getByText('Cancelled. The hall is let.')).toBeVisible();
     const span = { from: `${first}T00:00:00Z`, to: `${weeksLater(first, 7)}T00:00:00Z` };
     const { items } = (await (await mentor.request.get('/api/build-nights', { params: span })).json()) as {
       items: { id: string; title: string; cancelledAt: string | null }[];
