@@ -4,6 +4,9 @@ import { defineConfig } from 'vitest/config';
 
 const api = process.env.API_URL ?? 'http://127.0.0.1:4781';
 
+// Specs in plain TypeScript that stand on a browser's storage or its requests.
+const needsBrowser = ['src/api-client/**/*.test.ts'];
+
 export default defineConfig({
   plugins: [react()],
   // The levels package is read from its TypeScript source, so the browser never waits for a server build.
@@ -12,12 +15,26 @@ export default defineConfig({
   preview: { host: '127.0.0.1', proxy: { '/api': api } },
   build: { assetsDir: 'assets', chunkSizeWarningLimit: 600 },
   test: {
-    environment: 'jsdom',
-    environmentOptions: { jsdom: { url: 'http://127.0.0.1:4782/' } },
     globals: true,
     css: false,
     testTimeout: 30_000,
-    include: ['src/**/*.test.{ts,tsx}'],
-    setupFiles: './src/testing/setup.ts',
+    // Left to itself Vitest keeps one core free.
+    maxWorkers: '100%',
+    projects: [
+      {
+        extends: true,
+        test: { name: 'reckoning', include: ['src/**/*.test.ts'], exclude: needsBrowser, environment: 'node' },
+      },
+      {
+        extends: true,
+        test: {
+          name: 'pages',
+          include: ['src/**/*.test.tsx', ...needsBrowser],
+          environment: 'jsdom',
+          environmentOptions: { jsdom: { url: 'http://127.0.0.1:4782/' } },
+          setupFiles: './src/testing/setup.ts',
+        },
+      },
+    ],
   },
 });
