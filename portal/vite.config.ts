@@ -23,7 +23,12 @@ export default defineConfig({
     projects: [
       {
         extends: true,
-        test: { name: 'reckoning', include: ['src/**/*.test.ts'], exclude: needsBrowser, environment: 'node' },
+        test: {
+          name: 'reckoning',
+          include: ['src/**/*.test.ts'],
+          exclude: needsBrowser,
+          environment: 'node',
+        },
       },
       {
         extends: true,
