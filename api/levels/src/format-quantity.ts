@@ -28,7 +28,7 @@ export function formatQuantity(
   const chosen = prefix ?? prefixFor(Number(rounded), base, smallestNumber);
   const exponent = prefix === undefined && chosen !== undefined ? -PREFIX_EXPONENT[chosen] : 0;
   const number = String(shifted(rounded, exponent));
-  return `${value < 0 && Number(number) !== 0 ? '−' : ''}${number} ${chosen ?? ''}${base}`;
+  return `${value < 0 && Number(number) !== 0 ? '−' : ''}${number} ${chosen ?? ''}${base}`.trimEnd();
 }
 
 /** Shifts the decimal point in the text, so that 0.00109 becomes 1.09 and not 1.0899999999999999. */
@@ -56,11 +56,11 @@ function prefixFor(size: number, base: BaseUnit, smallestNumber: number): Prefix
 export function formatUnderstood(value: number, unit: QuantityUnit): string {
   const size = Math.abs(value);
   const { prefix, base } = splitUnit(unit);
-  const isLong = base !== 'ohm' && prefix === undefined && (size < 1 || size >= 1e6);
+  const isLong = BASE_UNITS[base].prefixes.length > 0 && base !== 'ohm' && prefix === undefined && (size < 1 || size >= 1e6);
   const isBeyondText = size >= 1e15 || (size > 0 && size < 1e-6);
   if (isLong || isBeyondText) return formatQuantity(value, unit, 12);
   const [whole = '', fraction] = String(Number(size.toPrecision(12))).split('.');
   const grouped = whole.replace(/\B(?=(?:\d{3})+$)/g, ',');
   const sign = value < 0 ? '−' : '';
-  return `${sign}${grouped}${fraction === undefined ? '' : `.${fraction}`} ${unit}`;
+  return `${sign}${grouped}${fraction === undefined ? '' : `.${fraction}`} ${unit}`.trimEnd();
 }

@@ -243,6 +243,7 @@ export { tooCloseText } from './too-close';
 
 export { readQuantity } from './read-quantity';
 export type { ReadQuantity } from './read-quantity';
+export { baseUnitsIn } from './quantity-units';
 export type { BaseUnit, Prefix, QuantityUnit } from './quantity-units';
 export { decimalsFor, formatAtLeast, formatAtMost, formatFixed, formatReading, formatSigned } from './format';
 export { formatQuantity, formatUnderstood } from './format-quantity';

@@ -7,6 +7,7 @@ import type { Prefix, QuantityUnit } from './quantity-units';
 export const LONGEST = 60;
 
 function example(unit: QuantityUnit): string {
+  if (unit === '') return 'a plain number';
   const { prefixes } = BASE_UNITS[splitUnit(unit).base];
   const taken = prefixes.length === 0 ? 'no prefix' : `the prefixes ${prefixes.join(', ')}`;
   return `a number in ${unit}, with ${taken}`;

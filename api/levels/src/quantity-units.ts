@@ -16,14 +16,20 @@ export type BaseUnit =
   | 'dB/div'
   | 'div'
   | 'ppm'
-  | '%';
+  | '%'
+  | 'm'
+  | 'min'
+  | '°C'
+  | 'K/W'
+  /** A plain number: a count, a ratio. */
+  | '';
 
 /** Prefixes that a field's own unit may carry. */
 export type Prefix = 'p' | 'n' | 'µ' | 'm' | 'k' | 'M' | 'G';
 
 /** Unit of a field: a mA field asks for `mA` and gets milliamperes. */
 export type QuantityUnit =
-  BaseUnit | `${Prefix}${'V' | 'A' | 'W' | 'ohm' | 'Hz' | 's' | 'F' | 'H' | 'V/div' | 's/div'}`;
+  BaseUnit | `${Prefix}${'V' | 'A' | 'W' | 'ohm' | 'Hz' | 's' | 'F' | 'H' | 'm' | 'V/div' | 's/div'}`;
 
 /** Powers of ten (SI brochure, table of prefixes). */
 export const PREFIX_EXPONENT: Record<Prefix, number> = { p: -12, n: -9, µ: -6, m: -3, k: 3, M: 6, G: 9 };
@@ -54,7 +60,25 @@ export const BASE_UNITS: Record<BaseUnit, BaseUnitFacts> = {
   s: { spellings: ['s', 'sec'], prefixes: ['n', 'µ', 'm'] },
   F: { spellings: ['f'], prefixes: ['p', 'n', 'µ', 'm'] },
   H: { spellings: ['h'], prefixes: ['n', 'µ', 'm'] },
+  min: { spellings: ['min', 'minutes'], prefixes: [] },
+  m: { spellings: ['m', 'metre', 'metres'], prefixes: ['µ', 'm'] },
+  '°C': { spellings: ['°c', 'c', 'degc'], prefixes: [] },
+  'K/W': { spellings: ['k/w', '°c/w', 'c/w'], prefixes: [] },
+  '': { spellings: [], prefixes: [] },
 };
+
+/**
+ * One of a unit in its base unit: 1e6 for MHz, 0.01 for per cent, 60 for minutes. Degrees Celsius stay as they are.
+ * @example baseUnitsIn('MHz') //=> 1000000
+ * @example baseUnitsIn('%') //=> 0.01
+ */
+export function baseUnitsIn(unit: QuantityUnit): number {
+  const { prefix, base } = splitUnit(unit);
+  if (base === '%') return 0.01;
+  if (base === 'ppm') return 1e-6;
+  if (base === 'min') return 60;
+  return prefix === undefined ? 1 : Number(`1e${PREFIX_EXPONENT[prefix]}`);
+}
 
 /**
  * Prefix and base of a field's unit.

@@ -73,6 +73,7 @@ const PAGES: RouteObject[] = [
   page('groups', () => import('../features/groups/pages/GroupsPage')),
   page('instruments', () => import('../features/instruments/pages/InstrumentsPage')),
   page('level-bench', () => import('../features/level-bench/pages/LevelBenchPage')),
+  page('level-bench/conversions', () => import('../features/level-bench/pages/ConversionsPage')),
   page('dues', () => import('../features/dues/pages/DuesPage')),
   page('you', () => import('../features/you/pages/YouPage')),
   ...ROLE_ROUTES,

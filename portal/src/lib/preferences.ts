@@ -1,6 +1,6 @@
 /** Choices this device remembers, such as Diagram or Table; never anything secret. */
 export type PreferenceName =
-  'level-view' | 'letter-keys' | 'shared-tablet' | 'instrument-view' | 'bench-view';
+  'level-view' | 'letter-keys' | 'shared-tablet' | 'instrument-view' | 'bench-view' | 'level-bench-view';
 
 const keyOf = (name: PreferenceName): string => `ferrite-${name}`;
 const listeners = new Set<() => void>();

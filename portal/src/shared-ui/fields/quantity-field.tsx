@@ -10,6 +10,8 @@ export interface QuantityFieldProps {
   label: string;
   /** The field's own unit: what a number without letters is in. */
   unit: QuantityUnit;
+  /** Stands in the unit's place where the trade counts in something else: 'm + n', 'turns'. */
+  unitWords?: string;
   /** Exactly as typed; kept so, whatever was understood. */
   value: string;
   onChange: (text: string) => void;
@@ -33,6 +35,7 @@ const readAs = (typed: TypedQuantity): string | undefined =>
  */
 export function QuantityField({
   unit,
+  unitWords = unit,
   value,
   onChange,
   onBlur,
@@ -69,7 +72,7 @@ export function QuantityField({
             onChange={(next) => onChange(joinUnit(parts.number, next, unit))}
           />
         ) : (
-          unit
+          unitWords
         )
       }
     />

@@ -1,80 +1,44 @@
-import type { EntryField } from '@ferrite-row/levels';
 import Box from '@mui/material/Box';
-import Typography from '@mui/material/Typography';
-import { useSearchParams } from 'react-router-dom';
-import { QuantityField } from '../../../shared-ui/fields/quantity-field';
-import { ToggleField } from '../../../shared-ui/fields/toggle-field';
+import { Link, Navigate, useLocation } from 'react-router-dom';
 import { PageTitle } from '../../../shared-ui/page-title';
-import { SectionHeading } from '../../../shared-ui/section-heading';
-import { fieldsOf, STARTS, WAYS, workOut, type Way } from '../readings';
+import { token } from '../../../shared-ui/tokens';
+import { usePhone } from '../../../shared-ui/use-phone';
+import { FAMILIES, familyPath } from '../frame/families';
 
-const NAMES: Record<Way, string> = { oscilloscope: 'Oscilloscope', analyzer: 'Spectrum analyzer' };
+const ROW = {
+  display: 'block',
+  py: '12px',
+  borderBottom: `1px solid ${token('rule')}`,
+  color: token('ink'),
+  textDecoration: 'none',
+} as const;
 
-/** What an instrument shows, turned into dBm. The address holds what was typed, so that it can be sent to somebody. */
+/** The way in: on a phone the list of families, on a wide screen, where they stand above every page, the readings. */
 export default function LevelBenchPage() {
-  const [search, setSearch] = useSearchParams();
-  const way = WAYS.find((known) => known === search.get('way')) ?? 'oscilloscope';
-  const entry = Object.fromEntries(
-    fieldsOf(way).map(({ name }) => [name, search.get(name) ?? STARTS[way][name] ?? '']),
-  );
-  const type = (name: string, text: string) =>
-    setSearch(
-      (before) => new URLSearchParams([...[...before].filter(([key]) => key !== name), [name, text]]),
-      {
-        replace: true,
-      },
-    );
-  const worked = workOut(way, entry);
+  const isPhone = usePhone();
+  const { search } = useLocation();
+  if (!isPhone) return <Navigate to={{ pathname: familyPath('readings'), search }} replace />;
   return (
     <>
       <PageTitle tab="Level bench">
         Level <b>bench</b>
       </PageTitle>
       <Box
-        sx={{ display: 'grid', gridTemplateColumns: { xs: '1fr', md: '420px 1fr' }, gap: '30px', mt: '18px' }}
+        component="nav"
+        aria-label="Families of calculators"
+        sx={{ borderTop: `1.5px solid ${token('ink')}` }}
       >
-        <Box
-          component="section"
-          aria-label="What the instrument shows"
-          sx={{ display: 'grid', gap: '14px', alignContent: 'start' }}
-        >
-          <ToggleField
-            label="Read on the"
-            value={way}
-            options={WAYS.map((value) => ({ value, label: NAMES[value] }))}
-            onChange={(next) => setSearch({ way: next }, { replace: true })}
-          />
-          {fieldsOf(way).map((field) => (
-            <Typed key={`${way} ${field.name}`} field={field} value={entry[field.name] ?? ''} onType={type} />
-          ))}
-        </Box>
-        <Box component="section" aria-label="Level">
-          <SectionHeading>Level</SectionHeading>
-          <Box aria-live="polite" sx={{ mt: '12px' }}>
-            {'level' in worked ? (
-              <>
-                <Typography variant="reading">{worked.level}</Typography>
-                <Typography sx={{ color: 'token.ink2' }}>{worked.beside}</Typography>
-              </>
-            ) : (
-              <Typography sx={{ color: 'token.ink3' }}>{worked.why}</Typography>
-            )}
+        {FAMILIES.map(({ path, name, about }) => (
+          <Box key={path} component={Link} to={familyPath(path)} sx={ROW}>
+            <Box component="span" sx={{ display: 'block', fontWeight: 700 }}>
+              {name}
+            </Box>
+            <Box component="span" sx={{ typography: 'small', color: 'token.ink2' }}>
+              {about}
+            </Box>
           </Box>
-        </Box>
+        ))}
       </Box>
     </>
   );
-}
-
-interface TypedProps {
-  field: EntryField;
-  value: string;
-  onType: (name: string, text: string) => void;
-}
-
-function Typed({ field: { name, label, unit, choices }, value, onType }: TypedProps) {
-  const onChange = (text: string) => onType(name, text);
-  if (!choices) return <QuantityField label={label} unit={unit} value={value} onChange={onChange} />;
-  const options = choices.map((choice) => ({ value: String(choice), label: `×${choice}` }));
-  return <ToggleField label={label} value={value} options={options} onChange={onChange} />;
 }

@@ -1,0 +1,65 @@
+import { LevelsError } from '@ferrite-row/levels';
+import { useEffect, useMemo, useState } from 'react';
+import type { BenchInputs, BenchValues } from '../inputs/fields';
+import { readValues, type TypedTexts } from '../inputs/read-values';
+import type { Bench } from '../inputs/use-bench';
+
+const SETTLE_MS = 80;
+
+/** Name under which a problem stands that belongs to no field of the page. */
+export const ELSEWHERE = '';
+
+export interface Worked<R> {
+  /** The last that could be worked out. */
+  result: R | undefined;
+  /** What is typed now cannot be worked out; `result` is from before. */
+  isStale: boolean;
+  /** Words for the field of that name, to show once it was left. */
+  problems: TypedTexts;
+}
+
+/** A value once it has rested for 80 ms. */
+export function useSettled<T>(value: T, ms = SETTLE_MS): T {
+  const [settled, setSettled] = useState(value);
+  useEffect(() => {
+    const timer = setTimeout(() => setSettled(value), ms);
+    return () => clearTimeout(timer);
+  }, [value, ms]);
+  return settled;
+}
+
+type Attempt<R> = { result: R } | { problems: TypedTexts };
+
+function attempt<F extends BenchInputs, R>(
+  inputs: F,
+  texts: TypedTexts,
+  work: (values: BenchValues<F>) => R,
+): Attempt<R> {
+  const read = readValues(inputs, texts);
+  if (!read.isComplete) return { problems: read.problems };
+  try {
+    return { result: work(read.values) };
+  } catch (error) {
+    if (!(error instanceof LevelsError)) throw error;
+    return { problems: { [error.input in inputs ? error.input : ELSEWHERE]: error.message } };
+  }
+}
+
+/**
+ * What the inputs come to, as they are typed. Half-typed input keeps the last good result.
+ * @param work - a constant function; what it throws of the levels package stands at the input it names.
+ */
+export function useWorked<F extends BenchInputs, R>(
+  { inputs, texts }: Pick<Bench<F>, 'inputs' | 'texts'>,
+  work: (values: BenchValues<F>) => R,
+): Worked<R> {
+  const settled = useSettled(JSON.stringify(texts));
+  const now = useMemo(
+    () => attempt(inputs, JSON.parse(settled) as TypedTexts, work),
+    [inputs, settled, work],
+  );
+  const [last, setLast] = useState<R>();
+  if ('result' in now && now.result !== last) setLast(() => now.result);
+  if ('result' in now) return { result: now.result, isStale: false, problems: {} };
+  return { result: last, isStale: true, problems: now.problems };
+}
