@@ -2,6 +2,7 @@ import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import { useEffect } from 'react';
 import { useForm, useWatch } from 'react-hook-form';
+import { carryOut } from '../../../api-client/carry-out';
 import { useMe } from '../../../api-client/session';
 import { formatDay } from '../../../lib/club-time-text';
 import { capital, counted } from '../../../lib/text';
@@ -59,7 +60,7 @@ export function PlanDrawer({ kind, day, onClose, onPlanned, onScheduled }: PlanD
     );
     const plan = planOf({ ...values, skip: [...values.skip, ...withoutDates] });
     if (!plan) return;
-    schedule.mutate(plan, {
+    carryOut(schedule, plan, {
       onSuccess: ({ nights: made, told }) => {
         draft.drop();
         say(madeWords(made, told));

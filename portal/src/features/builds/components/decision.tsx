@@ -2,6 +2,7 @@ import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import Typography from '@mui/material/Typography';
 import { useState } from 'react';
+import { carryOut } from '../../../api-client/carry-out';
 import { capital, counted, listText } from '../../../lib/text';
 import { ConfirmDialog } from '../../../shared-ui/confirm-dialog';
 import { CheckField } from '../../../shared-ui/fields/check-field';
@@ -31,7 +32,8 @@ export function Decision({ build, stage, isOwn, onDecided }: DecisionProps) {
   const say = useToast();
   const canSign = !isOwn && stage.missingToSignOff === 0;
   const decide = (move: 'sign-off' | 'send-back', words: string) =>
-    moving.mutate(
+    carryOut(
+      moving,
       { move, note: note.value },
       {
         onSuccess: () => {

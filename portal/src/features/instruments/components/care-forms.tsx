@@ -1,6 +1,7 @@
 import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import { useForm } from 'react-hook-form';
+import { carryOut } from '../../../api-client/carry-out';
 import { applyProblemToForm } from '../../../api-client/problem-to-form';
 import { FormSelect, FormText } from '../../../shared-ui/form/form-fields';
 import { ProblemAlert } from '../../../shared-ui/problem-alert';
@@ -28,7 +29,8 @@ export function ConditionForm({ instrument }: { instrument: Instrument }) {
   const form = useForm<{ condition: Condition; note: string }>({ defaultValues: { condition, note: '' } });
   const draft = useFormDraft(form, `condition:${instrumentId}`);
   const send = form.handleSubmit((values) =>
-    change.mutate(
+    carryOut(
+      change,
       { instrumentId, ...values },
       {
         onSuccess: () => {
@@ -70,7 +72,8 @@ export function CalibrationForm({ instrument }: { instrument: Instrument }) {
   const form = useForm({ defaultValues: { dueOn: calibrationDueOn ?? '', note: '' } });
   const draft = useFormDraft(form, `calibration:${instrumentId}`);
   const send = form.handleSubmit((values) =>
-    change.mutate(
+    carryOut(
+      change,
       { instrumentId, ...values },
       {
         onSuccess: () => {

@@ -1,6 +1,7 @@
 import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import { useQuery } from '@tanstack/react-query';
+import { carryOut } from '../../../api-client/carry-out';
 import { dateText } from '../../../lib/club-time-text';
 import { LoadingBars } from '../../../shared-ui/loading-bars';
 import { ProblemAlert } from '../../../shared-ui/problem-alert';
@@ -39,7 +40,7 @@ function ClearanceRow({ clearance }: { clearance: Clearance }) {
   const { id, personId, personName, kindId, kindName, grantedBy, until, holds } = clearance;
   const again = () => grant.mutate({ personId, kindId, ...(until && { until }) });
   const takeBack = () =>
-    end.mutate(id, {
+    carryOut(end, id, {
       onSuccess: () => say(`${personName} is no longer cleared on ${kindName}.`, holds ? again : undefined),
     });
   const term = until ? `${holds ? 'until' : 'ended'} ${dateText(until)}` : 'no end';
