@@ -101,8 +101,21 @@ describe('a build', () => {
         'It opens when an organiser has seen your licence.',
       );
       const { agent: organiser } = await someoneWith(test, 'organiser');
+      const listed = async () => {
+        const { body } = await organiser.get('/api/licences').expect(200);
+        return body.find(({ buildId }: { buildId: string }) => buildId === started.build.id);
+      };
+      expect(await listed()).toMatchObject({
+        builder: { id: started.build.builder.id },
+        seenAt: null,
+        seenBy: null,
+      });
       await organiser.post(started.at('/licence')).expect(204);
       await organiser.post(started.at('/licence')).expect(409);
+      expect(await listed()).toMatchObject({
+        seenAt: expect.any(String),
+        seenBy: { name: expect.any(String) },
+      });
       expect((await started.now()).stages[2]).toMatchObject({ state: 'not started', lockedBecause: null });
     });
 
