@@ -2,7 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { DataSource, IsNull } from 'typeorm';
 import { requireMember, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
-import { fieldError, notFound } from '../common/common.errors';
+import { fieldError } from '../common/common.errors';
 import { translatingConstraints } from '../common/constraint';
 import { DomainError } from '../common/domain-error';
 import { Plan } from '../plans/plan.entity';
