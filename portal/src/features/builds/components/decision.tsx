@@ -56,7 +56,7 @@ export function Decision({ build, stage, isOwn, onDecided }: DecisionProps) {
       <Typography>Your own stage is signed off by another mentor. You can look, as they will.</Typography>
     );
   return (
-    <Box sx={{ display: 'grid', gap: '12px' }}>
+    <Box sx={{ display: 'flex', flexDirection: 'column', gap: '12px', flex: 1 }}>
       {eyes.map((check) => (
         <Eye key={check.id} buildId={build.id} check={check} />
       ))}
@@ -100,7 +100,17 @@ interface WaysOnProps {
 
 function WaysOn({ stage, canSign, isBusy, askToSign, sendBack }: WaysOnProps) {
   return (
-    <Box sx={{ display: 'grid', gap: '8px', pt: '12px', borderTop: '1px solid', borderColor: 'token.rule' }}>
+    <Box
+      sx={{
+        display: 'grid',
+        gap: '8px',
+        m: 'auto -20px 0',
+        p: '14px 20px 20px',
+        borderTop: '1px solid',
+        borderColor: 'token.rule',
+        backgroundColor: 'token.sunk',
+      }}
+    >
       <Typography variant="small" component="p" sx={{ m: 0, color: 'token.ink2' }}>
         {missingText(stage)} Signing off fixes these readings in the record under your name.
       </Typography>
