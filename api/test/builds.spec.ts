@@ -1,4 +1,5 @@
 import { BuildsService } from '../src/builds/builds.service';
+import type { LicenceDto } from '../src/builds/dto/licence.dto';
 import {
   PNG,
   sendSource,
@@ -94,7 +95,7 @@ describe('a build', () => {
       await settleAmplifier(started);
       await started.agent.post(started.stageAt('Amplifier', 'submit')).send({}).expect(200);
       expect((await started.now()).stages[2]?.lockedBecause).toBe(
-        'It opens when stage 2 Amplifier is signed off.',
+        'It opens when stage 2 Amplifier is signed off and an organiser has seen your licence.',
       );
       await mentor.post(started.stageAt('Amplifier', 'sign-off')).send({}).expect(200);
       expect((await started.now()).stages[2]?.lockedBecause).toBe(
@@ -103,7 +104,7 @@ describe('a build', () => {
       const { agent: organiser } = await someoneWith(test, 'organiser');
       const listed = async () => {
         const { body } = await organiser.get('/api/licences').expect(200);
-        return body.find(({ buildId }: { buildId: string }) => buildId === started.build.id);
+        return (body as LicenceDto[]).find(({ buildId }) => buildId === started.build.id);
       };
       expect(await listed()).toMatchObject({
         builder: { id: started.build.builder.id },

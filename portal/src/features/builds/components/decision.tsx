@@ -30,7 +30,10 @@ export function Decision({ build, stage, isOwn, onDecided }: DecisionProps) {
   const [isAsking, setIsAsking] = useState(false);
   const moving = useMoveStage(build.id, stage.id);
   const say = useToast();
-  const canSign = !isOwn && stage.missingToSignOff === 0;
+  const first = build.stages.find(
+    ({ position, state }) => position < stage.position && state !== 'signed off',
+  );
+  const canSign = !isOwn && stage.missingToSignOff === 0 && !first;
   const decide = (move: 'sign-off' | 'send-back', words: string) =>
     carryOut(
       moving,
@@ -73,7 +76,7 @@ export function Decision({ build, stage, isOwn, onDecided }: DecisionProps) {
         hint={note.keptAt && `Kept as you type, ${note.keptAt}`}
       />
       {moving.isError && <ProblemAlert title="Not sent. Your note is kept." error={moving.error} />}
-      <WaysOn {...{ stage, canSign, askToSign, sendBack }} isBusy={moving.isPending} />
+      <WaysOn {...{ stage, first, canSign, askToSign, sendBack }} isBusy={moving.isPending} />
       <ConfirmDialog
         open={isAsking}
         title={`Sign off stage ${stage.position} ${stage.name}?`}
@@ -92,13 +95,16 @@ export function Decision({ build, stage, isOwn, onDecided }: DecisionProps) {
 
 interface WaysOnProps {
   stage: BuildStage;
+  /** An earlier stage that feeds this one and is signed off before it. */
+  first: BuildStage | undefined;
   canSign: boolean;
   isBusy: boolean;
   askToSign: () => void;
   sendBack: () => void;
 }
 
-function WaysOn({ stage, canSign, isBusy, askToSign, sendBack }: WaysOnProps) {
+function WaysOn({ stage, first, canSign, isBusy, askToSign, sendBack }: WaysOnProps) {
+  const missing = first ? `Sign off stage ${first.position} ${first.name} first.` : missingText(stage);
   return (
     <Box
       sx={{
@@ -112,14 +118,14 @@ function WaysOn({ stage, canSign, isBusy, askToSign, sendBack }: WaysOnProps) {
       }}
     >
       <Typography variant="small" component="p" sx={{ m: 0, color: 'token.ink2' }}>
-        {missingText(stage)} Signing off fixes these readings in the record under your name.
+        {missing} Signing off fixes these readings in the record under your name.
       </Typography>
       {canSign ? (
         <Button variant="contained" onClick={askToSign}>
           Sign off stage {stage.position}
         </Button>
       ) : (
-        <WaitingButton reason={missingText(stage)} fullWidth>
+        <WaitingButton reason={missing} fullWidth>
           Sign off stage {stage.position}
         </WaitingButton>
       )}

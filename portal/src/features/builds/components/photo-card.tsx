@@ -60,7 +60,10 @@ export function PhotoCard({ buildId, check }: { buildId: string; check: BuildChe
         type="file"
         accept={KINDS.join(',')}
         aria-label={`Picture for ${check.title}`}
-        onChange={(event) => setFile(event.target.files?.[0])}
+        onChange={(event) => {
+          adding.reset();
+          setFile(event.target.files?.[0]);
+        }}
         style={{ position: 'absolute', opacity: 0, width: 1, height: 1 }}
         tabIndex={-1}
       />
