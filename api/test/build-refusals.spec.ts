@@ -80,6 +80,7 @@ describe('what builds refuse', () => {
     await refused(started.agent.get('/api/reviews'), 403, 'not-allowed');
     await refused(started.agent.post(started.at('/licence')), 403, 'not-allowed');
     await refused(mentor.post(started.at('/licence')), 403, 'not-allowed');
+    await refused(mentor.get('/api/licences'), 403, 'not-allowed');
   });
 
   it('a mentor who would decide on a build of their own', async () => {

@@ -1,4 +1,5 @@
 import { BuildsService } from '../src/builds/builds.service';
+import type { LicenceDto } from '../src/builds/dto/licence.dto';
 import {
   PNG,
   sendSource,
@@ -94,15 +95,28 @@ describe('a build', () => {
       await settleAmplifier(started);
       await started.agent.post(started.stageAt('Amplifier', 'submit')).send({}).expect(200);
       expect((await started.now()).stages[2]?.lockedBecause).toBe(
-        'It opens when stage 2 Amplifier is signed off.',
+        'It opens when stage 2 Amplifier is signed off and an organiser has seen your licence.',
       );
       await mentor.post(started.stageAt('Amplifier', 'sign-off')).send({}).expect(200);
       expect((await started.now()).stages[2]?.lockedBecause).toBe(
         'It opens when an organiser has seen your licence.',
       );
       const { agent: organiser } = await someoneWith(test, 'organiser');
+      const listed = async () => {
+        const { body } = await organiser.get('/api/licences').expect(200);
+        return (body as LicenceDto[]).find(({ buildId }) => buildId === started.build.id);
+      };
+      expect(await listed()).toMatchObject({
+        builder: { id: started.build.builder.id },
+        seenAt: null,
+        seenBy: null,
+      });
       await organiser.post(started.at('/licence')).expect(204);
       await organiser.post(started.at('/licence')).expect(409);
+      expect(await listed()).toMatchObject({
+        seenAt: expect.any(String),
+        seenBy: { name: expect.any(String) },
+      });
       expect((await started.now()).stages[2]).toMatchObject({ state: 'not started', lockedBecause: null });
     });
 

@@ -129,6 +129,7 @@ describe('instruments', () => {
       ['calibration', { dueOn: '2026-02-30', note: 'x' }, '#/dueOn'],
       ['calibration', { dueOn: '2026-02-01T00:00:00Z', note: 'x' }, '#/dueOn'],
       ['calibration', { dueOn: '0000-01-01', note: 'x' }, '#/dueOn'],
+      ['calibration', { dueOn: '2026-01-14', note: 'x' }, '#/dueOn'],
       ['calibration', { dueOn: '2036-06-01', note: 'x' }, '#/dueOn'],
     ])('names the field of a %s at fault: %j', async (path, body, pointer) => {
       const { id } = await instrument(test);

@@ -1,4 +1,4 @@
-import { Body, Controller, Get, HttpCode, Param, ParseUUIDPipe, Post } from '@nestjs/common';
+import { Body, Controller, Get, Param, ParseUUIDPipe, Post } from '@nestjs/common';
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
@@ -29,13 +29,5 @@ export class BuildsController {
   @Access('signed-in')
   show(@CurrentActor() actor: Actor, @Param('buildId', ParseUUIDPipe) buildId: string): Promise<BuildDto> {
     return this.builds.show(actor, buildId);
-  }
-
-  /** Says that the builder's licence was seen, which opens the last stage. */
-  @Post(':buildId/licence')
-  @HttpCode(204)
-  @Access({ roles: ['organiser'] })
-  seeLicence(@CurrentActor() actor: Actor, @Param('buildId', ParseUUIDPipe) buildId: string): Promise<void> {
-    return this.builds.seeLicence(actor, buildId);
   }
 }

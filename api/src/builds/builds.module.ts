@@ -7,6 +7,8 @@ import { BuildsController } from './builds.controller';
 import { BuildsService } from './builds.service';
 import { ChecksController } from './checks.controller';
 import { InstrumentChoiceService } from './instrument-choice.service';
+import { LicencesController } from './licences.controller';
+import { LicencesService } from './licences.service';
 import { MarksService } from './marks.service';
 import { PhotosController } from './photos.controller';
 import { PhotosService } from './photos.service';
@@ -18,17 +20,25 @@ import { StagesController } from './stages.controller';
 
 @Module({
   imports: [InstrumentsModule, PeopleModule, PlansModule],
-  controllers: [BuildsController, StagesController, ChecksController, PhotosController, ReviewsController],
+  controllers: [
+    BuildsController,
+    StagesController,
+    ChecksController,
+    PhotosController,
+    ReviewsController,
+    LicencesController,
+  ],
   providers: [
     BuildRecordsService,
     BuildsService,
     InstrumentChoiceService,
+    LicencesService,
     MarksService,
     PhotosService,
     ReadingsService,
     ReviewsService,
     StageMovesService,
   ],
-  exports: [BuildsService, MarksService, PhotosService, ReadingsService, StageMovesService],
+  exports: [BuildsService, LicencesService, MarksService, PhotosService, ReadingsService, StageMovesService],
 })
 export class BuildsModule {}

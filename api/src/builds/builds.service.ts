@@ -1,8 +1,8 @@
 import { Injectable } from '@nestjs/common';
 import { DataSource, IsNull } from 'typeorm';
-import { requireMember, requireRole, type Actor } from '../common/actor';
+import { requireMember, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
-import { fieldError, notFound } from '../common/common.errors';
+import { fieldError } from '../common/common.errors';
 import { translatingConstraints } from '../common/constraint';
 import { DomainError } from '../common/domain-error';
 import { Plan } from '../plans/plan.entity';
@@ -79,18 +79,6 @@ export class BuildsService {
       },
     );
     return this.show(actor, build.id);
-  }
-
-  /** An organiser has seen the builder's licence, which opens the way on the air. */
-  async seeLicence(actor: Actor, buildId: string): Promise<void> {
-    requireRole(actor, 'organiser');
-    const seen = { licenceSeenAt: this.clock.now(), licenceSeenById: actor.personId };
-    const { affected } = await this.dataSource
-      .getRepository(Build)
-      .update({ id: buildId, licenceSeenAt: IsNull() }, seen);
-    if (affected) return;
-    if (await this.records.find(buildId)) throw buildProblems['licence-seen-already']('It was seen before.');
-    throw notFound('build');
   }
 
   /** For other features: everybody who is on one of these stages now, each once. */

@@ -49,6 +49,9 @@ describe('a stage', () => {
   it('on the air waits until all before it are signed off, not only sent, and for a licence', () => {
     const air = stage(2, 'not started', true);
     expect(lockOf(air, [stage(1, 'with mentor')], true)).toBe('It opens when stage 1 Stage1 is signed off.');
+    expect(
+      lockOf(air, [stage(1, 'signed off'), stage(2, 'with mentor'), stage(3, 'not started')], false),
+    ).toBe('It opens when stages 2 and 3 are signed off and an organiser has seen your licence.');
     expect(lockOf(air, [stage(1, 'signed off')], false)).toBe(
       'It opens when an organiser has seen your licence.',
     );

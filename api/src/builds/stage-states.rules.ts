@@ -39,12 +39,24 @@ export function lockOf(stage: Standing, before: readonly Standing[], isLicenceSe
 
 /** What a stage still waits for before it may be sent to a mentor; the same as opens it, or null. */
 export function waitOf(stage: Standing, before: readonly Standing[], isLicenceSeen: boolean): string | null {
-  const waits = before.find((other) => (stage.needsLicence ? !isSignedOff(other) : !isPast(other)));
-  const until = stage.needsLicence ? 'is signed off' : 'is with a mentor or signed off';
-  if (waits) return `It opens when ${called(waits)} ${until}.`;
-  if (stage.needsLicence && !isLicenceSeen) return 'It opens when an organiser has seen your licence.';
-  return null;
+  if (stage.needsLicence) return airWaitOf(before, isLicenceSeen);
+  const waits = before.find((other) => !isPast(other));
+  return waits ? `It opens when ${called(waits)} is with a mentor or signed off.` : null;
 }
+
+/** The way on the air: everything it waits for at once, so that the licence is not news at the very end. */
+function airWaitOf(before: readonly Standing[], isLicenceSeen: boolean): string | null {
+  const open = before.filter((other) => !isSignedOff(other));
+  const [first] = open;
+  const stages =
+    first && (open.length === 1 ? `${called(first)} is signed off` : `${spanOf(open)} are signed off`);
+  const licence = isLicenceSeen ? undefined : 'an organiser has seen your licence';
+  const waits = [stages, licence].filter((one) => one !== undefined);
+  return waits.length === 0 ? null : `It opens when ${waits.join(' and ')}.`;
+}
+
+const spanOf = (stages: readonly Standing[]): string =>
+  `stages ${stages[0]?.position} ${stages.length === 2 ? 'and' : 'to'} ${stages.at(-1)?.position}`;
 
 /** Why a stage cannot be signed off yet: those before it feed it, so they are signed off first. */
 export function signOffWaitOf(before: readonly Standing[]): string | null {

@@ -10,7 +10,6 @@ import { InstrumentChange } from './instrument-change.entity';
 import { Instrument } from './instrument.entity';
 import { Resource } from './resource.entity';
 
-const EARLIEST_CALIBRATION = '2000-01-01';
 /** Longer than any calibration holds; a later day is a slip of the keyboard. */
 const LONGEST_CALIBRATION_DAYS = 3660;
 
@@ -54,8 +53,8 @@ export class InstrumentCareService {
   ): Promise<void> {
     requireRole(actor, 'steward');
     const today = dayAt(this.clock.now(), (await this.club.settings()).timeZone);
-    if (dueOn < EARLIEST_CALIBRATION || dueOn > daysLater(today, LONGEST_CALIBRATION_DAYS))
-      throw fieldError('dueOn', 'The day lies between the year 2000 and ten years from now.');
+    if (dueOn < today || dueOn > daysLater(today, LONGEST_CALIBRATION_DAYS))
+      throw fieldError('dueOn', 'The last good day lies between today and ten years from now.');
     await this.dataSource.transaction(async (manager) => {
       const { calibrationDueOn: before } = await this.locked(manager, instrumentId);
       await manager

@@ -362,7 +362,7 @@ export interface paths {
         get?: never;
         put?: never;
         /** Says that the builder's licence was seen, which opens the last stage. */
-        post: operations["Builds.seeLicence"];
+        post: operations["Licences.see"];
         delete?: never;
         options?: never;
         head?: never;
@@ -749,6 +749,23 @@ export interface paths {
         };
         /** Every account with its balance on its side. */
         get: operations["Ledger.trialBalance"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/licences": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Builds under way, and whose licence was seen. */
+        get: operations["Licences.list"];
         put?: never;
         post?: never;
         delete?: never;
@@ -1642,6 +1659,15 @@ export interface components {
             toleranceDb: number;
             /** @description What the stage can deliver or the next can take, dBm. */
             limitDbm: number | null;
+        };
+        LicenceDto: {
+            buildId: string;
+            builder: components["schemas"]["PersonRefDto"];
+            planName: string;
+            /** @example 7 */
+            serial: number;
+            seenAt: string | null;
+            seenBy: components["schemas"]["PersonRefDto"] | null;
         };
         LineMatchDto: {
             /** @enum {string} */
@@ -3104,7 +3130,7 @@ export interface operations {
             };
         };
     };
-    "Builds.seeLicence": {
+    "Licences.see": {
         parameters: {
             query?: never;
             header?: never;
@@ -3928,6 +3954,34 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["TrialBalanceDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Licences.list": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["LicenceDto"][];
                 };
             };
             /** @description A problem document */

@@ -1,6 +1,6 @@
 import Box from '@mui/material/Box';
 import Drawer from '@mui/material/Drawer';
-import { useEffect, useRef, type ReactNode } from 'react';
+import { useEffect, useRef, type ReactNode, type RefObject } from 'react';
 import { createPortal } from 'react-dom';
 import type { DrawerPanelProps } from './drawer-panel';
 import { DrawerPanel } from './drawer-panel';
@@ -51,8 +51,26 @@ export function DockedDrawer({ open, width = 362, ...panel }: DockedDrawerProps)
 
 const dock = (drawer: ReactNode, slot: HTMLElement | null) => (slot ? createPortal(drawer, slot) : drawer);
 
+/** Escape closes while the focus is in the drawer, or nowhere because the pressed button is gone. */
+function useEscape(root: RefObject<HTMLElement | null>, onClose: () => void): void {
+  const close = useRef(onClose);
+  useEffect(() => {
+    close.current = onClose;
+  });
+  useEffect(() => {
+    const onKey = (event: KeyboardEvent) => {
+      if (event.key !== 'Escape' || event.defaultPrevented) return;
+      const { activeElement } = document;
+      if (activeElement === document.body || root.current?.contains(activeElement)) close.current();
+    };
+    document.addEventListener('keydown', onKey);
+    return () => document.removeEventListener('keydown', onKey);
+  }, [root]);
+}
+
 function Docked({ width, ...panel }: DrawerPanelProps & { width: number }) {
   const root = useRef<HTMLElement>(null);
+  useEscape(root, panel.onClose);
   useEffect(() => {
     const opener = document.activeElement;
     root.current?.focus({ preventScroll: true });
@@ -66,9 +84,6 @@ function Docked({ width, ...panel }: DrawerPanelProps & { width: number }) {
       ref={root}
       tabIndex={-1}
       aria-label={panel.title}
-      onKeyDown={(event) => {
-        if (event.key === 'Escape' && !event.defaultPrevented) panel.onClose();
-      }}
       sx={{
         position: 'sticky',
         top: 0,

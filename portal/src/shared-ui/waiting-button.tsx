@@ -8,12 +8,14 @@ interface WaitingButtonProps {
   children: ReactNode;
   /** A longer reason, read out with the button and said again when it is pressed. */
   reason?: string;
+  /** What a press does all the same: to point at what is missing. */
+  onPress?: () => void;
   fullWidth?: boolean;
   size?: 'small' | 'medium';
 }
 
 /** A button that is not available yet: dashed, still focusable, and it says what is missing. */
-export function WaitingButton({ children, reason, fullWidth, size }: WaitingButtonProps) {
+export function WaitingButton({ children, reason, onPress, fullWidth, size }: WaitingButtonProps) {
   const id = useId();
   const [presses, setPresses] = useState(0);
   return (
@@ -23,7 +25,10 @@ export function WaitingButton({ children, reason, fullWidth, size }: WaitingButt
         aria-describedby={reason ? id : undefined}
         fullWidth={fullWidth}
         size={size}
-        onClick={() => setPresses(presses + 1)}
+        onClick={() => {
+          setPresses(presses + 1);
+          onPress?.();
+        }}
         sx={{
           '&, &:hover': {
             borderStyle: 'dashed',

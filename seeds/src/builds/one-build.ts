@@ -1,4 +1,5 @@
 import { BuildsService } from '@ferrite-row/api/builds/builds.service';
+import { LicencesService } from '@ferrite-row/api/builds/licences.service';
 import { MarksService } from '@ferrite-row/api/builds/marks.service';
 import { PhotosService } from '@ferrite-row/api/builds/photos.service';
 import { ReadingsService } from '@ferrite-row/api/builds/readings.service';
@@ -46,7 +47,7 @@ export class OneBuild {
 
   async showLicence(): Promise<void> {
     const { context, as } = this.set;
-    await context.get(BuildsService).seeLicence(as('greta'), this.buildId);
+    await context.get(LicencesService).see(as('greta'), this.buildId);
   }
 
   /** Works through the first `count` checks of a stage, beginning at an instant. */

@@ -43,12 +43,20 @@ export const emptyPlan = (repeats: Repeats, mentorId: string): PlanForm => ({
 const MOST_NIGHTS = 60;
 const MOST_PLACES = 100;
 const DAY_MINUTES = 24 * 60;
+const LONGEST_MINUTES = 12 * 60;
 
 /** A whole number typed, within its bounds. */
 function readWhole(text: string, most: number): number | undefined {
   const isWhole = /^\d{1,4}$/.test(text.trim());
   const value = Number(text);
   return isWhole && value >= 1 && value <= most ? value : undefined;
+}
+
+/** An end that is earlier on the clock is the next day's, which is right for a late night and wrong for a slip. */
+function isTooLong({ from, to }: PlanForm): boolean {
+  const [start, end] = [readClock(from), readClock(to)];
+  if (start === undefined || end === undefined) return false;
+  return (end > start ? end - start : end + DAY_MINUTES - start) > LONGEST_MINUTES;
 }
 
 /** Words for a field that cannot be read, by its name; empty when every one can. */
@@ -58,6 +66,7 @@ export function formErrors(form: PlanForm): Partial<Record<keyof PlanForm, strin
   if (!/^\d{4}-\d{2}-\d{2}$/.test(form.first)) errors.first = 'Choose a day.';
   if (readClock(form.from) === undefined) errors.from = 'A time such as 19:30.';
   if (readClock(form.to) === undefined) errors.to = 'A time such as 21:30.';
+  if (isTooLong(form)) errors.to = 'It ends before it begins, or lasts longer than 12 hours.';
   if (readWhole(form.places, MOST_PLACES) === undefined) errors.places = `1 to ${MOST_PLACES}.`;
   if (form.repeats !== 'once' && readWhole(form.nights, MOST_NIGHTS) === undefined) {
     errors.nights = `1 to ${MOST_NIGHTS}.`;

@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import { carryOut } from '../../api-client/carry-out';
 import { formatMoney } from '../../lib/money';
 import { useToast } from '../../shared-ui/toasts';
 import { useDraft } from '../../shared-ui/use-draft';
@@ -43,13 +44,14 @@ export function useSettling(detail: StatementDetail) {
   };
   const takeBack = () => {
     if (line?.state !== 'matched') return;
-    takingBack.mutate(line.id, {
+    carryOut(takingBack, line.id, {
       onSuccess: () => say(`Match of ${formatMoney(line.amountMinor, currency)} taken back.`),
     });
   };
   const accept = () => {
     if (!line || line.state === 'matched' || faultOf(line, choice) || matching.isPending) return;
-    matching.mutate(
+    carryOut(
+      matching,
       { lineId: line.id, choice: matchBody(choice) },
       {
         onSuccess: () => {

@@ -6,7 +6,13 @@ import { FormSelect, FormText } from '../../../shared-ui/form/form-fields';
 import { ProblemAlert } from '../../../shared-ui/problem-alert';
 import { bookingsQuery, instrumentsQuery, myGroupsQuery, type Bench, type FreeTime } from '../api/bench-book';
 import { myBuildsQuery, openChecks } from '../api/my-build';
-import { clockProblem, endProblem, readTimes, type BookingValues } from '../form/booking-values';
+import {
+  clockProblem,
+  endProblem,
+  readTimes,
+  skippedProblem,
+  type BookingValues,
+} from '../form/booking-values';
 import { holderOf, holderWords } from '../form/instrument-words';
 import type { Refusal } from '../form/refusal';
 import { InstrumentRows } from './instrument-rows';
@@ -71,7 +77,10 @@ export function BookForm(props: BookFormProps) {
           name="from"
           label="From"
           inputMode="numeric"
-          rules={{ validate: (text: string) => clockProblem(text) ?? true }}
+          rules={{
+            validate: (text: string, all: BookingValues) =>
+              clockProblem(text) ?? skippedProblem(all.day, text) ?? true,
+          }}
         />
         <FormText
           control={control}

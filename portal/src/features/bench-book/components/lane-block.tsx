@@ -58,6 +58,9 @@ const BLOCK = {
   borderRadius: '2px',
   fontSize: '0.78125rem',
   lineHeight: '1.0625rem',
+  // A long word is cut at the lane's edge rather than broken between any two letters.
+  overflowWrap: 'normal',
+  hyphens: 'auto',
   cursor: 'pointer',
   pointerEvents: 'auto',
 } as const;

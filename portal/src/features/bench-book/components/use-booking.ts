@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import { carryOut } from '../../../api-client/carry-out';
 import { formatDay, formatSpan } from '../../../lib/club-time-text';
 import { listText } from '../../../lib/text';
 import { useToast } from '../../../shared-ui/toasts';
@@ -16,11 +17,11 @@ export function useBooking(onBooked: (booking: Booking) => void) {
   const [refusal, setRefusal] = useState<Refusal>();
   const send = (wish: BookingWish, instead?: FreeTime) => {
     const body = instead ? { ...wish, startsAt: instead.startsAt, endsAt: instead.endsAt } : wish;
-    book.mutate(body, {
+    carryOut(book, body, {
       onSuccess: (booking) => {
         setRefusal(undefined);
         say(bookedWords(booking), () =>
-          cancel.mutate(booking.id, {
+          carryOut(cancel, booking.id, {
             onError: () => say('The booking still stands. It could not be undone.'),
           }),
         );

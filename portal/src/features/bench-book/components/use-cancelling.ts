@@ -1,3 +1,4 @@
+import { carryOut } from '../../../api-client/carry-out';
 import { formatDay, formatSpan } from '../../../lib/club-time-text';
 import { useToast } from '../../../shared-ui/toasts';
 import { useBook, useCancelBooking, type Booking } from '../api/bench-book';
@@ -8,7 +9,8 @@ export function useCancelling(onDone: () => void) {
   const book = useBook();
   const say = useToast();
   const again = ({ resources, startsAt, endsAt, groupId, checkId }: Booking) =>
-    book.mutate(
+    carryOut(
+      book,
       {
         resourceIds: resources.map(({ id }) => id),
         ...{ startsAt, endsAt },
@@ -21,7 +23,7 @@ export function useCancelling(onDone: () => void) {
       },
     );
   const cancel = (booking: Booking) =>
-    cancelling.mutate(booking.id, {
+    carryOut(cancelling, booking.id, {
       onSuccess: () => {
         const isAhead = Date.parse(booking.startsAt) > Date.now();
         const words = `Cancelled ${formatDay(booking.startsAt)}, ${formatSpan(booking.startsAt, booking.endsAt)}.`;

@@ -40,11 +40,25 @@ export function readTimes({
 export const clockProblem = (text: string): string | undefined =>
   readClock(text) === undefined ? 'A time of day, such as 14:00.' : undefined;
 
+/** What is wrong with a time that the wall never shows, because the clocks go forward over it. */
+export function skippedProblem(day: string, text: string): string | undefined {
+  const minute = readClock(text);
+  if (!DAY.test(day) || minute === undefined || minute === 24 * 60) return undefined;
+  const wall = wallOf(instantOf(day, minute));
+  if (wall.minute === minute && wall.date === day) return undefined;
+  return `The clocks go forward over ${clockText(minute)}. Choose another time.`;
+}
+
 /** What is wrong with the end beside the start. */
 export function endProblem({ day, from, to }: BookingValues): string | undefined {
   const times = readTimes({ day, from, to });
   if (!times) return clockProblem(to);
-  return times.minutes > 0 ? undefined : 'It ends before it has begun. Choose a later end.';
+  const skipped = skippedProblem(day, to);
+  if (skipped) return skipped;
+  if (times.minutes > 0) return undefined;
+  return times.minutes === 0
+    ? 'It ends as it begins. Choose a later end.'
+    : 'It ends before it has begun. Choose a later end.';
 }
 
 /** The two hours that come next, on the hour; tomorrow's when today is nearly over. */

@@ -1,4 +1,5 @@
 import Box from '@mui/material/Box';
+import { carryOut } from '../../../api-client/carry-out';
 import { formatDay } from '../../../lib/club-time-text';
 import { counted } from '../../../lib/text';
 import { ConfirmDialog } from '../../../shared-ui/confirm-dialog';
@@ -23,7 +24,8 @@ export function CancelDialog({ night, open, onClose }: CancelDialogProps) {
   const day = formatDay(night.startsAt);
   const people = night.coming + night.waiting;
   const act = () =>
-    cancel.mutate(
+    carryOut(
+      cancel,
       { id: night.id, reason: reason.value },
       {
         onSuccess: () => {

@@ -2,6 +2,7 @@ import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import { useQuery } from '@tanstack/react-query';
 import { useForm } from 'react-hook-form';
+import { carryOut } from '../../../api-client/carry-out';
 import { ProblemError } from '../../../api-client/problem-error';
 import { clubDay, wallOf } from '../../../lib/club-time';
 import { clockText, formatDay } from '../../../lib/club-time-text';
@@ -46,7 +47,8 @@ function ChangeForm({ night, onClose }: { night: NightDetail; onClose: () => voi
     errors.forEach(([name, message]) => form.setError(name, { message }));
     const body = changeOf(night, form.getValues());
     if (!body) return;
-    change.mutate(
+    carryOut(
+      change,
       { id: night.id, change: body },
       {
         onSuccess: (after) => {

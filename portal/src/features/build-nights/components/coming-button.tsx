@@ -1,4 +1,5 @@
 import Button from '@mui/material/Button';
+import { carryOut } from '../../../api-client/carry-out';
 import { formatDay } from '../../../lib/club-time-text';
 import { useToast } from '../../../shared-ui/toasts';
 import type { BuildNight, NightDetail } from '../api/nights';
@@ -22,7 +23,8 @@ export function ComingButton({ night, short = false, onError }: ComingButtonProp
   const isComing = night.mine === null;
   const words = isComing ? joinWords(isFull, short) : leaveWords(night.mine?.state);
   const send = () =>
-    coming.mutate(
+    carryOut(
+      coming,
       { id: night.id, isComing },
       {
         onSuccess: (after) => say(outcomeWords(after, isFull, isComing)),

@@ -2,6 +2,7 @@ import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import { useEffect } from 'react';
 import { useForm, useWatch } from 'react-hook-form';
+import { carryOut } from '../../../api-client/carry-out';
 import { useMe } from '../../../api-client/session';
 import { formatDay } from '../../../lib/club-time-text';
 import { capital, counted } from '../../../lib/text';
@@ -59,7 +60,7 @@ export function PlanDrawer({ kind, day, onClose, onPlanned, onScheduled }: PlanD
     );
     const plan = planOf({ ...values, skip: [...values.skip, ...withoutDates] });
     if (!plan) return;
-    schedule.mutate(plan, {
+    carryOut(schedule, plan, {
       onSuccess: ({ nights: made, told }) => {
         draft.drop();
         say(madeWords(made, told));
@@ -86,6 +87,7 @@ export function PlanDrawer({ kind, day, onClose, onPlanned, onScheduled }: PlanD
           <TellTick form={form} people={toTell} />
           <ScheduleButtons
             nights={nights}
+            isReadable={preview.isReadable}
             isStale={preview.isStale}
             isBusy={schedule.isPending}
             onSend={send}
@@ -127,17 +129,26 @@ function TellTick({ form, people }: { form: ReturnType<typeof useForm<PlanForm>>
 
 interface ScheduleButtonsProps {
   nights: ReturnType<typeof usePlanPreview>['nights'];
+  isReadable: boolean;
   isStale: boolean;
   isBusy: boolean;
   onSend: (withoutDates: readonly string[]) => void;
 }
 
 /** The first button says what stands in the way, the second does what is possible. */
-function ScheduleButtons({ nights, isStale, isBusy, onSend }: ScheduleButtonsProps) {
+function ScheduleButtons({ nights, isReadable, isStale, isBusy, onSend }: ScheduleButtonsProps) {
   const wanted = nights.filter(({ verdict }) => verdict !== 'left out');
   const clashing = wanted.filter(({ verdict }) => verdict === 'clash').map(({ date }) => date);
   const possible = wanted.length - clashing.length;
   const all = scheduleWords(wanted.length, clashing.length);
+  // Pressed all the same, it says at each field what cannot be read.
+  if (!isReadable) {
+    return (
+      <WaitingButton fullWidth onPress={() => onSend([])}>
+        Schedule, no date yet
+      </WaitingButton>
+    );
+  }
   if (wanted.length === 0) return <WaitingButton fullWidth>Schedule, no date yet</WaitingButton>;
   if (clashing.length === 0) {
     return (

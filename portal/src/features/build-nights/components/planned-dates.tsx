@@ -21,11 +21,11 @@ interface PlannedDatesProps {
 
 /** Each date of the plan with its verdict, its reason, and a remedy that is one press. */
 export function PlannedDates({ form, preview }: PlannedDatesProps) {
-  const { nights, failure, isStale } = preview;
+  const { nights, failure, isReadable, isStale } = preview;
   const kept = nights.filter(({ verdict }) => verdict !== 'left out').map(({ date }) => date);
   return (
     <Box component="section" aria-label="Dates" sx={{ mt: '12px' }}>
-      <SectionHeading end={isStale ? 'looking' : 'checked as you type'}>
+      <SectionHeading end={!isReadable ? 'no dates yet' : isStale ? 'looking' : 'checked as you type'}>
         <Box component="span" sx={{ fontSize: '0.84375rem' }}>
           {plannedWords(kept)}
         </Box>
@@ -35,7 +35,7 @@ export function PlannedDates({ form, preview }: PlannedDatesProps) {
           <ProblemAlert error={failure} title="The dates could not be looked up." onRetry={preview.retry} />
         </Box>
       )}
-      {nights.length === 0 && isStale && failure === undefined && (
+      {nights.length === 0 && isReadable && isStale && failure === undefined && (
         <LoadingBars rows={4} label="Looking up dates" />
       )}
       <Box component="ul" aria-live="polite" sx={{ m: 0, p: 0, listStyle: 'none' }}>

@@ -13,6 +13,8 @@ const NO_NIGHTS: readonly CheckedNight[] = [];
 export interface PlanPreview {
   nights: readonly CheckedNight[];
   toTell: number;
+  /** Day, times and number of nights can be read. */
+  isReadable: boolean;
   /** Not of what is typed now, or not known yet. */
   isStale: boolean;
   /** Words for the fields the API finds fault with. */
@@ -32,6 +34,7 @@ export function usePlanPreview(control: Control<PlanForm>): PlanPreview {
   const isReadable = typed !== undefined && !query.isError;
   return {
     nights: isReadable ? (query.data?.nights ?? NO_NIGHTS) : NO_NIGHTS,
+    isReadable,
     toTell: query.data?.toTell ?? 0,
     isStale: query.isPlaceholderData || JSON.stringify(typed) !== JSON.stringify(resting) || !query.data,
     errors,

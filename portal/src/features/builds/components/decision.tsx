@@ -2,6 +2,7 @@ import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import Typography from '@mui/material/Typography';
 import { useState } from 'react';
+import { carryOut } from '../../../api-client/carry-out';
 import { capital, counted, listText } from '../../../lib/text';
 import { ConfirmDialog } from '../../../shared-ui/confirm-dialog';
 import { CheckField } from '../../../shared-ui/fields/check-field';
@@ -29,9 +30,13 @@ export function Decision({ build, stage, isOwn, onDecided }: DecisionProps) {
   const [isAsking, setIsAsking] = useState(false);
   const moving = useMoveStage(build.id, stage.id);
   const say = useToast();
-  const canSign = !isOwn && stage.missingToSignOff === 0;
+  const first = build.stages.find(
+    ({ position, state }) => position < stage.position && state !== 'signed off',
+  );
+  const canSign = !isOwn && stage.missingToSignOff === 0 && !first;
   const decide = (move: 'sign-off' | 'send-back', words: string) =>
-    moving.mutate(
+    carryOut(
+      moving,
       { move, note: note.value },
       {
         onSuccess: () => {
@@ -54,7 +59,7 @@ export function Decision({ build, stage, isOwn, onDecided }: DecisionProps) {
       <Typography>Your own stage is signed off by another mentor. You can look, as they will.</Typography>
     );
   return (
-    <Box sx={{ display: 'grid', gap: '12px' }}>
+    <Box sx={{ display: 'flex', flexDirection: 'column', gap: '12px', flex: 1 }}>
       {eyes.map((check) => (
         <Eye key={check.id} buildId={build.id} check={check} />
       ))}
@@ -71,7 +76,7 @@ export function Decision({ build, stage, isOwn, onDecided }: DecisionProps) {
         hint={note.keptAt && `Kept as you type, ${note.keptAt}`}
       />
       {moving.isError && <ProblemAlert title="Not sent. Your note is kept." error={moving.error} />}
-      <WaysOn {...{ stage, canSign, askToSign, sendBack }} isBusy={moving.isPending} />
+      <WaysOn {...{ stage, first, canSign, askToSign, sendBack }} isBusy={moving.isPending} />
       <ConfirmDialog
         open={isAsking}
         title={`Sign off stage ${stage.position} ${stage.name}?`}
@@ -90,24 +95,37 @@ export function Decision({ build, stage, isOwn, onDecided }: DecisionProps) {
 
 interface WaysOnProps {
   stage: BuildStage;
+  /** An earlier stage that feeds this one and is signed off before it. */
+  first: BuildStage | undefined;
   canSign: boolean;
   isBusy: boolean;
   askToSign: () => void;
   sendBack: () => void;
 }
 
-function WaysOn({ stage, canSign, isBusy, askToSign, sendBack }: WaysOnProps) {
+function WaysOn({ stage, first, canSign, isBusy, askToSign, sendBack }: WaysOnProps) {
+  const missing = first ? `Sign off stage ${first.position} ${first.name} first.` : missingText(stage);
   return (
-    <Box sx={{ display: 'grid', gap: '8px', pt: '12px', borderTop: '1px solid', borderColor: 'token.rule' }}>
+    <Box
+      sx={{
+        display: 'grid',
+        gap: '8px',
+        m: 'auto -20px 0',
+        p: '14px 20px 20px',
+        borderTop: '1px solid',
+        borderColor: 'token.rule',
+        backgroundColor: 'token.sunk',
+      }}
+    >
       <Typography variant="small" component="p" sx={{ m: 0, color: 'token.ink2' }}>
-        {missingText(stage)} Signing off fixes these readings in the record under your name.
+        {missing} Signing off fixes these readings in the record under your name.
       </Typography>
       {canSign ? (
         <Button variant="contained" onClick={askToSign}>
           Sign off stage {stage.position}
         </Button>
       ) : (
-        <WaitingButton reason={missingText(stage)} fullWidth>
+        <WaitingButton reason={missing} fullWidth>
           Sign off stage {stage.position}
         </WaitingButton>
       )}

@@ -1,9 +1,13 @@
 import Box from '@mui/material/Box';
+import Link from '@mui/material/Link';
 import Typography from '@mui/material/Typography';
 import type { ReactNode } from 'react';
+import { Link as RouterLink } from 'react-router-dom';
 import type { BuildCheck, BuildStage } from '../api/builds';
+import { usePhone } from '../../../shared-ui/use-phone';
 import type { ReadingFormState } from '../logic/use-reading-form';
 import { windowText } from '../logic/words';
+import { AllCautions, GraveCautions } from './caution-ticks';
 import { PhotoCard } from './photo-card';
 import { ReadingCard } from './reading-card';
 import { TickCard } from './tick-card';
@@ -64,15 +68,35 @@ export function OpenCheck({ buildId, stage, check, form, testPoint, onDone, asid
           {check.instruction}
         </Typography>
       )}
+      {check.instrumentKindId && !check.isSettled && (
+        <Typography variant="small" component="p" sx={{ mt: 0, mb: '12px' }}>
+          <Link component={RouterLink} to={bookPath(check)}>
+            Book a bench and instrument for this
+          </Link>
+        </Typography>
+      )}
       <Body {...{ buildId, stage, check, form, testPoint, onDone }} />
     </Box>
   );
 }
 
+/** The bench book with the check and its kind of instrument filled in. */
+const bookPath = ({ id, instrumentKindId }: BuildCheck): string =>
+  `/bench-book?${new URLSearchParams({ check: id, need: instrumentKindId ?? '' }).toString()}`;
+
 function Body({ buildId, stage, check, form, testPoint, onDone }: OpenCheckProps) {
-  if (check.kind === 'photo') return <PhotoCard buildId={buildId} check={check} />;
-  if (check.kind === 'tick' || check.kind === 'safety')
-    return <TickCard buildId={buildId} check={check} onDone={onDone} />;
+  const isPhone = usePhone();
   if (form.fields.length > 0) return <ReadingCard form={form} stage={stage} testPoint={testPoint} />;
-  return <Tries check={check} />;
+  // On a wide screen the milder ones stand under the diagram beside it.
+  const Cautions = isPhone ? AllCautions : GraveCautions;
+  return (
+    <>
+      <Cautions cautions={stage.cautions} />
+      {check.kind === 'photo' && <PhotoCard buildId={buildId} check={check} />}
+      {(check.kind === 'tick' || check.kind === 'safety') && (
+        <TickCard buildId={buildId} check={check} onDone={onDone} />
+      )}
+      {check.kind === 'measure' && <Tries check={check} />}
+    </>
+  );
 }

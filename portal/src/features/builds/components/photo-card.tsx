@@ -2,6 +2,7 @@ import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import Typography from '@mui/material/Typography';
 import { useEffect, useMemo, useRef, useState } from 'react';
+import { carryOut } from '../../../api-client/carry-out';
 import { TextField } from '../../../shared-ui/fields/text-field';
 import { Icon } from '../../../shared-ui/icon';
 import { ProblemAlert } from '../../../shared-ui/problem-alert';
@@ -39,7 +40,8 @@ export function PhotoCard({ buildId, check }: { buildId: string; check: BuildChe
   const problem = file && whyNot(file);
   const keep = () => {
     if (!file || problem) return;
-    adding.mutate(
+    carryOut(
+      adding,
       { file, caption },
       {
         onSuccess: () => {
@@ -58,7 +60,10 @@ export function PhotoCard({ buildId, check }: { buildId: string; check: BuildChe
         type="file"
         accept={KINDS.join(',')}
         aria-label={`Picture for ${check.title}`}
-        onChange={(event) => setFile(event.target.files?.[0])}
+        onChange={(event) => {
+          adding.reset();
+          setFile(event.target.files?.[0]);
+        }}
         style={{ position: 'absolute', opacity: 0, width: 1, height: 1 }}
         tabIndex={-1}
       />

@@ -1,6 +1,7 @@
 import Button from '@mui/material/Button';
 import Typography from '@mui/material/Typography';
 import { useState } from 'react';
+import { carryOut } from '../../../api-client/carry-out';
 import { listText } from '../../../lib/text';
 import { ConfirmDialog } from '../../../shared-ui/confirm-dialog';
 import { TextField } from '../../../shared-ui/fields/text-field';
@@ -33,7 +34,8 @@ export function StageActions({ buildId, stage }: { buildId: string; stage: Build
     );
   }
   const send = () =>
-    moving.mutate(
+    carryOut(
+      moving,
       { move: 'submit', note: note.value },
       {
         onSuccess: () => {

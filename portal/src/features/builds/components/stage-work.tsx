@@ -10,7 +10,7 @@ import type { Build, BuildCheck, BuildStage } from '../api/builds';
 import { liveGain } from '../logic/live-reading';
 import { levelPointsOf, readingInForce } from '../logic/stage';
 import { useReadingForm, type ReadingFormState } from '../logic/use-reading-form';
-import { MildCautions } from './caution-ticks';
+import { AllCautions, MildCautions } from './caution-ticks';
 import { Checklist } from './checklist';
 import { OpenCheck } from './open-check';
 
@@ -137,18 +137,25 @@ function StageDiagram({
   );
 }
 
+/** Signed off: what it warned of is done with. */
+const isShut = ({ state }: BuildStage): boolean => state === 'signed off';
+
 /** A stage that is closed or not open yet: its record beside the diagram, nothing to type. */
 export function StageRecord({ build, stage }: { build: Build; stage: BuildStage }) {
   const isPhone = usePhone();
+  const cautions = isShut(stage) ? null : <AllCautions cautions={stage.cautions} />;
   return (
     <Box sx={COLUMNS}>
-      <Checklist stage={stage} isRecord />
+      <div>
+        {isPhone && cautions}
+        <Checklist stage={stage} isRecord />
+      </div>
       {isPhone ? (
         <LevelsLink buildId={build.id} />
       ) : (
         <div>
           <StageDiagram build={build} stage={stage} />
-          <MildCautions cautions={stage.cautions} />
+          {cautions}
         </div>
       )}
     </Box>

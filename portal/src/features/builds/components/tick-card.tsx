@@ -1,6 +1,7 @@
 import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import Typography from '@mui/material/Typography';
+import { carryOut } from '../../../api-client/carry-out';
 import { useMe } from '../../../api-client/session';
 import { formatInClubZone } from '../../../lib/club-time-text';
 import { ProblemAlert } from '../../../shared-ui/problem-alert';
@@ -18,7 +19,7 @@ export function TickCard({ buildId, check, onDone }: TickCardProps) {
   const marking = useMark(buildId);
   const isSafety = check.kind === 'safety';
   const press = (isMarked: boolean) =>
-    marking.mutate({ checkId: check.id, isMarked }, { onSuccess: () => isMarked && onDone() });
+    carryOut(marking, { checkId: check.id, isMarked }, { onSuccess: () => isMarked && onDone() });
   return (
     <Box>
       {check.mark ? (

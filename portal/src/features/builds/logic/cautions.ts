@@ -1,7 +1,7 @@
 import type { CautionKind } from '../../../shared-ui/caution-symbols';
 import type { Caution } from '../api/builds';
 
-interface CautionWords {
+export interface CautionWords {
   kind: CautionKind;
   /** What to do. */
   text: string;

@@ -1,5 +1,6 @@
 import { useQuery } from '@tanstack/react-query';
 import { useMemo, useState } from 'react';
+import { carryOut } from '../../../api-client/carry-out';
 import { ProblemError } from '../../../api-client/problem-error';
 import { useDraft } from '../../../shared-ui/use-draft';
 import { useToast } from '../../../shared-ui/toasts';
@@ -77,23 +78,17 @@ export function useReadingForm(
     if (keeping.isPending) return;
     setLeft(names);
     if (live.state !== 'read' || !isTicked) return;
-    keeping.mutate(
-      {
-        method: check.method ?? '',
-        entry,
-        instrumentId: instrument?.id,
-        cautionAcknowledged: graves.length > 0 ? isTicked : undefined,
+    const cautionAcknowledged = graves.length > 0 ? isTicked : undefined;
+    const body = { method: check.method ?? '', entry, instrumentId: instrument?.id, cautionAcknowledged };
+    carryOut(keeping, body, {
+      onSuccess: (reading) => {
+        draft.drop();
+        setLeft([]);
+        setTicks([]);
+        say(`Reading kept, ${readingSentence(reading)}.`);
+        onKept(reading.verdict);
       },
-      {
-        onSuccess: (reading) => {
-          draft.drop();
-          setLeft([]);
-          setTicks([]);
-          say(`Reading kept, ${readingSentence(reading)}.`);
-          onKept(reading.verdict);
-        },
-      },
-    );
+    });
   };
 
   return {

@@ -1,5 +1,5 @@
 import { screen, waitFor, within } from '@testing-library/react';
-import { http, HttpResponse } from 'msw';
+import { delay, http, HttpResponse } from 'msw';
 import { describe, expect, it } from 'vitest';
 import { renderPage, TAMSIN } from '../../../testing/render';
 import { server } from '../../../testing/server';
@@ -82,6 +82,31 @@ describe('the review queue', () => {
     await user.click(within(await screen.findByRole('dialog')).getByRole('button', { name: 'Sign off' }));
     await waitFor(() => expect(sent).toEqual([{ note: 'Nice.' }]));
     expect(await screen.findByText('Stage 9 of Noor Ashby signed off.')).toBeVisible();
+  });
+
+  it('says it was signed, and drops the note, also when the queue has moved on before', async () => {
+    const { user } = open([aReview()]);
+    server.use(
+      http.post('*/api/builds/build/stages/stage-9/sign-off', () => {
+        server.use(
+          http.get('*/api/reviews', () =>
+            HttpResponse.json({ items: [], total: 0, page: 1, perPage: 100, lastSignOffAt: null }),
+          ),
+          // The build comes later than the queue, so the decision is gone before the sign-off has wholly ended.
+          http.get('*/api/builds/:buildId', async () => {
+            await delay(300);
+            return HttpResponse.json(aBuild(aStage({ state: 'signed off' })));
+          }),
+        );
+        return HttpResponse.json(aStage({ state: 'signed off' }));
+      }),
+    );
+    await user.type(await screen.findByLabelText('Note to Noor'), 'Nice.');
+    await user.click(screen.getByRole('button', { name: 'Sign off stage 9' }));
+    await user.click(within(await screen.findByRole('dialog')).getByRole('button', { name: 'Sign off' }));
+    expect(await screen.findByText(/Nothing waiting/)).toBeVisible();
+    expect(await screen.findByText('Stage 9 of Noor Ashby signed off.')).toBeVisible();
+    expect(Object.keys(localStorage).filter((key) => key.includes('review:'))).toEqual([]);
   });
 
   it('does not send back without a word', async () => {

@@ -18,6 +18,37 @@ import { findStage } from '../logic/stage';
 import { queueText } from '../logic/waiting';
 import { serialText } from '../logic/words';
 
+/** On a wide screen three panels from edge to edge, as deep as the window; below that one after the other. */
+const PANELS = {
+  display: 'grid',
+  gridTemplateColumns: { xs: 'minmax(0, 1fr)', lg: '252px minmax(0, 1fr) 290px' },
+  gap: { xs: '24px', lg: 0 },
+  m: { lg: '-24px -32px -40px -34px' },
+  minHeight: { lg: '100dvh' },
+} as const;
+
+const QUEUE = {
+  pt: { lg: '24px' },
+  borderRight: { lg: '1px solid' },
+  borderColor: { lg: 'token.rule' },
+} as const;
+
+const DECISION = {
+  display: 'flex',
+  flexDirection: 'column',
+  alignSelf: 'start',
+  position: { lg: 'sticky' },
+  top: 0,
+  height: { lg: '100dvh' },
+  overflowY: 'auto',
+  p: '20px 20px 0',
+  backgroundColor: 'token.sheet',
+  border: { xs: '1px solid', lg: 0 },
+  borderLeft: { lg: '1.5px solid' },
+  borderColor: { xs: 'token.rule', lg: 'token.ink' },
+  borderRadius: { xs: '3px', lg: 0 },
+} as const;
+
 const keyOf = ({ buildId, stageId }: Review): string => `${buildId}:${stageId}`;
 
 /** Which stage is waiting on me, and does it hold up? Queue, evidence, decision. */
@@ -64,33 +95,33 @@ function Queue({ reviews, now }: { reviews: readonly Review[]; now: Date }) {
   };
   useLetterKeys({ j: () => go(openIndex + 1), k: () => go(openIndex - 1) });
   return (
-    <Box
-      sx={{
-        display: 'grid',
-        gridTemplateColumns: { xs: 'minmax(0, 1fr)', lg: '216px minmax(0, 1fr) 280px' },
-        gap: '24px',
-        alignItems: 'start',
-      }}
-    >
-      <section>
-        <PageTitle tab="Review queue">
-          <b>Review</b> queue
-        </PageTitle>
-        <Typography variant="small" component="p" sx={{ mt: '-12px', mb: '12px', color: 'token.ink2' }}>
-          {queueText(
-            reviews.map(({ sentAt }) => sentAt),
-            now,
-          )}
-        </Typography>
+    <Box sx={PANELS}>
+      <Box component="section" aria-label="Queue" sx={QUEUE}>
+        <Box sx={{ pl: { lg: '30px' } }}>
+          <PageTitle tab="Review queue">
+            <b>Review</b> queue
+          </PageTitle>
+          <Typography variant="small" component="p" sx={{ mt: '-12px', mb: '12px', color: 'token.ink2' }}>
+            {queueText(
+              reviews.map(({ sentAt }) => sentAt),
+              now,
+            )}
+          </Typography>
+        </Box>
         <ReviewQueue reviews={reviews} openIndex={openIndex} now={now} onOpen={go} />
         <Typography
           variant="small"
           component="p"
-          sx={{ color: 'token.ink2', display: { xs: 'none', md: 'block' } }}
+          sx={{
+            m: 0,
+            p: { lg: '16px 16px 0 30px' },
+            color: 'token.ink2',
+            display: { xs: 'none', md: 'block' },
+          }}
         >
           <b>J</b> and <b>K</b> move through the queue. <b>S</b> signs off, <b>B</b> sends back.
         </Typography>
-      </section>
+      </Box>
       {open && (
         <OpenReview key={keyOf(open)} review={open} onDecided={() => setQuery({}, { replace: true })} />
       )}
@@ -108,7 +139,7 @@ function OpenReview({ review, onDecided }: { review: Review; onDecided: () => vo
   if (!stage) return null;
   return (
     <>
-      <Box component="section" aria-label="Evidence" sx={{ minWidth: 0 }}>
+      <Box component="section" aria-label="Evidence" sx={{ minWidth: 0, p: { lg: '24px 28px 40px' } }}>
         <Typography variant="small" component="p" sx={{ m: 0, color: 'token.ink2' }}>
           {planName}, {serialText(serial)}. Sent {formatInClubZone(sentAt)}
         </Typography>
@@ -135,17 +166,7 @@ function OpenReview({ review, onDecided }: { review: Review; onDecided: () => vo
         )}
         <Evidence stage={stage} />
       </Box>
-      <Box
-        component="section"
-        aria-labelledby="decision"
-        sx={{
-          p: '20px',
-          backgroundColor: 'token.sheet',
-          border: '1px solid',
-          borderColor: 'token.rule',
-          borderRadius: '3px',
-        }}
-      >
+      <Box component="section" aria-labelledby="decision" sx={DECISION}>
         <Typography variant="h2" id="decision" sx={{ fontSize: '1.25rem', mb: '12px' }}>
           Your decision
         </Typography>

@@ -1,29 +1,66 @@
-import { screen } from '@testing-library/react';
+import { screen, waitFor, within } from '@testing-library/react';
 import { http, HttpResponse } from 'msw';
-import { expect, it } from 'vitest';
+import { describe, expect, it } from 'vitest';
 import { renderPage } from '../../../testing/render';
 import { server } from '../../../testing/server';
+import type { Licence } from '../api/licences';
 import ClubDeskPage from './ClubDeskPage';
 
 const GRETA = { id: 'g', name: 'Greta Sorley', roles: ['member', 'mentor', 'organiser'] };
+const NOOR = { id: 'n', name: 'Noor Ashby', roles: ['member'] };
+const OF_NOOR: Licence = {
+  ...{ buildId: 'b-1', builder: { id: 'n', name: 'Noor Ashby' }, planName: 'Larkmoor Twenty', serial: 11 },
+  ...{ seenAt: null, seenBy: null },
+};
 
-it('lists people with every role they hold', async () => {
+function open(at = '/') {
+  const licences = [{ ...OF_NOOR }];
+  const people = { items: [GRETA, NOOR], total: 2, page: 1, perPage: 200 };
   server.use(
-    http.get('*/api/people', () => HttpResponse.json({ items: [GRETA], total: 1, page: 1, perPage: 200 })),
-  );
-  renderPage(<ClubDeskPage />);
-  expect(await screen.findByText('Member, mentor and organiser')).toBeVisible();
-});
-
-it('asks the server for the name in the address, and says when nobody has it', async () => {
-  const asked: (string | null)[] = [];
-  server.use(
-    http.get('*/api/people', ({ request }) => {
-      asked.push(new URL(request.url).searchParams.get('name'));
-      return HttpResponse.json({ items: [], total: 0, page: 1, perPage: 200 });
+    http.get('*/api/people', () => HttpResponse.json(people)),
+    http.get('*/api/licences', () => HttpResponse.json(licences)),
+    http.post('*/api/builds/b-1/licence', () => {
+      licences[0] = {
+        ...OF_NOOR,
+        seenAt: '2026-10-15T19:00:00Z',
+        seenBy: { id: 'g', name: 'Greta Sorley' },
+      };
+      return new HttpResponse(null, { status: 204 });
     }),
   );
-  renderPage(<ClubDeskPage />, { at: '/?name=zz' });
-  expect(await screen.findByText('Nobody of that name')).toBeVisible();
-  expect(asked).toContain('zz');
+  return renderPage(<ClubDeskPage />, { at });
+}
+
+describe('the club desk', () => {
+  it('lists people with every role they hold, and says whose role is the last', async () => {
+    open();
+    const row = await screen.findByRole('row', { name: /Greta Sorley/ });
+    expect(row).toHaveTextContent('Member, Mentor, Organiser');
+    expect(screen.getByText(/Greta Sorley is the only organiser/)).toBeVisible();
+  });
+
+  it('shows by a word above the table, which counts, and keeps it in the address', async () => {
+    const { user, router } = open();
+    await user.click(await screen.findByRole('button', { name: 'Mentors, 1' }));
+    expect(screen.queryByText('Noor Ashby')).not.toBeInTheDocument();
+    expect(router.state.location.search).toBe('?shown=mentor');
+  });
+
+  it('says when nobody has the name in the address', async () => {
+    open('/?name=zz');
+    expect(await screen.findByText('Nobody of that name here')).toBeVisible();
+  });
+
+  it('asks before it says a licence was seen, and then names who saw it', async () => {
+    const { user } = open();
+    await user.click(await screen.findByRole('button', { name: 'Licence of Noor Ashby seen' }));
+    const dialog = await screen.findByRole('dialog');
+    await user.click(within(dialog).getByRole('button', { name: 'Licence seen' }));
+    await waitFor(() =>
+      expect(screen.getByRole('row', { name: /Noor Ashby/ })).toHaveTextContent(
+        'Thu 15 Oct, by Greta Sorley',
+      ),
+    );
+    expect(screen.getByText('Licence of Noor Ashby seen.')).toBeVisible();
+  });
 });

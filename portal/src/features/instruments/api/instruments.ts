@@ -1,6 +1,7 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
 import { api, unwrap } from '../../../api-client/client';
 import type { components } from '../../../api-client/schema';
+import { addDays, clubDay, instantOf } from '../../../lib/club-time';
 
 type Schemas = components['schemas'];
 export type Instrument = Schemas['InstrumentDto'];
@@ -28,6 +29,18 @@ export const historyQuery = (instrumentId: string) =>
     queryKey: [...INSTRUMENTS_KEY, instrumentId, 'history'],
     queryFn: () =>
       unwrap(api.GET('/api/instruments/{instrumentId}/history', { params: { path: { instrumentId } } })),
+  });
+
+/** Bookings of an instrument from now on, for so many days. */
+export const bookingsAheadQuery = (instrumentId: string, days: number) =>
+  queryOptions({
+    queryKey: ['bookings', 'of', instrumentId, clubDay(), days],
+    queryFn: async () => {
+      const from = new Date().toISOString();
+      const query = { from, to: instantOf(addDays(clubDay(), days), 0) };
+      const bookings = await unwrap(api.GET('/api/bookings', { params: { query } }));
+      return bookings.filter(({ resources }) => resources.some(({ id }) => id === instrumentId));
+    },
   });
 
 export const clearancesQuery = queryOptions({

@@ -1,6 +1,8 @@
 import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
+import { useState } from 'react';
 import { useForm } from 'react-hook-form';
+import { carryOut } from '../../../api-client/carry-out';
 import { applyProblemToForm } from '../../../api-client/problem-to-form';
 import { FormSelect, FormText } from '../../../shared-ui/form/form-fields';
 import { ProblemAlert } from '../../../shared-ui/problem-alert';
@@ -8,11 +10,17 @@ import { SectionHeading } from '../../../shared-ui/section-heading';
 import { useToast } from '../../../shared-ui/toasts';
 import { useFormDraft } from '../../../shared-ui/use-form-draft';
 import { useChangeCalibration, useChangeCondition, type Instrument } from '../api/instruments';
+import { OutOfUseDialog } from './out-of-use-dialog';
 
 const NOTE = { required: 'Say in a few words why.' };
 const FORM = { display: 'grid', gap: '12px', p: '10px 0 18px' } as const;
 
 type Condition = Instrument['condition'];
+
+interface ConditionFields {
+  condition: Condition;
+  note: string;
+}
 
 const CONDITIONS: { value: Condition; label: string }[] = [
   { value: 'ready', label: 'Ready' },
@@ -25,23 +33,41 @@ export function ConditionForm({ instrument }: { instrument: Instrument }) {
   const { id: instrumentId, tag, condition } = instrument;
   const change = useChangeCondition();
   const say = useToast();
-  const form = useForm<{ condition: Condition; note: string }>({ defaultValues: { condition, note: '' } });
+  const form = useForm<ConditionFields>({ defaultValues: { condition, note: '' } });
   const draft = useFormDraft(form, `condition:${instrumentId}`);
-  const send = form.handleSubmit((values) =>
-    change.mutate(
+  const [asking, setAsking] = useState<ConditionFields>();
+  const send = (values: ConditionFields) =>
+    carryOut(
+      change,
       { instrumentId, ...values },
       {
         onSuccess: () => {
           draft.drop();
           form.reset({ ...values, note: '' });
+          setAsking(undefined);
           say(`${tag} is ${values.condition}.`);
         },
-        onError: (error) => applyProblemToForm(form.setError, error, ['condition', 'note']),
+        onError: (error) => {
+          setAsking(undefined);
+          applyProblemToForm(form.setError, error, ['condition', 'note']);
+        },
       },
-    ),
+    );
+  // Others are affected only when it is taken from them.
+  const ask = form.handleSubmit((values) =>
+    values.condition === 'ready' || condition !== 'ready' ? send(values) : setAsking(values),
   );
   return (
-    <Box component="form" noValidate aria-label="Condition" onSubmit={(event) => void send(event)}>
+    <Box component="form" noValidate aria-label="Condition" onSubmit={(event) => void ask(event)}>
+      {asking && (
+        <OutOfUseDialog
+          instrument={instrument}
+          condition={asking.condition}
+          isBusy={change.isPending}
+          onAct={() => send(asking)}
+          onStay={() => setAsking(undefined)}
+        />
+      )}
       <SectionHeading end={draft.keptFrom}>Condition</SectionHeading>
       <Box sx={FORM}>
         <FormSelect control={form.control} name="condition" label="From now on" options={CONDITIONS} />
@@ -70,7 +96,8 @@ export function CalibrationForm({ instrument }: { instrument: Instrument }) {
   const form = useForm({ defaultValues: { dueOn: calibrationDueOn ?? '', note: '' } });
   const draft = useFormDraft(form, `calibration:${instrumentId}`);
   const send = form.handleSubmit((values) =>
-    change.mutate(
+    carryOut(
+      change,
       { instrumentId, ...values },
       {
         onSuccess: () => {

@@ -2,6 +2,7 @@ import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import { useQuery } from '@tanstack/react-query';
 import { useForm } from 'react-hook-form';
+import { carryOut } from '../../../api-client/carry-out';
 import { applyProblemToForm } from '../../../api-client/problem-to-form';
 import { FormSelect, FormText } from '../../../shared-ui/form/form-fields';
 import { ProblemAlert } from '../../../shared-ui/problem-alert';
@@ -23,7 +24,8 @@ export function ClearanceForm({ instruments }: { instruments: readonly Instrumen
   );
   const choose = { value: '', label: 'Choose' };
   const send = form.handleSubmit(({ personId, kindId, until }) =>
-    grant.mutate(
+    carryOut(
+      grant,
       { personId, kindId, ...(until && { until }) },
       {
         onSuccess: ({ personName, kindName }) => {

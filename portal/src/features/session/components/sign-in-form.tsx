@@ -1,16 +1,22 @@
 import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
-import { useForm } from 'react-hook-form';
+import { useEffect } from 'react';
+import { useForm, useWatch } from 'react-hook-form';
 import type { Club } from '../../../api-client/club';
 import { ProblemError } from '../../../api-client/problem-error';
 import { applyProblemToForm } from '../../../api-client/problem-to-form';
 import { useSignIn } from '../../../api-client/session';
+import { dropDraft, keepDraft, readDraft } from '../../../lib/drafts';
 import { FormCheck, FormText } from '../../../shared-ui/form/form-fields';
 import { usePreference } from '../../../shared-ui/use-preference';
 import { DemoAccounts } from './demo-accounts';
 import { PasswordField } from './password-field';
 import type { SignInFields } from './sign-in-fields';
 import { SignInProblem } from './sign-in-problem';
+
+/** The typed address comes back after a reload, and belongs to nobody yet. The password never leaves the field. */
+const NOBODY = 'nobody';
+const PLACE = 'sign-in';
 
 interface SignInFormProps {
   demoAccounts: Club['demoAccounts'];
@@ -20,12 +26,20 @@ interface SignInFormProps {
 export function SignInForm({ demoAccounts }: SignInFormProps) {
   const [tablet, setTablet] = usePreference('shared-tablet', ['no', 'yes']);
   const form = useForm<SignInFields>({
-    defaultValues: { email: '', password: '', sharedDevice: tablet === 'yes' },
+    defaultValues: {
+      email: readDraft<string>(NOBODY, PLACE)?.value ?? '',
+      password: '',
+      sharedDevice: tablet === 'yes',
+    },
   });
   const signIn = useSignIn();
+  const email = useWatch({ control: form.control, name: 'email' });
+  useEffect(() => void (email ? keepDraft(NOBODY, PLACE, email) : dropDraft(NOBODY, PLACE)), [email]);
   const submit = form.handleSubmit((fields) => {
     setTablet(fields.sharedDevice ? 'yes' : 'no');
     signIn.mutate(fields, {
+      // Whoever comes to a shared tablet next begins with an empty field.
+      onSuccess: () => dropDraft(NOBODY, PLACE),
       onError: (error) => {
         if (error instanceof ProblemError && error.is('wrong-email-or-password')) {
           form.resetField('password');

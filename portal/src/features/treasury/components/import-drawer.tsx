@@ -3,6 +3,7 @@ import Button from '@mui/material/Button';
 import Typography from '@mui/material/Typography';
 import { useRef } from 'react';
 import { useNavigate } from 'react-router-dom';
+import { carryOut } from '../../../api-client/carry-out';
 import { counted } from '../../../lib/text';
 import { DockedDrawer } from '../../../shared-ui/docked-drawer';
 import { ProblemAlert } from '../../../shared-ui/problem-alert';
@@ -16,7 +17,7 @@ export function ImportDrawer({ open, onClose }: { open: boolean; onClose: () => 
   const navigate = useNavigate();
   const say = useToast();
   const send = (file: File) =>
-    sending.mutate(file, {
+    carryOut(sending, file, {
       onSuccess: ({ id, lineCount, matchedCount }) => {
         say(`Statement imported, ${matchedCount} of ${counted(lineCount, 'line')} matched by itself.`);
         onClose();

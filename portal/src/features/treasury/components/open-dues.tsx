@@ -12,7 +12,7 @@ import { LoadingBars } from '../../../shared-ui/loading-bars';
 import { ProblemAlert } from '../../../shared-ui/problem-alert';
 import { SectionHeading } from '../../../shared-ui/section-heading';
 import { openDuesQuery, type OpenInvoice } from '../api/treasury';
-import { FilterWords } from './filter-words';
+import { FilterWords } from '../../../shared-ui/filter-words';
 
 interface OpenDuesProps {
   currency: string;

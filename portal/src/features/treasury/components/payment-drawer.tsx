@@ -4,6 +4,7 @@ import Typography from '@mui/material/Typography';
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import { useForm, useWatch, type UseFormReturn } from 'react-hook-form';
+import { carryOut } from '../../../api-client/carry-out';
 import { ProblemError } from '../../../api-client/problem-error';
 import { applyProblemToForm } from '../../../api-client/problem-to-form';
 import { clubDay } from '../../../lib/club-time';
@@ -49,7 +50,7 @@ export function PaymentDrawer({ invoice, currency, onClose }: PaymentDrawerProps
   const takeBack = useTakeBackPayment();
   const say = useToast();
   const submit = handleSubmit((fields) =>
-    take.mutate(paymentBody(fields), {
+    carryOut(take, paymentBody(fields), {
       onSuccess: ({ id, receiptNumber, amountMinor, personName }) => {
         draft.drop();
         say(`${formatMoney(amountMinor, currency)} from ${personName} taken, ${receiptNumber}.`, () =>

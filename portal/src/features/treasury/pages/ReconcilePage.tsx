@@ -3,7 +3,7 @@ import Button from '@mui/material/Button';
 import Link from '@mui/material/Link';
 import Typography from '@mui/material/Typography';
 import { useQuery } from '@tanstack/react-query';
-import { useState, type KeyboardEvent } from 'react';
+import { useState } from 'react';
 import { Link as RouterLink, useParams } from 'react-router-dom';
 import { formatDate, monthText } from '../../../lib/club-time-text';
 import { counted, countWord } from '../../../lib/text';
@@ -13,7 +13,7 @@ import { PageTitle } from '../../../shared-ui/page-title';
 import { PhoneBar } from '../../../shared-ui/phone-bar';
 import { ProblemAlert } from '../../../shared-ui/problem-alert';
 import { SectionHeading } from '../../../shared-ui/section-heading';
-import { usePreference } from '../../../shared-ui/use-preference';
+import { useLetterKeys } from '../../../shared-ui/use-letter-keys';
 import { statementQuery, type StatementDetail } from '../api/treasury';
 import { BooksFoot } from '../components/books-foot';
 import { BookRows } from '../components/book-rows';
@@ -80,9 +80,9 @@ function Reconcile({ detail }: { detail: StatementDetail }) {
   const { shown, hidden } = booksShown(detail.books, line, choice, { find, most });
   const chosenIds = new Set(choice.items.map(({ id }) => id));
   const isOpen = line?.state === 'no match';
-  const onKey = useKeys({ a: settling.accept, n: settling.next, u: settling.takeBack });
+  useLetterKeys({ a: settling.accept, n: settling.next, u: settling.takeBack });
   return (
-    <Box onKeyDown={onKey}>
+    <>
       <Box sx={GRID}>
         <section aria-labelledby="on-the-statement">
           <SectionHeading id="on-the-statement" end={`${matchedCount} of ${lineCount} matched`}>
@@ -141,17 +141,6 @@ function Reconcile({ detail }: { detail: StatementDetail }) {
         currency={detail.currency}
         settling={isOpen && !faultOf(line, choice) ? line : undefined}
       />
-    </Box>
+    </>
   );
-}
-
-/** Single letters, never while typing, and the person can turn them off. */
-function useKeys(acts: Record<string, () => void>) {
-  const [letters] = usePreference('letter-keys', ['on', 'off']);
-  return (event: KeyboardEvent) => {
-    const isTyping =
-      event.target instanceof Element && event.target.closest('input, textarea, [role="combobox"]');
-    if (letters === 'off' || isTyping || event.ctrlKey || event.metaKey || event.altKey) return;
-    acts[event.key.toLowerCase()]?.();
-  };
 }

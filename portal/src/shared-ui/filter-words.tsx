@@ -10,7 +10,7 @@ interface FilterWordsProps<T extends string> {
 /** Words above a table that filter it; the chosen one stands on a green foot. */
 export function FilterWords<T extends string>({ label, value, options, onChange }: FilterWordsProps<T>) {
   return (
-    <Box role="group" aria-label={label} sx={{ display: 'flex', gap: '18px' }}>
+    <Box role="group" aria-label={label} sx={{ display: 'flex', flexWrap: 'wrap', gap: '0 18px' }}>
       {options.map((option) => (
         <Box
           component="button"
