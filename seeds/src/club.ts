@@ -6,6 +6,7 @@ export const CLUB: ClubSettings = {
   contactEmail: 'desk@larkmoor.example',
   timeZone: 'Europe/London',
   currency: 'GBP',
+  ruleSet: 'IARU-R1',
   accountName: 'Larkmoor Radio Builders',
   accountNumber: '00-41-17 3006 4417',
 };

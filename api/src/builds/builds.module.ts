@@ -17,6 +17,8 @@ import { ReviewsController } from './reviews.controller';
 import { ReviewsService } from './reviews.service';
 import { StageMovesService } from './stage-moves.service';
 import { StagesController } from './stages.controller';
+import { WorksheetsController } from './worksheets.controller';
+import { WorksheetsService } from './worksheets.service';
 
 @Module({
   imports: [InstrumentsModule, PeopleModule, PlansModule],
@@ -27,6 +29,7 @@ import { StagesController } from './stages.controller';
     PhotosController,
     ReviewsController,
     LicencesController,
+    WorksheetsController,
   ],
   providers: [
     BuildRecordsService,
@@ -38,6 +41,7 @@ import { StagesController } from './stages.controller';
     ReadingsService,
     ReviewsService,
     StageMovesService,
+    WorksheetsService,
   ],
   exports: [BuildsService, LicencesService, MarksService, PhotosService, ReadingsService, StageMovesService],
 })

@@ -1,10 +1,10 @@
 import { Injectable } from '@nestjs/common';
 import { InjectRepository } from '@nestjs/typeorm';
 import { Repository, type EntityManager } from 'typeorm';
-import { ROLES } from '../common/actor';
+import { requireRole, ROLES, type Actor } from '../common/actor';
 import { Environment } from '../config/environment';
 import { Club } from './club.entity';
-import type { ClubDto, DemoAccountDto } from './dto/club.dto';
+import type { ChooseRulesDto, ClubDto, DemoAccountDto } from './dto/club.dto';
 
 export type ClubSettings = Omit<Club, 'id'>;
 
@@ -17,8 +17,15 @@ export class ClubService {
 
   /** Open to everybody: the name over the door. */
   async front(): Promise<ClubDto> {
-    const { name, address, contactEmail, timeZone, currency } = await this.settings();
-    return { name, address, contactEmail, timeZone, currency, demoAccounts: this.demoAccounts() };
+    const { name, address, contactEmail, timeZone, currency, ruleSet } = await this.settings();
+    const demoAccounts = this.demoAccounts();
+    return { name, address, contactEmail, timeZone, currency, ruleSet, demoAccounts };
+  }
+
+  /** An organiser chooses by which rules the calculators judge. */
+  async chooseRules(actor: Actor, { ruleSet }: ChooseRulesDto): Promise<void> {
+    requireRole(actor, 'organiser');
+    await this.clubs.update({ id: 1 }, { ruleSet });
   }
 
   /** For other features. The migration writes the row, so it is always there. */

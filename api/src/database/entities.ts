@@ -14,6 +14,7 @@ import { BuildStageEvent } from '../builds/build-stage-event.entity';
 import { CheckMark } from '../builds/check-mark.entity';
 import { Photo } from '../builds/photo.entity';
 import { Reading } from '../builds/reading.entity';
+import { Worksheet } from '../builds/worksheet.entity';
 import { Club } from '../club/club.entity';
 import { Checkout } from '../dues/checkout.entity';
 import { Invoice } from '../dues/invoice.entity';
@@ -87,4 +88,5 @@ export const entities = [
   Stage,
   StatementLine,
   Tier,
+  Worksheet,
 ];

@@ -1,3 +1,7 @@
+import { ApiProperty } from '@nestjs/swagger';
+import { IsIn } from 'class-validator';
+import { CLUB_RULE_SETS, type ClubRuleSet } from '../club.entity';
+
 /** What the sign-in page may know before anybody has signed in. */
 export class ClubDto {
   /** @example Larkmoor Radio Builders */
@@ -9,6 +13,9 @@ export class ClubDto {
   timeZone: string;
   /** ISO 4217 @example GBP */
   currency: string;
+  /** By which rules the calculators judge what may be sent. The licence and local rules decide. */
+  @ApiProperty({ enum: CLUB_RULE_SETS })
+  ruleSet: ClubRuleSet;
   /** Accounts of the demo club; empty anywhere else. */
   demoAccounts: DemoAccountDto[];
 }
@@ -16,4 +23,10 @@ export class ClubDto {
 export class DemoAccountDto {
   email: string;
   role: string;
+}
+
+/** The rules an organiser chooses for the club. */
+export class ChooseRulesDto {
+  @IsIn(CLUB_RULE_SETS)
+  ruleSet: ClubRuleSet;
 }

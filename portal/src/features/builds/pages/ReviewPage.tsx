@@ -14,6 +14,7 @@ import { useReviews, type Review } from '../api/reviews';
 import { Decision } from '../components/decision';
 import { Evidence } from '../components/evidence';
 import { ReviewQueue } from '../components/review-queue';
+import { Worksheets } from '../components/worksheets';
 import { findStage } from '../logic/stage';
 import { queueText } from '../logic/waiting';
 import { serialText } from '../logic/words';
@@ -165,6 +166,7 @@ function OpenReview({ review, onDecided }: { review: Review; onDecided: () => vo
           </Box>
         )}
         <Evidence stage={stage} />
+        <Worksheets buildId={buildId} stageId={stageId} isOwn={false} />
       </Box>
       <Box component="section" aria-labelledby="decision" sx={DECISION}>
         <Typography variant="h2" id="decision" sx={{ fontSize: '1.25rem', mb: '12px' }}>

@@ -14,6 +14,7 @@ import { useBuild, type Build, type BuildStage } from '../api/builds';
 import { StageActions } from '../components/stage-actions';
 import { StageStory } from '../components/stage-story';
 import { StageRecord, StageWork } from '../components/stage-work';
+import { Worksheets } from '../components/worksheets';
 import { findStage, isInHand, isTyped, nextCheck } from '../logic/stage';
 import { serialText } from '../logic/words';
 
@@ -94,6 +95,7 @@ function Stage({ build, stage }: { build: Build; stage: BuildStage }) {
         <StageStory stage={stage} />
       </Box>
       <StageBody build={build} stage={stage} isOwn={isOwn} />
+      <Worksheets buildId={build.id} stageId={stage.id} isOwn={isOwn && isInHand(stage)} />
       {isPhone && actions && <Box sx={{ mt: '20px', display: 'grid' }}>{actions}</Box>}
       {isPhone && isOwn && isInHand(stage) && <Box aria-hidden sx={{ height: RESULT_HEIGHT }} />}
     </>

@@ -18,6 +18,9 @@ function open(at = '/') {
   const people = { items: [GRETA, NOOR], total: 2, page: 1, perPage: 200 };
   server.use(
     http.get('*/api/people', () => HttpResponse.json(people)),
+    http.get('*/api/club', () =>
+      HttpResponse.json({ name: 'Larkmoor', timeZone: 'Europe/London', ruleSet: 'IARU-R1' }),
+    ),
     http.get('*/api/licences', () => HttpResponse.json(licences)),
     http.post('*/api/builds/b-1/licence', () => {
       licences[0] = {
@@ -49,6 +52,20 @@ describe('the club desk', () => {
   it('says when nobody has the name in the address', async () => {
     open('/?name=zz');
     expect(await screen.findByText('Nobody of that name here')).toBeVisible();
+  });
+
+  it('lets an organiser choose the rules the calculators go by, with the caution beside them', async () => {
+    const chosen: unknown[] = [];
+    const { user } = open();
+    server.use(
+      http.put('*/api/club/rules', async ({ request }) => {
+        chosen.push(await request.json());
+        return new HttpResponse(null, { status: 204 });
+      }),
+    );
+    await user.click(await screen.findByRole('button', { name: /United States/ }));
+    await waitFor(() => expect(chosen).toEqual([{ ruleSet: 'US-97' }]));
+    expect(screen.getByText(/your licence decide/i)).toBeVisible();
   });
 
   it('asks before it says a licence was seen, and then names who saw it', async () => {

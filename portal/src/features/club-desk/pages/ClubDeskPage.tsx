@@ -15,6 +15,7 @@ import { ProblemAlert } from '../../../shared-ui/problem-alert';
 import { useToast } from '../../../shared-ui/toasts';
 import { licencesQuery, useSeeLicence, type Licence } from '../api/licences';
 import { peopleQuery } from '../api/people';
+import { ClubRules } from '../components/club-rules';
 import { LicenceCell } from '../components/licence-cell';
 import { PersonCell, RolesCell } from '../components/person-cells';
 import { deskRows, lastHolders, rowsShown, SHOWN, shownOptions, type DeskRow } from '../desk';
@@ -36,7 +37,10 @@ export default function ClubDeskPage() {
       {failed ? (
         <ProblemAlert error={failed} onRetry={again} />
       ) : people.data && licences.data ? (
-        <People rows={deskRows(people.data.items, licences.data)} />
+        <>
+          <People rows={deskRows(people.data.items, licences.data)} />
+          <ClubRules />
+        </>
       ) : (
         <LoadingBars rows={8} label="Loading people" />
       )}

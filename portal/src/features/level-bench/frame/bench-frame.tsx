@@ -6,6 +6,7 @@ import { PageTitle } from '../../../shared-ui/page-title';
 import { PhoneBar } from '../../../shared-ui/phone-bar';
 import { token } from '../../../shared-ui/tokens';
 import { usePhone } from '../../../shared-ui/use-phone';
+import { PutOnBuild } from '../build/put-on-build';
 import { useCopy } from '../results/copying';
 import { StillWords } from '../results/still-words';
 import { familyName, type Family } from './families';
@@ -24,8 +25,6 @@ interface BenchFrameProps {
   inputs: ReactNode;
   /** The answer line; on a phone it is pinned over the bottom bar. */
   answer: ReactNode;
-  /** Puts the result on one's build, where it fits. */
-  onBuild?: ReactNode;
   /** Picture and table, in this order. */
   children: ReactNode;
 }
@@ -45,7 +44,7 @@ const PINNED = {
 
 /** What every family's page has: title, families, inputs at the left, results at the right, and what to do with them. */
 export function BenchFrame(props: BenchFrameProps) {
-  const { family, link, problem, text, spoken, inputs, answer, onBuild, children } = props;
+  const { family, link, problem, text, spoken, inputs, answer, children } = props;
   const isPhone = usePhone();
   const copy = useCopy();
   const name = familyName(family);
@@ -59,6 +58,7 @@ export function BenchFrame(props: BenchFrameProps) {
       Copy as text
     </Button>
   );
+  const onBuild = <PutOnBuild family={family} link={link} text={text} />;
   const page = (
     <>
       {inputs}
