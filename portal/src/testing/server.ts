@@ -3,10 +3,11 @@ import { setupServer } from 'msw/node';
 
 /**
  * Answers at the network's edge; each test adds what it needs with `server.use(...)`. What the rail asks for on every
- * page is answered with nothing.
+ * page, and what stands on every stage, is answered with nothing.
  */
 export const server = setupServer(
   http.get('*/api/builds/mine', () => HttpResponse.json([])),
+  http.get('*/api/builds/:buildId/worksheets', () => HttpResponse.json([])),
   http.get('*/api/invoices/mine', () => HttpResponse.json([])),
   http.get('*/api/reviews', () =>
     HttpResponse.json({ items: [], total: 0, page: 1, perPage: 100, lastSignOffAt: null }),
