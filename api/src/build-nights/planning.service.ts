@@ -81,8 +81,9 @@ export class PlanningService {
       actor,
       made.map((night, index) => ({ night, mentorIds: wanted[index]?.mentorIds ?? [] })),
     );
-    const stages = (await this.nights.stages(stageIds)).map(({ position, name }) => `${position} ${name}`);
-    const letter = scheduledLetter(made, stages, await this.desk.hall(manager));
+    const stages = await this.nights.stages(stageIds, manager);
+    const focus = stages.map(({ position, name }) => `${position} ${name}`);
+    const letter = scheduledLetter(made, focus, await this.desk.hall(manager));
     await this.desk.write(manager, people, letter);
     return made;
   }

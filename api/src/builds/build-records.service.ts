@@ -51,17 +51,19 @@ export class BuildRecordsService {
     const photos = await manager.find(Photo, standing);
     const own = <T extends { buildId: string }>(rows: readonly T[], { id }: Build): T[] =>
       rows.filter((row) => row.buildId === id);
-    return Promise.all(
-      builds.map(async (build) => ({
+    const records: BuildRecord[] = [];
+    for (const build of builds) {
+      records.push({
         build,
-        edition: await this.plans.content(build.editionId),
+        edition: await this.plans.content(build.editionId, manager),
         states: new Map(own(stages, build).map(({ stageId, state }) => [stageId, state])),
         events: own(events, build),
         readings: own(readings, build),
         marks: own(marks, build),
         photos: own(photos, build),
-      })),
-    );
+      });
+    }
+    return records;
   }
 
   /** Everybody a record names. */

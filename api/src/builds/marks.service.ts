@@ -66,7 +66,7 @@ export class MarksService {
     checkId: string,
   ): Promise<{ build: Build; held: HeldCheck }> {
     const build = requireSight(actor, await this.records.hold(manager, buildId));
-    const edition = await this.plans.content(build.editionId);
+    const edition = await this.plans.content(build.editionId, manager);
     const held = await heldCheck(manager, build, edition, checkId);
     const { check, stage, states } = held;
     if (check.kind === 'measure' || check.kind === 'photo')

@@ -37,7 +37,7 @@ export class PhotosService {
     if (!bytes || bytes.length === 0) throw fieldError('photo', 'Choose a picture.');
     return this.dataSource.transaction(async (manager) => {
       const build = requireBuilder(actor, await this.records.hold(manager, buildId));
-      const edition = await this.plans.content(build.editionId);
+      const edition = await this.plans.content(build.editionId, manager);
       const held = await heldCheck(manager, build, edition, checkId);
       if (held.check.kind !== 'photo') throw fieldError('checkId', 'This check does not ask for a photo.');
       requireOpen(build, edition, held);
@@ -83,7 +83,7 @@ export class PhotosService {
       const standing = { id: photoId, buildId, takenBackAt: IsNull() };
       const photo = await manager.findOneBy(Photo, standing);
       if (!photo) throw notFound('photo');
-      const edition = await this.plans.content(build.editionId);
+      const edition = await this.plans.content(build.editionId, manager);
       requireOpen(build, edition, await heldCheck(manager, build, edition, photo.checkId));
       await manager.update(Photo, standing, { takenBackAt: this.clock.now() });
     });

@@ -40,7 +40,7 @@ export class ReadingsService {
     const keptAt = this.clock.now();
     return this.dataSource.transaction(async (manager) => {
       const build = requireBuilder(actor, await this.records.hold(manager, buildId));
-      const edition = await this.plans.content(build.editionId);
+      const edition = await this.plans.content(build.editionId, manager);
       const held = await heldCheck(manager, build, edition, checkId);
       requireOpen(build, edition, held);
       const { stage, check, states } = held;

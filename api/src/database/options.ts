@@ -9,6 +9,8 @@ export function databaseOptions(url: string, poolSize = 10): DataSourceOptions {
     type: 'postgres',
     url,
     poolSize,
+    // Somebody who waits longer for a free connection is told so; waiting without end would hang the whole process.
+    connectTimeoutMS: 5000,
     entities,
     migrations: Object.values(migrations),
     migrationsTableName: 'migration',
