@@ -14,7 +14,7 @@ describe('a pool of connections that are all in use', () => {
     first = await startTestApp();
   });
   beforeEach(async () => {
-    fresh = await appOn(first.environment.DATABASE_URL, { DATABASE_POOL: POOL });
+    fresh = await appOn(first.environment.DATABASE_URL, { DATABASE_POOL: POOL, DATABASE_WAIT: 8 });
   });
   afterEach(() => fresh.close());
   afterAll(() => first.close());
