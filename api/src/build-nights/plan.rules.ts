@@ -1,9 +1,10 @@
+import type { Span } from '../bookings/bookings.service';
+import { clubDay } from '../common/club-day';
 import { fieldError } from '../common/common.errors';
+import { wallOf } from '../common/wall-clock';
 import { occurrencesOf } from './occurrences.rules';
 import { fallsOn, MOST_NIGHTS, readRule } from './repeat.rules';
 import { spanOnWall } from './span-on-wall.rules';
-import { dayOf, wallOf } from './wall-time.rules';
-import type { Span } from '../bookings/bookings.service';
 
 const MINUTE_MS = 60_000;
 const SHORTEST_MS = 15 * MINUTE_MS;
@@ -45,7 +46,7 @@ export function wantedNights(
   const times = readTimes(plan, now);
   const spans = plan.repeat ? seriesSpans(times, plan.repeat.rule, zone) : [times];
   return spans.map((span) => {
-    const date = dayOf(span.startsAt, zone);
+    const date = clubDay(span.startsAt, zone);
     const other = plan.instead?.find((night) => night.date === date);
     return {
       date,

@@ -1,5 +1,5 @@
 import type { Span } from '../bookings/bookings.service';
-import { instantOf, wallOf, type WallTime } from './wall-time.rules';
+import { instantOf, wallOf, type WallTime } from '../common/wall-clock';
 
 /**
  * A night at the hours of another: 19:30 to 22:00 is 19:30 to 22:00 on the wall whatever the clocks do meanwhile, so
