@@ -3,7 +3,7 @@ import { DataSource, In, IsNull, type EntityManager } from 'typeorm';
 import { PeopleService } from '../people/people.service';
 import type { Person } from '../people/person.entity';
 import { PlansService } from '../plans/plans.service';
-import type { BuildRecord } from './build-record';
+import type { BuildOutline, BuildRecord } from './build-record';
 import { Build } from './build.entity';
 import { BuildStage } from './build-stage.entity';
 import { BuildStageEvent } from './build-stage-event.entity';
@@ -64,6 +64,20 @@ export class BuildRecordsService {
       });
     }
     return records;
+  }
+
+  /** How far these builds are: nothing of what is in them is read. */
+  async outlines(builds: readonly Build[]): Promise<BuildOutline[]> {
+    const stages = await this.dataSource
+      .getRepository(BuildStage)
+      .findBy({ buildId: In(builds.map(({ id }) => id)) });
+    const outlines: BuildOutline[] = [];
+    for (const build of builds) {
+      const own = stages.filter(({ buildId }) => buildId === build.id);
+      const states = new Map(own.map(({ stageId, state }) => [stageId, state]));
+      outlines.push({ build, edition: await this.plans.content(build.editionId), states });
+    }
+    return outlines;
   }
 
   /** Everybody a record names. */

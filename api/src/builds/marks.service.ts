@@ -11,6 +11,7 @@ import type { Build } from './build.entity';
 import { buildProblems } from './builds.errors';
 import { CheckMark } from './check-mark.entity';
 import { markDto, type MarkDto } from './dto/evidence.dto';
+import { takeMarksBack } from './take-back';
 import { heldCheck, putOnTheBench, requireOpen, type HeldCheck } from './open-stage';
 
 @Injectable()
@@ -54,7 +55,7 @@ export class MarksService {
     await this.dataSource.transaction(async (manager) => {
       await this.holdMarkable(manager, actor, buildId, checkId);
       const standing = { buildId, checkId, takenBackAt: IsNull() };
-      await manager.update(CheckMark, standing, { takenBackAt: this.clock.now() });
+      await takeMarksBack(manager, standing, this.clock.now());
     });
   }
 
