@@ -64,9 +64,12 @@ function asRefusal(error: unknown): DomainError | undefined {
   if (error instanceof DomainError) return error;
   if (isOutOfTurn(error)) {
     const extra = { retryAfterSeconds: AGAIN_SECONDS };
-    return commonProblems.busy('Too many people were at it at once. Nothing was changed. Try again.', {
-      extra,
-    });
+    return commonProblems.busy(
+      'The server had too much to do at once and gave this up. Try again in a moment.',
+      {
+        extra,
+      },
+    );
   }
   const status = statusOf(error);
   if (status === undefined || status >= 500) return undefined;
