@@ -3,6 +3,7 @@ import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
 import { BuildsService } from './builds.service';
+import { BuildSummaryDto } from './dto/build-summary.dto';
 import { BuildDto, StartBuildDto } from './dto/build.dto';
 
 @ApiTags('Builds')
@@ -15,6 +16,13 @@ export class BuildsController {
   @Access('signed-in')
   mine(@CurrentActor() actor: Actor): Promise<BuildDto[]> {
     return this.builds.mine(actor);
+  }
+
+  /** How far one's own builds are: the states of their stages, and nothing of what is in them. */
+  @Get('mine/summary')
+  @Access('signed-in')
+  mySummaries(@CurrentActor() actor: Actor): Promise<BuildSummaryDto[]> {
+    return this.builds.mySummaries(actor);
   }
 
   /** Begins a build to the newest edition of a plan. */

@@ -4,7 +4,8 @@ import { requireMember, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { fieldError, notFound } from '../common/common.errors';
 import { Instrument } from '../instruments/instrument.entity';
-import { InstrumentUseService } from '../instruments/instrument-use.service';
+import { InstrumentKind } from '../instruments/instrument-kind.entity';
+import { InstrumentUseService, lower } from '../instruments/instrument-use.service';
 import type { PlanCheck } from '../plans/plan-check.entity';
 import { PlansService } from '../plans/plans.service';
 import { requireSight } from './build-access';
@@ -46,6 +47,12 @@ export class InstrumentChoiceService {
     return instruments
       .map((instrument) => choiceDto(instrument, reasons.get(instrument.resourceId)?.[0]?.reason ?? null))
       .sort((one, other) => Number(one.reason !== null) - Number(other.reason !== null));
+  }
+
+  /** A level is nothing without what it was read on. @throws DomainError `invalid-input` on `instrumentId` */
+  async askFor(manager: EntityManager, kindId: string): Promise<never> {
+    const { name } = await manager.findOneByOrFail(InstrumentKind, { id: kindId });
+    throw fieldError('instrumentId', `Choose the ${lower(name)} it was read on.`);
   }
 
   /**

@@ -10,6 +10,7 @@ export const commonProblems = defineProblems({
   'too-large': { status: 413, title: 'Too large' },
   'wrong-kind-of-file': { status: 415, title: 'The wrong kind of file' },
   'slow-down': { status: 429, title: 'Too many tries' },
+  busy: { status: 503, title: 'Too much at once' },
 });
 
 /** A 422 about one field of the request body; `field` may be a path such as `items.0.startsAt`. */

@@ -5,7 +5,7 @@ export interface FieldProblem {
 }
 
 export interface ProblemKind {
-  status: 400 | 401 | 403 | 404 | 409 | 413 | 415 | 422 | 429;
+  status: 400 | 401 | 403 | 404 | 409 | 413 | 415 | 422 | 429 | 503;
   /** The same for every occurrence of the kind. */
   title: string;
 }

@@ -1,5 +1,6 @@
 import { Catch, HttpException, Logger, type ArgumentsHost, type ExceptionFilter } from '@nestjs/common';
 import type { Request, Response } from 'express';
+import { isOutOfTurn } from './busy';
 import { commonProblems } from './common.errors';
 import { DomainError } from './domain-error';
 
@@ -11,6 +12,9 @@ interface ProblemDocument {
   instance: string;
   [member: string]: unknown;
 }
+
+/** After a request was given up for the sake of others. */
+const AGAIN_SECONDS = 2;
 
 /** Writes every answer that is not a success as an RFC 9457 problem document. */
 @Catch()
@@ -58,6 +62,15 @@ function unplanned(instance: string): ProblemDocument {
 /** What the body parser, the router and the upload handler throw is a refusal too, with words of ours. */
 function asRefusal(error: unknown): DomainError | undefined {
   if (error instanceof DomainError) return error;
+  if (isOutOfTurn(error)) {
+    const extra = { retryAfterSeconds: AGAIN_SECONDS };
+    return commonProblems.busy(
+      'The server had too much to do at once and gave this up. Try again in a moment.',
+      {
+        extra,
+      },
+    );
+  }
   const status = statusOf(error);
   if (status === undefined || status >= 500) return undefined;
   if (status === 401) return commonProblems['not-signed-in']('Sign in to go on.');

@@ -26,6 +26,13 @@ export class Environment {
   @Max(200)
   DATABASE_POOL = 10;
 
+  /** How many seconds a request waits for a free connection before it is told to come again. */
+  @Type(() => Number)
+  @IsInt()
+  @Min(1)
+  @Max(120)
+  DATABASE_WAIT = 20;
+
   /** The address people type; links in mail and the return from the card page are made from it. */
   @IsUrl({ require_tld: false, require_protocol: true })
   PUBLIC_URL = 'http://127.0.0.1:4780';

@@ -267,6 +267,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/builds/mine/summary": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** How far one's own builds are: the states of their stages, and nothing of what is in them. */
+        get: operations["Builds.mySummaries"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/builds/{buildId}": {
         parameters: {
             query?: never;
@@ -1289,6 +1306,16 @@ export interface components {
             /** @description Oldest first. */
             events: components["schemas"]["StageEventDto"][];
         };
+        BuildSummaryDto: {
+            id: string;
+            planName: string;
+            /** @example 7 */
+            serial: number;
+            endedAt: string | null;
+            /** @description The stage its builder is on. */
+            currentStageId: string | null;
+            stages: components["schemas"]["StageSummaryDto"][];
+        };
         CancelNightDto: {
             reason: string;
         };
@@ -1636,7 +1663,7 @@ export interface components {
             };
             /**
              * Format: date-time
-             * @description When it was taken, for one that waited on a device; now where left out.
+             * @description When it was taken, for one that waited on a device; now where left out. Not before the stage opened.
              */
             takenAt?: string;
             /**
@@ -1644,7 +1671,10 @@ export interface components {
              * @example oscilloscope
              */
             method: string;
-            /** Format: uuid */
+            /**
+             * Format: uuid
+             * @description What it was read on; asked for where the check names a kind of instrument.
+             */
             instrumentId?: string;
             /** @description The tick beside a grave caution; asked for with every reading of such a stage. */
             cautionAcknowledged?: boolean;
@@ -2169,6 +2199,14 @@ export interface components {
         StageNoteDto: {
             /** @example Two turns off the output winding brought the gain down. */
             note?: string;
+        };
+        StageSummaryDto: {
+            /** @enum {string} */
+            state: "not started" | "on the bench" | "with mentor" | "sent back" | "signed off" | "locked";
+            id: string;
+            position: number;
+            /** @example Pre-driver */
+            name: string;
         };
         StartBuildDto: {
             /** Format: uuid */
@@ -2922,6 +2960,34 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["BuildDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Builds.mySummaries": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildSummaryDto"][];
                 };
             };
             /** @description A problem document */

@@ -14,11 +14,12 @@ export class KeepReadingDto {
   @IsObject()
   entry: Record<string, string>;
 
+  /** What it was read on; asked for where the check names a kind of instrument. */
   @IsOptional()
   @IsUUID()
   instrumentId?: string;
 
-  /** When it was taken, for one that waited on a device; now where left out. */
+  /** When it was taken, for one that waited on a device; now where left out. Not before the stage opened. */
   @IsOptional()
   @IsInstant()
   takenAt?: string;
