@@ -10,18 +10,52 @@ describe('bad input', () => {
   afterAll(() => test.close());
 
   it.each([
-    ['an unknown field', { email: 'a@b.example', password: 'x', admin: true }, '#/admin'],
-    ['a wrong type', { email: 'a@b.example', password: 12 }, '#/password'],
-    ['a missing field', { password: 'x' }, '#/email'],
-    ['an overlong text', { email: 'a@b.example', password: 'x'.repeat(201) }, '#/password'],
-  ])('names the field: %s', async (_what, body, pointer) => {
+    [
+      'an unknown field',
+      { email: 'a@b.example', password: 'x', admin: true },
+      '#/admin',
+      'There is no field named admin.',
+    ],
+    ['a wrong type', { email: 'a@b.example', password: 12 }, '#/password', 'password must be a string.'],
+    ['a missing field', { password: 'x' }, '#/email', 'email is needed.'],
+    ['a null', { email: null, password: 'x' }, '#/email', 'email is needed.'],
+    ['no email', { email: '', password: 'x' }, '#/email', 'That is not an email address.'],
+    [
+      'an overlong text',
+      { email: 'a@b.example', password: 'x'.repeat(201) },
+      '#/password',
+      'password must be shorter than or equal to 200 characters.',
+    ],
+  ])('names the field and says what is wrong with it: %s', async (_what, body, pointer, detail) => {
     const response = await test.http().post('/api/auth/sign-in').send(body).expect(422);
     expect(response.headers['content-type']).toMatch(/^application\/problem\+json/);
     expect(response.body).toMatchObject({
       type: '/problems/invalid-input',
       status: 422,
-      errors: [{ pointer }],
+      detail,
+      errors: [{ pointer, detail }],
     });
+  });
+
+  it('asks for each field of an empty body', async () => {
+    const { body } = await test.http().post('/api/auth/sign-in').send({}).expect(422);
+    expect((body as { errors: unknown }).errors).toEqual([
+      { pointer: '#/email', detail: 'email is needed.' },
+      { pointer: '#/password', detail: 'password is needed.' },
+    ]);
+  });
+
+  it('names the part of an address that is not an id, and takes an id in any spelling', async () => {
+    const { agent, person } = await someoneWith(test);
+    const detail = 'personId in the address is not an id.';
+    const { body } = await agent.get('/api/people/not-an-id').expect(400);
+    expect(body).toMatchObject({
+      type: '/problems/unreadable-request',
+      detail,
+      errors: [{ pointer: '#/personId', detail }],
+    });
+    const shouted = await agent.get(`/api/people/${person.id.toUpperCase()}`).expect(200);
+    expect(shouted.body).toMatchObject({ id: person.id });
   });
 
   it('answers broken JSON with a problem document', async () => {

@@ -1,4 +1,5 @@
 import { createHash, randomBytes } from 'node:crypto';
+import { isId } from '../common/id';
 
 /** What the refresh cookie carries: which session, and a secret only that device knows. */
 export interface RefreshToken {
@@ -18,12 +19,10 @@ export function writeRefreshToken({ sessionId, secret }: RefreshToken): string {
   return `${sessionId}.${secret}`;
 }
 
-const UUID = /^[0-9a-f]{8}-(?:[0-9a-f]{4}-){3}[0-9a-f]{12}$/;
-
 /** @returns undefined for anything that was not written by {@link writeRefreshToken}. */
 export function readRefreshToken(text: unknown): RefreshToken | undefined {
   if (typeof text !== 'string') return undefined;
   const [sessionId, secret, ...rest] = text.split('.');
-  if (!sessionId || !secret || rest.length > 0 || !UUID.test(sessionId)) return undefined;
+  if (!sessionId || !secret || rest.length > 0 || !isId(sessionId)) return undefined;
   return { sessionId, secret };
 }

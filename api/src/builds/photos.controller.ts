@@ -5,7 +5,6 @@ import {
   Get,
   HttpCode,
   Param,
-  ParseUUIDPipe,
   Post,
   Res,
   UploadedFile,
@@ -16,6 +15,7 @@ import { ApiBody, ApiConsumes, ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import type { Response } from 'express';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { ParseIdPipe } from '../common/parse-id.pipe';
 import { AddPhotoDto, PhotoDto } from './dto/evidence.dto';
 import { PHOTO_BYTES } from './photos.rules';
 import { PhotosService } from './photos.service';
@@ -42,8 +42,8 @@ export class PhotosController {
   @UseInterceptors(FileInterceptor('photo', { limits: { fileSize: PHOTO_BYTES, files: 1, fields: 4 } }))
   add(
     @CurrentActor() actor: Actor,
-    @Param('buildId', ParseUUIDPipe) buildId: string,
-    @Param('checkId', ParseUUIDPipe) checkId: string,
+    @Param('buildId', ParseIdPipe) buildId: string,
+    @Param('checkId', ParseIdPipe) checkId: string,
     @UploadedFile() file: { buffer: Buffer } | undefined,
     @Body() body: AddPhotoDto,
   ): Promise<PhotoDto> {
@@ -56,8 +56,8 @@ export class PhotosController {
   @ApiOkResponse({ content: { 'image/*': { schema: { type: 'string', format: 'binary' } } } })
   async show(
     @CurrentActor() actor: Actor,
-    @Param('buildId', ParseUUIDPipe) buildId: string,
-    @Param('photoId', ParseUUIDPipe) photoId: string,
+    @Param('buildId', ParseIdPipe) buildId: string,
+    @Param('photoId', ParseIdPipe) photoId: string,
     @Res() response: Response,
   ): Promise<void> {
     const { bytes, contentType, sha256 } = await this.photos.bytes(actor, buildId, photoId);
@@ -76,8 +76,8 @@ export class PhotosController {
   @Access('signed-in')
   takeBack(
     @CurrentActor() actor: Actor,
-    @Param('buildId', ParseUUIDPipe) buildId: string,
-    @Param('photoId', ParseUUIDPipe) photoId: string,
+    @Param('buildId', ParseIdPipe) buildId: string,
+    @Param('photoId', ParseIdPipe) photoId: string,
   ): Promise<void> {
     return this.photos.takeBack(actor, buildId, photoId);
   }

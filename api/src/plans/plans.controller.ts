@@ -1,7 +1,8 @@
-import { Controller, Get, Param, ParseIntPipe, ParseUUIDPipe, Query } from '@nestjs/common';
+import { Controller, Get, Param, ParseIntPipe, Query } from '@nestjs/common';
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { ParseIdPipe } from '../common/parse-id.pipe';
 import { PlanEditionDto } from './dto/plan-edition.dto';
 import { ListPlansQueryDto, PlansPageDto } from './dto/plan.dto';
 import { PlansService } from './plans.service';
@@ -23,7 +24,7 @@ export class PlansController {
   @Access('signed-in')
   show(
     @CurrentActor() actor: Actor,
-    @Param('planId', ParseUUIDPipe) planId: string,
+    @Param('planId', ParseIdPipe) planId: string,
     @Param('number', ParseIntPipe) number: number,
   ): Promise<PlanEditionDto> {
     return this.plans.show(actor, planId, number);

@@ -4,7 +4,6 @@ import {
   Get,
   HttpCode,
   Param,
-  ParseUUIDPipe,
   Post,
   Query,
   UploadedFile,
@@ -15,6 +14,7 @@ import { ApiBody, ApiConsumes, ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
 import { PageQueryDto } from '../common/paging.dto';
+import { ParseIdPipe } from '../common/parse-id.pipe';
 import { MatchLineDto } from './dto/match-line.dto';
 import { StatementDetailDto, StatementDto, StatementLineDto, StatementsPageDto } from './dto/statement.dto';
 import { ReconciliationService } from './reconciliation.service';
@@ -63,7 +63,7 @@ export class ReconciliationController {
   @Access({ roles: ['treasurer'] })
   show(
     @CurrentActor() actor: Actor,
-    @Param('statementId', ParseUUIDPipe) statementId: string,
+    @Param('statementId', ParseIdPipe) statementId: string,
   ): Promise<StatementDetailDto> {
     return this.reconciliation.show(actor, statementId);
   }
@@ -74,7 +74,7 @@ export class ReconciliationController {
   @Access({ roles: ['treasurer'] })
   match(
     @CurrentActor() actor: Actor,
-    @Param('lineId', ParseUUIDPipe) lineId: string,
+    @Param('lineId', ParseIdPipe) lineId: string,
     @Body() choice: MatchLineDto,
   ): Promise<StatementLineDto> {
     return this.reconciliation.match(actor, lineId, choice);
@@ -85,7 +85,7 @@ export class ReconciliationController {
   @Access({ roles: ['treasurer'] })
   takeBack(
     @CurrentActor() actor: Actor,
-    @Param('lineId', ParseUUIDPipe) lineId: string,
+    @Param('lineId', ParseIdPipe) lineId: string,
   ): Promise<StatementLineDto> {
     return this.reconciliation.takeBack(actor, lineId);
   }

@@ -1057,14 +1057,14 @@ export interface components {
         };
         AssignTierDto: {
             /** Format: uuid */
+            personId: string;
+            /** Format: uuid */
             tierId: string;
             /**
              * Format: date
              * @description The first day it holds.
              */
             fromOn: string;
-            /** Format: uuid */
-            personId: string;
         };
         BankDetailsDto: {
             accountName: string;
@@ -1312,13 +1312,13 @@ export interface components {
             startsAt?: string;
             /** Format: date-time */
             endsAt?: string;
+            benchIds?: string[];
+            mentorIds?: string[];
+            stageIds?: string[];
             title?: string;
             /** @description Not fewer than are coming. More moves the waiting list up. */
             places?: number;
             note?: string;
-            benchIds?: string[];
-            mentorIds?: string[];
-            stageIds?: string[];
         };
         CheckedNightDto: {
             /**
@@ -1377,12 +1377,12 @@ export interface components {
             demoAccounts: components["schemas"]["DemoAccountDto"][];
         };
         CreateBookingDto: {
+            /** @description Benches and instruments, 1 to 8: all of them are booked, or none. */
+            resourceIds: string[];
             /** Format: date-time */
             startsAt: string;
             /** Format: date-time */
             endsAt: string;
-            /** @description Benches and instruments, 1 to 8: all of them are booked, or none. */
-            resourceIds: string[];
             /**
              * Format: uuid
              * @description Book it for one of your groups.
@@ -1421,15 +1421,15 @@ export interface components {
             detail: string;
         };
         GrantClearanceDto: {
+            /** Format: uuid */
+            personId: string;
+            /** Format: uuid */
+            kindId: string;
             /**
              * Format: date
              * @description Last day on which it holds; leave it out for no end.
              */
             until?: string;
-            /** Format: uuid */
-            personId: string;
-            /** Format: uuid */
-            kindId: string;
         };
         GroupDto: {
             id: string;
@@ -1617,6 +1617,8 @@ export interface components {
             entry: {
                 [key: string]: string;
             };
+            /** Format: uuid */
+            instrumentId?: string;
             /**
              * Format: date-time
              * @description When it was taken, for one that waited on a device; now where left out.
@@ -1627,8 +1629,6 @@ export interface components {
              * @example oscilloscope
              */
             method: string;
-            /** Format: uuid */
-            instrumentId?: string;
             /** @description The tick beside a grave caution; asked for with every reading of such a stage. */
             cautionAcknowledged?: boolean;
         };
@@ -1909,16 +1909,16 @@ export interface components {
             endsAt: string;
             /** @description Days to leave out of the series (EXDATE). A day that is no night of it changes nothing. */
             skip?: string[];
-            /** @description Left out for a single night. */
-            repeat?: components["schemas"]["RepeatDto"];
-            /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
-            instead?: components["schemas"]["InsteadDto"][];
             /** @description Benches the night holds; none for an evening without. */
             benchIds?: string[];
             /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
             mentorIds?: string[];
             /** @description Stages in focus. */
             stageIds?: string[];
+            /** @description Left out for a single night. */
+            repeat?: components["schemas"]["RepeatDto"];
+            /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
+            instead?: components["schemas"]["InsteadDto"][];
             title: string;
             places: number;
             note?: string;
@@ -1953,6 +1953,12 @@ export interface components {
             endsAt: string;
             /** @description Days to leave out of the series (EXDATE). A day that is no night of it changes nothing. */
             skip?: string[];
+            /** @description Benches the night holds; none for an evening without. */
+            benchIds?: string[];
+            /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
+            mentorIds?: string[];
+            /** @description Stages in focus. */
+            stageIds?: string[];
             title?: string;
             places?: number;
             note?: string;
@@ -1962,12 +1968,6 @@ export interface components {
             repeat?: components["schemas"]["RepeatDto"];
             /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
             instead?: components["schemas"]["InsteadDto"][];
-            /** @description Benches the night holds; none for an evening without. */
-            benchIds?: string[];
-            /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
-            mentorIds?: string[];
-            /** @description Stages in focus. */
-            stageIds?: string[];
         };
         ProblemDto: {
             /**
@@ -1992,13 +1992,13 @@ export interface components {
             paidCount: number;
         };
         RaiseInvoiceDto: {
+            /** Format: uuid */
+            personId: string;
             /**
              * Format: date
              * @description Not before today.
              */
             dueOn: string;
-            /** Format: uuid */
-            personId: string;
             /** @enum {string} */
             kind: "dues" | "course fee" | "kit";
             description: string;
@@ -2205,24 +2205,24 @@ export interface components {
             perPage: number;
         };
         TakePaymentDto: {
+            /** Format: uuid */
+            personId: string;
             /**
              * Format: date
              * @description Today or before.
              */
             receivedOn: string;
-            /** Format: uuid */
-            personId: string;
-            /** @enum {string} */
-            method: "cash" | "cheque" | "transfer";
-            amountMinor: number;
             /** @description Paid in this order; what is left over is credit on account. */
             invoiceIds: string[];
-            note?: string;
             /**
              * Format: uuid
              * @description Chosen once by the form: the same key again answers with the payment already taken.
              */
             clientKey: string;
+            /** @enum {string} */
+            method: "cash" | "cheque" | "transfer";
+            amountMinor: number;
+            note?: string;
         };
         TakenDto: {
             resourceId: string;
@@ -3597,10 +3597,10 @@ export interface operations {
             query?: {
                 page?: number;
                 perPage?: number;
-                /** @description For which day the instrument would be used; today unless told. */
-                on?: string;
                 /** @description Only instruments of this kind. */
                 kindId?: string;
+                /** @description For which day the instrument would be used; today unless told. */
+                on?: string;
             };
             header?: never;
             path?: never;
@@ -3761,9 +3761,9 @@ export interface operations {
             query?: {
                 page?: number;
                 perPage?: number;
+                personId?: string;
                 /** @description `open`: anything left to pay, late or not. */
                 state?: "open" | "late" | "paid";
-                personId?: string;
             };
             header?: never;
             path?: never;
