@@ -1,20 +1,9 @@
-import {
-  Body,
-  Controller,
-  Delete,
-  Get,
-  HttpCode,
-  Param,
-  Post,
-  Res,
-  UploadedFile,
-  UseInterceptors,
-} from '@nestjs/common';
-import { FileInterceptor } from '@nestjs/platform-express';
-import { ApiBody, ApiConsumes, ApiOkResponse, ApiTags } from '@nestjs/swagger';
+import { Body, Controller, Delete, Get, HttpCode, Param, Post, Res, UploadedFile } from '@nestjs/common';
+import { ApiBody, ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import type { Response } from 'express';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { TakesFile } from '../common/one-file';
 import { ParseIdPipe } from '../common/parse-id.pipe';
 import { AddPhotoDto, PhotoDto } from './dto/evidence.dto';
 import { PHOTO_BYTES } from './photos.rules';
@@ -37,9 +26,8 @@ export class PhotosController {
   /** Adds a picture of at most 6 MB to a check that asks for one. */
   @Post('checks/:checkId/photos')
   @Access('signed-in')
-  @ApiConsumes('multipart/form-data')
   @ApiBody({ schema: UPLOAD })
-  @UseInterceptors(FileInterceptor('photo', { limits: { fileSize: PHOTO_BYTES, files: 1, fields: 4 } }))
+  @TakesFile('photo', { bytes: PHOTO_BYTES, fields: 4 })
   add(
     @CurrentActor() actor: Actor,
     @Param('buildId', ParseIdPipe) buildId: string,
