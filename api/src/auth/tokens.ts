@@ -1,4 +1,4 @@
-import { createHash, randomBytes } from 'node:crypto';
+import { createHash, createHmac, randomBytes } from 'node:crypto';
 import { isId } from '../common/id';
 
 /** What the refresh cookie carries: which session, and a secret only that device knows. */
@@ -9,6 +9,14 @@ export interface RefreshToken {
 
 export function newSecret(): string {
   return randomBytes(32).toString('base64url');
+}
+
+/**
+ * The secret that replaces this one. Worked out and not drawn, so that a token sent twice is answered twice with the
+ * same successor, in whatever order the answers arrive; without the server's key nobody can work it out.
+ */
+export function successorOf({ sessionId, secret }: RefreshToken, key: string): string {
+  return createHmac('sha256', key).update(`refresh ${sessionId} ${secret}`).digest('base64url');
 }
 
 export function hashOf(secret: string): string {
