@@ -18,7 +18,7 @@ export function setUpApp(app: NestExpressApplication): void {
   const environment = app.get(Environment);
   app.useLogger(app.get(Logger));
   app.enableShutdownHooks();
-  app.set('trust proxy', 'loopback');
+  app.set('trust proxy', environment.TRUSTED_PROXY ?? false);
   app.setGlobalPrefix('api', { exclude: [{ path: 'problems{/*rest}', method: RequestMethod.GET }] });
   app.use(helmet({ contentSecurityPolicy: { directives: contentPolicy(environment) } }));
   app.use(compression());
