@@ -108,3 +108,30 @@ describe('bad input', () => {
     });
   });
 });
+
+describe('without its database', () => {
+  let test: TestApp;
+
+  beforeAll(async () => {
+    test = await startTestApp();
+    await test.dataSource.destroy();
+  });
+  afterAll(() => test.close());
+
+  it('the API is not healthy: 503', async () => {
+    const { body } = await test
+      .http()
+      .get('/api/health')
+      .expect(503)
+      .expect('content-type', /problem\+json/);
+    expect(body).toMatchObject({ type: '/problems/not-now', status: 503 });
+  });
+
+  it('a request fails with a kind of problem that is explained, and no word about what was changed', async () => {
+    const { body } = await test.http().get('/api/club').expect(500);
+    const { type, title, status, detail } = body as Record<string, string>;
+    expect(type).toBe('/problems/unplanned');
+    expect(detail).not.toMatch(/nothing was/i);
+    expect((await test.http().get('/problems/unplanned').expect(200)).body).toEqual({ type, title, status });
+  });
+});
