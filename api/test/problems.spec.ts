@@ -45,7 +45,7 @@ describe('bad input', () => {
     ]);
   });
 
-  it('names the part of an address that is not an id, and takes an id in any spelling', async () => {
+  it('names the part of an address that cannot be read, and takes an id in any spelling', async () => {
     const { agent, person } = await someoneWith(test);
     const detail = 'personId in the address is not an id.';
     const { body } = await agent.get('/api/people/not-an-id').expect(400);
@@ -54,6 +54,8 @@ describe('bad input', () => {
       detail,
       errors: [{ pointer: '#/personId', detail }],
     });
+    const edition = await agent.get(`/api/plans/${person.id}/editions/first`).expect(400);
+    expect(edition.body).toMatchObject({ errors: [{ pointer: '#/number' }] });
     const shouted = await agent.get(`/api/people/${person.id.toUpperCase()}`).expect(200);
     expect(shouted.body).toMatchObject({ id: person.id });
   });

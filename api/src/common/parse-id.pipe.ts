@@ -1,5 +1,6 @@
 import { Injectable, type ArgumentMetadata, type PipeTransform } from '@nestjs/common';
 import { commonProblems } from './common.errors';
+import type { DomainError } from './domain-error';
 import { isId } from './id';
 
 /**
@@ -11,7 +12,12 @@ import { isId } from './id';
 export class ParseIdPipe implements PipeTransform<string, string> {
   transform(value: string, { data: name = 'id' }: ArgumentMetadata): string {
     if (isId(value)) return value.toLowerCase();
-    const detail = `${name} in the address is not an id.`;
-    throw commonProblems['unreadable-request'](detail, { errors: [{ pointer: `#/${name}`, detail }] });
+    throw unreadablePart(name, 'an id');
   }
+}
+
+/** A part of the address, by its name, is not what it should be. */
+export function unreadablePart(name: string, wanted: string): DomainError {
+  const detail = `${name} in the address is not ${wanted}.`;
+  return commonProblems['unreadable-request'](detail, { errors: [{ pointer: `#/${name}`, detail }] });
 }

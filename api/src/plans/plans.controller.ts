@@ -2,10 +2,14 @@ import { Controller, Get, Param, ParseIntPipe, Query } from '@nestjs/common';
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
-import { ParseIdPipe } from '../common/parse-id.pipe';
+import { ParseIdPipe, unreadablePart } from '../common/parse-id.pipe';
 import { PlanEditionDto } from './dto/plan-edition.dto';
 import { ListPlansQueryDto, PlansPageDto } from './dto/plan.dto';
 import { PlansService } from './plans.service';
+
+const EDITION_NUMBER = new ParseIntPipe({
+  exceptionFactory: () => unreadablePart('number', 'a whole number'),
+});
 
 @ApiTags('Plans')
 @Controller('plans')
@@ -25,7 +29,7 @@ export class PlansController {
   show(
     @CurrentActor() actor: Actor,
     @Param('planId', ParseIdPipe) planId: string,
-    @Param('number', ParseIntPipe) number: number,
+    @Param('number', EDITION_NUMBER) number: number,
   ): Promise<PlanEditionDto> {
     return this.plans.show(actor, planId, number);
   }
