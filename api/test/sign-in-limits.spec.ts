@@ -50,6 +50,15 @@ describe.each([
     expect(await test.dataSource.query('SELECT * FROM sign_in_failure')).toEqual([]);
   });
 
+  it('forgets tries that no limit counts any more', async () => {
+    for (const n of range(3)) await signIn(`nobody-${n}@larkmoor.example`);
+    test.clock.advance(16 * MINUTE);
+    await signIn('nobody@larkmoor.example');
+    expect(await test.dataSource.query('SELECT email FROM sign_in_failure')).toEqual([
+      { email: 'nobody@larkmoor.example' },
+    ]);
+  });
+
   if (TRUSTED_PROXY === undefined)
     it('believes nobody who names an address of their own', async () => {
       const { email } = await person(test);

@@ -1,5 +1,5 @@
 import { Injectable } from '@nestjs/common';
-import { DataSource, LessThan, MoreThan, type EntityManager } from 'typeorm';
+import { DataSource, MoreThan, type EntityManager } from 'typeorm';
 import { Clock } from '../common/clock';
 import { commonProblems } from '../common/common.errors';
 import { FAILURES_KEPT_MS, waitBeforeTry, type SignInTry } from './auth.rules';
@@ -28,9 +28,14 @@ export class SignInTries {
     };
   }
 
+  /** Several may do it at once: each leaves alone what another is about to delete. */
   async forgetOldOnes(): Promise<void> {
     const before = new Date(this.clock.now().getTime() - FAILURES_KEPT_MS);
-    await this.dataSource.getRepository(SignInFailure).delete({ failedAt: LessThan(before) });
+    await this.dataSource.query(
+      `DELETE FROM sign_in_failure
+       WHERE id IN (SELECT id FROM sign_in_failure WHERE failed_at < $1 FOR UPDATE SKIP LOCKED)`,
+      [before],
+    );
   }
 
   private async note(manager: EntityManager, attempt: SignInTry): Promise<string> {
