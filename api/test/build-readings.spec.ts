@@ -258,6 +258,16 @@ describe('an instrument', () => {
       expect((await keep(id).expect(422)).body.errors[0].pointer).toBe('#/instrumentId');
   });
 
+  it('is judged the same in whatever spelling its id comes', async () => {
+    const { scopes, keep } = await measured();
+    const past = await instrument(test, { kindId: scopes.id, calibrationDueOn: '2026-01-14' });
+    const { body } = await keep(past.id.toUpperCase()).expect(422);
+    expect(body.detail).toMatch(/calibration of .* ran out on 14 Jan 2026/);
+    const fit = await instrument(test, { kindId: scopes.id, calibrationDueOn: '2026-01-15' });
+    const kept = await keep(fit.id.toUpperCase()).expect(201);
+    expect(kept.body).toMatchObject({ instrumentId: fit.id });
+  });
+
   it('choices come with the reason against those that cannot be chosen', async () => {
     const { scopes, started } = await measured();
     const good = await instrument(test, { kindId: scopes.id, calibrationDueOn: '2027-01-01' });

@@ -72,11 +72,12 @@ export class InstrumentChoiceService {
       relations: { resource: true, kind: true },
     });
     if (!instrument) throw fieldError('instrumentId', 'There is no such instrument.');
-    const { resource, kind } = instrument;
+    // By the row's own spelling of its id: the database takes any, the reasons are kept under one.
+    const { resource, kind, resourceId } = instrument;
     const isOfKind = check.instrumentKindId === null || check.instrumentKindId === instrument.kindId;
     if (!isOfKind) throw fieldError('instrumentId', `${resource.tag} is of another kind: ${kind.name}.`);
-    const { reasons } = await this.use.judge(manager, personId, [instrumentId], after(takenAt));
-    const against = reasons.get(instrumentId)?.[0];
+    const { reasons } = await this.use.judge(manager, personId, [resourceId], after(takenAt));
+    const against = reasons.get(resourceId)?.[0];
     if (against) throw fieldError('instrumentId', `${against.reason} ${against.remedy}`);
     return instrument;
   }

@@ -1,5 +1,16 @@
 import { plainToInstance, Type } from 'class-transformer';
-import { IsIn, IsInt, IsOptional, IsString, IsUrl, Max, Min, MinLength, validateSync } from 'class-validator';
+import {
+  IsIn,
+  IsInt,
+  IsOptional,
+  IsString,
+  IsUrl,
+  Matches,
+  Max,
+  Min,
+  MinLength,
+  validateSync,
+} from 'class-validator';
 
 /** Everything the process takes from its environment, read once at start-up and typed. */
 export class Environment {
@@ -36,6 +47,16 @@ export class Environment {
   /** The address people type; links in mail and the return from the card page are made from it. */
   @IsUrl({ require_tld: false, require_protocol: true })
   PUBLIC_URL = 'http://127.0.0.1:4780';
+
+  /**
+   * Whose word about the caller's address is taken: `loopback`, or a proxy's addresses with commas between them. Left
+   * out, nobody's, because without a proxy in front everybody could name an address of their choosing.
+   */
+  @IsOptional()
+  @Matches(/^[\da-z:./]*[:.a-z][\da-z:./]*(, *[\da-z:./]*[:.a-z][\da-z:./]*)*$/i, {
+    message: 'TRUSTED_PROXY is loopback or addresses with commas between them',
+  })
+  TRUSTED_PROXY?: string;
 
   @IsString()
   @MinLength(32)

@@ -3,6 +3,7 @@ import type Stripe from 'stripe';
 import type { EntityManager } from 'typeorm';
 import { Clock } from '../common/clock';
 import { clubDay } from '../common/club-day';
+import { isId } from '../common/id';
 import { writeMinor } from '../common/minor-units';
 import { ClubService } from '../club/club.service';
 import { Checkout, type CheckoutState } from './checkout.entity';
@@ -98,7 +99,7 @@ export class CardEvents {
   /** By the id we gave the service: its own session id may not be written down yet when the event is quick. */
   private async hold(manager: EntityManager, session: Stripe.Checkout.Session): Promise<Checkout | null> {
     const id = session.metadata?.checkout ?? '';
-    if (!/^[0-9a-f-]{36}$/.test(id)) return null;
+    if (!isId(id)) return null;
     const checkout = await manager
       .getRepository(Checkout)
       .findOne({ where: { id }, lock: { mode: 'for_no_key_update' } });

@@ -1,7 +1,8 @@
-import { Body, Controller, Get, HttpCode, Param, ParseUUIDPipe, Post, Query } from '@nestjs/common';
+import { Body, Controller, Get, HttpCode, Param, Post, Query } from '@nestjs/common';
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { ParseIdPipe } from '../common/parse-id.pipe';
 import { CheckoutService } from './checkout.service';
 import { CardPaymentDto, CheckoutDto } from './dto/checkout.dto';
 import {
@@ -47,7 +48,7 @@ export class InvoicesController {
   @Access('signed-in')
   open(
     @CurrentActor() actor: Actor,
-    @Param('invoiceId', ParseUUIDPipe) invoiceId: string,
+    @Param('invoiceId', ParseIdPipe) invoiceId: string,
   ): Promise<CheckoutDto> {
     return this.checkout.open(actor, invoiceId);
   }
@@ -57,7 +58,7 @@ export class InvoicesController {
   @Access('signed-in')
   cardPayment(
     @CurrentActor() actor: Actor,
-    @Param('invoiceId', ParseUUIDPipe) invoiceId: string,
+    @Param('invoiceId', ParseIdPipe) invoiceId: string,
   ): Promise<CardPaymentDto> {
     return this.checkout.cardPayment(actor, invoiceId);
   }

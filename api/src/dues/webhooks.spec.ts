@@ -48,6 +48,12 @@ describe('events of the card service', () => {
     expect(await stateOfVisit()).toBe('paid');
   });
 
+  it('about a page that is not ours wait for a look, whatever stands where our id would', async () => {
+    for (const stranger of ['', '-'.repeat(36), 'not an id', '4f0f5b52-1d9c-4c6e-9a35-0d7f9c1a2b3c'])
+      expect(await outcomeOf(completed(visit, { metadata: { checkout: stranger } }))).toBe('needs a look');
+    expect(await payments()).toHaveLength(0);
+  });
+
   it('count once, delivered again, and hours later', async () => {
     const event = completed(visit);
     expect(await outcomeOf(event)).toBe('acted');

@@ -186,7 +186,14 @@ describe('importing a statement', () => {
     it('is refused without a file, under another name, with a field more, and as no form at all', async () => {
       const problem = /problem\+json/;
       await agent.post('/api/statements').expect(422).expect('content-type', problem);
-      await agent.post('/api/statements').send({ file: 'x' }).expect(422);
+      await agent.post('/api/statements').send({ file: 'x' }).expect(415).expect('content-type', problem);
+      for (const type of ['multipart/mixed; boundary=x', 'multipart/related; boundary=x'])
+        await agent
+          .post('/api/statements')
+          .set('content-type', type)
+          .send('--x--\r\n')
+          .expect(415)
+          .expect('content-type', problem);
       await agent
         .post('/api/statements')
         .attach('statement', Buffer.from('x'), 'x.csv')

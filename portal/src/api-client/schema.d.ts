@@ -267,23 +267,6 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
-    "/api/builds/mine/summary": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** How far one's own builds are: the states of their stages, and nothing of what is in them. */
-        get: operations["Builds.mySummaries"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
-    };
     "/api/builds/{buildId}": {
         parameters: {
             query?: never;
@@ -379,7 +362,7 @@ export interface paths {
         get?: never;
         put?: never;
         /** Says that the builder's licence was seen, which opens the last stage. */
-        post: operations["Licences.see"];
+        post: operations["Builds.seeLicence"];
         delete?: never;
         options?: never;
         head?: never;
@@ -774,23 +757,6 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
-    "/api/licences": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Builds under way, and whose licence was seen. */
-        get: operations["Licences.list"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
-    };
     "/api/payments": {
         parameters: {
             query?: never;
@@ -1091,14 +1057,14 @@ export interface components {
         };
         AssignTierDto: {
             /** Format: uuid */
+            personId: string;
+            /** Format: uuid */
             tierId: string;
             /**
              * Format: date
              * @description The first day it holds.
              */
             fromOn: string;
-            /** Format: uuid */
-            personId: string;
         };
         BankDetailsDto: {
             accountName: string;
@@ -1306,16 +1272,6 @@ export interface components {
             /** @description Oldest first. */
             events: components["schemas"]["StageEventDto"][];
         };
-        BuildSummaryDto: {
-            id: string;
-            planName: string;
-            /** @example 7 */
-            serial: number;
-            endedAt: string | null;
-            /** @description The stage its builder is on. */
-            currentStageId: string | null;
-            stages: components["schemas"]["StageSummaryDto"][];
-        };
         CancelNightDto: {
             reason: string;
         };
@@ -1356,13 +1312,13 @@ export interface components {
             startsAt?: string;
             /** Format: date-time */
             endsAt?: string;
+            benchIds?: string[];
+            mentorIds?: string[];
+            stageIds?: string[];
             title?: string;
             /** @description Not fewer than are coming. More moves the waiting list up. */
             places?: number;
             note?: string;
-            benchIds?: string[];
-            mentorIds?: string[];
-            stageIds?: string[];
         };
         CheckedNightDto: {
             /**
@@ -1421,12 +1377,12 @@ export interface components {
             demoAccounts: components["schemas"]["DemoAccountDto"][];
         };
         CreateBookingDto: {
+            /** @description Benches and instruments, 1 to 8: all of them are booked, or none. */
+            resourceIds: string[];
             /** Format: date-time */
             startsAt: string;
             /** Format: date-time */
             endsAt: string;
-            /** @description Benches and instruments, 1 to 8: all of them are booked, or none. */
-            resourceIds: string[];
             /**
              * Format: uuid
              * @description Book it for one of your groups.
@@ -1465,15 +1421,15 @@ export interface components {
             detail: string;
         };
         GrantClearanceDto: {
+            /** Format: uuid */
+            personId: string;
+            /** Format: uuid */
+            kindId: string;
             /**
              * Format: date
              * @description Last day on which it holds; leave it out for no end.
              */
             until?: string;
-            /** Format: uuid */
-            personId: string;
-            /** Format: uuid */
-            kindId: string;
         };
         GroupDto: {
             id: string;
@@ -1661,9 +1617,11 @@ export interface components {
             entry: {
                 [key: string]: string;
             };
+            /** Format: uuid */
+            instrumentId?: string;
             /**
              * Format: date-time
-             * @description When it was taken, for one that waited on a device; now where left out. Not before the stage opened.
+             * @description When it was taken, for one that waited on a device; now where left out.
              */
             takenAt?: string;
             /**
@@ -1671,11 +1629,6 @@ export interface components {
              * @example oscilloscope
              */
             method: string;
-            /**
-             * Format: uuid
-             * @description What it was read on; asked for where the check names a kind of instrument.
-             */
-            instrumentId?: string;
             /** @description The tick beside a grave caution; asked for with every reading of such a stage. */
             cautionAcknowledged?: boolean;
         };
@@ -1689,15 +1642,6 @@ export interface components {
             toleranceDb: number;
             /** @description What the stage can deliver or the next can take, dBm. */
             limitDbm: number | null;
-        };
-        LicenceDto: {
-            buildId: string;
-            builder: components["schemas"]["PersonRefDto"];
-            planName: string;
-            /** @example 7 */
-            serial: number;
-            seenAt: string | null;
-            seenBy: components["schemas"]["PersonRefDto"] | null;
         };
         LineMatchDto: {
             /** @enum {string} */
@@ -1965,16 +1909,16 @@ export interface components {
             endsAt: string;
             /** @description Days to leave out of the series (EXDATE). A day that is no night of it changes nothing. */
             skip?: string[];
-            /** @description Left out for a single night. */
-            repeat?: components["schemas"]["RepeatDto"];
-            /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
-            instead?: components["schemas"]["InsteadDto"][];
             /** @description Benches the night holds; none for an evening without. */
             benchIds?: string[];
             /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
             mentorIds?: string[];
             /** @description Stages in focus. */
             stageIds?: string[];
+            /** @description Left out for a single night. */
+            repeat?: components["schemas"]["RepeatDto"];
+            /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
+            instead?: components["schemas"]["InsteadDto"][];
             title: string;
             places: number;
             note?: string;
@@ -2009,6 +1953,12 @@ export interface components {
             endsAt: string;
             /** @description Days to leave out of the series (EXDATE). A day that is no night of it changes nothing. */
             skip?: string[];
+            /** @description Benches the night holds; none for an evening without. */
+            benchIds?: string[];
+            /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
+            mentorIds?: string[];
+            /** @description Stages in focus. */
+            stageIds?: string[];
             title?: string;
             places?: number;
             note?: string;
@@ -2018,12 +1968,6 @@ export interface components {
             repeat?: components["schemas"]["RepeatDto"];
             /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
             instead?: components["schemas"]["InsteadDto"][];
-            /** @description Benches the night holds; none for an evening without. */
-            benchIds?: string[];
-            /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
-            mentorIds?: string[];
-            /** @description Stages in focus. */
-            stageIds?: string[];
         };
         ProblemDto: {
             /**
@@ -2048,13 +1992,13 @@ export interface components {
             paidCount: number;
         };
         RaiseInvoiceDto: {
+            /** Format: uuid */
+            personId: string;
             /**
              * Format: date
              * @description Not before today.
              */
             dueOn: string;
-            /** Format: uuid */
-            personId: string;
             /** @enum {string} */
             kind: "dues" | "course fee" | "kit";
             description: string;
@@ -2200,14 +2144,6 @@ export interface components {
             /** @example Two turns off the output winding brought the gain down. */
             note?: string;
         };
-        StageSummaryDto: {
-            /** @enum {string} */
-            state: "not started" | "on the bench" | "with mentor" | "sent back" | "signed off" | "locked";
-            id: string;
-            position: number;
-            /** @example Pre-driver */
-            name: string;
-        };
         StartBuildDto: {
             /** Format: uuid */
             planId: string;
@@ -2269,24 +2205,24 @@ export interface components {
             perPage: number;
         };
         TakePaymentDto: {
+            /** Format: uuid */
+            personId: string;
             /**
              * Format: date
              * @description Today or before.
              */
             receivedOn: string;
-            /** Format: uuid */
-            personId: string;
-            /** @enum {string} */
-            method: "cash" | "cheque" | "transfer";
-            amountMinor: number;
             /** @description Paid in this order; what is left over is credit on account. */
             invoiceIds: string[];
-            note?: string;
             /**
              * Format: uuid
              * @description Chosen once by the form: the same key again answers with the payment already taken.
              */
             clientKey: string;
+            /** @enum {string} */
+            method: "cash" | "cheque" | "transfer";
+            amountMinor: number;
+            note?: string;
         };
         TakenDto: {
             resourceId: string;
@@ -2973,34 +2909,6 @@ export interface operations {
             };
         };
     };
-    "Builds.mySummaries": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["BuildSummaryDto"][];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
     "Builds.show": {
         parameters: {
             query?: never;
@@ -3196,7 +3104,7 @@ export interface operations {
             };
         };
     };
-    "Licences.see": {
+    "Builds.seeLicence": {
         parameters: {
             query?: never;
             header?: never;
@@ -3689,10 +3597,10 @@ export interface operations {
             query?: {
                 page?: number;
                 perPage?: number;
-                /** @description For which day the instrument would be used; today unless told. */
-                on?: string;
                 /** @description Only instruments of this kind. */
                 kindId?: string;
+                /** @description For which day the instrument would be used; today unless told. */
+                on?: string;
             };
             header?: never;
             path?: never;
@@ -3853,9 +3761,9 @@ export interface operations {
             query?: {
                 page?: number;
                 perPage?: number;
+                personId?: string;
                 /** @description `open`: anything left to pay, late or not. */
                 state?: "open" | "late" | "paid";
-                personId?: string;
             };
             header?: never;
             path?: never;
@@ -4020,34 +3928,6 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["TrialBalanceDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Licences.list": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["LicenceDto"][];
                 };
             };
             /** @description A problem document */

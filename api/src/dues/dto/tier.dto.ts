@@ -1,6 +1,6 @@
 import { ApiProperty } from '@nestjs/swagger';
-import { IsInt, IsUUID, Max, Min } from 'class-validator';
-import { IsDay, IsWords } from '../../common/validators';
+import { IsInt, Max, Min } from 'class-validator';
+import { IsDay, IsId, IsWords } from '../../common/validators';
 import type { Tier } from '../tier.entity';
 
 export class CreateTierDto {
@@ -22,11 +22,11 @@ export class CreateTierDto {
 }
 
 export class AssignTierDto {
-  @IsUUID()
+  @IsId()
   personId: string;
 
   @ApiProperty({ format: 'uuid' })
-  @IsUUID()
+  @IsId()
   tierId: string;
 
   /** The first day it holds. */
