@@ -9,6 +9,7 @@ export const commonProblems = defineProblems({
   'not-found': { status: 404, title: 'Not found' },
   'too-large': { status: 413, title: 'Too large' },
   'wrong-kind-of-file': { status: 415, title: 'The wrong kind of file' },
+  busy: { status: 409, title: 'Somebody else is at the same thing' },
   'slow-down': { status: 429, title: 'Too many tries' },
 });
 

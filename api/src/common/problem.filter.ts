@@ -2,6 +2,7 @@ import { Catch, HttpException, Logger, type ArgumentsHost, type ExceptionFilter 
 import type { Request, Response } from 'express';
 import { commonProblems } from './common.errors';
 import { DomainError } from './domain-error';
+import { wantsAnotherTry } from './retrying';
 
 interface ProblemDocument {
   type: string;
@@ -58,6 +59,8 @@ function unplanned(instance: string): ProblemDocument {
 /** What the body parser, the router and the upload handler throw is a refusal too, with words of ours. */
 function asRefusal(error: unknown): DomainError | undefined {
   if (error instanceof DomainError) return error;
+  if (wantsAnotherTry(error))
+    return commonProblems.busy('Somebody else is changing the same thing. Nothing was changed; try again.');
   const status = statusOf(error);
   if (status === undefined || status >= 500) return undefined;
   if (status === 401) return commonProblems['not-signed-in']('Sign in to go on.');
