@@ -5,6 +5,7 @@ import { LedgerModule } from '../ledger/ledger.module';
 import { MailModule } from '../mail/mail.module';
 import { PeopleModule } from '../people/people.module';
 import { AwaitingBankService } from './awaiting-bank.service';
+import { CardCheckService } from './card-check.service';
 import { CardEvents } from './card-events';
 import { CardService } from './card-service';
 import { CheckoutService } from './checkout.service';
@@ -39,6 +40,7 @@ import { WebhooksService } from './webhooks.service';
   controllers: [DuesController, InvoicesController, PaymentsController, WebhooksController],
   providers: [
     AwaitingBankService,
+    CardCheckService,
     CardEvents,
     CardService,
     CheckoutService,

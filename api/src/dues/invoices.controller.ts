@@ -2,6 +2,7 @@ import { Body, Controller, Get, HttpCode, Param, ParseUUIDPipe, Post, Query } fr
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { CardCheckService } from './card-check.service';
 import { CheckoutService } from './checkout.service';
 import { CardPaymentDto, CheckoutDto } from './dto/checkout.dto';
 import {
@@ -19,6 +20,7 @@ export class InvoicesController {
   constructor(
     private readonly invoices: InvoicesService,
     private readonly checkout: CheckoutService,
+    private readonly cardCheck: CardCheckService,
   ) {}
 
   /** What the signed-in person owes and has paid. */
@@ -60,5 +62,16 @@ export class InvoicesController {
     @Param('invoiceId', ParseUUIDPipe) invoiceId: string,
   ): Promise<CardPaymentDto> {
     return this.checkout.cardPayment(actor, invoiceId);
+  }
+
+  /** Asks the card service itself, for the page that has waited long enough for its word. */
+  @Post(':invoiceId/card-payment/check')
+  @HttpCode(200)
+  @Access('signed-in')
+  check(
+    @CurrentActor() actor: Actor,
+    @Param('invoiceId', ParseUUIDPipe) invoiceId: string,
+  ): Promise<CardPaymentDto> {
+    return this.cardCheck.check(actor, invoiceId);
   }
 }
