@@ -7,6 +7,7 @@ import { ClubService } from '../club/club.service';
 import type { Actor } from '../common/actor';
 import { isCreditorReference } from '../common/creditor-reference.rules';
 import { LedgerService } from '../ledger/ledger.service';
+import type { PeopleOnTiersPageDto } from './dto/tier.dto';
 import { TiersService } from './tiers.service';
 
 const DAY = 86_400_000;
@@ -188,7 +189,7 @@ describe('dues', () => {
       expect(body).toMatchObject({
         today: '2026-01-15',
         currency: 'GBP',
-        dues: { from: '2026-01-01', to: '2026-03-31' },
+        dues: { description: 'Dues, January to March', dueOn: '2026-01-31' },
         holdings: {
           cashBoxMinor: await ledger.balance('1000'),
           chequesInHandMinor: await ledger.balance('1010'),
@@ -210,6 +211,27 @@ describe('dues', () => {
       expect(body).toEqual(expect.arrayContaining([expect.objectContaining(tier)]));
     });
 
+    it('show who is on which, today and next, by name', async () => {
+      const tiers = test.app.get(TiersService);
+      const family = await tiers.create(ines, { name: 'family', amountMinor: 4000, months: 3 });
+      const student = await tiers.create(ines, { name: 'student', amountMinor: 500, months: 3 });
+      const someone = await person(test, { name: 'Aaron Aaronson' });
+      const list = async () =>
+        ((await agent.get('/api/tiers/people?perPage=1').expect(200)).body as PeopleOnTiersPageDto).items[0];
+      expect(await list()).toMatchObject({ personName: 'Aaron Aaronson', tierId: null, coming: null });
+      for (const [tierId, fromOn] of [
+        [family.id, '2025-03-01'],
+        [student.id, '2026-01-15'],
+        [family.id, '2026-02-01'],
+        [student.id, '2026-05-01'],
+      ] as const)
+        await tiers.assign(ines, { personId: someone.id, tierId, fromOn });
+      expect(await list()).toMatchObject({
+        tierName: 'student',
+        coming: { tierName: 'family', fromOn: '2026-02-01' },
+      });
+    });
+
     it('are not given to nobody, nor is a tier that is none', async () => {
       const fromOn = '2026-01-01';
       const nobody = { personId: randomUUID(), tierId: randomUUID(), fromOn };
@@ -228,6 +250,7 @@ describe('dues', () => {
     ['post', '/api/payments'],
     ['post', `/api/payments/${randomUUID()}/take-back`],
     ['get', '/api/tiers'],
+    ['get', '/api/tiers/people'],
     ['post', '/api/tiers'],
     ['post', '/api/tiers/assignments'],
     ['get', '/api/treasury/summary'],

@@ -723,6 +723,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/invoices/{invoiceId}/card-payment/check": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Asks the card service itself, for the page that has waited long enough for its word. */
+        post: operations["Invoices.check"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/invoices/{invoiceId}/checkout": {
         parameters: {
             query?: never;
@@ -1005,6 +1022,23 @@ export interface paths {
         put?: never;
         /** Sets a person's tier from a day on. */
         post: operations["Dues.assign"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/tiers/people": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Who is on which tier, by name. */
+        get: operations["Dues.people"];
+        put?: never;
+        post?: never;
         delete?: never;
         options?: never;
         head?: never;
@@ -1376,6 +1410,10 @@ export interface components {
             /** @description Accounts of the demo club; empty anywhere else. */
             demoAccounts: components["schemas"]["DemoAccountDto"][];
         };
+        ComingTierDto: {
+            tierName: string;
+            fromOn: string;
+        };
         CreateBookingDto: {
             /** Format: date-time */
             startsAt: string;
@@ -1411,6 +1449,15 @@ export interface components {
         DemoAccountDto: {
             email: string;
             role: string;
+        };
+        DuesRunDto: {
+            description: string;
+            /** @description The last due day among them. */
+            dueOn: string;
+            raisedMinor: number;
+            paidMinor: number;
+            count: number;
+            paidCount: number;
         };
         FieldProblemDto: {
             /**
@@ -1824,6 +1871,12 @@ export interface components {
             page: number;
             perPage: number;
         };
+        PeopleOnTiersPageDto: {
+            items: components["schemas"]["PersonOnTierDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
         PeoplePageDto: {
             items: components["schemas"]["PersonDto"][];
             total: number;
@@ -1835,6 +1888,15 @@ export interface components {
             id: string;
             name: string;
             roles: ("member" | "mentor" | "steward" | "treasurer" | "organiser")[];
+        };
+        PersonOnTierDto: {
+            personId: string;
+            personName: string;
+            /** @description Today's; null while none was given. */
+            tierId: string | null;
+            tierName: string | null;
+            /** @description The next change that was set for a later day. */
+            coming: components["schemas"]["ComingTierDto"] | null;
         };
         PersonRefDto: {
             id: string;
@@ -1982,14 +2044,6 @@ export interface components {
             /** @description Names this request in the log. */
             instance: string;
             errors?: components["schemas"]["FieldProblemDto"][];
-        };
-        QuarterDto: {
-            from: string;
-            to: string;
-            raisedMinor: number;
-            paidMinor: number;
-            count: number;
-            paidCount: number;
         };
         RaiseInvoiceDto: {
             /**
@@ -2255,7 +2309,8 @@ export interface components {
             asOf: string;
             today: string;
             currency: string;
-            dues: components["schemas"]["QuarterDto"];
+            /** @description Null until dues are raised. */
+            dues: components["schemas"]["DuesRunDto"] | null;
             holdings: components["schemas"]["HoldingsDto"];
             aged: components["schemas"]["AgeBandDto"][];
             openCount: number;
@@ -3880,6 +3935,36 @@ export interface operations {
             };
         };
     };
+    "Invoices.check": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                invoiceId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CardPaymentDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
     "Invoices.open": {
         parameters: {
             query?: never;
@@ -4462,6 +4547,37 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Dues.people": {
+        parameters: {
+            query?: {
+                page?: number;
+                perPage?: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PeopleOnTiersPageDto"];
+                };
             };
             /** @description A problem document */
             default: {
