@@ -1,5 +1,6 @@
 import type supertest from 'supertest';
 import type { Actor } from '../src/common/actor';
+import { ClubService } from '../src/club/club.service';
 import { LedgerService } from '../src/ledger/ledger.service';
 import type {
   StatementDetailDto,
@@ -9,6 +10,16 @@ import type {
 import { startTestApp, TEST_NOW, type TestApp } from './app';
 import { treasurer } from './factories/dues.factory';
 import { someoneWith } from './factories/person.factory';
+
+const LARKMOOR = {
+  name: 'Larkmoor Radio Builders',
+  address: 'Millbeck Hall, Larkmoor',
+  contactEmail: 'treasurer@larkmoor.example',
+  timeZone: 'Europe/London',
+  currency: 'GBP',
+  accountNumber: '00-41-17 3006 4417',
+  accountName: 'Larkmoor Radio Builders',
+};
 
 /** Every table money is written in. */
 const MONEY = [
@@ -29,6 +40,8 @@ export interface Desk {
   test: TestApp;
   ines: Actor;
   agent: supertest.Agent;
+  /** Whose session it is. */
+  treasurerId: string;
   /** Closes every book, for tests that must not see the money of each other. */
   empty: () => Promise<void>;
   ledger: (account: string) => Promise<number>;
@@ -43,7 +56,8 @@ export interface Desk {
 export async function startDesk(): Promise<Desk> {
   const test = await startTestApp();
   const ines = await treasurer(test);
-  const { agent } = await someoneWith(test, 'treasurer');
+  await test.app.get(ClubService).set(LARKMOOR);
+  const { agent, person } = await someoneWith(test, 'treasurer');
   const upload: Desk['upload'] = (csv, name = 'january.csv') =>
     agent.post('/api/statements').attach('file', Buffer.from(csv), name);
   const show: Desk['show'] = async (id) =>
@@ -52,6 +66,7 @@ export async function startDesk(): Promise<Desk> {
     test,
     ines,
     agent,
+    treasurerId: person.id,
     upload,
     show,
     empty: () => emptyBooks(test),

@@ -1,9 +1,9 @@
 import { randomUUID } from 'node:crypto';
 import type supertest from 'supertest';
-import { startTestApp, TEST_NOW, type TestApp } from '../../test/app';
-import { invoice, payment, treasurer } from '../../test/factories/dues.factory';
+import { TEST_NOW, type TestApp } from '../../test/app';
+import { startDesk, type Desk } from '../../test/books';
+import { invoice, payment } from '../../test/factories/dues.factory';
 import { person, signedInAs, someoneWith } from '../../test/factories/person.factory';
-import { ClubService } from '../club/club.service';
 import type { Actor } from '../common/actor';
 import { isCreditorReference } from '../common/creditor-reference.rules';
 import { LedgerService } from '../ledger/ledger.service';
@@ -13,34 +13,22 @@ import { TiersService } from './tiers.service';
 const DAY = 86_400_000;
 
 describe('dues', () => {
+  let desk: Desk;
   let test: TestApp;
   let ines: Actor;
-  /** A treasurer's session, for the whole file: signing in is slow on purpose. */
   let agent: supertest.Agent;
   let treasurerId: string;
   let outsider: supertest.Agent;
 
   beforeAll(async () => {
-    test = await startTestApp();
-    await test.app.get(ClubService).set({
-      name: 'Larkmoor Radio Builders',
-      address: 'Millbeck Hall, Larkmoor',
-      contactEmail: 'treasurer@larkmoor.example',
-      timeZone: 'Europe/London',
-      currency: 'GBP',
-      accountNumber: '00-41-17 3006 4417',
-      accountName: 'Larkmoor Radio Builders',
-    });
-    ines = await treasurer(test);
-    const signedIn = await someoneWith(test, 'treasurer');
-    agent = signedIn.agent;
-    treasurerId = signedIn.person.id;
+    desk = await startDesk();
+    ({ test, ines, agent, treasurerId } = desk);
     outsider = (await someoneWith(test, 'mentor', 'steward', 'organiser')).agent;
   });
   beforeEach(() => test.clock.set(TEST_NOW));
   afterAll(() => test.close());
 
-  const owedInBooks = () => test.app.get(LedgerService).balance('1100');
+  const owedInBooks = () => desk.ledger('1100');
 
   describe('an invoice', () => {
     it('has a number, a sound reference, and is owed in the books', async () => {

@@ -20,7 +20,8 @@ export function DrawerForm({ label, keptFrom, onSubmit, children }: DrawerFormPr
         event.preventDefault();
         onSubmit();
       }}
-      sx={{ display: 'grid', gap: '14px' }}
+      // Under a heading of its own where it has a name, else right under the drawer's title.
+      sx={{ display: 'grid', gap: '14px', mt: label ? '12px' : 0 }}
       noValidate
     >
       {keptFrom && (

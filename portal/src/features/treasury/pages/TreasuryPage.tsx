@@ -75,7 +75,8 @@ function Treasury({ summary, onTake }: { summary: Summary; onTake: (invoice: Ope
       <Box
         sx={{
           display: 'grid',
-          gridTemplateColumns: { lg: 'repeat(3, minmax(0, 1fr))' },
+          // By the room there is: an open drawer takes some of a wide screen's.
+          gridTemplateColumns: 'repeat(auto-fit, minmax(min(310px, 100%), 1fr))',
           gap: '24px 32px',
           alignItems: 'start',
         }}
