@@ -66,9 +66,7 @@ function asRefusal(error: unknown): DomainError | undefined {
     const extra = { retryAfterSeconds: AGAIN_SECONDS };
     return commonProblems.busy(
       'The server had too much to do at once and gave this up. Try again in a moment.',
-      {
-        extra,
-      },
+      { extra },
     );
   }
   const status = statusOf(error);

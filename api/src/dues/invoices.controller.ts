@@ -3,6 +3,7 @@ import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
 import { ParseIdPipe } from '../common/parse-id.pipe';
+import { CardCheckService } from './card-check.service';
 import { CheckoutService } from './checkout.service';
 import { CardPaymentDto, CheckoutDto } from './dto/checkout.dto';
 import {
@@ -20,6 +21,7 @@ export class InvoicesController {
   constructor(
     private readonly invoices: InvoicesService,
     private readonly checkout: CheckoutService,
+    private readonly cardCheck: CardCheckService,
   ) {}
 
   /** What the signed-in person owes and has paid. */
@@ -61,5 +63,16 @@ export class InvoicesController {
     @Param('invoiceId', ParseIdPipe) invoiceId: string,
   ): Promise<CardPaymentDto> {
     return this.checkout.cardPayment(actor, invoiceId);
+  }
+
+  /** Asks the card service itself, for the page that has waited long enough for its word. */
+  @Post(':invoiceId/card-payment/check')
+  @HttpCode(200)
+  @Access('signed-in')
+  check(
+    @CurrentActor() actor: Actor,
+    @Param('invoiceId', ParseIdPipe) invoiceId: string,
+  ): Promise<CardPaymentDto> {
+    return this.cardCheck.check(actor, invoiceId);
   }
 }

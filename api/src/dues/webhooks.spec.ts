@@ -125,6 +125,39 @@ describe('events of the card service', () => {
     expect(await payments()).toHaveLength(0);
   });
 
+  it.each([
+    [
+      'charge.refunded',
+      { id: 'ch_1', amount: 2400, amount_refunded: 2400 },
+      '24.00 GBP went back to the card for R-',
+    ],
+    [
+      'charge.refunded',
+      { id: 'ch_1', amount: 2400, amount_refunded: 1000 },
+      '10.00 GBP of 24.00 GBP went back to the card for R-',
+    ],
+    ['charge.refunded', { id: 'ch_2', metadata: {}, amount: 5, amount_refunded: 5 }, 'for the charge ch_2'],
+    [
+      'charge.dispute.created',
+      { charge: 'ch_3', metadata: {}, amount: 2400, status: 'needs_response' },
+      'The cardholder disputes 24.00 GBP for the charge ch_3',
+    ],
+    [
+      'charge.dispute.closed',
+      { charge: 'ch_3', metadata: {}, amount: 2400, status: 'lost' },
+      'decided against the club',
+    ],
+    ['refund.failed', { charge: 'ch_3', metadata: {}, amount: 2400 }, 'did not reach the card'],
+  ])('that take card money back are shown to the treasurer: %s %#', async (type, changes, words) => {
+    await outcomeOf(completed(visit));
+    expect(await outcomeOf(cardEvent(type, visit, changes))).toBe('needs a look');
+    const { agent } = await someoneWith(test, 'treasurer');
+    const { body } = await agent.get('/api/treasury/summary').expect(200);
+    const notes = (body as { cardNotes: { note: string }[] }).cardNotes.map(({ note }) => note);
+    expect(notes).toContainEqual(expect.stringContaining(words));
+    expect(await payments()).toHaveLength(1);
+  });
+
   it('of a kind that nothing here acts on are noted', async () => {
     expect(await outcomeOf(cardEvent('customer.created', visit))).toBe('noted');
     expect(await outcomeOf(cardEvent('payout.paid', visit))).toBe('noted');

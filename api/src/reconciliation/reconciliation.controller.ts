@@ -8,7 +8,8 @@ import { ParseIdPipe } from '../common/parse-id.pipe';
 import { MatchLineDto } from './dto/match-line.dto';
 import { StatementDetailDto, StatementDto, StatementLineDto, StatementsPageDto } from './dto/statement.dto';
 import { ReconciliationService } from './reconciliation.service';
-import { StatementImportService, type UploadedStatement } from './statement-import.service';
+import type { UploadedStatement } from './statement-file';
+import { StatementImportService } from './statement-import.service';
 
 const LARGEST_BYTES = 1024 * 1024;
 

@@ -267,6 +267,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/builds/mine/summary": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** How far one's own builds are: the states of their stages, and nothing of what is in them. */
+        get: operations["Builds.mySummaries"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/builds/{buildId}": {
         parameters: {
             query?: never;
@@ -362,7 +379,7 @@ export interface paths {
         get?: never;
         put?: never;
         /** Says that the builder's licence was seen, which opens the last stage. */
-        post: operations["Builds.seeLicence"];
+        post: operations["Licences.see"];
         delete?: never;
         options?: never;
         head?: never;
@@ -723,6 +740,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/invoices/{invoiceId}/card-payment/check": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Asks the card service itself, for the page that has waited long enough for its word. */
+        post: operations["Invoices.check"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/invoices/{invoiceId}/checkout": {
         parameters: {
             query?: never;
@@ -749,6 +783,23 @@ export interface paths {
         };
         /** Every account with its balance on its side. */
         get: operations["Ledger.trialBalance"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/licences": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Builds under way, and whose licence was seen. */
+        get: operations["Licences.list"];
         put?: never;
         post?: never;
         delete?: never;
@@ -1005,6 +1056,23 @@ export interface paths {
         put?: never;
         /** Sets a person's tier from a day on. */
         post: operations["Dues.assign"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/tiers/people": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Who is on which tier, by name. */
+        get: operations["Dues.people"];
+        put?: never;
+        post?: never;
         delete?: never;
         options?: never;
         head?: never;
@@ -1272,6 +1340,16 @@ export interface components {
             /** @description Oldest first. */
             events: components["schemas"]["StageEventDto"][];
         };
+        BuildSummaryDto: {
+            id: string;
+            planName: string;
+            /** @example 7 */
+            serial: number;
+            endedAt: string | null;
+            /** @description The stage its builder is on. */
+            currentStageId: string | null;
+            stages: components["schemas"]["StageSummaryDto"][];
+        };
         CancelNightDto: {
             reason: string;
         };
@@ -1376,6 +1454,10 @@ export interface components {
             /** @description Accounts of the demo club; empty anywhere else. */
             demoAccounts: components["schemas"]["DemoAccountDto"][];
         };
+        ComingTierDto: {
+            tierName: string;
+            fromOn: string;
+        };
         CreateBookingDto: {
             /** @description Benches and instruments, 1 to 8: all of them are booked, or none. */
             resourceIds: string[];
@@ -1411,6 +1493,15 @@ export interface components {
         DemoAccountDto: {
             email: string;
             role: string;
+        };
+        DuesRunDto: {
+            description: string;
+            /** @description The last due day among them. */
+            dueOn: string;
+            raisedMinor: number;
+            paidMinor: number;
+            count: number;
+            paidCount: number;
         };
         FieldProblemDto: {
             /**
@@ -1617,11 +1708,14 @@ export interface components {
             entry: {
                 [key: string]: string;
             };
-            /** Format: uuid */
+            /**
+             * Format: uuid
+             * @description What it was read on; asked for where the check names a kind of instrument.
+             */
             instrumentId?: string;
             /**
              * Format: date-time
-             * @description When it was taken, for one that waited on a device; now where left out.
+             * @description When it was taken, for one that waited on a device; now where left out. Not before the stage opened.
              */
             takenAt?: string;
             /**
@@ -1642,6 +1736,15 @@ export interface components {
             toleranceDb: number;
             /** @description What the stage can deliver or the next can take, dBm. */
             limitDbm: number | null;
+        };
+        LicenceDto: {
+            buildId: string;
+            builder: components["schemas"]["PersonRefDto"];
+            planName: string;
+            /** @example 7 */
+            serial: number;
+            seenAt: string | null;
+            seenBy: components["schemas"]["PersonRefDto"] | null;
         };
         LineMatchDto: {
             /** @enum {string} */
@@ -1824,6 +1927,12 @@ export interface components {
             page: number;
             perPage: number;
         };
+        PeopleOnTiersPageDto: {
+            items: components["schemas"]["PersonOnTierDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
         PeoplePageDto: {
             items: components["schemas"]["PersonDto"][];
             total: number;
@@ -1835,6 +1944,15 @@ export interface components {
             id: string;
             name: string;
             roles: ("member" | "mentor" | "steward" | "treasurer" | "organiser")[];
+        };
+        PersonOnTierDto: {
+            personId: string;
+            personName: string;
+            /** @description Today's; null while none was given. */
+            tierId: string | null;
+            tierName: string | null;
+            /** @description The next change that was set for a later day. */
+            coming: components["schemas"]["ComingTierDto"] | null;
         };
         PersonRefDto: {
             id: string;
@@ -1982,14 +2100,6 @@ export interface components {
             /** @description Names this request in the log. */
             instance: string;
             errors?: components["schemas"]["FieldProblemDto"][];
-        };
-        QuarterDto: {
-            from: string;
-            to: string;
-            raisedMinor: number;
-            paidMinor: number;
-            count: number;
-            paidCount: number;
         };
         RaiseInvoiceDto: {
             /** Format: uuid */
@@ -2144,6 +2254,14 @@ export interface components {
             /** @example Two turns off the output winding brought the gain down. */
             note?: string;
         };
+        StageSummaryDto: {
+            /** @enum {string} */
+            state: "not started" | "on the bench" | "with mentor" | "sent back" | "signed off" | "locked";
+            id: string;
+            position: number;
+            /** @example Pre-driver */
+            name: string;
+        };
         StartBuildDto: {
             /** Format: uuid */
             planId: string;
@@ -2255,7 +2373,8 @@ export interface components {
             asOf: string;
             today: string;
             currency: string;
-            dues: components["schemas"]["QuarterDto"];
+            /** @description Null until dues are raised. */
+            dues: components["schemas"]["DuesRunDto"] | null;
             holdings: components["schemas"]["HoldingsDto"];
             aged: components["schemas"]["AgeBandDto"][];
             openCount: number;
@@ -2909,6 +3028,34 @@ export interface operations {
             };
         };
     };
+    "Builds.mySummaries": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildSummaryDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
     "Builds.show": {
         parameters: {
             query?: never;
@@ -3104,7 +3251,7 @@ export interface operations {
             };
         };
     };
-    "Builds.seeLicence": {
+    "Licences.see": {
         parameters: {
             query?: never;
             header?: never;
@@ -3880,6 +4027,36 @@ export interface operations {
             };
         };
     };
+    "Invoices.check": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                invoiceId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CardPaymentDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
     "Invoices.open": {
         parameters: {
             query?: never;
@@ -3928,6 +4105,34 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["TrialBalanceDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Licences.list": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["LicenceDto"][];
                 };
             };
             /** @description A problem document */
@@ -4462,6 +4667,37 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Dues.people": {
+        parameters: {
+            query?: {
+                page?: number;
+                perPage?: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PeopleOnTiersPageDto"];
+                };
             };
             /** @description A problem document */
             default: {

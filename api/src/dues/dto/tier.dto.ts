@@ -34,6 +34,29 @@ export class AssignTierDto {
   fromOn: string;
 }
 
+export class ComingTierDto {
+  tierName: string;
+  fromOn: string;
+}
+
+/** Somebody of the club, and the tier they are on. */
+export class PersonOnTierDto {
+  personId: string;
+  personName: string;
+  /** Today's; null while none was given. */
+  tierId: string | null;
+  tierName: string | null;
+  /** The next change that was set for a later day. */
+  coming: ComingTierDto | null;
+}
+
+export class PeopleOnTiersPageDto {
+  items: PersonOnTierDto[];
+  total: number;
+  page: number;
+  perPage: number;
+}
+
 export class TierDto {
   id: string;
   name: string;
