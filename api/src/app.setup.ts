@@ -1,4 +1,3 @@
-import { existsSync } from 'node:fs';
 import path from 'node:path';
 import { RequestMethod } from '@nestjs/common';
 import type { NestExpressApplication } from '@nestjs/platform-express';
@@ -12,13 +11,14 @@ import { ProblemFilter } from './common/problem.filter';
 import { validationPipe } from './common/validation.pipe';
 import { Environment } from './config/environment';
 import { setUpDocumentation } from './openapi.document';
+import { servePortal } from './portal-pages';
 
 /** Everything between the socket and the controllers; the same in the running product and in the tests. */
 export function setUpApp(app: NestExpressApplication): void {
   const environment = app.get(Environment);
   app.useLogger(app.get(Logger));
   app.enableShutdownHooks();
-  app.set('trust proxy', 'loopback');
+  app.set('trust proxy', environment.TRUSTED_PROXY ?? false);
   app.setGlobalPrefix('api', { exclude: [{ path: 'problems{/*rest}', method: RequestMethod.GET }] });
   app.use(helmet({ contentSecurityPolicy: { directives: contentPolicy(environment) } }));
   app.use(compression());
@@ -50,26 +50,4 @@ function contentPolicy({ PUBLIC_URL }: Environment): Record<string, string[] | n
 function forbidStoring(_request: Request, response: Response, next: NextFunction): void {
   response.setHeader('Cache-Control', 'no-store');
   next();
-}
-
-/** The built portal: hashed files for a year, the page itself asked for anew, and the page for every deep link. */
-function servePortal(app: NestExpressApplication, folder: string): void {
-  const page = path.join(folder, 'index.html');
-  if (!existsSync(page)) return;
-  app.useStaticAssets(path.join(folder, 'assets'), {
-    prefix: '/assets',
-    immutable: true,
-    maxAge: '1y',
-    fallthrough: false,
-  });
-  app.useStaticAssets(folder, { index: false, maxAge: 0 });
-  app.use((request: Request, response: Response, next: NextFunction) => {
-    const isPage =
-      request.method === 'GET' &&
-      !/^\/(api|assets|problems)(\/|$)/.test(request.path) &&
-      request.accepts('html');
-    if (!isPage) return next();
-    response.setHeader('Cache-Control', 'no-cache');
-    response.sendFile(page);
-  });
 }

@@ -26,8 +26,18 @@ export interface TestApp {
 /** The whole API on a database of its own and a clock that stands at {@link TEST_NOW}. */
 export async function startTestApp(overrides: Partial<Environment> = {}): Promise<TestApp> {
   const database = await createDatabase();
+  const test = await appOn(database.url, overrides);
+  const close = async (): Promise<void> => {
+    await test.close();
+    await database.drop();
+  };
+  return { ...test, close };
+}
+
+/** Another process of the API on a database that is there already: it knows nothing of what the first one read. */
+export async function appOn(url: string, overrides: Partial<Environment> = {}): Promise<TestApp> {
   const clock = new SettableClock(TEST_NOW);
-  const environment = readEnvironment({ ...testEnvironment(database.url), ...overrides });
+  const environment = readEnvironment({ ...testEnvironment(url), ...overrides });
   const module = await Test.createTestingModule({ imports: [AppModule.on(clock)] })
     .overrideProvider(Environment)
     .useValue(environment)
@@ -36,10 +46,6 @@ export async function startTestApp(overrides: Partial<Environment> = {}): Promis
   setUpApp(app);
   await app.listen(0, '127.0.0.1');
   const server = app.getHttpServer();
-  const close = async (): Promise<void> => {
-    await app.close();
-    await database.drop();
-  };
   const baseUrl = await app.getUrl();
   return {
     app,
@@ -48,7 +54,7 @@ export async function startTestApp(overrides: Partial<Environment> = {}): Promis
     dataSource: app.get(DataSource),
     http: () => supertest.agent(server),
     baseUrl,
-    close,
+    close: () => app.close(),
   };
 }
 

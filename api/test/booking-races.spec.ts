@@ -47,7 +47,7 @@ describe('racing for benches and instruments', () => {
   };
   const itemsOf = (ids: string[]): Promise<{ booking_id: string; resource_id: string }[]> =>
     test.dataSource.query(
-      'SELECT booking_id, resource_id FROM booking_item WHERE resource_id = ANY ($1) AND cancelled_at IS NULL',
+      'SELECT booking_id, resource_id FROM booking_item WHERE resource_id = ANY ($1) AND holds',
       [ids],
     );
 

@@ -175,6 +175,25 @@ describe('the database', () => {
     expect(await broken(later, [id])).toBe('check_mark_is_fixed');
   });
 
+  it.each(['reading', 'build_stage_event', 'check_mark', 'photo'])('empties no record: %s', async (table) => {
+    expect(await broken(`TRUNCATE ${table} CASCADE`, [])).toBe(`${table}_is_fixed`);
+  });
+
+  it('signs nothing off that was worked out of a reading taken again since', async () => {
+    const started = await startedBuild(test);
+    await sendSource(started);
+    await settleAmplifier(started);
+    await started.agent.post(started.stageAt('Source', 'withdraw')).expect(200);
+    expect(await copied(started, `'{"kept_at": "2026-01-16T00:00:00Z"}'`)).toBeUndefined();
+    expect(
+      await broken(
+        `INSERT INTO build_stage_event (build_id, stage_id, position, kind, by_person_id, at)
+         VALUES ($1, $2, 1, 'sent', $3, now())`,
+        [started.build.id, started.stage('Amplifier').id, started.builder.id],
+      ),
+    ).toBe('build_stage_event_worked_out_afresh');
+  });
+
   it('keeps one live build for each person and plan, and a build with its builder', async () => {
     const { build, builder } = await startedBuild(test);
     const another = `INSERT INTO build (person_id, plan_id, edition_id, serial, started_at) SELECT person_id, plan_id, edition_id, 99, now() FROM build WHERE id = $1`;
@@ -205,5 +224,8 @@ describe('the database', () => {
     ];
     expect(await broken(add, [...at, 'image/png', Buffer.alloc(6 * 1024 * 1024 + 1)])).toBe('photo_size');
     expect(await broken(add, [...at, 'image/svg+xml', Buffer.alloc(1)])).toBe('photo_type_known');
+    for (let count = 0; count < 12; count += 1)
+      expect(await broken(add, [...at, 'image/png', Buffer.alloc(1)])).toBeUndefined();
+    expect(await broken(add, [...at, 'image/png', Buffer.alloc(1)])).toBe('photo_no_more_than_twelve');
   });
 });

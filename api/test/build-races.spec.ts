@@ -1,4 +1,4 @@
-import { sendSource, settleSource, SOURCE_ENTRY, startedBuild } from './factories/build.factory';
+import { PNG, sendSource, settleSource, SOURCE_ENTRY, startedBuild } from './factories/build.factory';
 import { PASSWORD, person } from './factories/person.factory';
 import { startTestApp, type TestApp } from './app';
 
@@ -76,6 +76,29 @@ describe('builds under a race', () => {
     const cookie = await cookieOf(one.email);
     const twice = [1, 2].map(() => post('/api/builds', cookie, { planId: build.planId }));
     expect(await statuses(twice)).toEqual([201, 409]);
+  });
+
+  it('of sixteen photos sent at once a check keeps twelve, and refuses the others with the reason', async () => {
+    const started = await startedBuild(test);
+    const cookie = await cookieOf(started.builder.email);
+    const send = (index: number): Promise<Response> => {
+      const body = new FormData();
+      const picture = Buffer.concat([PNG, Buffer.from([index])]);
+      body.set('photo', new Blob([picture], { type: 'image/png' }), 'board.png');
+      const address = `${test.baseUrl}${started.checkAt('Photo of the board', 'photos')}`;
+      return fetch(address, { method: 'POST', headers: { cookie }, body });
+    };
+    const answers = await Promise.all(Array.from({ length: 16 }, (_, index) => send(index)));
+    const refused = answers.filter(({ status }) => status === 409);
+    expect(refused).toHaveLength(4);
+    expect(await refused[0]?.json()).toMatchObject({
+      type: '/problems/photos-enough',
+      detail: expect.stringMatching(/^Photo of the board has 12 photos/) as string,
+    });
+    const photos = (await started.now()).stages[0]?.checks[2]?.photos ?? [];
+    expect(photos).toHaveLength(12);
+    await started.agent.delete(photos[0]?.url ?? '').expect(204);
+    expect((await send(16)).status).toBe(201);
   });
 
   it('ticks pressed at once are one mark', async () => {

@@ -1,4 +1,12 @@
-import { sendSource, settleAmplifier, SOURCE_ENTRY, startedBuild } from './factories/build.factory';
+import type { BuildStageDto } from '../src/builds/dto/build-stage.dto';
+import {
+  sendSource,
+  settleAmplifier,
+  SOURCE_ENTRY,
+  startedBuild,
+  type StartedBuild,
+} from './factories/build.factory';
+import { someoneWith } from './factories/person.factory';
 import { instrument, kind } from './factories/bench.factory';
 import { smallPlan } from './factories/plan.factory';
 import { startTestApp, TEST_NOW, type TestApp } from './app';
@@ -64,7 +72,8 @@ describe('a reading', () => {
         .send({ method: 'oscilloscope', entry: { ...SOURCE_ENTRY, divisionsPeakToPeak }, takenAt })
         .expect(201);
     await keep('3.55');
-    await keep('3.0', new Date(TEST_NOW.getTime() + HOUR).toISOString());
+    const late = await keep('3.0', new Date(TEST_NOW.getTime() + HOUR).toISOString());
+    expect(late.body).toMatchObject({ verdict: 'too close to call', isSuperseded: true });
     const shown = (await now()).stages[0]?.checks.find(({ id }) => id === check('Output level at TP1').id);
     expect(shown?.readings.map(({ verdict }) => verdict)).toEqual(['too close to call', 'pass']);
     expect(shown?.isSettled).toBe(true);
@@ -105,16 +114,115 @@ describe('a reading', () => {
   });
 });
 
+describe('a time at which a reading is said to have been taken', () => {
+  const keepAt = (started: StartedBuild, title: string, takenAt: Date) =>
+    started.agent
+      .post(started.checkAt(title, 'readings'))
+      .send({ method: 'oscilloscope', entry: SOURCE_ENTRY, takenAt: takenAt.toISOString() });
+  const after = (milliseconds: number) => new Date(TEST_NOW.getTime() + milliseconds);
+
+  it('lies neither before the build was begun nor in the time to come', async () => {
+    const started = await startedBuild(test);
+    test.clock.advance(HOUR);
+    for (const takenAt of [after(-1), after(2 * HOUR)]) {
+      const { body } = await keepAt(started, 'Output level at TP1', takenAt).expect(422);
+      expect(body.errors).toMatchObject([{ pointer: '#/takenAt' }]);
+    }
+    await keepAt(started, 'Output level at TP1', after(0)).expect(201);
+  });
+
+  it('does not lie before the stage opened', async () => {
+    const started = await startedBuild(test);
+    test.clock.advance(HOUR);
+    await sendSource(started);
+    test.clock.advance(HOUR);
+    const { body } = await keepAt(started, 'Output level at TP2', after(HOUR - 1)).expect(422);
+    expect(body.errors).toEqual([
+      { pointer: '#/takenAt', detail: 'That was before Amplifier could be begun.' },
+    ]);
+    await keepAt(started, 'Output level at TP2', after(HOUR)).expect(201);
+  });
+});
+
+describe('what is worked out of readings that were taken again while its stage was with a mentor', () => {
+  /** Both stages sent, the first sent back, mended by another level, sent again and signed off. */
+  const stale = async () => {
+    const started = await startedBuild(test);
+    await sendSource(started);
+    await settleAmplifier(started);
+    await started.agent.post(started.stageAt('Amplifier', 'submit')).send({}).expect(200);
+    const { agent: mentor } = await someoneWith(test, 'mentor');
+    await mentor.post(started.stageAt('Source', 'send-back')).send({ note: 'Once more.' }).expect(200);
+    test.clock.advance(HOUR);
+    const reading = { method: 'oscilloscope', entry: { ...SOURCE_ENTRY, divisionsPeakToPeak: '3.6' } };
+    const { body } = await started.agent
+      .post(started.checkAt('Output level at TP1', 'readings'))
+      .send(reading)
+      .expect(201);
+    await started.agent.post(started.stageAt('Source', 'submit')).send({}).expect(200);
+    await mentor.post(started.checkAt('Looked at the joints', 'marks')).expect(201);
+    await mentor.post(started.stageAt('Source', 'sign-off')).send({}).expect(200);
+    return { started, mentor, again: body.value as number };
+  };
+  const inputOf = async ({ now }: StartedBuild) => (await now()).stages[1]?.checks[0]?.readings.at(-1)?.value;
+
+  it('is not signed off, and the words say why', async () => {
+    const { started, mentor } = await stale();
+    const { body } = await mentor.post(started.stageAt('Amplifier', 'sign-off')).send({}).expect(409);
+    expect(body).toMatchObject({ type: '/problems/readings-out-of-date' });
+    expect(body.detail).toMatch(/^Input level at TP1 of Amplifier was worked out/);
+  });
+
+  it('is worked out anew when the stage is sent back, and signed off then', async () => {
+    const { started, mentor, again } = await stale();
+    await mentor.post(started.stageAt('Amplifier', 'send-back')).send({ note: 'Once more.' }).expect(200);
+    expect(await inputOf(started)).toBe(again);
+    await started.agent.post(started.stageAt('Amplifier', 'submit')).send({}).expect(200);
+    await mentor.post(started.stageAt('Amplifier', 'sign-off')).send({}).expect(200);
+  });
+
+  it('is worked out anew when the builder takes the stage back', async () => {
+    const { started, again } = await stale();
+    const { body } = await started.agent.post(started.stageAt('Amplifier', 'withdraw')).expect(200);
+    expect((body as BuildStageDto).checks.slice(0, 3).map(({ readings }) => readings.length)).toEqual([
+      2, 1, 2,
+    ]);
+    expect(await inputOf(started)).toBe(again);
+  });
+
+  it('is not sent either, should a reading have come past the services', async () => {
+    const started = await startedBuild(test);
+    await sendSource(started);
+    await settleAmplifier(started);
+    await started.agent.post(started.stageAt('Source', 'withdraw')).expect(200);
+    await test.dataSource.query(
+      `INSERT INTO reading SELECT (jsonb_populate_record(r, jsonb_build_object('id', gen_random_uuid(),
+         'sequence', nextval('reading_sequence_seq')))).* FROM reading r WHERE check_id = $1`,
+      [started.check('Output level at TP1').id],
+    );
+    await started.agent.post(started.stageAt('Source', 'submit')).send({}).expect(200);
+    const { body } = await started.agent.post(started.stageAt('Amplifier', 'submit')).send({}).expect(409);
+    expect(body).toMatchObject({ type: '/problems/readings-out-of-date' });
+  });
+});
+
 describe('an instrument', () => {
   const measured = async () => {
     const scopes = await kind(test, { name: `Scope ${Math.random()}`, needsCalibration: true });
     const started = await startedBuild(test, smallPlan({}, scopes.name));
-    const keep = (instrumentId: string, takenAt?: string) =>
+    const keep = (instrumentId?: string, takenAt?: string) =>
       started.agent
         .post(started.checkAt('Output level at TP1', 'readings'))
         .send({ method: 'oscilloscope', entry: SOURCE_ENTRY, instrumentId, takenAt });
     return { started, scopes, keep };
   };
+
+  it('is to be named where the check names its kind', async () => {
+    const { keep, scopes } = await measured();
+    const { body } = await keep().expect(422);
+    const detail = `Choose the ${scopes.name.toLowerCase()} it was read on.`;
+    expect(body.errors).toEqual([{ pointer: '#/instrumentId', detail }]);
+  });
 
   it('is named in the reading with its calibration as it was then', async () => {
     const { scopes, keep } = await measured();
@@ -148,6 +256,16 @@ describe('an instrument', () => {
     const meter = await instrument(test);
     for (const id of [broken.id, meter.id, '00000000-0000-4000-8000-000000000000'])
       expect((await keep(id).expect(422)).body.errors[0].pointer).toBe('#/instrumentId');
+  });
+
+  it('is judged the same in whatever spelling its id comes', async () => {
+    const { scopes, keep } = await measured();
+    const past = await instrument(test, { kindId: scopes.id, calibrationDueOn: '2026-01-14' });
+    const { body } = await keep(past.id.toUpperCase()).expect(422);
+    expect(body.detail).toMatch(/calibration of .* ran out on 14 Jan 2026/);
+    const fit = await instrument(test, { kindId: scopes.id, calibrationDueOn: '2026-01-15' });
+    const kept = await keep(fit.id.toUpperCase()).expect(201);
+    expect(kept.body).toMatchObject({ instrumentId: fit.id });
   });
 
   it('choices come with the reason against those that cannot be chosen', async () => {

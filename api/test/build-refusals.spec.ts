@@ -270,6 +270,7 @@ describe('what builds refuse', () => {
   });
 
   describe('uploads', () => {
+    const NO_FORMS = ['multipart/mixed; boundary=x', 'multipart/related; boundary=x'];
     const upload = () => started.agent.post(started.checkAt('Photo of the board', 'photos'));
 
     it('of another kind, whatever the name says', async () => {
@@ -307,7 +308,10 @@ describe('what builds refuse', () => {
     });
 
     it('that are no form', async () => {
-      await refused(upload().send({ photo: 'x' }), 422, 'invalid-input');
+      await refused(upload(), 422, 'invalid-input');
+      await refused(upload().send({ photo: 'x' }), 415, 'wrong-kind-of-file');
+      for (const type of NO_FORMS)
+        await refused(upload().set('content-type', type).send('--x--\r\n'), 415, 'wrong-kind-of-file');
     });
   });
 });

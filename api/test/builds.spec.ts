@@ -1,5 +1,6 @@
 import { BuildsService } from '../src/builds/builds.service';
 import type { LicenceDto } from '../src/builds/dto/licence.dto';
+import type { BuildDto } from '../src/builds/dto/build.dto';
 import {
   PNG,
   sendSource,
@@ -210,6 +211,53 @@ describe('a build', () => {
       await agent.post(stageAt('Source', 'submit')).send({}).expect(200);
       const kept = (await now()).stages[0]?.checks[2]?.photos[0];
       await agent.delete(kept?.url ?? '').expect(409);
+    });
+  });
+
+  it('is summed up for every page by the states of its stages alone', async () => {
+    const { agent, build } = await startedBuild(test);
+    const { body } = await agent.get('/api/builds/mine/summary').expect(200);
+    const [whole] = (await agent.get('/api/builds/mine').expect(200)).body as BuildDto[];
+    const { id, planName, serial, endedAt, currentStageId } = build;
+    const stages = whole?.stages.map((stage) => ({
+      ...{ id: stage.id, position: stage.position, name: stage.name, state: stage.state },
+    }));
+    expect(body).toEqual([{ id, planName, serial, endedAt, currentStageId, stages }]);
+    // Nothing of what is in a build is read for it, nor for the question who is on a stage.
+    await test.dataSource.query('ALTER TABLE reading RENAME TO reading_out_of_reach');
+    try {
+      await agent.get('/api/builds/mine/summary').expect(200);
+      const people = await test.app.get(BuildsService).peopleOnStages([currentStageId ?? '']);
+      expect(people).toHaveLength(1);
+    } finally {
+      await test.dataSource.query('ALTER TABLE reading_out_of_reach RENAME TO reading');
+    }
+    const { agent: other } = await someoneWith(test);
+    expect((await other.get('/api/builds/mine/summary').expect(200)).body).toEqual([]);
+    await test.http().get('/api/builds/mine/summary').expect(401);
+  });
+
+  describe('on a server whose clock is behind another’s', () => {
+    const ahead = <T>(work: () => PromiseLike<T>): Promise<T> => {
+      test.clock.advance(5_000);
+      return Promise.resolve(work()).finally(() => test.clock.advance(-5_000));
+    };
+
+    it('has its marks taken back', async () => {
+      const started = await startedBuild(test);
+      await ahead(() => sendSource(started));
+      const { agent: mentor } = await someoneWith(test, 'mentor');
+      await ahead(() => mentor.post(started.checkAt('Looked at the joints', 'marks')).expect(201));
+      await mentor.post(started.stageAt('Source', 'send-back')).send({ note: 'Once more.' }).expect(200);
+      await started.agent.delete(started.checkAt('Board cleaned', 'marks')).expect(204);
+      expect((await started.now()).stages[0]?.checks.filter(({ mark }) => mark !== null)).toEqual([]);
+    });
+
+    it('has its gain worked out of a level that seems to come from the future', async () => {
+      const started = await startedBuild(test);
+      await ahead(() => sendSource(started));
+      await settleAmplifier(started);
+      expect((await started.now()).stages[1]?.checks[2]?.readings).toHaveLength(1);
     });
   });
 

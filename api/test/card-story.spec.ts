@@ -12,6 +12,7 @@ const KEYS = { secretKey: 'sk_test_ferrite_row', webhookSecret: 'whsec_test_ferr
 const PAYS = '4242424242424242';
 const DECLINED = '4000000000000002';
 const PAYS_LATE = '4000000000001018';
+const FAILS_LATE = '4000000000002024';
 
 /** The whole way of a card payment, with the stand-in as a program of its own and the official SDK between. */
 describe('paying by card', () => {
@@ -114,6 +115,70 @@ describe('paying by card', () => {
     expect(body).toMatchObject({ payments: [{ amountMinor: 2400 }] });
   });
 
+  describe('when no word of it comes', () => {
+    beforeEach(() => cards.control('pause'));
+    afterEach(() => cards.control('resume'));
+
+    const check = async () =>
+      (await agent.post(`/api/invoices/${raised.id}/card-payment/check`).expect(200)).body as {
+        state: string;
+        receiptId: string | null;
+      };
+
+    it('is asked of the card service itself, once for all, and its late word changes nothing', async () => {
+      const url = await open();
+      expect(await check()).toMatchObject({ state: 'open' });
+      await pay(url, PAYS);
+      expect(await cardPayment()).toMatchObject({ state: 'open' });
+      const answers = await Promise.all([check(), check(), check()]);
+      expect(answers.map(({ state }) => state)).toEqual(['paid', 'paid', 'paid']);
+      await cards.control('resume');
+      await cards.control('deliver-out-of-order');
+      const { body } = await agent.get('/api/dues/mine').expect(200);
+      expect((body as { payments: unknown[] }).payments).toHaveLength(1);
+    });
+
+    it('tells a payment that the bank has yet to confirm from one that it refused', async () => {
+      await pay(await open(), FAILS_LATE);
+      expect(await check()).toMatchObject({ state: 'confirming' });
+      await cards.control('confirm-late');
+      expect(await check()).toMatchObject({ state: 'failed' });
+    });
+  });
+
+  it('gets a new page where the card service has lost the old one', async () => {
+    const lost = await open();
+    await test.dataSource.query(`UPDATE checkout SET session_id = 'cs_test_lost' WHERE invoice_id = $1`, [
+      raised.id,
+    ]);
+    const fresh = await open();
+    expect(fresh).not.toBe(lost);
+    expect((await fetch(fresh)).status).toBe(200);
+  });
+
+  it('gets a new page where the first answer was lost and the words have changed since', async () => {
+    const lost = await open();
+    await test.dataSource.query(`UPDATE checkout SET session_id = NULL, url = NULL WHERE invoice_id = $1`, [
+      raised.id,
+    ]);
+    await test.dataSource.query(`UPDATE invoice SET description = 'Dues, put right' WHERE id = $1`, [
+      raised.id,
+    ]);
+    const urls = await Promise.all([open(), open()]);
+    expect(new Set(urls).size).toBe(1);
+    expect(urls[0]).not.toBe(lost);
+    expect(await (await fetch(urls[0] ?? '')).text()).toContain('Dues, put right');
+  });
+
+  it('gets a new page for what is open now where the first answer was lost', async () => {
+    await open();
+    await test.dataSource.query(`UPDATE checkout SET session_id = NULL, url = NULL WHERE invoice_id = $1`, [
+      raised.id,
+    ]);
+    await payment(test, ines, raised, { amountMinor: 1000, receivedOn: '2026-01-01' });
+    expect(await (await fetch(await open())).text()).toContain('£14.00');
+  });
+
   it('is refused for an invoice that is paid', async () => {
     await payment(test, ines, raised, { receivedOn: '2026-01-01' });
     const { body } = await agent.post(`/api/invoices/${raised.id}/checkout`).expect(409);
@@ -131,6 +196,15 @@ describe('paying by card', () => {
         .post(`/api/invoices/${own.id}/checkout`)
         .expect(409);
       expect(body).toMatchObject({ type: '/problems/card-page-unavailable' });
+      await away.dataSource.query(`UPDATE checkout SET session_id = 'cs_test_1' WHERE invoice_id = $1`, [
+        own.id,
+      ]);
+      const asked = await (
+        await signedInAs(away, someone)
+      )
+        .post(`/api/invoices/${own.id}/card-payment/check`)
+        .expect(409);
+      expect(asked.body).toMatchObject({ type: '/problems/card-service-silent' });
     } finally {
       await away.close();
     }

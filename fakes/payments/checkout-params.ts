@@ -10,7 +10,6 @@ type IntentParam = keyof Stripe.Checkout.SessionCreateParams.PaymentIntentData;
 
 /** What a session may be opened with here; anything else is refused rather than silently ignored. */
 export const SESSION_PARAMS = [
-  'allowed_payment_method_types',
   'cancel_url',
   'client_reference_id',
   'customer_email',
@@ -21,7 +20,6 @@ export const SESSION_PARAMS = [
   'metadata',
   'mode',
   'payment_intent_data',
-
   'submit_type',
   'success_url',
 ] satisfies SessionParam[];

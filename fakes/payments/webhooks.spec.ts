@@ -1,4 +1,10 @@
+import { JsonFile } from '../common/json-file';
 import { idOf, paidSession, type Scene, startScene, verified, WEBHOOK_SECRET } from '../testing/payments';
+import { newEvent } from './event';
+import { readSettings } from './settings';
+import type { Payout } from './shapes';
+import { Store } from './store';
+import { Webhooks } from './webhooks';
 
 let scene: Scene;
 beforeEach(async () => {
@@ -120,4 +126,31 @@ describe('delivery', () => {
       error: { param: 'events' },
     });
   });
+});
+
+/** A disk that is full for a moment. */
+class FullOnce extends JsonFile {
+  private isFull = true;
+
+  override write(): void {
+    if (!this.isFull) return;
+    this.isFull = false;
+    throw new Error('no space left on device');
+  }
+}
+
+it('goes on sending after one event could not be written down', async () => {
+  const said = jest.spyOn(console, 'error').mockImplementation(() => undefined);
+  const settings = readSettings({
+    ...{ PORT: '1', FAKE_SECRET_KEY: 'sk', FAKE_WEBHOOK_SECRET: WEBHOOK_SECRET },
+    ...{ FAKE_WEBHOOK_URL: scene.receiver.url, FAKE_RETRY_FIRST_MS: '10' },
+  });
+  const webhooks = new Webhooks(new Store(new FullOnce('/nowhere/at-all.json')), settings);
+  webhooks.add({ ...newEvent('payout.paid', {} as Payout), id: 'evt_first' });
+  await scene.receiver.waitFor(1);
+  webhooks.add({ ...newEvent('payout.paid', {} as Payout), id: 'evt_second' });
+  await scene.receiver.waitFor(2);
+  expect(said).toHaveBeenCalledTimes(1);
+  webhooks.stop();
+  said.mockRestore();
 });

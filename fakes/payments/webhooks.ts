@@ -70,14 +70,24 @@ export class Webhooks {
 
   private wakeIn(ms: number): void {
     clearTimeout(this.timer);
-    if (!this.stopped.signal.aborted) this.timer = setTimeout(() => void this.sendDue(), ms);
+    if (this.stopped.signal.aborted) return;
+    const send = (): void => void this.sendDue().catch((error: unknown) => console.error(error));
+    this.timer = setTimeout(send, ms);
   }
 
   private async sendDue(): Promise<void> {
     if (this.sending) return;
     this.sending = true;
-    for (let event = this.nextDue(); event; event = this.nextDue()) await this.send(event);
-    this.sending = false;
+    try {
+      for (let event = this.nextDue(); event; event = this.nextDue()) await this.send(event);
+    } finally {
+      // Whatever went wrong with one event, the next wake-up goes on.
+      this.sending = false;
+      this.wakeForNext();
+    }
+  }
+
+  private wakeForNext(): void {
     const next = Math.min(...this.waiting().map((delivery) => delivery.nextAttemptAtMs));
     if (this.canSend() && Number.isFinite(next)) this.wakeIn(Math.max(0, next - Date.now()));
   }

@@ -14,6 +14,7 @@ import { seedMoney } from './money/year';
 import { seedNights } from './nights';
 import { PEOPLE } from './people';
 import { found, type StageSet } from './stage-set';
+import { beginSeeding, endSeeding } from './state';
 
 const PASSWORD = 'larkmoor-demo';
 
@@ -25,9 +26,10 @@ export type Counts = Record<string, number>;
  * The same on every run but for the dates. Leaves the clock where it found it.
  */
 export async function seedDemoClub(context: ServiceContext, clock: SettableClock): Promise<Counts> {
+  await beginSeeding(context.database);
   const calendar = calendarAround(clock.now(), CLUB.timeZone);
   clock.set(calendar.at(calendar.today.subtract({ days: 400 }), 10));
-  await context.get(ClubService).set({ ...CLUB, contactEmail: '' });
+  await context.get(ClubService).set(CLUB);
   const people = await seedPeople(context);
   const set: StageSet = { context, clock, calendar, as: (key) => found(people, key) };
   const inventory = await seedInventory(set);
@@ -39,8 +41,8 @@ export async function seedDemoClub(context: ServiceContext, clock: SettableClock
   const money = await seedMoney(set);
   const bookings = await seedBookings(set, inventory);
   clock.set(calendar.now);
-  await context.get(ClubService).set(CLUB);
   await sendOldMail(set);
+  await endSeeding(context.database);
   return { people: people.size, groups, nights, builds, readings, bookings, ...money };
 }
 

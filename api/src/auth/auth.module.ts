@@ -12,11 +12,11 @@ import { AuthService } from './auth.service';
 import { Passwords } from './passwords';
 import { Session } from './session.entity';
 import { SessionsService } from './sessions.service';
-import { SignInFailure } from './sign-in-failure.entity';
+import { SignInTries } from './sign-in-tries';
 
 @Module({
   imports: [
-    TypeOrmModule.forFeature([Person, Session, SignInFailure]),
+    TypeOrmModule.forFeature([Person, Session]),
     PassportModule,
     JwtModule.registerAsync({
       inject: [Environment],
@@ -31,6 +31,7 @@ import { SignInFailure } from './sign-in-failure.entity';
   providers: [
     AuthService,
     SessionsService,
+    SignInTries,
     Passwords,
     AccessTokenStrategy,
     { provide: APP_GUARD, useClass: AccessGuard },

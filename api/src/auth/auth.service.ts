@@ -1,16 +1,14 @@
 import { Injectable } from '@nestjs/common';
 import { JwtService } from '@nestjs/jwt';
 import { InjectRepository } from '@nestjs/typeorm';
-import { LessThan, MoreThan, Repository } from 'typeorm';
-import { Clock } from '../common/clock';
-import { commonProblems } from '../common/common.errors';
+import { Repository } from 'typeorm';
 import { Person } from '../people/person.entity';
 import { authProblems } from './auth.errors';
-import { accessLifeMs, FAILURES_KEPT_MS, waitBeforeNextTry } from './auth.rules';
+import { accessLifeMs } from './auth.rules';
 import type { SignInDto } from './dto/sign-in.dto';
 import { Passwords } from './passwords';
 import { SessionsService } from './sessions.service';
-import { SignInFailure } from './sign-in-failure.entity';
+import { SignInTries } from './sign-in-tries';
 import { writeRefreshToken, type RefreshToken } from './tokens';
 
 /** What goes into the two cookies. */
@@ -25,27 +23,27 @@ export interface SignedIn {
 export class AuthService {
   constructor(
     @InjectRepository(Person) private readonly people: Repository<Person>,
-    @InjectRepository(SignInFailure) private readonly failures: Repository<SignInFailure>,
+    private readonly tries: SignInTries,
     private readonly passwords: Passwords,
     private readonly sessions: SessionsService,
     private readonly jwt: JwtService,
-    private readonly clock: Clock,
   ) {}
 
   /** @throws DomainError `wrong-email-or-password` (401), `slow-down` (429) with `retryAfterSeconds` */
   async signIn({ email, password, sharedDevice = false }: SignInDto, address: string): Promise<SignedIn> {
-    await this.refuseHaste(email, address);
+    const takeBack = await this.tries.begin({ email, address });
     const person = await this.people.findOne({
       where: { email },
       select: { id: true, passwordHash: true, leftAt: true },
     });
     const isRight = await this.passwords.matches(person?.passwordHash, password);
     if (!person || !isRight || person.leftAt) {
-      await this.noteFailure(email, address);
+      await this.tries.forgetOldOnes();
       throw authProblems['wrong-email-or-password'](
         'That email and password do not match. Your email is kept.',
       );
     }
+    await takeBack();
     const token = await this.sessions.start(person.id, sharedDevice);
     return this.cookiesFor(token, sharedDevice);
   }
@@ -73,29 +71,5 @@ export class AuthService {
       refreshToken: writeRefreshToken(token),
       isSharedDevice,
     };
-  }
-
-  private async refuseHaste(email: string, address: string): Promise<void> {
-    const now = this.clock.now();
-    const since = MoreThan(new Date(now.getTime() - FAILURES_KEPT_MS));
-    const recent = await this.failures.find({
-      where: { email, address, failedAt: since },
-      order: { failedAt: 'DESC' },
-      take: 50,
-    });
-    const waitMs = waitBeforeNextTry(
-      recent.map((failure) => failure.failedAt),
-      now,
-    );
-    if (waitMs === 0) return;
-    const retryAfterSeconds = Math.ceil(waitMs / 1000);
-    const detail = `Too many tries with that email. The next one can be made in ${retryAfterSeconds} s. Your email is kept.`;
-    throw commonProblems['slow-down'](detail, { extra: { retryAfterSeconds } });
-  }
-
-  private async noteFailure(email: string, address: string): Promise<void> {
-    const failedAt = this.clock.now();
-    await this.failures.insert({ email, address, failedAt });
-    await this.failures.delete({ failedAt: LessThan(new Date(failedAt.getTime() - FAILURES_KEPT_MS)) });
   }
 }

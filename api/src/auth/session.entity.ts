@@ -20,7 +20,7 @@ export class Session {
   @Column('text')
   tokenHash: string;
 
-  /** The one before it, so that its second use is noticed. */
+  /** The one before it; whoever still holds that may sign out with it. */
   @Column('text', { nullable: true })
   previousTokenHash: string | null;
 

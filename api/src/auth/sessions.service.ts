@@ -1,12 +1,13 @@
 import { Injectable } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
-import { DataSource, IsNull } from 'typeorm';
+import { DataSource, IsNull, type EntityManager } from 'typeorm';
 import type { Actor } from '../common/actor';
 import { Clock } from '../common/clock';
+import { Environment } from '../config/environment';
 import { authProblems } from './auth.errors';
 import { refreshDecision, sessionExpiry } from './auth.rules';
 import { Session } from './session.entity';
-import { hashOf, newSecret, type RefreshToken } from './tokens';
+import { hashOf, newSecret, successorOf, type RefreshToken } from './tokens';
 
 export interface LiveSession {
   actor: Actor;
@@ -21,6 +22,7 @@ const runOut = (): Error =>
 export class SessionsService {
   constructor(
     @InjectDataSource() private readonly dataSource: DataSource,
+    private readonly environment: Environment,
     private readonly clock: Clock,
   ) {}
 
@@ -68,31 +70,37 @@ export class SessionsService {
    * @throws DomainError `session-ended` (401)
    */
   async refresh(presented: RefreshToken): Promise<RefreshToken & { isSharedDevice: boolean }> {
-    const next = await this.dataSource.transaction(async (manager) => {
-      const sessions = manager.getRepository(Session);
-      const where = { id: presented.sessionId, endedAt: IsNull() };
-      const session = await sessions.findOne({ where, lock: { mode: 'pessimistic_write' } });
-      const now = this.clock.now();
-      if (!session || session.expiresAt <= now) return undefined;
-      const presentedHash = hashOf(presented.secret);
-      const decision = refreshDecision(session, presentedHash, now);
-      if (decision === 'end') {
-        await sessions.update({ id: session.id }, { endedAt: now });
-        return undefined;
-      }
+    const secret = successorOf(presented, this.environment.JWT_SECRET);
+    const hashes = { presentedHash: hashOf(presented.secret), successorHash: hashOf(secret) };
+    const session = await this.dataSource.transaction((manager) =>
+      this.exchange(manager, presented.sessionId, hashes),
+    );
+    if (!session) throw runOut();
+    return { sessionId: session.id, secret, isSharedDevice: session.isSharedDevice };
+  }
+
+  /** @returns undefined when the session has ended, or ends by this. */
+  private async exchange(
+    manager: EntityManager,
+    id: string,
+    hashes: { presentedHash: string; successorHash: string },
+  ): Promise<Session | undefined> {
+    const sessions = manager.getRepository(Session);
+    const where = { id, endedAt: IsNull() };
+    const session = await sessions.findOne({ where, lock: { mode: 'pessimistic_write' } });
+    const now = this.clock.now();
+    if (!session || session.expiresAt <= now) return undefined;
+    const decision = refreshDecision(session, hashes, now);
+    if (decision === 'end') {
+      await sessions.update({ id }, { endedAt: now });
+      return undefined;
+    }
+    if (decision === 'rotate') {
+      const { presentedHash: previousTokenHash, successorHash: tokenHash } = hashes;
       const expiresAt = sessionExpiry(now, session.isSharedDevice);
-      const { id: sessionId, isSharedDevice } = session;
-      if (decision === 'keep') return { sessionId, secret: undefined, isSharedDevice };
-      const secret = newSecret();
-      const tokenHash = hashOf(secret);
-      await sessions.update(
-        { id: sessionId },
-        { tokenHash, previousTokenHash: presentedHash, rotatedAt: now, expiresAt },
-      );
-      return { sessionId, secret, isSharedDevice };
-    });
-    if (!next) throw runOut();
-    return { ...next, secret: next.secret ?? presented.secret };
+      await sessions.update({ id }, { tokenHash, previousTokenHash, rotatedAt: now, expiresAt });
+    }
+    return session;
   }
 
   /** Ends the session a refresh token belongs to; a token that is not that session's ends nothing. */

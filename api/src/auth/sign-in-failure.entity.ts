@@ -1,8 +1,9 @@
 import { Column, Entity, Index, PrimaryGeneratedColumn } from 'typeorm';
 
-/** A wrong password, kept an hour: in the database, because several API processes must count together. */
+/** A try whose password was not right, kept a while: in the database, because several API processes must count together. */
 @Entity()
 @Index('sign_in_failure_recent', ['email', 'failedAt'])
+@Index('sign_in_failure_from', ['address', 'failedAt'])
 export class SignInFailure {
   @PrimaryGeneratedColumn('identity', { type: 'bigint' })
   id: string;

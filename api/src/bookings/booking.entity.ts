@@ -6,6 +6,7 @@ import {
   JoinColumn,
   ManyToOne,
   PrimaryGeneratedColumn,
+  Unique,
   type Relation,
 } from 'typeorm';
 import { BuildGroup } from '../groups/build-group.entity';
@@ -14,12 +15,14 @@ import { PlanCheck } from '../plans/plan-check.entity';
 
 export type BookingKind = 'session' | 'build night';
 
-/** Benches and instruments held together for one stretch of time; what is held stands in its items. */
+/** Benches and instruments held together for one stretch of time; what is held stands in its items, one at least. */
 @Entity()
 @Index('booking_by_start', ['startsAt'])
 @Index('booking_of_person', ['personId', 'startsAt'])
 @Check('booking_kind_known', `kind IN ('session', 'build night')`)
 @Check('booking_times_ordered', `starts_at < ends_at`)
+@Check('booking_holds_unless_cancelled', `holds = (cancelled_at IS NULL OR cancelled_at > starts_at)`)
+@Unique('booking_as_held', ['id', 'startsAt', 'endsAt', 'holds'])
 @Check('booking_night_named', `kind = 'session' OR length(btrim(title)) > 0`)
 export class Booking {
   @PrimaryGeneratedColumn('uuid')
@@ -67,6 +70,10 @@ export class Booking {
 
   @Column('timestamptz', { nullable: true })
   cancelledAt: Date | null;
+
+  /** False when it was cancelled before it began; one cut short holds until then. */
+  @Column('boolean', { default: true })
+  holds: boolean;
 
   @Column('uuid', { nullable: true })
   cancelledById: string | null;

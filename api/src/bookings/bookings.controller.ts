@@ -1,7 +1,8 @@
-import { Body, Controller, Delete, Get, HttpCode, Param, ParseUUIDPipe, Post, Query } from '@nestjs/common';
+import { Body, Controller, Delete, Get, HttpCode, Param, Post, Query } from '@nestjs/common';
 import { ApiConflictResponse, ApiTags, ApiUnprocessableEntityResponse } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { ParseIdPipe } from '../common/parse-id.pipe';
 import { CancellationsService } from './cancellations.service';
 import { BookingOverlapDto, NotBookableDto } from './dto/booking-refusal.dto';
 import { BookingDto } from './dto/booking.dto';
@@ -44,7 +45,7 @@ export class BookingsController {
   @Delete(':bookingId')
   @Access('signed-in')
   @HttpCode(204)
-  cancel(@CurrentActor() actor: Actor, @Param('bookingId', ParseUUIDPipe) bookingId: string): Promise<void> {
+  cancel(@CurrentActor() actor: Actor, @Param('bookingId', ParseIdPipe) bookingId: string): Promise<void> {
     return this.cancellations.cancel(actor, bookingId);
   }
 }

@@ -6,7 +6,7 @@ export const FIND_CLASHES = `
          item.starts_at AS "startsAt", item.ends_at AS "endsAt", booking.made_at AS "madeAt"
   FROM unnest($2::timestamptz[], $3::timestamptz[]) WITH ORDINALITY AS wanted(starts_at, ends_at, ordinal)
   JOIN booking_item item
-    ON item.resource_id = ANY ($1::uuid[]) AND item.cancelled_at IS NULL
+    ON item.resource_id = ANY ($1::uuid[]) AND item.holds
    AND tstzrange(item.starts_at, item.ends_at, '[)') && tstzrange(wanted.starts_at, wanted.ends_at, '[)')
   JOIN booking ON booking.id = item.booking_id
   JOIN person ON person.id = booking.person_id
@@ -29,7 +29,7 @@ export const FIND_NEAREST_FREE = `
     SELECT unnest(tstzmultirange(wish.search) - coalesce(
       (SELECT range_agg(tstzrange(item.starts_at, item.ends_at, '[)'))
        FROM booking_item item
-       WHERE item.resource_id = ANY ($1::uuid[]) AND item.cancelled_at IS NULL
+       WHERE item.resource_id = ANY ($1::uuid[]) AND item.holds
          AND tstzrange(item.starts_at, item.ends_at, '[)') && wish.search),
       '{}'::tstzmultirange)) AS free
     FROM wish

@@ -1,5 +1,5 @@
 import { Injectable } from '@nestjs/common';
-import { Brackets, DataSource, In, IsNull, type EntityManager, type SelectQueryBuilder } from 'typeorm';
+import { DataSource, In, type EntityManager, type SelectQueryBuilder } from 'typeorm';
 import { Resource } from '../instruments/resource.entity';
 import { BookingItem } from './booking-item.entity';
 import { Booking } from './booking.entity';
@@ -40,7 +40,7 @@ export class BookingsRepository {
     booking: NewBooking,
     resourceIds: readonly string[],
   ): Promise<Booking> {
-    const uncancelled = { cancelledAt: null, cancelledById: null };
+    const uncancelled = { cancelledAt: null, cancelledById: null, holds: true };
     const made = await manager.getRepository(Booking).save({ ...booking, ...uncancelled });
     await this.insertItems(manager, made, resourceIds);
     return made;
@@ -60,13 +60,10 @@ export class BookingsRepository {
     if (booking.cancelledAt !== null) return;
     const extent = cancellation(booking, now);
     if (extent === 'over') return;
-    const cut = extent === 'rest' ? { endsAt: now } : {};
+    const given = extent === 'rest' ? { endsAt: now } : { holds: false };
     await manager
       .getRepository(Booking)
-      .update({ id: booking.id }, { ...cut, cancelledAt: now, cancelledById });
-    await manager
-      .getRepository(BookingItem)
-      .update({ bookingId: booking.id }, extent === 'rest' ? cut : { cancelledAt: now });
+      .update({ id: booking.id }, { ...given, cancelledAt: now, cancelledById });
   }
 
   /** Everything confirmed that lies in the way of any of the spans, first span first. */
@@ -134,10 +131,7 @@ export class BookingsRepository {
 
   /** Bookings that hold, those cut short included. */
   private confirmed(): SelectQueryBuilder<Booking> {
-    const holds = new Brackets((where) =>
-      where.where('booking.cancelled_at IS NULL').orWhere('booking.cancelled_at > booking.starts_at'),
-    );
-    return this.named().where(holds);
+    return this.named().where('booking.holds');
   }
 
   private named(): SelectQueryBuilder<Booking> {
@@ -152,7 +146,7 @@ export class BookingsRepository {
 
   private async withItems(bookings: Booking[]): Promise<WholeBooking[]> {
     const items = await this.dataSource.getRepository(BookingItem).find({
-      where: { bookingId: In(bookings.map(({ id }) => id)), cancelledAt: IsNull() },
+      where: { bookingId: In(bookings.map(({ id }) => id)), holds: true },
       relations: { resource: true },
       order: { resource: { kind: 'ASC', position: 'ASC', tag: 'ASC' } },
     });

@@ -60,9 +60,15 @@ export class BookingsService {
   ): Promise<void> {
     const { resourceIds, ...head } = night;
     await this.lockOffered(manager, resourceIds);
-    await manager.getRepository(Booking).update({ id: bookingId, kind: 'build night' }, head);
+    // What is held follows the times at once, so what is given up goes first.
     await manager.getRepository(BookingItem).delete({ bookingId });
+    await manager.getRepository(Booking).update({ id: bookingId, kind: 'build night' }, head);
     await this.bookings.insertItems(manager, { id: bookingId, ...head }, resourceIds);
+  }
+
+  /** For build nights: another name on the same benches at the same times. */
+  async renameForNight(manager: EntityManager, bookingId: string, title: string): Promise<void> {
+    await manager.getRepository(Booking).update({ id: bookingId, kind: 'build night' }, { title });
   }
 
   /** For build nights: gives the benches back, those of a running night from now on. Twice is as good as once. */

@@ -1,9 +1,10 @@
 import { Injectable } from '@nestjs/common';
-import { DataSource } from 'typeorm';
+import { DataSource, type EntityManager } from 'typeorm';
 import { ClubService } from '../club/club.service';
 import { requireMember, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { notAllowed, notFound } from '../common/common.errors';
+import { retryingOnce } from '../common/retrying';
 import { spanWords } from '../common/wall-clock';
 import { MailService } from '../mail/mail.service';
 import { PeopleService } from '../people/people.service';
@@ -26,7 +27,7 @@ export class CancellationsService {
   /** Gives back what is not used yet. Cancelling what is cancelled changes nothing and is no error. */
   async cancel(actor: Actor, bookingId: string): Promise<void> {
     requireMember(actor);
-    await this.dataSource.transaction(async (manager) => {
+    const work = async (manager: EntityManager): Promise<void> => {
       const booking = await manager
         .getRepository(Booking)
         .findOne({ where: { id: bookingId }, lock: { mode: 'pessimistic_write' } });
@@ -38,7 +39,8 @@ export class CancellationsService {
         throw bookingProblems['booking-over']('This booking is over. What is past stays in the book.');
       await this.repository.release(manager, booking, now, actor.personId);
       if (booking.personId !== actor.personId) await this.tell(manager, actor, booking);
-    });
+    };
+    await retryingOnce(() => this.dataSource.transaction(work));
   }
 
   private refuse(actor: Actor, booking: Booking): void {
@@ -51,11 +53,7 @@ export class CancellationsService {
   }
 
   /** Nobody loses a bench without being told by whom. */
-  private async tell(
-    manager: Parameters<MailService['queue']>[0],
-    actor: Actor,
-    booking: Booking,
-  ): Promise<void> {
+  private async tell(manager: EntityManager, actor: Actor, booking: Booking): Promise<void> {
     const owner = (await this.people.byIds([booking.personId], manager)).get(booking.personId);
     if (!owner || owner.leftAt) return;
     const { timeZone } = await this.club.settings(manager);

@@ -1,18 +1,8 @@
-import {
-  Body,
-  Controller,
-  Delete,
-  Get,
-  HttpCode,
-  Param,
-  ParseUUIDPipe,
-  Patch,
-  Post,
-  Query,
-} from '@nestjs/common';
+import { Body, Controller, Delete, Get, HttpCode, Param, Patch, Post, Query } from '@nestjs/common';
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { ParseIdPipe } from '../common/parse-id.pipe';
 import { BuildNightsService } from './build-nights.service';
 import { BuildNightDetailDto, BuildNightsDto } from './dto/build-night.dto';
 import { CancelNightDto, ChangeNightDto } from './dto/change-night.dto';
@@ -62,7 +52,7 @@ export class BuildNightsController {
   /** One night with the names of who is coming and who waits. */
   @Get(':id')
   @Access('signed-in')
-  show(@CurrentActor() actor: Actor, @Param('id', ParseUUIDPipe) id: string): Promise<BuildNightDetailDto> {
+  show(@CurrentActor() actor: Actor, @Param('id', ParseIdPipe) id: string): Promise<BuildNightDetailDto> {
     return this.nights.show(actor, id);
   }
 
@@ -71,7 +61,7 @@ export class BuildNightsController {
   @Access({ roles: ['mentor'] })
   change(
     @CurrentActor() actor: Actor,
-    @Param('id', ParseUUIDPipe) id: string,
+    @Param('id', ParseIdPipe) id: string,
     @Body() body: ChangeNightDto,
   ): Promise<BuildNightDetailDto> {
     return this.changes.change(actor, id, body);
@@ -83,7 +73,7 @@ export class BuildNightsController {
   @Access({ roles: ['mentor'] })
   cancel(
     @CurrentActor() actor: Actor,
-    @Param('id', ParseUUIDPipe) id: string,
+    @Param('id', ParseIdPipe) id: string,
     @Body() body: CancelNightDto,
   ): Promise<BuildNightDetailDto> {
     return this.changes.cancel(actor, id, body);
@@ -93,7 +83,7 @@ export class BuildNightsController {
   @Post(':id/coming')
   @HttpCode(200)
   @Access('signed-in')
-  come(@CurrentActor() actor: Actor, @Param('id', ParseUUIDPipe) id: string): Promise<BuildNightDetailDto> {
+  come(@CurrentActor() actor: Actor, @Param('id', ParseIdPipe) id: string): Promise<BuildNightDetailDto> {
     return this.places.come(actor, id);
   }
 
@@ -101,10 +91,7 @@ export class BuildNightsController {
   @Delete(':id/coming')
   @HttpCode(200)
   @Access('signed-in')
-  stayAway(
-    @CurrentActor() actor: Actor,
-    @Param('id', ParseUUIDPipe) id: string,
-  ): Promise<BuildNightDetailDto> {
+  stayAway(@CurrentActor() actor: Actor, @Param('id', ParseIdPipe) id: string): Promise<BuildNightDetailDto> {
     return this.places.stayAway(actor, id);
   }
 }

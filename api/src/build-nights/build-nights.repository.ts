@@ -53,8 +53,8 @@ export class BuildNightsRepository {
       .find({ where: { kind: 'bench', retiredAt: IsNull() }, order: { position: 'ASC', tag: 'ASC' } });
   }
 
-  stages(ids: readonly string[]): Promise<Stage[]> {
-    return this.dataSource
+  stages(ids: readonly string[], manager: EntityManager = this.dataSource.manager): Promise<Stage[]> {
+    return manager
       .getRepository(Stage)
       .find({ where: { id: In([...ids]) }, order: { position: 'ASC', id: 'ASC' } });
   }

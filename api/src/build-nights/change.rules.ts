@@ -1,7 +1,7 @@
+import { clubDay } from '../common/club-day';
 import type { NightRecord } from './build-nights.repository';
 import type { ChangeNightDto } from './dto/change-night.dto';
 import { readTimes, someMentor, type WantedNight } from './plan.rules';
-import { dayOf } from './wall-time.rules';
 
 /** A night as it is to be. */
 export interface ChangedNight extends WantedNight {
@@ -10,6 +10,8 @@ export interface ChangedNight extends WantedNight {
   note: string;
   stageIds: string[];
   hasOtherTimes: boolean;
+  /** Its times or benches are others, so that the bench book is written anew. */
+  isHeldOtherwise: boolean;
   /** Its times, benches or mentors are others, so that it may clash. */
   isElsewhere: boolean;
 }
@@ -29,7 +31,7 @@ export function changedNight(
   const times = hasOtherTimes ? readTimes(textTimes(night, change), now) : night;
   const { startsAt, endsAt } = times;
   return {
-    date: dayOf(startsAt, zone),
+    date: clubDay(startsAt, zone),
     ...{ startsAt, endsAt, hasOtherTimes },
     title: change.title ?? night.title,
     places: change.places ?? night.places,
@@ -38,6 +40,7 @@ export function changedNight(
     mentorIds: someMentor(change.mentorIds ?? mentors.map(({ personId }) => personId)),
     stageIds: change.stageIds ?? stages.map(({ stageId }) => stageId),
     isLeftOut: false,
+    isHeldOtherwise: hasOtherTimes || change.benchIds !== undefined,
     isElsewhere: hasOtherTimes || change.benchIds !== undefined || change.mentorIds !== undefined,
   };
 }

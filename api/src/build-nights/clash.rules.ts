@@ -1,6 +1,7 @@
 import type { Clash, Span } from '../bookings/bookings.service';
+import { hoursWords, timeWords } from '../common/wall-clock';
 import type { CheckedNightDto, NightClashDto, NightRemedyDto } from './dto/planned-nights.dto';
-import { listText, spanText, timeText } from './night-words.rules';
+import { listText } from './night-words.rules';
 import type { WantedNight } from './plan.rules';
 
 /** A mentor who is on duty elsewhere during one of the wanted nights. */
@@ -61,11 +62,11 @@ function benchClash(clashes: readonly Clash[], zone: string): NightClashDto {
   const benches = listText(clashes.map(({ resourceTag }) => resourceTag));
   const verb = clashes.length === 1 ? 'is' : 'are';
   const by = first.kind === 'session' ? `booked by ${first.personName}` : `taken by ${first.title}`;
-  return { kind: 'bench', detail: `${benches} ${verb} ${by}, ${spanText(first, zone)}.` };
+  return { kind: 'bench', detail: `${benches} ${verb} ${by}, ${hoursWords(first, zone)}.` };
 }
 
 function mentorClash({ personName, title, endsAt }: Duty, zone: string): NightClashDto {
-  return { kind: 'mentor', detail: `${personName} is on ${title} until ${timeText(endsAt, zone)}.` };
+  return { kind: 'mentor', detail: `${personName} is on ${title} until ${timeWords(endsAt, zone)}.` };
 }
 
 function remedyOf(

@@ -6,6 +6,7 @@ import { requireRole, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { notFound } from '../common/common.errors';
 import { translatingConstraints } from '../common/constraint';
+import { retryingOnce } from '../common/retrying';
 import { BuildNight } from './build-night.entity';
 import { BuildNightMentor } from './build-night-mentor.entity';
 import { BuildNightPlace } from './build-night-place.entity';
@@ -45,21 +46,19 @@ export class NightChangesService {
     const look = await this.lookAgain(nightId, change);
     if (look.after.isElsewhere) await this.looking.refuseClashes(...look.wanted);
     const lostRace = () => this.looking.lostRace(...look.wanted);
-    await translatingConstraints(
-      () => this.dataSource.transaction((manager) => this.write(manager, actor, nightId, change)),
-      {
-        booking_no_overlap: lostRace,
-        build_night_mentor_on_one_duty: lostRace,
-        build_night_place_kept: () => tooFewPlaces(),
-      },
-    );
+    const work = () => this.dataSource.transaction((manager) => this.write(manager, actor, nightId, change));
+    await translatingConstraints(() => retryingOnce(work), {
+      booking_no_overlap: lostRace,
+      build_night_mentor_on_one_duty: lostRace,
+      build_night_place_kept: () => tooFewPlaces(),
+    });
     return this.reading.show(actor, nightId);
   }
 
   /** Gives back the benches and the mentors, and tells everybody who was coming, who waited and who was on duty. */
   async cancel(actor: Actor, nightId: string, { reason }: CancelNightDto): Promise<BuildNightDetailDto> {
     requireRole(actor, 'mentor');
-    await this.dataSource.transaction(async (manager) => {
+    const work = async (manager: EntityManager): Promise<void> => {
       const night = await this.desk.open(manager, nightId);
       const cancelledAt = this.clock.now();
       await manager.update(BuildNight, { id: nightId }, { cancelledAt, cancelledReason: reason });
@@ -76,7 +75,8 @@ export class NightChangesService {
         [...told],
         cancelledLetter(night, reason, await this.desk.hall(manager)),
       );
-    });
+    };
+    await retryingOnce(() => this.dataSource.transaction(work));
     return this.reading.show(actor, nightId);
   }
 

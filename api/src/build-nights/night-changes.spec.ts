@@ -114,6 +114,30 @@ describe('changing a build night', () => {
     await change(id, { startsAt: '2026-01-20T19:00:00Z', endsAt: '2026-01-20T21:00:00Z' }).expect(200);
   });
 
+  it('takes another title though a bench was retired since, and wants another bench for other times', async () => {
+    const { id: benchId } = await bench(test);
+    const { id } = await night(mentor.agent, { benchIds: [benchId] });
+    await test.dataSource.query('UPDATE resource SET retired_at = $2 WHERE id = $1', [benchId, TEST_NOW]);
+    const { body } = await change(id, { title: 'Cores and cables' }).expect(200);
+    expect(body).toMatchObject({ title: 'Cores and cables', benches: [{ id: benchId }] });
+    const [booking] = await test.dataSource.query<{ title: string }[]>(
+      'SELECT title FROM booking JOIN booking_item ON booking_id = id WHERE resource_id = $1',
+      [benchId],
+    );
+    expect(booking?.title).toBe('Cores and cables');
+    await change(id, { startsAt: '2026-01-20T19:45:00Z' }).expect(422);
+  });
+
+  it('gives the place of somebody who is put on duty to the next in line', async () => {
+    const { id } = await night(mentor.agent, { places: 1 });
+    const greta = await someoneWith(test, 'mentor');
+    await come(greta.agent, id);
+    await come(member.agent, id);
+    const { body } = await change(id, { mentorIds: [mentor.person.id, greta.person.id] }).expect(200);
+    expect(body).toMatchObject({ coming: 1, waiting: 0, comingPeople: [{ id: member.person.id }] });
+    expect(await lettersTo(member.person.email)).toHaveLength(1);
+  });
+
   it('loses nothing of two changes made at once', async () => {
     const { id } = await night(mentor.agent);
     const other = await someoneWith(test, 'mentor');

@@ -1,13 +1,14 @@
 import { Injectable } from '@nestjs/common';
 import { BookingsService } from '../bookings/bookings.service';
 import { fieldError } from '../common/common.errors';
-import { PeopleService } from '../people/people.service';
 import type { DomainError } from '../common/domain-error';
+import { dayWords } from '../common/wall-clock';
+import { PeopleService } from '../people/people.service';
 import { nightProblems } from './build-nights.errors';
 import { BuildNightsRepository } from './build-nights.repository';
 import { checkNights } from './clash.rules';
 import type { CheckedNightDto } from './dto/planned-nights.dto';
-import { dayText, listText } from './night-words.rules';
+import { listText } from './night-words.rules';
 import type { WantedNight } from './plan.rules';
 
 /** The night that is being changed: its own benches and mentors are not in its way. */
@@ -74,7 +75,7 @@ export class NightCheck {
 
 function clashProblem(checked: readonly CheckedNightDto[], zone: string): DomainError {
   const clashes = checked.filter(({ verdict }) => verdict === 'clash');
-  const days = listText(clashes.map(({ startsAt }) => dayText(startsAt, zone)));
+  const days = listText(clashes.map(({ startsAt }) => dayWords(startsAt, zone)));
   const detail =
     clashes.length === 0
       ? 'Somebody was a moment quicker with a bench or a mentor. Nothing was changed. Try again.'

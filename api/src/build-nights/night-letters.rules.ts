@@ -1,5 +1,6 @@
 import type { Span } from '../bookings/bookings.service';
-import { listText, nightName, whenText } from './night-words.rules';
+import { spanWords } from '../common/wall-clock';
+import { listText, nightName } from './night-words.rules';
 
 interface Named extends Span {
   title: string;
@@ -22,7 +23,7 @@ export interface Hall {
 
 const paragraphs = (...parts: string[]): string => parts.filter((part) => part !== '').join('\n\n');
 const dateList = (nights: readonly Span[], zone: string): string =>
-  nights.map((night) => `  ${whenText(night, zone)}`).join('\n');
+  nights.map((night) => `  ${spanWords(night, zone)}`).join('\n');
 
 /** To the people whose build is on a stage in focus. */
 export function scheduledLetter(nights: readonly Named[], stages: readonly string[], hall: Hall): LetterText {
@@ -54,7 +55,7 @@ export function movedUpLetter(night: Named, hall: Hall): LetterText {
   return {
     subject: `You have a place: ${nightName(night)}`,
     text: paragraphs(
-      `A place came free, and you were next in line. You are coming to ${nightName(night)}: ${whenText(night, hall.zone)}.`,
+      `A place came free, and you were next in line. You are coming to ${nightName(night)}: ${spanWords(night, hall.zone)}.`,
       hall.address,
       `If you cannot come after all, say so, and the next in line moves up: ${hall.link}`,
     ),
@@ -65,7 +66,7 @@ export function cancelledLetter(night: Named, reason: string, hall: Hall): Lette
   return {
     subject: `Cancelled: ${nightName(night)}`,
     text: paragraphs(
-      `${nightName(night)}, ${whenText(night, hall.zone)}, does not take place.`,
+      `${nightName(night)}, ${spanWords(night, hall.zone)}, does not take place.`,
       reason,
       `The other build nights: ${hall.link}`,
     ),
@@ -77,7 +78,7 @@ export function changedLetter(before: Named, after: Named, hall: Hall): LetterTe
   return {
     subject: `Other times: ${nightName(after)}`,
     text: paragraphs(
-      `${nightName(after)} is now ${whenText(after, hall.zone)}. It was ${whenText(before, hall.zone)}.`,
+      `${nightName(after)} is now ${spanWords(after, hall.zone)}. It was ${spanWords(before, hall.zone)}.`,
       `Your place is kept. If the new times do not suit you, say so: ${hall.link}`,
     ),
   };

@@ -1,5 +1,5 @@
 import type supertest from 'supertest';
-import { startTestApp, type TestApp } from '../../test/app';
+import { appOn, startTestApp, type TestApp } from '../../test/app';
 import { joined, startedBuild } from '../../test/factories/build.factory';
 import { night, nightPlan } from '../../test/factories/night.factory';
 import { someoneWith } from '../../test/factories/person.factory';
@@ -15,7 +15,7 @@ describe('the mail of build nights', () => {
   beforeAll(async () => {
     catcher = await startMailCatcher();
     test = await startTestApp({ SMTP_URL: catcher.smtpUrl });
-    second = await startTestApp({ SMTP_URL: catcher.smtpUrl, DATABASE_URL: test.environment.DATABASE_URL });
+    second = await appOn(test.environment.DATABASE_URL, { SMTP_URL: catcher.smtpUrl });
     mentor = (await someoneWith(test, 'mentor')).agent;
   });
   afterAll(async () => {

@@ -4,6 +4,7 @@ import { BookingsService } from '../bookings/bookings.service';
 import { BuildNight } from './build-night.entity';
 import { BuildNightBench } from './build-night-bench.entity';
 import { BuildNightMentor } from './build-night-mentor.entity';
+import { BuildNightPlace } from './build-night-place.entity';
 import { BuildNightSeries } from './build-night-series.entity';
 import { BuildNightStage } from './build-night-stage.entity';
 import type { ChangedNight } from './change.rules';
@@ -60,6 +61,8 @@ export class NightWriter {
     await manager.update(BuildNight, { id: night.id }, { title, places, note, startsAt, endsAt, bookingId });
     await manager.delete(BuildNightBench, { nightId: night.id });
     await manager.delete(BuildNightStage, { nightId: night.id });
+    // Whoever is on duty is expected anyway, and takes nobody's place.
+    await manager.delete(BuildNightPlace, { nightId: night.id, personId: In(after.mentorIds) });
     const moved = { ...night, startsAt, endsAt };
     const staying = await manager.findBy(BuildNightMentor, { nightId: night.id });
     const added = after.mentorIds.filter((id) => !staying.some(({ personId }) => personId === id));
@@ -70,10 +73,16 @@ export class NightWriter {
   private async rebook(
     manager: EntityManager,
     { bookingId, number }: BuildNight,
-    { startsAt, endsAt, benchIds, title }: ChangedNight,
+    { startsAt, endsAt, benchIds, title, isHeldOtherwise }: ChangedNight,
     personId: string,
   ): Promise<string | null> {
-    const held = { startsAt, endsAt, resourceIds: benchIds, title: nightName({ title, number }) };
+    const name = nightName({ title, number });
+    if (!isHeldOtherwise) {
+      // The same benches at the same times: also those that were retired since stay with the night.
+      if (bookingId) await this.bookings.renameForNight(manager, bookingId, name);
+      return bookingId;
+    }
+    const held = { startsAt, endsAt, resourceIds: benchIds, title: name };
     if (benchIds.length === 0) {
       if (bookingId) await this.bookings.releaseForNight(manager, bookingId, personId);
       return null;

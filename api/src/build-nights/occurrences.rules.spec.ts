@@ -1,7 +1,7 @@
 import { Temporal } from 'temporal-polyfill';
-import calendar from './reference/calendar.json';
+import { instantOf, wallOf } from '../common/wall-clock';
 import { occurrencesOf } from './occurrences.rules';
-import { instantOf, wallOf } from './wall-time.rules';
+import calendar from './reference/calendar.json';
 
 const compactWall = (text: string) => Temporal.PlainDateTime.from(text);
 const minutes = (instant: Date) => `${instant.toISOString().slice(0, 16)}Z`;

@@ -1,6 +1,6 @@
 import { RRule } from 'rrule';
 import { Temporal } from 'temporal-polyfill';
-import { instantOf, type WallTime } from './wall-time.rules';
+import { instantOf, type WallTime } from '../common/wall-clock';
 
 export interface Recurrence {
   /** DTSTART, on the club's wall. */

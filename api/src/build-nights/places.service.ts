@@ -1,7 +1,8 @@
 import { Injectable } from '@nestjs/common';
-import { DataSource } from 'typeorm';
+import { DataSource, type EntityManager } from 'typeorm';
 import { requireMember, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
+import { retryingOnce } from '../common/retrying';
 import { BuildNightMentor } from './build-night-mentor.entity';
 import { nightProblems } from './build-nights.errors';
 import { BuildNightsService } from './build-nights.service';
@@ -24,23 +25,25 @@ export class PlacesService {
   async come(actor: Actor, nightId: string): Promise<BuildNightDetailDto> {
     requireMember(actor);
     const { personId } = actor;
-    await this.dataSource.transaction(async (manager) => {
+    const work = async (manager: EntityManager): Promise<void> => {
       const night = await this.desk.open(manager, nightId);
       if (await manager.existsBy(BuildNightMentor, { nightId, personId })) {
         throw nightProblems['night-on-duty']('You are on duty that night, so you are expected anyway.');
       }
       await this.line.join(manager, night, personId, this.clock.now());
-    });
+    };
+    await retryingOnce(() => this.dataSource.transaction(work));
     return this.nights.show(actor, nightId);
   }
 
   /** Gives the place up; the first in the waiting list moves up and is told. Safe to repeat. */
   async stayAway(actor: Actor, nightId: string): Promise<BuildNightDetailDto> {
     requireMember(actor);
-    await this.dataSource.transaction(async (manager) => {
+    const work = async (manager: EntityManager): Promise<void> => {
       const night = await this.desk.open(manager, nightId);
       await this.line.leave(manager, night, actor.personId);
-    });
+    };
+    await retryingOnce(() => this.dataSource.transaction(work));
     return this.nights.show(actor, nightId);
   }
 }

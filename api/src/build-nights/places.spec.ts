@@ -185,6 +185,20 @@ describe('coming to a build night', () => {
       await expect(fewer).rejects.toMatchObject({ driverError: { constraint: 'build_night_place_kept' } });
     });
 
+    it('nobody takes a place on a cancelled night', async () => {
+      await put('coming');
+      await test.dataSource.query(
+        `UPDATE build_night SET cancelled_at = now(), cancelled_reason = 'No heating.' WHERE id = $1`,
+        [nightId],
+      );
+      const cancelled = { driverError: { constraint: 'build_night_place_not_cancelled' } };
+      const more = test.dataSource.query(
+        `INSERT INTO build_night_place (night_id, person_id, state, turn, said_at) VALUES ($1, $2, 'coming', 9, now())`,
+        [nightId, people[2]?.id],
+      );
+      await expect(more).rejects.toMatchObject(cancelled);
+    });
+
     it('nobody waits beside a free place, and nobody overtakes', async () => {
       const inTurn = { driverError: { constraint: 'build_night_place_in_turn' } };
       await expect(put('coming', 'waiting')).rejects.toMatchObject(inTurn);

@@ -1,7 +1,10 @@
+import type { Span } from '../bookings/bookings.service';
+import { clubDay } from '../common/club-day';
 import { fieldError } from '../common/common.errors';
+import { wallOf } from '../common/wall-clock';
 import { occurrencesOf } from './occurrences.rules';
 import { fallsOn, MOST_NIGHTS, readRule } from './repeat.rules';
-import { instantOf, wallOf, type WallTime } from './wall-time.rules';
+import { spanOnWall } from './span-on-wall.rules';
 
 const MINUTE_MS = 60_000;
 const SHORTEST_MS = 15 * MINUTE_MS;
@@ -40,16 +43,14 @@ export function wantedNights(
   now: Date,
   mentorIdsByDefault: string[],
 ): WantedNight[] {
-  const { startsAt, endsAt } = readTimes(plan, now);
-  const first = wallOf(startsAt, zone);
-  const length = first.until(wallOf(endsAt, zone));
-  return startsOf(plan, first, zone).map((start) => {
-    const date = start.toPlainDate().toString();
+  const times = readTimes(plan, now);
+  const spans = plan.repeat ? seriesSpans(times, plan.repeat.rule, zone) : [times];
+  return spans.map((span) => {
+    const date = clubDay(span.startsAt, zone);
     const other = plan.instead?.find((night) => night.date === date);
     return {
       date,
-      startsAt: instantOf(start, zone),
-      endsAt: instantOf(start.add(length), zone),
+      ...span,
       benchIds: other?.benchIds ?? plan.benchIds ?? [],
       mentorIds: someMentor(other?.mentorIds ?? plan.mentorIds ?? mentorIdsByDefault),
       isLeftOut: plan.skip?.includes(date) ?? false,
@@ -63,17 +64,18 @@ export function someMentor(mentorIds: string[]): string[] {
   return mentorIds;
 }
 
-function startsOf({ repeat }: NightPlan, first: WallTime, zone: string): WallTime[] {
-  if (!repeat) return [first];
-  if (!fallsOn(readRule(repeat.rule), first.dayOfWeek)) {
+/** The first night as it was given; the others at its hours on the wall. */
+function seriesSpans(given: Span, rule: string, zone: string): Span[] {
+  const first = wallOf(given.startsAt, zone);
+  if (!fallsOn(readRule(rule), first.dayOfWeek)) {
     throw fieldError('startsAt', 'The first night does not lie on a day of the rule.');
   }
-  const starts = occurrencesOf({ start: first, rule: repeat.rule, zone }, () => false, MOST_NIGHTS + 1);
+  const starts = occurrencesOf({ start: first, rule, zone }, () => false, MOST_NIGHTS + 1);
   if (starts.length > MOST_NIGHTS) {
     throw fieldError('repeat.rule', `A series has at most ${MOST_NIGHTS} nights; this rule makes more.`);
   }
   if (starts.length === 0) throw fieldError('repeat.rule', 'UNTIL lies before the first night.');
-  return starts;
+  return [given, ...starts.slice(1).map((start) => spanOnWall(start, given, zone))];
 }
 
 /**

@@ -6,6 +6,7 @@ import { requireRole, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { fieldError } from '../common/common.errors';
 import { translatingConstraints } from '../common/constraint';
+import { retryingOnce } from '../common/retrying';
 import type { BuildNight } from './build-night.entity';
 import { BuildNightsRepository } from './build-nights.repository';
 import type { PlanNightsDto, PreviewNightsDto } from './dto/plan-nights.dto';
@@ -58,10 +59,12 @@ export class PlanningService {
     await this.looking.refuseClashes(wanted, timeZone);
     const lostRace = () => this.looking.lostRace(wanted, timeZone);
     const people = plan.tellByMail ? await this.peopleToTell(actor, plan.stageIds ?? []) : [];
-    const made = await translatingConstraints(
-      () => this.dataSource.transaction((manager) => this.write(manager, actor, plan, wanted, people)),
-      { booking_no_overlap: lostRace, build_night_mentor_on_one_duty: lostRace },
-    );
+    const work = () =>
+      this.dataSource.transaction((manager) => this.write(manager, actor, plan, wanted, people));
+    const made = await translatingConstraints(() => retryingOnce(work), {
+      booking_no_overlap: lostRace,
+      build_night_mentor_on_one_duty: lostRace,
+    });
     const records = await this.nights.byIds(made.map(({ id }) => id));
     return { nights: records.map((record) => buildNightDto(record, actor.personId)), told: people.length };
   }
@@ -81,8 +84,9 @@ export class PlanningService {
       actor,
       made.map((night, index) => ({ night, mentorIds: wanted[index]?.mentorIds ?? [] })),
     );
-    const stages = (await this.nights.stages(stageIds)).map(({ position, name }) => `${position} ${name}`);
-    const letter = scheduledLetter(made, stages, await this.desk.hall(manager));
+    const stages = await this.nights.stages(stageIds, manager);
+    const focus = stages.map(({ position, name }) => `${position} ${name}`);
+    const letter = scheduledLetter(made, focus, await this.desk.hall(manager));
     await this.desk.write(manager, people, letter);
     return made;
   }

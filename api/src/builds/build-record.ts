@@ -13,11 +13,15 @@ import type { Standing } from './stage-states.rules';
 /** A picture without its bytes. */
 export type PhotoFacts = Omit<Photo, 'bytes'>;
 
-/** Everything there is about one build, read at once. */
-export interface BuildRecord {
+/** How far a build is. */
+export interface BuildOutline {
   build: Build;
   edition: EditionContent;
   states: ReadonlyMap<string, KeptStageState>;
+}
+
+/** Everything there is about one build, read at once. */
+export interface BuildRecord extends BuildOutline {
   events: readonly BuildStageEvent[];
   /** The newest last, so that the one in force is the last of its check. */
   readings: readonly Reading[];

@@ -3,7 +3,7 @@ import { DataSource, In, IsNull, type EntityManager } from 'typeorm';
 import { PeopleService } from '../people/people.service';
 import type { Person } from '../people/person.entity';
 import { PlansService } from '../plans/plans.service';
-import type { BuildRecord } from './build-record';
+import type { BuildOutline, BuildRecord } from './build-record';
 import { Build } from './build.entity';
 import { BuildStage } from './build-stage.entity';
 import { BuildStageEvent } from './build-stage-event.entity';
@@ -51,17 +51,33 @@ export class BuildRecordsService {
     const photos = await manager.find(Photo, standing);
     const own = <T extends { buildId: string }>(rows: readonly T[], { id }: Build): T[] =>
       rows.filter((row) => row.buildId === id);
-    return Promise.all(
-      builds.map(async (build) => ({
+    const records: BuildRecord[] = [];
+    for (const build of builds) {
+      records.push({
         build,
-        edition: await this.plans.content(build.editionId),
+        edition: await this.plans.content(build.editionId, manager),
         states: new Map(own(stages, build).map(({ stageId, state }) => [stageId, state])),
         events: own(events, build),
         readings: own(readings, build),
         marks: own(marks, build),
         photos: own(photos, build),
-      })),
-    );
+      });
+    }
+    return records;
+  }
+
+  /** How far these builds are: nothing of what is in them is read. */
+  async outlines(builds: readonly Build[]): Promise<BuildOutline[]> {
+    const stages = await this.dataSource
+      .getRepository(BuildStage)
+      .findBy({ buildId: In(builds.map(({ id }) => id)) });
+    const outlines: BuildOutline[] = [];
+    for (const build of builds) {
+      const own = stages.filter(({ buildId }) => buildId === build.id);
+      const states = new Map(own.map(({ stageId, state }) => [stageId, state]));
+      outlines.push({ build, edition: await this.plans.content(build.editionId), states });
+    }
+    return outlines;
   }
 
   /** Everybody a record names. */

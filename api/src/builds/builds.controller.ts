@@ -1,8 +1,10 @@
-import { Body, Controller, Get, Param, ParseUUIDPipe, Post } from '@nestjs/common';
+import { Body, Controller, Get, Param, Post } from '@nestjs/common';
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { ParseIdPipe } from '../common/parse-id.pipe';
 import { BuildsService } from './builds.service';
+import { BuildSummaryDto } from './dto/build-summary.dto';
 import { BuildDto, StartBuildDto } from './dto/build.dto';
 
 @ApiTags('Builds')
@@ -17,6 +19,13 @@ export class BuildsController {
     return this.builds.mine(actor);
   }
 
+  /** How far one's own builds are: the states of their stages, and nothing of what is in them. */
+  @Get('mine/summary')
+  @Access('signed-in')
+  mySummaries(@CurrentActor() actor: Actor): Promise<BuildSummaryDto[]> {
+    return this.builds.mySummaries(actor);
+  }
+
   /** Begins a build to the newest edition of a plan. */
   @Post()
   @Access('signed-in')
@@ -27,7 +36,7 @@ export class BuildsController {
   /** A build, for its builder and for mentors. */
   @Get(':buildId')
   @Access('signed-in')
-  show(@CurrentActor() actor: Actor, @Param('buildId', ParseUUIDPipe) buildId: string): Promise<BuildDto> {
+  show(@CurrentActor() actor: Actor, @Param('buildId', ParseIdPipe) buildId: string): Promise<BuildDto> {
     return this.builds.show(actor, buildId);
   }
 }

@@ -6,6 +6,8 @@ export const buildProblems = defineProblems({
   'stage-out-of-hand': { status: 409, title: 'The stage is not in your hands' },
   'stage-not-with-mentor': { status: 409, title: 'The stage is not with a mentor' },
   'checks-missing': { status: 409, title: 'Checks are still missing' },
+  'photos-enough': { status: 409, title: 'The check has all the photos it takes' },
+  'readings-out-of-date': { status: 409, title: 'A reading it was made of was taken again' },
   'own-stage': { status: 403, title: 'Your own stage is signed off by somebody else' },
   'licence-seen-already': { status: 409, title: 'The licence was seen already' },
 });

@@ -12,6 +12,7 @@ import { BuildRecordsService } from './build-records.service';
 import { Build } from './build.entity';
 import { BuildStage } from './build-stage.entity';
 import { buildProblems } from './builds.errors';
+import { buildSummaryDto, type BuildSummaryDto } from './dto/build-summary.dto';
 import { buildDto, type BuildDto, type StartBuildDto } from './dto/build.dto';
 
 /** Somebody whose current stage is one of those asked for. */
@@ -33,12 +34,15 @@ export class BuildsService {
   /** The actor's own builds, the newest first. */
   async mine(actor: Actor): Promise<BuildDto[]> {
     requireMember(actor);
-    const builds = await this.dataSource
-      .getRepository(Build)
-      .find({ where: { personId: actor.personId }, order: { startedAt: 'DESC', id: 'ASC' } });
-    const records = await this.records.read(builds);
+    const records = await this.records.read(await this.ownedBy(actor));
     const people = await this.records.peopleIn(records);
     return records.map((record) => buildDto(record, people));
+  }
+
+  /** How far the actor's own builds are, the newest first; what every page can afford to ask. */
+  async mySummaries(actor: Actor): Promise<BuildSummaryDto[]> {
+    requireMember(actor);
+    return (await this.records.outlines(await this.ownedBy(actor))).map(buildSummaryDto);
   }
 
   async show(actor: Actor, buildId: string): Promise<BuildDto> {
@@ -83,21 +87,32 @@ export class BuildsService {
 
   /** For other features: everybody who is on one of these stages now, each once. */
   async peopleOnStages(stageIds: readonly string[]): Promise<PersonOnStage[]> {
-    const builds = await this.dataSource.getRepository(Build).find({
-      where: { endedAt: IsNull(), person: { leftAt: IsNull() } },
-      relations: { person: true },
-      order: { person: { name: 'ASC' }, id: 'ASC' },
-    });
-    const records = await this.records.read(builds);
+    if (stageIds.length === 0) return [];
+    const builds = await this.dataSource
+      .getRepository(Build)
+      .createQueryBuilder('build')
+      .innerJoinAndSelect('build.person', 'person', 'person.left_at IS NULL')
+      .where('build.ended_at IS NULL')
+      .andWhere('build.id IN (SELECT build_id FROM build_stage WHERE stage_id IN (:...stageIds))', {
+        stageIds,
+      })
+      .orderBy('person.name')
+      .addOrderBy('build.id')
+      .getMany();
     const people = new Map<string, PersonOnStage>();
-    for (const record of records) {
-      const { build } = record;
-      const { currentStageId } = buildDto(record, new Map());
+    for (const outline of await this.records.outlines(builds)) {
+      const { currentStageId } = buildSummaryDto(outline);
       if (!currentStageId || !stageIds.includes(currentStageId)) continue;
-      const { id: personId, name, email } = build.person;
+      const { id: personId, name, email } = outline.build.person;
       people.set(personId, { personId, name, email });
     }
     return [...people.values()];
+  }
+
+  private ownedBy({ personId }: Actor): Promise<Build[]> {
+    return this.dataSource
+      .getRepository(Build)
+      .find({ where: { personId }, order: { startedAt: 'DESC', id: 'ASC' } });
   }
 }
 

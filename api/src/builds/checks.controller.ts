@@ -1,7 +1,8 @@
-import { Body, Controller, Delete, Get, HttpCode, Param, ParseUUIDPipe, Post } from '@nestjs/common';
+import { Body, Controller, Delete, Get, HttpCode, Param, Post } from '@nestjs/common';
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { ParseIdPipe } from '../common/parse-id.pipe';
 import { InstrumentChoiceDto, MarkDto } from './dto/evidence.dto';
 import { KeepReadingDto, ReadingDto } from './dto/reading.dto';
 import { InstrumentChoiceService } from './instrument-choice.service';
@@ -22,8 +23,8 @@ export class ChecksController {
   @Access('signed-in')
   keepReading(
     @CurrentActor() actor: Actor,
-    @Param('buildId', ParseUUIDPipe) buildId: string,
-    @Param('checkId', ParseUUIDPipe) checkId: string,
+    @Param('buildId', ParseIdPipe) buildId: string,
+    @Param('checkId', ParseIdPipe) checkId: string,
     @Body() body: KeepReadingDto,
   ): Promise<ReadingDto> {
     return this.readings.keep(actor, buildId, checkId, body);
@@ -34,8 +35,8 @@ export class ChecksController {
   @Access('signed-in')
   mark(
     @CurrentActor() actor: Actor,
-    @Param('buildId', ParseUUIDPipe) buildId: string,
-    @Param('checkId', ParseUUIDPipe) checkId: string,
+    @Param('buildId', ParseIdPipe) buildId: string,
+    @Param('checkId', ParseIdPipe) checkId: string,
   ): Promise<MarkDto> {
     return this.marks.mark(actor, buildId, checkId);
   }
@@ -45,8 +46,8 @@ export class ChecksController {
   @Access('signed-in')
   takeBackMark(
     @CurrentActor() actor: Actor,
-    @Param('buildId', ParseUUIDPipe) buildId: string,
-    @Param('checkId', ParseUUIDPipe) checkId: string,
+    @Param('buildId', ParseIdPipe) buildId: string,
+    @Param('checkId', ParseIdPipe) checkId: string,
   ): Promise<void> {
     return this.marks.takeBack(actor, buildId, checkId);
   }
@@ -56,8 +57,8 @@ export class ChecksController {
   @Access('signed-in')
   listInstruments(
     @CurrentActor() actor: Actor,
-    @Param('buildId', ParseUUIDPipe) buildId: string,
-    @Param('checkId', ParseUUIDPipe) checkId: string,
+    @Param('buildId', ParseIdPipe) buildId: string,
+    @Param('checkId', ParseIdPipe) checkId: string,
   ): Promise<InstrumentChoiceDto[]> {
     return this.instruments.list(actor, buildId, checkId);
   }

@@ -4,7 +4,8 @@ import { requireMember, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { fieldError, notFound } from '../common/common.errors';
 import { Instrument } from '../instruments/instrument.entity';
-import { InstrumentUseService } from '../instruments/instrument-use.service';
+import { InstrumentKind } from '../instruments/instrument-kind.entity';
+import { InstrumentUseService, lower } from '../instruments/instrument-use.service';
 import type { PlanCheck } from '../plans/plan-check.entity';
 import { PlansService } from '../plans/plans.service';
 import { requireSight } from './build-access';
@@ -48,6 +49,12 @@ export class InstrumentChoiceService {
       .sort((one, other) => Number(one.reason !== null) - Number(other.reason !== null));
   }
 
+  /** A level is nothing without what it was read on. @throws DomainError `invalid-input` on `instrumentId` */
+  async askFor(manager: EntityManager, kindId: string): Promise<never> {
+    const { name } = await manager.findOneByOrFail(InstrumentKind, { id: kindId });
+    throw fieldError('instrumentId', `Choose the ${lower(name)} it was read on.`);
+  }
+
   /**
    * The instrument a reading was taken with, fit on the day it was taken.
    *
@@ -65,11 +72,12 @@ export class InstrumentChoiceService {
       relations: { resource: true, kind: true },
     });
     if (!instrument) throw fieldError('instrumentId', 'There is no such instrument.');
-    const { resource, kind } = instrument;
+    // By the row's own spelling of its id: the database takes any, the reasons are kept under one.
+    const { resource, kind, resourceId } = instrument;
     const isOfKind = check.instrumentKindId === null || check.instrumentKindId === instrument.kindId;
     if (!isOfKind) throw fieldError('instrumentId', `${resource.tag} is of another kind: ${kind.name}.`);
-    const { reasons } = await this.use.judge(manager, personId, [instrumentId], after(takenAt));
-    const against = reasons.get(instrumentId)?.[0];
+    const { reasons } = await this.use.judge(manager, personId, [resourceId], after(takenAt));
+    const against = reasons.get(resourceId)?.[0];
     if (against) throw fieldError('instrumentId', `${against.reason} ${against.remedy}`);
     return instrument;
   }

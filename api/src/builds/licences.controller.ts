@@ -1,7 +1,8 @@
-import { Controller, Get, HttpCode, Param, ParseUUIDPipe, Post } from '@nestjs/common';
+import { Controller, Get, HttpCode, Param, Post } from '@nestjs/common';
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { ParseIdPipe } from '../common/parse-id.pipe';
 import { LicenceDto } from './dto/licence.dto';
 import { LicencesService } from './licences.service';
 
@@ -21,7 +22,7 @@ export class LicencesController {
   @Post('builds/:buildId/licence')
   @HttpCode(204)
   @Access({ roles: ['organiser'] })
-  see(@CurrentActor() actor: Actor, @Param('buildId', ParseUUIDPipe) buildId: string): Promise<void> {
+  see(@CurrentActor() actor: Actor, @Param('buildId', ParseIdPipe) buildId: string): Promise<void> {
     return this.licences.see(actor, buildId);
   }
 }

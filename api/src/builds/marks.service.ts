@@ -11,6 +11,7 @@ import type { Build } from './build.entity';
 import { buildProblems } from './builds.errors';
 import { CheckMark } from './check-mark.entity';
 import { markDto, type MarkDto } from './dto/evidence.dto';
+import { takeMarksBack } from './take-back';
 import { heldCheck, putOnTheBench, requireOpen, type HeldCheck } from './open-stage';
 
 @Injectable()
@@ -54,7 +55,7 @@ export class MarksService {
     await this.dataSource.transaction(async (manager) => {
       await this.holdMarkable(manager, actor, buildId, checkId);
       const standing = { buildId, checkId, takenBackAt: IsNull() };
-      await manager.update(CheckMark, standing, { takenBackAt: this.clock.now() });
+      await takeMarksBack(manager, standing, this.clock.now());
     });
   }
 
@@ -66,7 +67,7 @@ export class MarksService {
     checkId: string,
   ): Promise<{ build: Build; held: HeldCheck }> {
     const build = requireSight(actor, await this.records.hold(manager, buildId));
-    const edition = await this.plans.content(build.editionId);
+    const edition = await this.plans.content(build.editionId, manager);
     const held = await heldCheck(manager, build, edition, checkId);
     const { check, stage, states } = held;
     if (check.kind === 'measure' || check.kind === 'photo')

@@ -5,9 +5,10 @@ import type { PlanCheck } from '../plans/plan-check.entity';
 import type { Stage } from '../plans/stage.entity';
 import { findCheck, standingsOf } from './build-record';
 import type { Build } from './build.entity';
+import { BuildStageEvent } from './build-stage-event.entity';
 import { BuildStage, type KeptStageState } from './build-stage.entity';
 import { buildProblems } from './builds.errors';
-import { isInBuildersHands, lockOf } from './stage-states.rules';
+import { isInBuildersHands, lockOf, openedAt } from './stage-states.rules';
 
 /** A check of a build that somebody is about to write to. */
 export interface HeldCheck {
@@ -48,6 +49,24 @@ export function requireOpen(build: Build, edition: EditionContent, { stage, stat
   const where = standing.state === 'signed off' ? 'signed off' : 'with a mentor';
   const way = standing.state === 'signed off' ? '' : ' Take it back from the mentor to add to it.';
   throw buildProblems['stage-out-of-hand'](`${stage.name} is ${where}, so its record is closed.${way}`);
+}
+
+/** When a stage of a build opened. */
+export async function openingOf(
+  manager: EntityManager,
+  build: Build,
+  edition: EditionContent,
+  stage: Stage,
+): Promise<Date> {
+  const events = await manager.find(BuildStageEvent, { where: { buildId: build.id }, order: { at: 'ASC' } });
+  const before = edition.stages.filter(({ position }) => position < stage.position);
+  const needsLicence = stage.cautions.includes('licence needed');
+  return openedAt(
+    { needsLicence },
+    before.map(({ id }) => ({ stageId: id })),
+    events,
+    build,
+  );
 }
 
 /** The first thing done on a stage puts it on the bench. One that was sent back stays so until it is sent again. */

@@ -1,21 +1,10 @@
-import {
-  Body,
-  Controller,
-  Delete,
-  Get,
-  HttpCode,
-  Param,
-  ParseUUIDPipe,
-  Post,
-  Res,
-  UploadedFile,
-  UseInterceptors,
-} from '@nestjs/common';
-import { FileInterceptor } from '@nestjs/platform-express';
-import { ApiBody, ApiConsumes, ApiOkResponse, ApiTags } from '@nestjs/swagger';
+import { Body, Controller, Delete, Get, HttpCode, Param, Post, Res, UploadedFile } from '@nestjs/common';
+import { ApiBody, ApiOkResponse, ApiTags } from '@nestjs/swagger';
 import type { Response } from 'express';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { TakesFile } from '../common/one-file';
+import { ParseIdPipe } from '../common/parse-id.pipe';
 import { AddPhotoDto, PhotoDto } from './dto/evidence.dto';
 import { PHOTO_BYTES } from './photos.rules';
 import { PhotosService } from './photos.service';
@@ -37,13 +26,12 @@ export class PhotosController {
   /** Adds a picture of at most 6 MB to a check that asks for one. */
   @Post('checks/:checkId/photos')
   @Access('signed-in')
-  @ApiConsumes('multipart/form-data')
   @ApiBody({ schema: UPLOAD })
-  @UseInterceptors(FileInterceptor('photo', { limits: { fileSize: PHOTO_BYTES, files: 1, fields: 4 } }))
+  @TakesFile('photo', { bytes: PHOTO_BYTES, fields: 4 })
   add(
     @CurrentActor() actor: Actor,
-    @Param('buildId', ParseUUIDPipe) buildId: string,
-    @Param('checkId', ParseUUIDPipe) checkId: string,
+    @Param('buildId', ParseIdPipe) buildId: string,
+    @Param('checkId', ParseIdPipe) checkId: string,
     @UploadedFile() file: { buffer: Buffer } | undefined,
     @Body() body: AddPhotoDto,
   ): Promise<PhotoDto> {
@@ -56,8 +44,8 @@ export class PhotosController {
   @ApiOkResponse({ content: { 'image/*': { schema: { type: 'string', format: 'binary' } } } })
   async show(
     @CurrentActor() actor: Actor,
-    @Param('buildId', ParseUUIDPipe) buildId: string,
-    @Param('photoId', ParseUUIDPipe) photoId: string,
+    @Param('buildId', ParseIdPipe) buildId: string,
+    @Param('photoId', ParseIdPipe) photoId: string,
     @Res() response: Response,
   ): Promise<void> {
     const { bytes, contentType, sha256 } = await this.photos.bytes(actor, buildId, photoId);
@@ -76,8 +64,8 @@ export class PhotosController {
   @Access('signed-in')
   takeBack(
     @CurrentActor() actor: Actor,
-    @Param('buildId', ParseUUIDPipe) buildId: string,
-    @Param('photoId', ParseUUIDPipe) photoId: string,
+    @Param('buildId', ParseIdPipe) buildId: string,
+    @Param('photoId', ParseIdPipe) photoId: string,
   ): Promise<void> {
     return this.photos.takeBack(actor, buildId, photoId);
   }

@@ -1,5 +1,8 @@
 import type { PhotoType } from './photo.entity';
 
+/** Pictures lie in the database; the trigger `photo_no_more_than_twelve` counts with us. */
+export const MOST_PHOTOS = 12;
+
 export const PHOTO_BYTES = 6 * 1024 * 1024;
 
 /**

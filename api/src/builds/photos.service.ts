@@ -7,10 +7,11 @@ import { commonProblems, fieldError, notFound } from '../common/common.errors';
 import { PlansService } from '../plans/plans.service';
 import { requireBuilder, requireSight } from './build-access';
 import { BuildRecordsService } from './build-records.service';
+import { buildProblems } from './builds.errors';
 import { photoDto, type AddPhotoDto, type PhotoDto } from './dto/evidence.dto';
 import { heldCheck, putOnTheBench, requireOpen } from './open-stage';
 import { Photo } from './photo.entity';
-import { photoTypeOf } from './photos.rules';
+import { MOST_PHOTOS, photoTypeOf } from './photos.rules';
 
 @Injectable()
 export class PhotosService {
@@ -24,7 +25,7 @@ export class PhotosService {
   /**
    * Keeps a picture. What it is, its first bytes say; the same picture sent twice is kept once.
    *
-   * @throws DomainError `wrong-kind-of-file` (415), `stage-locked` or `stage-out-of-hand` (409)
+   * @throws DomainError `wrong-kind-of-file` (415), `photos-enough`, `stage-locked` or `stage-out-of-hand` (409)
    */
   async add(
     actor: Actor,
@@ -37,7 +38,7 @@ export class PhotosService {
     if (!bytes || bytes.length === 0) throw fieldError('photo', 'Choose a picture.');
     return this.dataSource.transaction(async (manager) => {
       const build = requireBuilder(actor, await this.records.hold(manager, buildId));
-      const edition = await this.plans.content(build.editionId);
+      const edition = await this.plans.content(build.editionId, manager);
       const held = await heldCheck(manager, build, edition, checkId);
       if (held.check.kind !== 'photo') throw fieldError('checkId', 'This check does not ask for a photo.');
       requireOpen(build, edition, held);
@@ -50,6 +51,10 @@ export class PhotosService {
       const standing = { buildId, checkId, sha256, takenBackAt: IsNull() };
       const known = await manager.findOneBy(Photo, standing);
       if (known) return photoDto(known);
+      if ((await manager.countBy(Photo, { buildId, checkId, takenBackAt: IsNull() })) >= MOST_PHOTOS)
+        throw buildProblems['photos-enough'](
+          `${held.check.title} has ${MOST_PHOTOS} photos, which is as many as it takes. Take one of them back first. Nothing was kept.`,
+        );
       const photo = manager.create(Photo, {
         ...{ buildId, checkId, stageId: held.stage.id, byPersonId: actor.personId },
         ...{ bytes, contentType, sha256, caption, at: this.clock.now(), takenBackAt: null },
@@ -83,7 +88,7 @@ export class PhotosService {
       const standing = { id: photoId, buildId, takenBackAt: IsNull() };
       const photo = await manager.findOneBy(Photo, standing);
       if (!photo) throw notFound('photo');
-      const edition = await this.plans.content(build.editionId);
+      const edition = await this.plans.content(build.editionId, manager);
       requireOpen(build, edition, await heldCheck(manager, build, edition, photo.checkId));
       await manager.update(Photo, standing, { takenBackAt: this.clock.now() });
     });

@@ -5,14 +5,15 @@ import { Clock } from '../common/clock';
 import { commonProblems, fieldError } from '../common/common.errors';
 import type { Instrument } from '../instruments/instrument.entity';
 import type { PlanCheck } from '../plans/plan-check.entity';
-import { PlansService } from '../plans/plans.service';
+import { PlansService, type EditionContent } from '../plans/plans.service';
+import type { Stage } from '../plans/stage.entity';
 import { requireBuilder } from './build-access';
 import { BuildRecordsService } from './build-records.service';
 import type { Build } from './build.entity';
-import { judgedColumns, keepDerived } from './derived-readings';
+import { judgedColumns, keepDerived, readingsInForce } from './derived-readings';
 import { readingDto, type KeepReadingDto, type ReadingDto } from './dto/reading.dto';
 import { InstrumentChoiceService } from './instrument-choice.service';
-import { heldCheck, putOnTheBench, requireOpen } from './open-stage';
+import { heldCheck, openingOf, putOnTheBench, requireOpen } from './open-stage';
 import { Reading } from './reading.entity';
 import { asksForTick, judgeEntry, type JudgedReading } from './readings.rules';
 
@@ -40,20 +41,21 @@ export class ReadingsService {
     const keptAt = this.clock.now();
     return this.dataSource.transaction(async (manager) => {
       const build = requireBuilder(actor, await this.records.hold(manager, buildId));
-      const edition = await this.plans.content(build.editionId);
+      const edition = await this.plans.content(build.editionId, manager);
       const held = await heldCheck(manager, build, edition, checkId);
       requireOpen(build, edition, held);
       const { stage, check, states } = held;
       if (check.kind !== 'measure') throw fieldError('method', 'This check is not a measurement.');
       if (asksForTick(stage.cautions) && body.cautionAcknowledged !== true)
         throw fieldError('cautionAcknowledged', 'Tick the caution before the reading is kept.');
-      const takenAt = takenAtOf(body, build, keptAt);
+      const takenAt = await this.takenAt(manager, build, edition, stage, body, keptAt);
       const instrument = await this.instrumentOf(manager, build, check, body, takenAt);
       const judged = judgedOrRefused(check, body, instrument);
       const reading = await this.insert(manager, build, check, { body, judged, instrument, takenAt, keptAt });
       await putOnTheBench(manager, build, stage);
       await keepDerived(manager, build, edition, states, checkId, keptAt);
-      return readingDto(reading, undefined);
+      const inForce = await readingsInForce(manager, build.id, [checkId]);
+      return readingDto(reading, inForce.get(checkId)?.id);
     });
   }
 
@@ -64,8 +66,27 @@ export class ReadingsService {
     { instrumentId }: KeepReadingDto,
     takenAt: Date,
   ): Promise<Instrument | undefined> {
-    if (instrumentId === undefined) return undefined;
-    return this.instruments.fitFor(manager, build.personId, check, instrumentId, takenAt);
+    if (instrumentId !== undefined)
+      return this.instruments.fitFor(manager, build.personId, check, instrumentId, takenAt);
+    if (check.instrumentKindId !== null) await this.instruments.askFor(manager, check.instrumentKindId);
+    return undefined;
+  }
+
+  /** When it was taken: not in the time to come, and not before the stage could be worked on. */
+  private async takenAt(
+    manager: EntityManager,
+    build: Build,
+    edition: EditionContent,
+    stage: Stage,
+    { takenAt }: KeepReadingDto,
+    now: Date,
+  ): Promise<Date> {
+    if (takenAt === undefined) return now;
+    const instant = new Date(takenAt);
+    if (instant.getTime() > now.getTime() + AHEAD_MS) throw fieldError('takenAt', 'That is still to come.');
+    if (instant < (await openingOf(manager, build, edition, stage)))
+      throw fieldError('takenAt', `That was before ${stage.name} could be begun.`);
+    return instant > now ? now : instant;
   }
 
   private async insert(
@@ -106,12 +127,4 @@ function judgedOrRefused(
   const { problems } = judgement;
   const detail = problems[0]?.detail ?? 'The reading cannot be worked out.';
   throw commonProblems['invalid-input'](detail, { errors: problems });
-}
-
-function takenAtOf({ takenAt }: KeepReadingDto, build: Build, now: Date): Date {
-  if (takenAt === undefined) return now;
-  const instant = new Date(takenAt);
-  if (instant.getTime() > now.getTime() + AHEAD_MS) throw fieldError('takenAt', 'That is still to come.');
-  if (instant < build.startedAt) throw fieldError('takenAt', 'That was before this build was begun.');
-  return instant > now ? now : instant;
 }

@@ -4,6 +4,7 @@ import { requireMember, requireRole, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { notFound } from '../common/common.errors';
 import { checksOf } from '../plans/plans.service';
+import type { PlanCheck } from '../plans/plan-check.entity';
 import type { Stage } from '../plans/stage.entity';
 import { requireBuilder, requireOtherMentor } from './build-access';
 import { standingsOf, standingsOfChecks, type BuildRecord } from './build-record';
@@ -12,10 +13,11 @@ import type { Build } from './build.entity';
 import { BuildStageEvent, type StageEventKind } from './build-stage-event.entity';
 import type { KeptStageState } from './build-stage.entity';
 import { buildProblems } from './builds.errors';
-import { CheckMark } from './check-mark.entity';
 import { missingToSend, missingToSignOff, type CheckStanding } from './checks.rules';
+import { outOfDate, workOutAnew } from './derived-readings';
 import { buildStageDto, type BuildStageDto } from './dto/build-stage.dto';
 import type { SendBackDto, StageNoteDto } from './dto/stage-moves.dto';
+import { takeMarksBack } from './take-back';
 import { isInBuildersHands, lockOf, signOffWaitOf, waitOf } from './stage-states.rules';
 
 interface HeldStage {
@@ -34,7 +36,7 @@ export class StageMovesService {
     private readonly clock: Clock,
   ) {}
 
-  /** Sends a stage to a mentor. @throws DomainError `stage-locked`, `stage-out-of-hand`, `checks-missing` (409) */
+  /** Sends a stage to a mentor. @throws DomainError `stage-locked`, `stage-out-of-hand`, `checks-missing`, `readings-out-of-date` (409) */
   async submit(actor: Actor, buildId: string, stageId: string, body: StageNoteDto): Promise<BuildStageDto> {
     requireMember(actor);
     return this.move(actor, buildId, stageId, requireBuilder, 'sent', body.note, (held) => {
@@ -43,6 +45,7 @@ export class StageMovesService {
       if (!isInBuildersHands(state))
         throw buildProblems['stage-out-of-hand'](`${stage.name} was sent already, or is signed off.`);
       refuseMissing(stage, missingToSend(standingsOfChecks(record, stage.id)));
+      refuseOutOfDate(stage, outOfDate(record, stage.id));
       if (waits.toSend)
         throw buildProblems['stage-locked'](`${stage.name} cannot be sent yet. ${waits.toSend}`);
     });
@@ -54,13 +57,14 @@ export class StageMovesService {
     return this.move(actor, buildId, stageId, requireBuilder, 'withdrawn', '', requireWithMentor);
   }
 
-  /** Signs a stage off, which fixes its record. @throws DomainError `stage-not-with-mentor`, `checks-missing`, `stage-locked` (409), `own-stage` (403) */
+  /** Signs a stage off, which fixes its record. @throws DomainError `stage-not-with-mentor`, `checks-missing`, `readings-out-of-date`, `stage-locked` (409), `own-stage` (403) */
   async signOff(actor: Actor, buildId: string, stageId: string, body: StageNoteDto): Promise<BuildStageDto> {
     requireRole(actor, 'mentor');
     return this.move(actor, buildId, stageId, requireOtherMentor, 'signed off', body.note, (held) => {
       requireWithMentor(held);
       const { stage, record, waits } = held;
       refuseMissing(stage, missingToSignOff(standingsOfChecks(record, stage.id)));
+      refuseOutOfDate(stage, outOfDate(record, stage.id));
       if (waits.toSignOff)
         throw buildProblems['stage-locked'](`${stage.name} cannot be signed off yet. ${waits.toSignOff}`);
     });
@@ -86,10 +90,12 @@ export class StageMovesService {
       const held = heldStage(await this.records.readOne(build, manager), stageId);
       refuse(held);
       const at = this.clock.now();
-      if (kind === 'sent back' || kind === 'withdrawn') await forgetWhatWasSeen(manager, held, at);
+      const isReopened = kind === 'sent back' || kind === 'withdrawn';
+      if (isReopened) await forgetWhatWasSeen(manager, held, at);
       const position = held.record.events.filter((event) => event.stageId === stageId).length + 1;
       const by = { byPersonId: actor.personId, at, note: note ?? '' };
       await manager.insert(BuildStageEvent, { buildId, stageId, position, kind, ...by });
+      if (isReopened) await workOutAnew(manager, held.record, at);
       const moved = await this.records.readOne(build, manager);
       return buildStageDto(moved, held.stage, await this.records.peopleIn([moved], manager));
     });
@@ -125,6 +131,15 @@ function refuseMissing(stage: Stage, missing: readonly CheckStanding[]): void {
   throw buildProblems['checks-missing'](detail, { extra });
 }
 
+function refuseOutOfDate(stage: Stage, checks: readonly PlanCheck[]): void {
+  if (checks.length === 0) return;
+  const named = checks.map(({ title }) => title).join(', ');
+  throw buildProblems['readings-out-of-date'](
+    `${named} of ${stage.name} was worked out of readings that were taken again since. ` +
+      'It is worked out anew when the stage is sent back or taken back from the mentor.',
+  );
+}
+
 /** A mentor looks again at a stage that went back: what was seen then does not hold for what comes. */
 async function forgetWhatWasSeen(
   manager: EntityManager,
@@ -133,5 +148,5 @@ async function forgetWhatWasSeen(
 ): Promise<void> {
   const seen = checksOf(record.edition, stage.id).filter(({ kind }) => kind === "mentor's eyes");
   const standing = { buildId: record.build.id, checkId: In(seen.map(({ id }) => id)), takenBackAt: IsNull() };
-  await manager.update(CheckMark, standing, { takenBackAt });
+  await takeMarksBack(manager, standing, takenBackAt);
 }

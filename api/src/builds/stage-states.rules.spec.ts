@@ -3,6 +3,7 @@ import {
   currentOf,
   isInBuildersHands,
   lockOf,
+  openedAt,
   signOffWaitOf,
   waitOf,
   type Standing,
@@ -67,6 +68,36 @@ describe('a stage', () => {
       'signed off',
     ];
     expect(states.map(isInBuildersHands)).toEqual([true, true, true, false, false]);
+  });
+});
+
+describe('the moment a stage opened', () => {
+  const day = (date: number): Date => new Date(Date.UTC(2026, 0, date));
+  const [one, two] = [{ stageId: 'one' }, { stageId: 'two' }];
+  const moved = (stageId: string, kind: 'sent' | 'sent back' | 'signed off', date: number) => ({
+    ...{ stageId, kind },
+    at: day(date),
+  });
+  const events = [
+    moved('one', 'sent', 3),
+    moved('two', 'sent', 4),
+    moved('one', 'sent back', 5),
+    moved('one', 'sent', 6),
+    moved('one', 'signed off', 7),
+    moved('two', 'signed off', 8),
+  ];
+  const build = { startedAt: day(1), licenceSeenAt: day(2) };
+
+  it('is when the build was begun, or the last of those before was first sent', () => {
+    expect(openedAt({ needsLicence: false }, [], events, build)).toEqual(day(1));
+    expect(openedAt({ needsLicence: false }, [one], events, build)).toEqual(day(3));
+    expect(openedAt({ needsLicence: false }, [one, two], events, build)).toEqual(day(4));
+  });
+
+  it('is, on the air, when the last of them was signed off or the licence was seen', () => {
+    expect(openedAt({ needsLicence: true }, [one, two], events, build)).toEqual(day(8));
+    const seenLater = { ...build, licenceSeenAt: day(9) };
+    expect(openedAt({ needsLicence: true }, [one, two], events, seenLater)).toEqual(day(9));
   });
 });
 

@@ -1,3 +1,4 @@
+import type { StageEventKind } from './build-stage-event.entity';
 import type { KeptStageState } from './build-stage.entity';
 
 export const STAGE_STATES = [
@@ -57,6 +58,33 @@ function airWaitOf(before: readonly Standing[], isLicenceSeen: boolean): string 
 
 const spanOf = (stages: readonly Standing[]): string =>
   `stages ${stages[0]?.position} ${stages.length === 2 ? 'and' : 'to'} ${stages.at(-1)?.position}`;
+
+/** What moved one of the stages before, and when. */
+interface Moved {
+  stageId: string;
+  kind: StageEventKind;
+  at: Date;
+}
+
+/**
+ * When a stage opened: nothing on it can have been read before.
+ *
+ * @param before - the stages before it.
+ * @param events - of the whole build, in the order of time.
+ */
+export function openedAt(
+  { needsLicence }: Pick<Standing, 'needsLicence'>,
+  before: readonly { stageId: string }[],
+  events: readonly Moved[],
+  { startedAt, licenceSeenAt }: { startedAt: Date; licenceSeenAt: Date | null },
+): Date {
+  const opener: StageEventKind = needsLicence ? 'signed off' : 'sent';
+  const moves = before.map(({ stageId }) =>
+    events.find((event) => event.stageId === stageId && event.kind === opener),
+  );
+  const instants = [startedAt, needsLicence ? licenceSeenAt : null, ...moves.map((move) => move?.at)];
+  return new Date(Math.max(...instants.map((instant) => instant?.getTime() ?? 0)));
+}
 
 /** Why a stage cannot be signed off yet: those before it feed it, so they are signed off first. */
 export function signOffWaitOf(before: readonly Standing[]): string | null {

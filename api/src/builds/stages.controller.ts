@@ -1,7 +1,8 @@
-import { Body, Controller, HttpCode, Param, ParseUUIDPipe, Post } from '@nestjs/common';
+import { Body, Controller, HttpCode, Param, Post } from '@nestjs/common';
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { ParseIdPipe } from '../common/parse-id.pipe';
 import { BuildStageDto } from './dto/build-stage.dto';
 import { SendBackDto, StageNoteDto } from './dto/stage-moves.dto';
 import { StageMovesService } from './stage-moves.service';
@@ -17,8 +18,8 @@ export class StagesController {
   @Access('signed-in')
   submit(
     @CurrentActor() actor: Actor,
-    @Param('buildId', ParseUUIDPipe) buildId: string,
-    @Param('stageId', ParseUUIDPipe) stageId: string,
+    @Param('buildId', ParseIdPipe) buildId: string,
+    @Param('stageId', ParseIdPipe) stageId: string,
     @Body() body: StageNoteDto,
   ): Promise<BuildStageDto> {
     return this.moves.submit(actor, buildId, stageId, body);
@@ -30,8 +31,8 @@ export class StagesController {
   @Access('signed-in')
   withdraw(
     @CurrentActor() actor: Actor,
-    @Param('buildId', ParseUUIDPipe) buildId: string,
-    @Param('stageId', ParseUUIDPipe) stageId: string,
+    @Param('buildId', ParseIdPipe) buildId: string,
+    @Param('stageId', ParseIdPipe) stageId: string,
   ): Promise<BuildStageDto> {
     return this.moves.withdraw(actor, buildId, stageId);
   }
@@ -41,8 +42,8 @@ export class StagesController {
   @Access({ roles: ['mentor'] })
   signOff(
     @CurrentActor() actor: Actor,
-    @Param('buildId', ParseUUIDPipe) buildId: string,
-    @Param('stageId', ParseUUIDPipe) stageId: string,
+    @Param('buildId', ParseIdPipe) buildId: string,
+    @Param('stageId', ParseIdPipe) stageId: string,
     @Body() body: StageNoteDto,
   ): Promise<BuildStageDto> {
     return this.moves.signOff(actor, buildId, stageId, body);
@@ -54,8 +55,8 @@ export class StagesController {
   @Access({ roles: ['mentor'] })
   sendBack(
     @CurrentActor() actor: Actor,
-    @Param('buildId', ParseUUIDPipe) buildId: string,
-    @Param('stageId', ParseUUIDPipe) stageId: string,
+    @Param('buildId', ParseIdPipe) buildId: string,
+    @Param('stageId', ParseIdPipe) stageId: string,
     @Body() body: SendBackDto,
   ): Promise<BuildStageDto> {
     return this.moves.sendBack(actor, buildId, stageId, body);

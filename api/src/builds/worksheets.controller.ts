@@ -1,7 +1,8 @@
-import { Body, Controller, Delete, Get, HttpCode, Param, ParseUUIDPipe, Post } from '@nestjs/common';
+import { Body, Controller, Delete, Get, HttpCode, Param, Post } from '@nestjs/common';
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { ParseIdPipe } from '../common/parse-id.pipe';
 import { PutWorksheetDto, WorksheetDto } from './dto/worksheet.dto';
 import { WorksheetsService } from './worksheets.service';
 
@@ -15,7 +16,7 @@ export class WorksheetsController {
   @Access('signed-in')
   list(
     @CurrentActor() actor: Actor,
-    @Param('buildId', ParseUUIDPipe) buildId: string,
+    @Param('buildId', ParseIdPipe) buildId: string,
   ): Promise<WorksheetDto[]> {
     return this.worksheets.list(actor, buildId);
   }
@@ -25,8 +26,8 @@ export class WorksheetsController {
   @Access('signed-in')
   put(
     @CurrentActor() actor: Actor,
-    @Param('buildId', ParseUUIDPipe) buildId: string,
-    @Param('stageId', ParseUUIDPipe) stageId: string,
+    @Param('buildId', ParseIdPipe) buildId: string,
+    @Param('stageId', ParseIdPipe) stageId: string,
     @Body() body: PutWorksheetDto,
   ): Promise<WorksheetDto> {
     return this.worksheets.put(actor, buildId, stageId, body);
@@ -37,8 +38,8 @@ export class WorksheetsController {
   @Access('signed-in')
   takeBack(
     @CurrentActor() actor: Actor,
-    @Param('buildId', ParseUUIDPipe) buildId: string,
-    @Param('worksheetId', ParseUUIDPipe) worksheetId: string,
+    @Param('buildId', ParseIdPipe) buildId: string,
+    @Param('worksheetId', ParseIdPipe) worksheetId: string,
   ): Promise<void> {
     return this.worksheets.takeBack(actor, buildId, worksheetId);
   }

@@ -1,11 +1,15 @@
 import { Temporal } from 'temporal-polyfill';
+import { MONTHS, wallOf } from './wall-clock';
 
 /** The day on the club's wall at an instant, `2026-10-15`. */
-export function clubDay(instant: Date, timeZone: string): string {
-  return Temporal.Instant.fromEpochMilliseconds(instant.getTime())
-    .toZonedDateTimeISO(timeZone)
-    .toPlainDate()
-    .toString();
+export function clubDay(instant: Date, zone: string): string {
+  return wallOf(instant, zone).toPlainDate().toString();
+}
+
+/** The instant at which a day of the club is over: midnight on the wall, whatever the clocks do. */
+export function endOfDay(day: string, zone: string): Date {
+  const next = Temporal.PlainDate.from(day).add({ days: 1 });
+  return new Date(next.toZonedDateTime(zone).epochMilliseconds);
 }
 
 /** Whole days from one day to another; negative when the second is earlier. */
@@ -15,6 +19,12 @@ export function daysBetween(from: string, to: string): number {
 
 export function addDays(day: string, days: number): string {
   return Temporal.PlainDate.from(day).add({ days }).toString();
+}
+
+/** A day in a sentence, with its year: `9 Dec 2026`. */
+export function dateWords(day: string): string {
+  const { day: date, month, year } = Temporal.PlainDate.from(day);
+  return `${date} ${MONTHS[month - 1]} ${year}`;
 }
 
 /** `Sat 31 October 2026`, for letters and problem texts. */

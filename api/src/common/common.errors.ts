@@ -10,6 +10,9 @@ export const commonProblems = defineProblems({
   'too-large': { status: 413, title: 'Too large' },
   'wrong-kind-of-file': { status: 415, title: 'The wrong kind of file' },
   'slow-down': { status: 429, title: 'Too many tries' },
+  busy: { status: 503, title: 'Too much at once' },
+  unplanned: { status: 500, title: 'Something went wrong' },
+  'not-now': { status: 503, title: 'Not to be had at the moment' },
 });
 
 /** A 422 about one field of the request body; `field` may be a path such as `items.0.startsAt`. */

@@ -5,7 +5,7 @@ export interface FieldProblem {
 }
 
 export interface ProblemKind {
-  status: 400 | 401 | 403 | 404 | 409 | 413 | 415 | 422 | 429;
+  status: 400 | 401 | 403 | 404 | 409 | 413 | 415 | 422 | 429 | 500 | 503;
   /** The same for every occurrence of the kind. */
   title: string;
 }
@@ -16,7 +16,7 @@ export interface ProblemExtras {
   extra?: Record<string, unknown>;
 }
 
-/** An expected refusal, answered as RFC 9457 problem details. `detail` is read by a member. */
+/** A refusal, answered as RFC 9457 problem details. `detail` is read by a member. */
 export class DomainError extends Error {
   constructor(
     readonly code: string,

@@ -1,5 +1,6 @@
 import { Catch, HttpException, Logger, type ArgumentsHost, type ExceptionFilter } from '@nestjs/common';
 import type { Request, Response } from 'express';
+import { isOutOfTurn } from './busy';
 import { commonProblems } from './common.errors';
 import { DomainError } from './domain-error';
 
@@ -12,6 +13,14 @@ interface ProblemDocument {
   [member: string]: unknown;
 }
 
+/** After a request was given up for the sake of others. */
+const AGAIN_SECONDS = 2;
+
+/** Whether anything was changed before it went wrong, nobody knows who did not plan it. */
+const UNPLANNED = commonProblems.unplanned(
+  'Something went wrong on the server. Look whether it was done before you try again. The number below finds it in the log.',
+);
+
 /** Writes every answer that is not a success as an RFC 9457 problem document. */
 @Catch()
 export class ProblemFilter implements ExceptionFilter {
@@ -22,15 +31,16 @@ export class ProblemFilter implements ExceptionFilter {
     const request = http.getRequest<Request & { id?: string }>();
     const response = http.getResponse<Response>();
     const instance = `urn:ferrite-row:request:${String(request.id ?? 'unknown')}`;
-    const refusal = asRefusal(error);
-    if (!refusal) this.logger.error({ err: error, instance }, 'A request failed for a reason nobody planned');
+    const refusal = asRefusal(error) ?? UNPLANNED;
+    if (refusal === UNPLANNED)
+      this.logger.error({ err: error, instance }, 'A request failed for a reason nobody planned');
     if (response.headersSent) {
       response.end();
       return;
     }
-    const { retryAfterSeconds } = refusal?.extras.extra ?? {};
+    const { retryAfterSeconds } = refusal.extras.extra ?? {};
     if (typeof retryAfterSeconds === 'number') response.setHeader('Retry-After', String(retryAfterSeconds));
-    const document = refusal ? describe(refusal, instance) : unplanned(instance);
+    const document = describe(refusal, instance);
     response.status(document.status).type('application/problem+json').send(JSON.stringify(document));
   }
 }
@@ -49,16 +59,19 @@ function describe(refusal: DomainError, instance: string): ProblemDocument {
   };
 }
 
-function unplanned(instance: string): ProblemDocument {
-  const detail =
-    'Something went wrong on the server. Nothing was changed. The number below finds it in the log.';
-  return { type: '/problems/unplanned', title: 'Something went wrong', status: 500, detail, instance };
-}
-
 /** What the body parser, the router and the upload handler throw is a refusal too, with words of ours. */
 function asRefusal(error: unknown): DomainError | undefined {
   if (error instanceof DomainError) return error;
+  if (isOutOfTurn(error)) {
+    const extra = { retryAfterSeconds: AGAIN_SECONDS };
+    return commonProblems.busy(
+      'The server had too much to do at once and gave this up. Try again in a moment.',
+      { extra },
+    );
+  }
   const status = statusOf(error);
+  if (status === 503)
+    return commonProblems['not-now']('The portal cannot answer at the moment. Try again shortly.');
   if (status === undefined || status >= 500) return undefined;
   if (status === 401) return commonProblems['not-signed-in']('Sign in to go on.');
   if (status === 403) return commonProblems['not-allowed']('This is not open to you.');

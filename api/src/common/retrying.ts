@@ -13,7 +13,8 @@ export async function retryingOnce<T>(work: () => Promise<T>): Promise<T> {
   }
 }
 
-function wantsAnotherTry(error: unknown): boolean {
+/** Whether the database gave the work up although nothing is wrong with it. */
+export function wantsAnotherTry(error: unknown): boolean {
   if (!(error instanceof QueryFailedError)) return false;
   const { code } = error.driverError as { code?: unknown };
   return typeof code === 'string' && TRY_AGAIN.has(code);

@@ -1,7 +1,19 @@
 import { applyDecorators } from '@nestjs/common';
 import { ApiProperty } from '@nestjs/swagger';
 import { Transform } from 'class-transformer';
-import { IsISO8601, IsString, Matches, MaxLength, MinLength, ValidateBy } from 'class-validator';
+import {
+  ArrayMaxSize,
+  ArrayUnique,
+  IsArray,
+  IsISO8601,
+  IsString,
+  Matches,
+  MaxLength,
+  MinLength,
+  ValidateBy,
+  ValidateIf,
+} from 'class-validator';
+import { ID } from './id';
 
 /** An instant on the wire: ISO 8601 with an offset or Z, because a wall time alone names no instant. */
 export function IsInstant(): PropertyDecorator {
@@ -44,4 +56,37 @@ export function IsWords(maxLength: number, minLength = 1): PropertyDecorator {
     MaxLength(maxLength),
     Matches(/^[^\u0000]*$/, { message: '$property has a character that cannot be stored' }),
   );
+}
+
+/** A field that may be left out, though not sent as null: nothing behind the validation asks what null would mean. */
+export function MayBeLeftOut(): PropertyDecorator {
+  return ValidateIf((_body, value) => value !== undefined);
+}
+
+/** The id of something, in any spelling on the wire and in lower case behind it, as the database writes it. */
+export function IsId(): PropertyDecorator {
+  return applyDecorators(
+    ApiProperty({ type: String, format: 'uuid' }),
+    Transform(({ value }: { value: unknown }) => inLowerCase(value)),
+    Matches(ID, { message: '$property is not an id' }),
+  );
+}
+
+/** Each id once, in whatever spelling, and not endlessly many. */
+export function AreIds(
+  most: number,
+  { tooMany, twice }: { tooMany?: string; twice?: string } = {},
+): PropertyDecorator {
+  return applyDecorators(
+    ApiProperty({ type: [String], format: 'uuid', maxItems: most, uniqueItems: true }),
+    Transform(({ value }: { value: unknown }) => (Array.isArray(value) ? value.map(inLowerCase) : value)),
+    IsArray(),
+    ArrayMaxSize(most, { message: tooMany }),
+    ArrayUnique({ message: twice }),
+    Matches(ID, { each: true, message: '$property holds something that is not an id' }),
+  );
+}
+
+function inLowerCase(value: unknown): unknown {
+  return typeof value === 'string' ? value.toLowerCase() : value;
 }

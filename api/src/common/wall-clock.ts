@@ -1,47 +1,63 @@
 import { Temporal } from 'temporal-polyfill';
 
+export type WallTime = Temporal.PlainDateTime;
+
 const DAYS = ['Mon', 'Tue', 'Wed', 'Thu', 'Fri', 'Sat', 'Sun'];
-const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'];
+export const MONTHS = [
+  ...['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun'],
+  ...['Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'],
+];
 
-const two = (value: number): string => String(value).padStart(2, '0');
-
-function onTheWall(instant: Date, zone: string): Temporal.ZonedDateTime {
-  return Temporal.Instant.fromEpochMilliseconds(instant.getTime()).toZonedDateTimeISO(zone);
+/** What the club's wall shows at an instant. */
+export function wallOf(instant: Date, zone: string): WallTime {
+  return Temporal.Instant.fromEpochMilliseconds(instant.getTime()).toZonedDateTimeISO(zone).toPlainDateTime();
 }
 
-/** The day the club's wall shows at an instant, `2026-10-15`. */
-export function dayAt(instant: Date, zone: string): string {
-  return onTheWall(instant, zone).toPlainDate().toString();
+/**
+ * The instant at which the wall shows this time.
+ *
+ * | wall time | answer |
+ * |---|---|
+ * | skipped in spring | read with the offset before the change, so one hour later on the wall |
+ * | twice in autumn | the first of the two |
+ *
+ * @see RFC 5545, 3.3.5, "DATE-TIME", form 3
+ */
+export function instantOf(wall: WallTime, zone: string): Date {
+  return new Date(wall.toZonedDateTime(zone, { disambiguation: 'compatible' }).epochMilliseconds);
 }
 
-/** The instant at which a day of the club is over: midnight on the wall, whatever the clocks do. */
-export function endOfDay(day: string, zone: string): Date {
-  const next = Temporal.PlainDate.from(day).add({ days: 1 });
-  return new Date(next.toZonedDateTime(zone).epochMilliseconds);
+/** `19:30` */
+export function timeWords(instant: Date, zone: string): string {
+  return clock(wallOf(instant, zone));
 }
 
-/** A day so many days later. */
-export function daysLater(day: string, days: number): string {
-  return Temporal.PlainDate.from(day).add({ days }).toString();
+/** `Thu 22 Oct` */
+export function dayWords(instant: Date, zone: string): string {
+  return day(wallOf(instant, zone));
 }
 
-/** A day in a sentence, with its year: `9 Dec 2026`. */
-export function dateWords(day: string): string {
-  const { day: date, month, year } = Temporal.PlainDate.from(day);
-  return `${date} ${MONTHS[month - 1]} ${year}`;
+interface Span {
+  startsAt: Date;
+  endsAt: Date;
 }
 
-/** A stretch of time as the wall shows it: `Thu 15 Oct, 14:00 to 16:30`; names the second day when it is another. */
-export function spanWords({ startsAt, endsAt }: { startsAt: Date; endsAt: Date }, zone: string): string {
-  const [from, to] = [onTheWall(startsAt, zone), onTheWall(endsAt, zone)];
-  const sameDay = from.toPlainDate().equals(to.toPlainDate());
-  return `${dayWords(from)}, ${timeWords(from)} to ${sameDay ? '' : `${dayWords(to)}, `}${timeWords(to)}`;
+/** The hours of a day that is named already: `19:00 to 22:00`; names the second day when it is another. */
+export function hoursWords({ startsAt, endsAt }: Span, zone: string): string {
+  const [from, to] = [wallOf(startsAt, zone), wallOf(endsAt, zone)];
+  const isSameDay = from.toPlainDate().equals(to.toPlainDate());
+  return `${clock(from)} to ${isSameDay ? '' : `${day(to)}, `}${clock(to)}`;
 }
 
-function dayWords(at: Temporal.ZonedDateTime): string {
-  return `${DAYS[at.dayOfWeek - 1]} ${at.day} ${MONTHS[at.month - 1]}`;
+/** A stretch of time: `Thu 15 Oct, 14:00 to 16:30`, or `Thu 15 Oct, 22:00 to Fri 16 Oct, 00:30`. */
+export function spanWords(span: Span, zone: string): string {
+  return `${dayWords(span.startsAt, zone)}, ${hoursWords(span, zone)}`;
 }
 
-function timeWords(at: Temporal.ZonedDateTime): string {
-  return `${two(at.hour)}:${two(at.minute)}`;
+function clock(wall: WallTime): string {
+  return wall.toPlainTime().toString({ smallestUnit: 'minute' });
+}
+
+function day(wall: WallTime): string {
+  return `${DAYS[wall.dayOfWeek - 1]} ${wall.day} ${MONTHS[wall.month - 1]}`;
 }

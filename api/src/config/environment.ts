@@ -1,5 +1,16 @@
 import { plainToInstance, Type } from 'class-transformer';
-import { IsIn, IsInt, IsOptional, IsString, IsUrl, Max, Min, MinLength, validateSync } from 'class-validator';
+import {
+  IsIn,
+  IsInt,
+  IsOptional,
+  IsString,
+  IsUrl,
+  Matches,
+  Max,
+  Min,
+  MinLength,
+  validateSync,
+} from 'class-validator';
 
 /** Everything the process takes from its environment, read once at start-up and typed. */
 export class Environment {
@@ -26,9 +37,26 @@ export class Environment {
   @Max(200)
   DATABASE_POOL = 10;
 
+  /** How many seconds a request waits for a free connection before it is told to come again. */
+  @Type(() => Number)
+  @IsInt()
+  @Min(1)
+  @Max(120)
+  DATABASE_WAIT = 20;
+
   /** The address people type; links in mail and the return from the card page are made from it. */
   @IsUrl({ require_tld: false, require_protocol: true })
   PUBLIC_URL = 'http://127.0.0.1:4780';
+
+  /**
+   * Whose word about the caller's address is taken: `loopback`, or a proxy's addresses with commas between them. Left
+   * out, nobody's, because without a proxy in front everybody could name an address of their choosing.
+   */
+  @IsOptional()
+  @Matches(/^[\da-z:./]*[:.a-z][\da-z:./]*(, *[\da-z:./]*[:.a-z][\da-z:./]*)*$/i, {
+    message: 'TRUSTED_PROXY is loopback or addresses with commas between them',
+  })
+  TRUSTED_PROXY?: string;
 
   @IsString()
   @MinLength(32)

@@ -8,7 +8,7 @@ import { databaseOptions } from './options';
     TypeOrmModule.forRootAsync({
       inject: [Environment],
       useFactory: (environment: Environment) => ({
-        ...databaseOptions(environment.DATABASE_URL, environment.DATABASE_POOL),
+        ...databaseOptions(environment.DATABASE_URL, environment.DATABASE_POOL, environment.DATABASE_WAIT),
         // Migrating is the start script's business: several processes start at once.
         migrationsRun: false,
         retryAttempts: 3,

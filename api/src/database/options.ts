@@ -4,11 +4,13 @@ import * as migrations from './migrations/index';
 import { SnakeNaming } from './naming';
 
 /** How every program of ours reaches PostgreSQL. Migrations are the only source of the schema. */
-export function databaseOptions(url: string, poolSize = 10): DataSourceOptions {
+export function databaseOptions(url: string, poolSize = 10, waitSeconds = 20): DataSourceOptions {
   return {
     type: 'postgres',
     url,
     poolSize,
+    // Somebody who waits longer for a free connection is told so; waiting without end would hang the whole process.
+    connectTimeoutMS: waitSeconds * 1000,
     entities,
     migrations: Object.values(migrations),
     migrationsTableName: 'migration',

@@ -3,14 +3,17 @@ import type Stripe from 'stripe';
 import type { EntityManager } from 'typeorm';
 import { Clock } from '../common/clock';
 import { clubDay } from '../common/club-day';
+import { isId } from '../common/id';
 import { writeMinor } from '../common/minor-units';
 import { ClubService } from '../club/club.service';
+import { hasFailed, type CardSession } from './card-service';
 import { Checkout, type CheckoutState } from './checkout.entity';
 import { Invoice } from './invoice.entity';
 import type { EventOutcome } from './payment-event.entity';
 import { Payment } from './payment.entity';
 import { PaymentsRepository } from './payments.repository';
 import { ReceiptMail } from './receipt-mail';
+import { takenBackByCard, type TakenBackByCard } from './refund-notes';
 import { TillService } from './till.service';
 
 interface Outcome {
@@ -43,10 +46,28 @@ export class CardEvents {
     if (event.type === 'checkout.session.async_payment_failed')
       return this.move(manager, event.data.object, 'failed');
     if (event.type === 'checkout.session.expired') return this.move(manager, event.data.object, 'expired');
+    const back = takenBackByCard(event);
+    if (back) return needsALook(back.note(await this.paidBy(manager, back)));
     return noted('Nothing here acts on this kind of event.');
   }
 
-  private async settle(manager: EntityManager, session: Stripe.Checkout.Session): Promise<Outcome> {
+  /** The same from the session itself, asked for where no event has come. */
+  async actOnSession(manager: EntityManager, session: CardSession): Promise<Outcome> {
+    if (session.status === 'expired') return this.move(manager, session, 'expired');
+    if (session.status !== 'complete') return noted('Nobody has paid there yet.');
+    if (session.payment_status === 'paid') return this.settle(manager, session);
+    return this.move(manager, session, hasFailed(session) ? 'failed' : 'confirming');
+  }
+
+  /** In words: the receipt of what a charge had paid, or the charge itself where it is none of ours. */
+  private async paidBy(manager: EntityManager, { chargeId, metadata }: TakenBackByCard): Promise<string> {
+    const checkout = await this.find(manager, metadata.checkout);
+    const payment =
+      checkout?.sessionId && (await this.payments.one({ cardSessionId: checkout.sessionId }, manager));
+    return payment ? `${payment.receiptNumber} from ${payment.personName}` : `the charge ${chargeId}`;
+  }
+
+  private async settle(manager: EntityManager, session: CardSession): Promise<Outcome> {
     const checkout = await this.hold(manager, session);
     if (!checkout) return needsALook(`Paid on a card page that is not one of ours: ${session.id}.`);
     if (await manager.getRepository(Payment).existsBy({ cardSessionId: session.id }))
@@ -82,11 +103,7 @@ export class CardEvents {
   }
 
   /** Only a live visit moves: an event that comes after the money changes nothing. */
-  private async move(
-    manager: EntityManager,
-    session: Stripe.Checkout.Session,
-    state: CheckoutState,
-  ): Promise<Outcome> {
+  private async move(manager: EntityManager, session: CardSession, state: CheckoutState): Promise<Outcome> {
     const checkout = await this.hold(manager, session);
     if (!checkout) return noted(`No card page of ours: ${session.id}.`);
     const isLive = checkout.state === 'open' || checkout.state === 'confirming';
@@ -96,16 +113,21 @@ export class CardEvents {
   }
 
   /** By the id we gave the service: its own session id may not be written down yet when the event is quick. */
-  private async hold(manager: EntityManager, session: Stripe.Checkout.Session): Promise<Checkout | null> {
-    const id = session.metadata?.checkout ?? '';
-    if (!/^[0-9a-f-]{36}$/.test(id)) return null;
-    const checkout = await manager
-      .getRepository(Checkout)
-      .findOne({ where: { id }, lock: { mode: 'for_no_key_update' } });
+  private async hold(manager: EntityManager, session: CardSession): Promise<Checkout | null> {
+    const checkout = await this.find(manager, session.metadata?.checkout, { mode: 'for_no_key_update' });
     if (!checkout || (checkout.sessionId !== null && checkout.sessionId !== session.id)) return null;
     if (checkout.sessionId === null)
-      await manager.getRepository(Checkout).update({ id }, { sessionId: session.id });
+      await manager.getRepository(Checkout).update({ id: checkout.id }, { sessionId: session.id });
     return checkout;
+  }
+
+  private async find(
+    manager: EntityManager,
+    id = '',
+    lock?: { mode: 'for_no_key_update' },
+  ): Promise<Checkout | null> {
+    if (!isId(id)) return null;
+    return manager.getRepository(Checkout).findOne({ where: { id }, ...(lock && { lock }) });
   }
 
   private async set(manager: EntityManager, { id }: Checkout, state: CheckoutState): Promise<void> {
@@ -113,7 +135,7 @@ export class CardEvents {
   }
 }
 
-function mismatch(session: Stripe.Checkout.Session, { amountMinor, currency }: Checkout): string | undefined {
+function mismatch(session: CardSession, { amountMinor, currency }: Checkout): string | undefined {
   const paid = session.amount_total ?? 0;
   const paidIn = (session.currency ?? '').toUpperCase();
   if (paid === amountMinor && paidIn === currency) return undefined;

@@ -10,7 +10,7 @@ export interface CardPage {
   url: string;
 }
 
-export type CardSession = Pick<Stripe.Checkout.Session, 'id' | 'status' | 'payment_status' | 'url'>;
+export type CardSession = Stripe.Checkout.Session;
 
 export interface CardPageRequest {
   checkoutId: string;
@@ -68,8 +68,14 @@ export class CardService {
     return { sessionId: session.id, url: session.url };
   }
 
-  async session(sessionId: string): Promise<CardSession> {
-    return this.stripe.checkout.sessions.retrieve(sessionId);
+  /** With what became of its payment; null when the service knows of no such session. */
+  async session(sessionId: string): Promise<CardSession | null> {
+    try {
+      return await this.stripe.checkout.sessions.retrieve(sessionId, { expand: ['payment_intent'] });
+    } catch (error) {
+      if (error instanceof Stripe.errors.StripeError && error.code === 'resource_missing') return null;
+      throw error;
+    }
   }
 
   async closePage(sessionId: string): Promise<void> {
@@ -96,6 +102,16 @@ export class CardService {
 /** Network trouble, or an answer of the service that is not a success. */
 export function isCardServiceError(error: unknown): boolean {
   return error instanceof Stripe.errors.StripeError;
+}
+
+/** The key of a page was used before, and what is asked for now is not the same: the invoice's words changed since. */
+export function isAskedOtherwise(error: unknown): boolean {
+  return error instanceof Stripe.errors.StripeIdempotencyError;
+}
+
+/** The bank said no after the page was left: the session alone only says that it is not paid. */
+export function hasFailed({ payment_intent: intent }: CardSession): boolean {
+  return typeof intent === 'object' && intent?.status === 'requires_payment_method';
 }
 
 function reachedAt(base: URL): Stripe.StripeConfig {

@@ -6,7 +6,7 @@ import { clubDay } from '../common/club-day';
 import { notFound } from '../common/common.errors';
 import { ClubService } from '../club/club.service';
 import { PeopleService } from '../people/people.service';
-import { CardService, isCardServiceError } from './card-service';
+import { CardService, isAskedOtherwise, isCardServiceError } from './card-service';
 import { Checkout } from './checkout.entity';
 import type { CardPaymentDto, CheckoutDto } from './dto/checkout.dto';
 import { duesProblems } from './dues.errors';
@@ -36,9 +36,7 @@ export class CheckoutService {
     const { currency } = await this.club.settings();
     const invoice = await this.ownInvoice(actor, invoiceId);
     try {
-      await this.closeStale(invoice, currency);
-      const checkout = await this.claim(invoiceId, currency);
-      return { url: checkout.url ?? (await this.openPage(checkout, invoice)) };
+      return { url: await this.pageFor(invoice, currency) };
     } catch (error) {
       if (!isCardServiceError(error)) throw error;
       this.logger.warn({ err: error, invoiceId }, 'The card service did not give a page');
@@ -70,22 +68,47 @@ export class CheckoutService {
     return invoice;
   }
 
-  /** A page that has been used, has run out, or asks for another amount than is open now, is not offered again. */
+  /** For this feature: the visit has no page any more. Only a live one ends so. */
+  async expire(checkoutId: string): Promise<void> {
+    await this.dataSource
+      .getRepository(Checkout)
+      .update(
+        { id: checkoutId, state: In(['open', 'confirming']) },
+        { state: 'expired', changedAt: this.clock.now() },
+      );
+  }
+
+  /** A visit whose page was asked for in other words before can never have it; then there is one new visit. */
+  private async pageFor(invoice: InvoiceRow, currency: string, isSecondTry = false): Promise<string> {
+    await this.closeStale(invoice, currency);
+    const checkout = await this.claim(invoice.id, currency);
+    if (checkout.url) return checkout.url;
+    try {
+      return await this.openPage(checkout, invoice);
+    } catch (error) {
+      if (isSecondTry || !isAskedOtherwise(error)) throw error;
+      await this.expire(checkout.id);
+      return this.pageFor(invoice, currency, true);
+    }
+  }
+
   private async closeStale(invoice: InvoiceRow, currency: string): Promise<void> {
     const live = await this.live(invoice.id);
     if (live?.state === 'confirming') throw underWay(invoice);
-    if (live?.sessionId) {
-      const { status } = await this.cards.session(live.sessionId);
-      if (status === 'complete') throw underWay(invoice);
-      const isRight = live.amountMinor === openOf(invoice) && live.currency === currency;
-      if (status === 'open' && isRight) return;
-      if (status === 'open') await this.cards.closePage(live.sessionId);
-      await this.dataSource
-        .getRepository(Checkout)
-        .update({ id: live.id, state: 'open' }, { state: 'expired', changedAt: this.clock.now() });
-    }
+    if (live && !(await this.isOffered(live, invoice, currency))) await this.expire(live.id);
     if (openOf(invoice) === 0)
       throw duesProblems['invoice-paid'](`${invoice.number} is paid. There is nothing open on it.`);
+  }
+
+  /** A page that was used, has run out, is gone, or asks for another amount than is open now is not offered again. */
+  private async isOffered(live: Checkout, invoice: InvoiceRow, currency: string): Promise<boolean> {
+    const isRight = live.amountMinor === openOf(invoice) && live.currency === currency;
+    if (!live.sessionId) return isRight;
+    const session = await this.cards.session(live.sessionId);
+    if (session?.status === 'complete') throw underWay(invoice);
+    if (session?.status !== 'open') return false;
+    if (!isRight) await this.cards.closePage(live.sessionId);
+    return isRight;
   }
 
   /** The one live visit of the invoice: the one that is there, or a new one. The index lets one of two through. */

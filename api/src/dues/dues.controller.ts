@@ -1,9 +1,10 @@
-import { Body, Controller, Get, HttpCode, Post } from '@nestjs/common';
+import { Body, Controller, Get, HttpCode, Post, Query } from '@nestjs/common';
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { PageQueryDto } from '../common/paging.dto';
 import { MyDuesDto } from './dto/my-dues.dto';
-import { AssignTierDto, CreateTierDto, TierDto } from './dto/tier.dto';
+import { AssignTierDto, CreateTierDto, PeopleOnTiersPageDto, TierDto } from './dto/tier.dto';
 import { TreasurySummaryDto } from './dto/treasury.dto';
 import { MyDuesService } from './my-dues.service';
 import { TiersService } from './tiers.service';
@@ -35,6 +36,13 @@ export class DuesController {
   @Access({ roles: ['treasurer'] })
   create(@CurrentActor() actor: Actor, @Body() tier: CreateTierDto): Promise<TierDto> {
     return this.tiers.create(actor, tier);
+  }
+
+  /** Who is on which tier, by name. */
+  @Get('tiers/people')
+  @Access({ roles: ['treasurer'] })
+  people(@CurrentActor() actor: Actor, @Query() query: PageQueryDto): Promise<PeopleOnTiersPageDto> {
+    return this.tiers.listPeople(actor, query);
   }
 
   /** Sets a person's tier from a day on. */

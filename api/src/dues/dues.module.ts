@@ -4,6 +4,8 @@ import { ClubModule } from '../club/club.module';
 import { LedgerModule } from '../ledger/ledger.module';
 import { MailModule } from '../mail/mail.module';
 import { PeopleModule } from '../people/people.module';
+import { AwaitingBankService } from './awaiting-bank.service';
+import { CardCheckService } from './card-check.service';
 import { CardEvents } from './card-events';
 import { CardService } from './card-service';
 import { CheckoutService } from './checkout.service';
@@ -37,6 +39,8 @@ import { WebhooksService } from './webhooks.service';
   ],
   controllers: [DuesController, InvoicesController, PaymentsController, WebhooksController],
   providers: [
+    AwaitingBankService,
+    CardCheckService,
     CardEvents,
     CardService,
     CheckoutService,
@@ -52,6 +56,6 @@ import { WebhooksService } from './webhooks.service';
     TreasuryService,
     WebhooksService,
   ],
-  exports: [InvoicesService, PaymentsService, TiersService, TillService],
+  exports: [AwaitingBankService, InvoicesService, PaymentsService, TiersService, TillService],
 })
 export class DuesModule {}

@@ -1,4 +1,4 @@
-import { aged, ageOf, daysLate, initialsOf, quarterOf, spread, stateOf } from './dues.rules';
+import { aged, ageOf, daysLate, initialsOf, spread, stateOf } from './dues.rules';
 
 const invoice = (overrides = {}) => ({ amountMinor: 2400, paidMinor: 0, dueOn: '2026-10-31', ...overrides });
 
@@ -66,15 +66,6 @@ describe('aged dues', () => {
 });
 
 describe('small words', () => {
-  it.each([
-    ['2026-10-15', '2026-10-01', '2026-12-31'],
-    ['2027-01-01', '2027-01-01', '2027-03-31'],
-    ['2027-06-30', '2027-04-01', '2027-06-30'],
-    ['2028-02-29', '2028-01-01', '2028-03-31'],
-  ])('knows the quarter of %s', (day, from, to) => {
-    expect(quarterOf(day)).toEqual({ from, to });
-  });
-
   it.each([
     ['Larkmoor Radio Builders', 'LRB'],
     ['The club', 'TC'],

@@ -75,20 +75,6 @@ export function aged(invoices: readonly Standing[], today: string): AgeBand[] {
   });
 }
 
-export interface Quarter {
-  from: string;
-  to: string;
-}
-
-/** The calendar quarter a day lies in. */
-export function quarterOf(day: string): Quarter {
-  const [year = 0, month = 1] = day.split('-').map(Number);
-  const first = Math.floor((month - 1) / 3) * 3 + 1;
-  const lastDay = new Date(Date.UTC(year, first + 2, 0)).getUTCDate();
-  const two = (value: number): string => String(value).padStart(2, '0');
-  return { from: `${year}-${two(first)}-01`, to: `${year}-${two(first + 2)}-${lastDay}` };
-}
-
 /** The letters a club's references begin with: `LRB` for Larkmoor Radio Builders. */
 export function initialsOf(clubName: string): string {
   const words =

@@ -1,45 +1,34 @@
 import { randomUUID } from 'node:crypto';
 import type supertest from 'supertest';
-import { startTestApp, TEST_NOW, type TestApp } from '../../test/app';
-import { invoice, payment, treasurer } from '../../test/factories/dues.factory';
+import { TEST_NOW, type TestApp } from '../../test/app';
+import { startDesk, type Desk } from '../../test/books';
+import { invoice, payment } from '../../test/factories/dues.factory';
 import { person, signedInAs, someoneWith } from '../../test/factories/person.factory';
-import { ClubService } from '../club/club.service';
 import type { Actor } from '../common/actor';
 import { isCreditorReference } from '../common/creditor-reference.rules';
 import { LedgerService } from '../ledger/ledger.service';
+import type { PeopleOnTiersPageDto } from './dto/tier.dto';
 import { TiersService } from './tiers.service';
 
 const DAY = 86_400_000;
 
 describe('dues', () => {
+  let desk: Desk;
   let test: TestApp;
   let ines: Actor;
-  /** A treasurer's session, for the whole file: signing in is slow on purpose. */
   let agent: supertest.Agent;
   let treasurerId: string;
   let outsider: supertest.Agent;
 
   beforeAll(async () => {
-    test = await startTestApp();
-    await test.app.get(ClubService).set({
-      name: 'Larkmoor Radio Builders',
-      address: 'Millbeck Hall, Larkmoor',
-      contactEmail: 'treasurer@larkmoor.example',
-      timeZone: 'Europe/London',
-      currency: 'GBP',
-      accountNumber: '00-41-17 3006 4417',
-      accountName: 'Larkmoor Radio Builders',
-    });
-    ines = await treasurer(test);
-    const signedIn = await someoneWith(test, 'treasurer');
-    agent = signedIn.agent;
-    treasurerId = signedIn.person.id;
+    desk = await startDesk();
+    ({ test, ines, agent, treasurerId } = desk);
     outsider = (await someoneWith(test, 'mentor', 'steward', 'organiser')).agent;
   });
   beforeEach(() => test.clock.set(TEST_NOW));
   afterAll(() => test.close());
 
-  const owedInBooks = () => test.app.get(LedgerService).balance('1100');
+  const owedInBooks = () => desk.ledger('1100');
 
   describe('an invoice', () => {
     it('has a number, a sound reference, and is owed in the books', async () => {
@@ -188,7 +177,7 @@ describe('dues', () => {
       expect(body).toMatchObject({
         today: '2026-01-15',
         currency: 'GBP',
-        dues: { from: '2026-01-01', to: '2026-03-31' },
+        dues: { description: 'Dues, January to March', dueOn: '2026-01-31' },
         holdings: {
           cashBoxMinor: await ledger.balance('1000'),
           chequesInHandMinor: await ledger.balance('1010'),
@@ -210,6 +199,27 @@ describe('dues', () => {
       expect(body).toEqual(expect.arrayContaining([expect.objectContaining(tier)]));
     });
 
+    it('show who is on which, today and next, by name', async () => {
+      const tiers = test.app.get(TiersService);
+      const family = await tiers.create(ines, { name: 'family', amountMinor: 4000, months: 3 });
+      const student = await tiers.create(ines, { name: 'student', amountMinor: 500, months: 3 });
+      const someone = await person(test, { name: 'Aaron Aaronson' });
+      const list = async () =>
+        ((await agent.get('/api/tiers/people?perPage=1').expect(200)).body as PeopleOnTiersPageDto).items[0];
+      expect(await list()).toMatchObject({ personName: 'Aaron Aaronson', tierId: null, coming: null });
+      for (const [tierId, fromOn] of [
+        [family.id, '2025-03-01'],
+        [student.id, '2026-01-15'],
+        [family.id, '2026-02-01'],
+        [student.id, '2026-05-01'],
+      ] as const)
+        await tiers.assign(ines, { personId: someone.id, tierId, fromOn });
+      expect(await list()).toMatchObject({
+        tierName: 'student',
+        coming: { tierName: 'family', fromOn: '2026-02-01' },
+      });
+    });
+
     it('are not given to nobody, nor is a tier that is none', async () => {
       const fromOn = '2026-01-01';
       const nobody = { personId: randomUUID(), tierId: randomUUID(), fromOn };
@@ -228,6 +238,7 @@ describe('dues', () => {
     ['post', '/api/payments'],
     ['post', `/api/payments/${randomUUID()}/take-back`],
     ['get', '/api/tiers'],
+    ['get', '/api/tiers/people'],
     ['post', '/api/tiers'],
     ['post', '/api/tiers/assignments'],
     ['get', '/api/treasury/summary'],

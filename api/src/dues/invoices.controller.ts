@@ -1,7 +1,9 @@
-import { Body, Controller, Get, HttpCode, Param, ParseUUIDPipe, Post, Query } from '@nestjs/common';
+import { Body, Controller, Get, HttpCode, Param, Post, Query } from '@nestjs/common';
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { ParseIdPipe } from '../common/parse-id.pipe';
+import { CardCheckService } from './card-check.service';
 import { CheckoutService } from './checkout.service';
 import { CardPaymentDto, CheckoutDto } from './dto/checkout.dto';
 import {
@@ -19,6 +21,7 @@ export class InvoicesController {
   constructor(
     private readonly invoices: InvoicesService,
     private readonly checkout: CheckoutService,
+    private readonly cardCheck: CardCheckService,
   ) {}
 
   /** What the signed-in person owes and has paid. */
@@ -47,7 +50,7 @@ export class InvoicesController {
   @Access('signed-in')
   open(
     @CurrentActor() actor: Actor,
-    @Param('invoiceId', ParseUUIDPipe) invoiceId: string,
+    @Param('invoiceId', ParseIdPipe) invoiceId: string,
   ): Promise<CheckoutDto> {
     return this.checkout.open(actor, invoiceId);
   }
@@ -57,8 +60,19 @@ export class InvoicesController {
   @Access('signed-in')
   cardPayment(
     @CurrentActor() actor: Actor,
-    @Param('invoiceId', ParseUUIDPipe) invoiceId: string,
+    @Param('invoiceId', ParseIdPipe) invoiceId: string,
   ): Promise<CardPaymentDto> {
     return this.checkout.cardPayment(actor, invoiceId);
+  }
+
+  /** Asks the card service itself, for the page that has waited long enough for its word. */
+  @Post(':invoiceId/card-payment/check')
+  @HttpCode(200)
+  @Access('signed-in')
+  check(
+    @CurrentActor() actor: Actor,
+    @Param('invoiceId', ParseIdPipe) invoiceId: string,
+  ): Promise<CardPaymentDto> {
+    return this.cardCheck.check(actor, invoiceId);
   }
 }

@@ -3,6 +3,7 @@ import { InjectRepository } from '@nestjs/typeorm';
 import { In, Repository, type EntityManager } from 'typeorm';
 import { asMinor } from '../common/minor-units';
 import type { InvoiceFilter } from './dto/invoice.dto';
+import type { DuesRunDto } from './dto/treasury.dto';
 import { Invoice, type InvoiceKind } from './invoice.entity';
 
 /** An invoice with what has been paid on it. */
@@ -24,8 +25,6 @@ export interface InvoiceSearch {
   references?: readonly string[];
   personId?: string;
   state?: InvoiceFilter;
-  /** Only those with a due day in this stretch, both ends counted. */
-  due?: { from: string; to: string };
 }
 
 const PAID = `coalesce((SELECT sum(a.amount_minor) FROM payment_allocation a
@@ -37,8 +36,7 @@ const WHERE = `($1::uuid[] IS NULL OR i.id = ANY ($1))
               WHEN 'late' THEN i.amount_minor > i.paid_minor AND i.due_on < $4
               WHEN 'paid' THEN i.amount_minor = i.paid_minor
               ELSE true END
-  AND ($5::date IS NULL OR i.due_on BETWEEN $5 AND $6)
-  AND ($7::text[] IS NULL OR i.reference = ANY ($7))`;
+  AND ($5::text[] IS NULL OR i.reference = ANY ($5))`;
 
 const FROM = `(SELECT i.*, ${PAID} AS paid_minor FROM invoice i) i`;
 
@@ -57,7 +55,7 @@ export class InvoicesRepository {
       `SELECT i.id, i.number, i.kind, i.person_id AS "personId", i.description,
               i.amount_minor::text AS "amountMinor", i.paid_minor::text AS "paidMinor",
               i.issued_on::text AS "issuedOn", i.due_on::text AS "dueOn", i.reference
-         FROM ${FROM} WHERE ${WHERE} ORDER BY i.due_on, i.number LIMIT $8 OFFSET $9`,
+         FROM ${FROM} WHERE ${WHERE} ORDER BY i.due_on, i.number LIMIT $6 OFFSET $7`,
       [...parameters(search, today), page?.take ?? null, page?.skip ?? 0],
     );
     return rows.map((row) => ({
@@ -77,6 +75,23 @@ export class InvoicesRepository {
   }
 
   /**
+   * The dues raised last, as one run. A run is told by its words, within half a year because the same words come back
+   * every year; an invoice raised by itself is not one as long as there is another.
+   */
+  async newestRun(): Promise<DuesRunDto | undefined> {
+    const [run] = await this.invoices.manager.query<DuesRunDto[]>(
+      `SELECT description, max(due_on)::text AS "dueOn", count(*)::int AS count,
+              sum(amount_minor)::text AS "raisedMinor", sum(paid_minor)::text AS "paidMinor",
+              count(*) FILTER (WHERE amount_minor = paid_minor)::int AS "paidCount"
+         FROM (SELECT i.*, max(issued_on) OVER (PARTITION BY description) AS newest
+                 FROM ${FROM} WHERE kind = 'dues') i
+        WHERE issued_on > newest - interval '6 months'
+        GROUP BY description ORDER BY count(*) > 1 DESC, max(issued_on) DESC, count(*) DESC LIMIT 1`,
+    );
+    return run && { ...run, raisedMinor: asMinor(run.raisedMinor), paidMinor: asMinor(run.paidMinor) };
+  }
+
+  /**
    * Holds these invoices until the transaction ends, always in the same order, so that two payments queue up instead
    * of blocking each other. Then reads what is open on them.
    */
@@ -93,6 +108,6 @@ export class InvoicesRepository {
 }
 
 function parameters(search: InvoiceSearch, today: string): unknown[] {
-  const { ids = null, personId = null, state = 'any', due, references = null } = search;
-  return [ids, personId, state, today, due?.from ?? null, due?.to ?? null, references];
+  const { ids = null, personId = null, state = 'any', references = null } = search;
+  return [ids, personId, state, today, references];
 }

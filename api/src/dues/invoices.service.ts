@@ -94,7 +94,7 @@ export class InvoicesService {
 
   /** For the reconciliation: these invoices, held until the transaction ends. */
   async hold(manager: EntityManager, ids: readonly string[]): Promise<HeldInvoice[]> {
-    return (await this.invoices.lock(manager, ids, await this.today())).map(held);
+    return (await this.invoices.lock(manager, ids, await this.today(manager))).map(held);
   }
 
   /** For the reconciliation: the invoices that bear these references, paid ones too. */
@@ -104,7 +104,7 @@ export class InvoicesService {
     hold: boolean,
   ): Promise<HeldInvoice[]> {
     if (references.length === 0) return [];
-    const found = await this.invoices.find({ references }, await this.today(), undefined, manager);
+    const found = await this.invoices.find({ references }, await this.today(manager), undefined, manager);
     if (!hold) return found.map(held);
     return this.hold(
       manager,
@@ -164,8 +164,8 @@ export class InvoicesService {
     }));
   }
 
-  private async today(): Promise<string> {
-    const { timeZone } = await this.club.settings();
+  private async today(manager?: EntityManager): Promise<string> {
+    const { timeZone } = await this.club.settings(manager);
     return clubDay(this.clock.now(), timeZone);
   }
 }

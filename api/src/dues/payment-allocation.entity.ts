@@ -6,6 +6,7 @@ import {
   JoinColumn,
   ManyToOne,
   PrimaryGeneratedColumn,
+  Unique,
   type Relation,
 } from 'typeorm';
 import { minorUnits } from '../common/minor-units';
@@ -20,6 +21,7 @@ import { Payment } from './payment.entity';
 @Entity()
 @Index('payment_allocation_once', ['paymentId', 'invoiceId'], { unique: true, where: 'released_at IS NULL' })
 @Index('payment_allocation_of_invoice', ['invoiceId'])
+@Unique('payment_allocation_has_its_entry', ['creditEntryId'])
 @Check('payment_allocation_positive', `amount_minor > 0`)
 export class PaymentAllocation {
   @PrimaryGeneratedColumn('uuid')

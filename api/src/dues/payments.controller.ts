@@ -1,7 +1,8 @@
-import { Body, Controller, Get, HttpCode, Param, ParseUUIDPipe, Post, Query } from '@nestjs/common';
+import { Body, Controller, Get, HttpCode, Param, Post, Query } from '@nestjs/common';
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { ParseIdPipe } from '../common/parse-id.pipe';
 import {
   ListPaymentsQueryDto,
   PaymentDto,
@@ -35,7 +36,7 @@ export class PaymentsController {
   @Access({ roles: ['treasurer'] })
   takeBack(
     @CurrentActor() actor: Actor,
-    @Param('paymentId', ParseUUIDPipe) paymentId: string,
+    @Param('paymentId', ParseIdPipe) paymentId: string,
   ): Promise<PaymentDto> {
     return this.payments.takeBack(actor, paymentId);
   }
@@ -45,7 +46,7 @@ export class PaymentsController {
   @Access('signed-in')
   receipt(
     @CurrentActor() actor: Actor,
-    @Param('paymentId', ParseUUIDPipe) paymentId: string,
+    @Param('paymentId', ParseIdPipe) paymentId: string,
   ): Promise<ReceiptDto> {
     return this.payments.receipt(actor, paymentId);
   }

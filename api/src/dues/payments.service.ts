@@ -1,11 +1,12 @@
 import { Injectable } from '@nestjs/common';
-import { DataSource, In, IsNull, type EntityManager, type FindOptionsWhere } from 'typeorm';
+import { DataSource, In, type FindOptionsWhere } from 'typeorm';
 import { hasRole, requireMember, requireRole, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { clubDay } from '../common/club-day';
 import { fieldError, notFound } from '../common/common.errors';
 import { constraintOf, translatingConstraints } from '../common/constraint';
 import { skipOf } from '../common/paging.dto';
+import { retryingOnce } from '../common/retrying';
 import { ClubService } from '../club/club.service';
 import { PeopleService } from '../people/people.service';
 import type {
@@ -76,26 +77,16 @@ export class PaymentsService {
   /** Takes back a payment written down by mistake: its invoices are open again, the books hold both entries. */
   async takeBack(actor: Actor, paymentId: string): Promise<PaymentDto> {
     requireRole(actor, 'treasurer');
-    await this.dataSource.transaction(async (manager) => {
-      const payment = await this.till.hold(manager, paymentId);
-      if (payment.method === 'card' || payment.bankedOn !== null) throw notTakenBackHere(payment);
-      await this.till.takeBack(manager, payment, actor.personId);
-    });
+    const work = () =>
+      this.dataSource.transaction(async (manager) => {
+        const payment = await this.till.hold(manager, paymentId);
+        if (payment.method === 'card' || payment.bankedOn !== null) throw notTakenBackHere(payment);
+        await this.till.takeBack(manager, payment, actor.personId);
+      });
+    await retryingOnce(work);
     const payment = await this.payments.one({ id: paymentId });
     if (!payment) throw notFound('payment');
     return payment;
-  }
-
-  /** For other features: transfers and cheques written down that no statement has shown yet. */
-  async awaitingBank(manager?: EntityManager): Promise<PaymentDto[]> {
-    const where = [
-      { method: 'transfer' as const, bankedOn: IsNull(), takenBackAt: IsNull() },
-      { method: 'cheque' as const, bankedOn: IsNull(), takenBackAt: IsNull() },
-    ];
-    const found = await Promise.all(
-      where.map((one) => this.payments.find(one, { skip: 0, take: 500 }, manager)),
-    );
-    return found.flat();
   }
 
   /** For other features: these payments with what they paid, by id. */
@@ -123,7 +114,7 @@ export class PaymentsService {
         await this.receipts.queue(manager, taken);
         return taken;
       });
-    return translatingConstraints(work, {
+    return translatingConstraints(() => retryingOnce(work), {
       payment_from_person: () => fieldError('personId', 'There is no such person.'),
     });
   }

@@ -1,41 +1,29 @@
 import { randomUUID } from 'node:crypto';
 import type supertest from 'supertest';
-import { startTestApp, TEST_NOW, type TestApp } from '../../test/app';
-import { invoice, payment, paymentFor, treasurer } from '../../test/factories/dues.factory';
-import { person, someoneWith } from '../../test/factories/person.factory';
-import { ClubService } from '../club/club.service';
+import { TEST_NOW, type TestApp } from '../../test/app';
+import { startDesk, type Desk } from '../../test/books';
+import { invoice, payment, paymentFor } from '../../test/factories/dues.factory';
+import { person } from '../../test/factories/person.factory';
 import type { Actor } from '../common/actor';
 import { constraintOf } from '../common/constraint';
 import { LedgerService } from '../ledger/ledger.service';
 import type { OpenInvoiceDto } from './dto/invoice.dto';
 
 describe('payments', () => {
+  let desk: Desk;
   let test: TestApp;
   let ines: Actor;
-  /** A treasurer's session, for the whole file: signing in is slow on purpose. */
   let agent: supertest.Agent;
   let treasurerId: string;
 
   beforeAll(async () => {
-    test = await startTestApp();
-    await test.app.get(ClubService).set({
-      name: 'Larkmoor Radio Builders',
-      address: 'Millbeck Hall, Larkmoor',
-      contactEmail: 'treasurer@larkmoor.example',
-      timeZone: 'Europe/London',
-      currency: 'GBP',
-      accountNumber: '00-41-17 3006 4417',
-      accountName: 'Larkmoor Radio Builders',
-    });
-    ines = await treasurer(test);
-    const signedIn = await someoneWith(test, 'treasurer');
-    agent = signedIn.agent;
-    treasurerId = signedIn.person.id;
+    desk = await startDesk();
+    ({ test, ines, agent, treasurerId } = desk);
   });
   beforeEach(() => test.clock.set(TEST_NOW));
   afterAll(() => test.close());
 
-  const owedInBooks = () => test.app.get(LedgerService).balance('1100');
+  const owedInBooks = () => desk.ledger('1100');
   const openOnInvoices = async () => {
     const { body } = await agent.get('/api/invoices?state=open').expect(200);
     return (body as { openMinor: number }).openMinor;

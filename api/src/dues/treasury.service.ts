@@ -8,8 +8,8 @@ import { sumMinor } from '../common/minor-units';
 import { ClubService } from '../club/club.service';
 import { ACCOUNTS } from '../ledger/account.entity';
 import { LedgerService } from '../ledger/ledger.service';
-import type { HoldingsDto, QuarterDto, TreasurySummaryDto } from './dto/treasury.dto';
-import { aged, daysLate, openOf, quarterOf } from './dues.rules';
+import type { HoldingsDto, TreasurySummaryDto } from './dto/treasury.dto';
+import { aged, daysLate, openOf } from './dues.rules';
 import { InvoicesRepository } from './invoices.repository';
 import { PaymentEvent } from './payment-event.entity';
 
@@ -38,7 +38,7 @@ export class TreasuryService {
       asOf: now.toISOString(),
       today,
       currency,
-      dues: await this.quarter(today),
+      dues: (await this.invoices.newestRun()) ?? null,
       holdings: await this.holdings(balanceOf, today),
       aged: aged(open, today),
       openCount: open.length,
@@ -47,20 +47,6 @@ export class TreasuryService {
       latePeople: new Set(late.map(({ personId }) => personId)).size,
       creditMinor: -balanceOf(ACCOUNTS.membersInCredit),
       cardNotes: await this.cardNotes(),
-    };
-  }
-
-  private async quarter(today: string): Promise<QuarterDto> {
-    const { from, to } = quarterOf(today);
-    const due = await this.invoices.find({ due: { from, to } }, today);
-    const dues = due.filter(({ kind }) => kind === 'dues');
-    return {
-      from,
-      to,
-      raisedMinor: sumMinor(dues.map(({ amountMinor }) => amountMinor)),
-      paidMinor: sumMinor(dues.map(({ paidMinor }) => paidMinor)),
-      count: dues.length,
-      paidCount: dues.filter((invoice) => openOf(invoice) === 0).length,
     };
   }
 

@@ -48,6 +48,12 @@ describe('events of the card service', () => {
     expect(await stateOfVisit()).toBe('paid');
   });
 
+  it('about a page that is not ours wait for a look, whatever stands where our id would', async () => {
+    for (const stranger of ['', '-'.repeat(36), 'not an id', '4f0f5b52-1d9c-4c6e-9a35-0d7f9c1a2b3c'])
+      expect(await outcomeOf(completed(visit, { metadata: { checkout: stranger } }))).toBe('needs a look');
+    expect(await payments()).toHaveLength(0);
+  });
+
   it('count once, delivered again, and hours later', async () => {
     const event = completed(visit);
     expect(await outcomeOf(event)).toBe('acted');
@@ -117,6 +123,39 @@ describe('events of the card service', () => {
   ])('%s write nothing down as paid', async (_what, changes) => {
     expect(await outcomeOf(completed(visit, changes))).toBe('needs a look');
     expect(await payments()).toHaveLength(0);
+  });
+
+  it.each([
+    [
+      'charge.refunded',
+      { id: 'ch_1', amount: 2400, amount_refunded: 2400 },
+      '24.00 GBP went back to the card for R-',
+    ],
+    [
+      'charge.refunded',
+      { id: 'ch_1', amount: 2400, amount_refunded: 1000 },
+      '10.00 GBP of 24.00 GBP went back to the card for R-',
+    ],
+    ['charge.refunded', { id: 'ch_2', metadata: {}, amount: 5, amount_refunded: 5 }, 'for the charge ch_2'],
+    [
+      'charge.dispute.created',
+      { charge: 'ch_3', metadata: {}, amount: 2400, status: 'needs_response' },
+      'The cardholder disputes 24.00 GBP for the charge ch_3',
+    ],
+    [
+      'charge.dispute.closed',
+      { charge: 'ch_3', metadata: {}, amount: 2400, status: 'lost' },
+      'decided against the club',
+    ],
+    ['refund.failed', { charge: 'ch_3', metadata: {}, amount: 2400 }, 'did not reach the card'],
+  ])('that take card money back are shown to the treasurer: %s %#', async (type, changes, words) => {
+    await outcomeOf(completed(visit));
+    expect(await outcomeOf(cardEvent(type, visit, changes))).toBe('needs a look');
+    const { agent } = await someoneWith(test, 'treasurer');
+    const { body } = await agent.get('/api/treasury/summary').expect(200);
+    const notes = (body as { cardNotes: { note: string }[] }).cardNotes.map(({ note }) => note);
+    expect(notes).toContainEqual(expect.stringContaining(words));
+    expect(await payments()).toHaveLength(1);
   });
 
   it('of a kind that nothing here acts on are noted', async () => {

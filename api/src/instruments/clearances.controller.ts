@@ -1,7 +1,8 @@
-import { Body, Controller, Delete, Get, HttpCode, Param, ParseUUIDPipe, Post, Query } from '@nestjs/common';
+import { Body, Controller, Delete, Get, HttpCode, Param, Post, Query } from '@nestjs/common';
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { ParseIdPipe } from '../common/parse-id.pipe';
 import { ClearancesService } from './clearances.service';
 import {
   ClearanceDto,
@@ -38,7 +39,7 @@ export class ClearancesController {
   @Delete(':clearanceId')
   @Access({ roles: ['steward'] })
   @HttpCode(204)
-  end(@CurrentActor() actor: Actor, @Param('clearanceId', ParseUUIDPipe) clearanceId: string): Promise<void> {
+  end(@CurrentActor() actor: Actor, @Param('clearanceId', ParseIdPipe) clearanceId: string): Promise<void> {
     return this.clearances.end(actor, clearanceId);
   }
 }

@@ -7,7 +7,7 @@ import { Clock } from '../common/clock';
 import { fieldError, notFound } from '../common/common.errors';
 import { translatingConstraints } from '../common/constraint';
 import { skipOf } from '../common/paging.dto';
-import { dayAt } from '../common/wall-clock';
+import { clubDay } from '../common/club-day';
 import { PeopleService } from '../people/people.service';
 import { Clearance } from './clearance.entity';
 import {
@@ -139,6 +139,6 @@ export class ClearancesService {
   }
 
   private async today(): Promise<string> {
-    return dayAt(this.clock.now(), (await this.club.settings()).timeZone);
+    return clubDay(this.clock.now(), (await this.club.settings()).timeZone);
   }
 }

@@ -4,7 +4,7 @@ import { ClubService } from '../club/club.service';
 import { requireRole, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { fieldError, notFound } from '../common/common.errors';
-import { dayAt, daysLater } from '../common/wall-clock';
+import { clubDay, addDays } from '../common/club-day';
 import type { ChangeCalibrationDto, ChangeConditionDto } from './dto/change-instrument.dto';
 import { InstrumentChange } from './instrument-change.entity';
 import { Instrument } from './instrument.entity';
@@ -52,8 +52,8 @@ export class InstrumentCareService {
     { dueOn, note }: ChangeCalibrationDto,
   ): Promise<void> {
     requireRole(actor, 'steward');
-    const today = dayAt(this.clock.now(), (await this.club.settings()).timeZone);
-    if (dueOn < today || dueOn > daysLater(today, LONGEST_CALIBRATION_DAYS))
+    const today = clubDay(this.clock.now(), (await this.club.settings()).timeZone);
+    if (dueOn < today || dueOn > addDays(today, LONGEST_CALIBRATION_DAYS))
       throw fieldError('dueOn', 'The last good day lies between today and ten years from now.');
     await this.dataSource.transaction(async (manager) => {
       const { calibrationDueOn: before } = await this.locked(manager, instrumentId);

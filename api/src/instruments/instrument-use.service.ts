@@ -2,13 +2,13 @@ import { Injectable } from '@nestjs/common';
 import { In, type EntityManager } from 'typeorm';
 import { ClubService } from '../club/club.service';
 import { Clock } from '../common/clock';
-import { dayAt, endOfDay } from '../common/wall-clock';
+import { clubDay, endOfDay } from '../common/club-day';
 import { ClearancesService } from './clearances.service';
 import type { Clearance } from './clearance.entity';
 import { Instrument } from './instrument.entity';
 import { reasonsAgainst, usableUntil, type UseFacts, type UseReason } from './instruments.rules';
 
-export type { UseReason } from './instruments.rules';
+export { lower, type UseReason } from './instruments.rules';
 
 /** What the rules say about some benches and instruments for one person and time. */
 export interface Judgement {
@@ -42,8 +42,8 @@ export class InstrumentUseService {
     const facts = instruments.map((instrument) => factsOf(instrument, held.get(instrument.kindId)));
     // The end is not part of the use: one that ends at midnight does not touch the next day.
     const days = {
-      today: dayAt(this.clock.now(), zone),
-      lastDay: dayAt(new Date(endsAt.getTime() - 1), zone),
+      today: clubDay(this.clock.now(), zone),
+      lastDay: clubDay(new Date(endsAt.getTime() - 1), zone),
     };
     const judged = instruments.map(({ resourceId }, index) => {
       const fact = facts[index];

@@ -1,8 +1,9 @@
-import { Body, Controller, Get, HttpCode, Param, ParseUUIDPipe, Post, Query } from '@nestjs/common';
+import { Body, Controller, Get, HttpCode, Param, Post, Query } from '@nestjs/common';
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
 import { PageQueryDto } from '../common/paging.dto';
+import { ParseIdPipe } from '../common/parse-id.pipe';
 import { ChangeCalibrationDto, ChangeConditionDto } from './dto/change-instrument.dto';
 import { InstrumentHistoryDto } from './dto/instrument-change.dto';
 import { InstrumentDetailDto, InstrumentPageDto } from './dto/instrument.dto';
@@ -29,7 +30,7 @@ export class InstrumentsController {
   @Access('signed-in')
   show(
     @CurrentActor() actor: Actor,
-    @Param('instrumentId', ParseUUIDPipe) instrumentId: string,
+    @Param('instrumentId', ParseIdPipe) instrumentId: string,
     @Query() query: UseDayQueryDto,
   ): Promise<InstrumentDetailDto> {
     return this.instruments.show(actor, instrumentId, query);
@@ -40,7 +41,7 @@ export class InstrumentsController {
   @Access('signed-in')
   history(
     @CurrentActor() actor: Actor,
-    @Param('instrumentId', ParseUUIDPipe) instrumentId: string,
+    @Param('instrumentId', ParseIdPipe) instrumentId: string,
     @Query() query: PageQueryDto,
   ): Promise<InstrumentHistoryDto> {
     return this.instruments.history(actor, instrumentId, query);
@@ -52,7 +53,7 @@ export class InstrumentsController {
   @HttpCode(204)
   changeCondition(
     @CurrentActor() actor: Actor,
-    @Param('instrumentId', ParseUUIDPipe) instrumentId: string,
+    @Param('instrumentId', ParseIdPipe) instrumentId: string,
     @Body() body: ChangeConditionDto,
   ): Promise<void> {
     return this.care.changeCondition(actor, instrumentId, body);
@@ -64,7 +65,7 @@ export class InstrumentsController {
   @HttpCode(204)
   changeCalibration(
     @CurrentActor() actor: Actor,
-    @Param('instrumentId', ParseUUIDPipe) instrumentId: string,
+    @Param('instrumentId', ParseIdPipe) instrumentId: string,
     @Body() body: ChangeCalibrationDto,
   ): Promise<void> {
     return this.care.changeCalibration(actor, instrumentId, body);

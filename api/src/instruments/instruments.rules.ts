@@ -1,4 +1,4 @@
-import { dateWords } from '../common/wall-clock';
+import { dateWords } from '../common/club-day';
 import type { Condition } from './instrument.entity';
 
 /** What decides whether somebody may use an instrument. */
@@ -108,7 +108,7 @@ function clearanceReason(facts: UseFacts, { today, lastDay }: UseDays): UseReaso
 }
 
 /** A kind's name inside a sentence: `spectrum analyzer`, but `RF millivoltmeter` keeps its capitals. */
-function lower(name: string): string {
+export function lower(name: string): string {
   return /^.[A-Z]/.test(name) ? name : name.charAt(0).toLowerCase() + name.slice(1);
 }
 

@@ -6,7 +6,7 @@ import { requireMember, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { notFound } from '../common/common.errors';
 import { skipOf, type PageQueryDto } from '../common/paging.dto';
-import { dayAt } from '../common/wall-clock';
+import { clubDay } from '../common/club-day';
 import { ClearancesService } from './clearances.service';
 import { benchDto, type BenchPageDto } from './dto/bench.dto';
 import { instrumentChangeDto, type InstrumentHistoryDto } from './dto/instrument-change.dto';
@@ -93,7 +93,7 @@ export class InstrumentsService {
     on: string | undefined,
   ): Promise<InstrumentDto[]> {
     const { timeZone } = await this.club.settings();
-    const today = dayAt(this.clock.now(), timeZone);
+    const today = clubDay(this.clock.now(), timeZone);
     const kindIds = [...new Set(found.map(({ kindId }) => kindId))];
     const held = await this.clearances.heldBy(actor.personId, kindIds);
     return found.map((instrument) => {

@@ -1,7 +1,8 @@
-import { Controller, Get, Param, ParseUUIDPipe, Query } from '@nestjs/common';
+import { Controller, Get, Param, Query } from '@nestjs/common';
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { ParseIdPipe } from '../common/parse-id.pipe';
 import { ListPeopleQueryDto, PeoplePageDto } from './dto/list-people.dto';
 import { PersonDto } from './dto/person.dto';
 import { PeopleService } from './people.service';
@@ -20,7 +21,7 @@ export class PeopleController {
 
   @Get(':personId')
   @Access('signed-in')
-  show(@CurrentActor() actor: Actor, @Param('personId', ParseUUIDPipe) personId: string): Promise<PersonDto> {
+  show(@CurrentActor() actor: Actor, @Param('personId', ParseIdPipe) personId: string): Promise<PersonDto> {
     return this.people.show(actor, personId);
   }
 }

@@ -1,10 +1,15 @@
-import { Controller, Get, Param, ParseIntPipe, ParseUUIDPipe, Query } from '@nestjs/common';
+import { Controller, Get, Param, ParseIntPipe, Query } from '@nestjs/common';
 import { ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { ParseIdPipe, unreadablePart } from '../common/parse-id.pipe';
 import { PlanEditionDto } from './dto/plan-edition.dto';
 import { ListPlansQueryDto, PlansPageDto } from './dto/plan.dto';
 import { PlansService } from './plans.service';
+
+const EDITION_NUMBER = new ParseIntPipe({
+  exceptionFactory: () => unreadablePart('number', 'a whole number'),
+});
 
 @ApiTags('Plans')
 @Controller('plans')
@@ -23,8 +28,8 @@ export class PlansController {
   @Access('signed-in')
   show(
     @CurrentActor() actor: Actor,
-    @Param('planId', ParseUUIDPipe) planId: string,
-    @Param('number', ParseIntPipe) number: number,
+    @Param('planId', ParseIdPipe) planId: string,
+    @Param('number', EDITION_NUMBER) number: number,
   ): Promise<PlanEditionDto> {
     return this.plans.show(actor, planId, number);
   }

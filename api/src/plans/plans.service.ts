@@ -1,5 +1,5 @@
 import { Injectable } from '@nestjs/common';
-import { DataSource, In, IsNull, Not } from 'typeorm';
+import { DataSource, In, IsNull, Not, type EntityManager } from 'typeorm';
 import { requireMember, requireRole, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { notFound } from '../common/common.errors';
@@ -109,28 +109,32 @@ export class PlansService {
     return this.content(edition.id);
   }
 
-  /** For other features: everything in a published edition. */
-  async content(editionId: string): Promise<EditionContent> {
-    const known = this.contents.get(editionId) ?? (await this.readContent(editionId));
+  /**
+   * For other features: everything in a published edition.
+   *
+   * @param manager - of the caller's transaction, which reads on the connection it has and waits for no other.
+   */
+  async content(editionId: string, manager?: EntityManager): Promise<EditionContent> {
+    const known =
+      this.contents.get(editionId) ?? (await this.readContent(editionId, manager ?? this.dataSource.manager));
     this.contents.set(editionId, known);
     return known;
   }
 
-  private async readContent(editionId: string): Promise<EditionContent> {
-    const edition = await this.dataSource.getRepository(PlanEdition).findOne({
+  private async readContent(editionId: string, manager: EntityManager): Promise<EditionContent> {
+    const edition = await manager.findOne(PlanEdition, {
       where: { id: editionId, publishedAt: Not(IsNull()) },
       relations: { plan: true },
     });
     if (!edition?.publishedAt) throw notFound('edition of a plan');
     const { id, planId, number, publishedAt, plan } = edition;
     const inEdition = { stage: { editionId } };
-    const [stages, levelPoints, checks] = await Promise.all([
-      this.dataSource.getRepository(Stage).find({ where: { editionId }, order: { position: 'ASC' } }),
-      this.dataSource
-        .getRepository(LevelPoint)
-        .find({ where: inEdition, order: { stage: { position: 'ASC' }, position: 'ASC' } }),
-      this.dataSource.getRepository(PlanCheck).find({ where: inEdition, order: { position: 'ASC' } }),
-    ]);
+    const stages = await manager.find(Stage, { where: { editionId }, order: { position: 'ASC' } });
+    const levelPoints = await manager.find(LevelPoint, {
+      where: inEdition,
+      order: { stage: { position: 'ASC' }, position: 'ASC' },
+    });
+    const checks = await manager.find(PlanCheck, { where: inEdition, order: { position: 'ASC' } });
     const byStage = new Map(stages.map((stage) => [stage.id, checks.filter((c) => c.stageId === stage.id)]));
     return { id, planId, planName: plan.name, number, publishedAt, stages, checks: byStage, levelPoints };
   }

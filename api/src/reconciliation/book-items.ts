@@ -1,6 +1,8 @@
 import { Injectable } from '@nestjs/common';
+import { AwaitingBankService } from '../dues/awaiting-bank.service';
 import { InvoicesService } from '../dues/invoices.service';
 import { PaymentsService } from '../dues/payments.service';
+import type { OpenInvoiceDto } from '../dues/dto/invoice.dto';
 import type { PaymentDto } from '../dues/dto/payment.dto';
 import type { Account } from '../ledger/account.entity';
 import type { BookItemDto } from './dto/statement.dto';
@@ -16,6 +18,7 @@ export class BookItems {
   constructor(
     private readonly invoices: InvoicesService,
     private readonly payments: PaymentsService,
+    private readonly awaiting: AwaitingBankService,
   ) {}
 
   async of(
@@ -29,29 +32,22 @@ export class BookItems {
       const match = matches.get(line.id);
       return match ? behind(line, match, payments, accounts) : [];
     });
-    const open = await this.open();
-    return {
-      books: [...matched, ...open.slice(0, MOST_OPEN)],
-      booksLeftOut: Math.max(open.length - MOST_OPEN, 0),
-    };
+    const { items, total } = await this.open();
+    return { books: [...matched, ...items], booksLeftOut: total - items.length };
   }
 
-  private async open(): Promise<BookItemDto[]> {
-    const waiting = await this.payments.awaitingBank();
+  private async open(): Promise<{ items: BookItemDto[]; total: number }> {
+    const waiting = await this.awaiting.latest(MOST_OPEN);
     const invoices = await this.invoices.allOpen();
-    return [
-      ...waiting.map(waitingItem),
-      ...invoices.map(({ id, number, personName, description, openMinor, amountMinor }) => ({
-        kind: 'invoice' as const,
-        id,
-        tag: number,
-        name: personName,
-        detail: openMinor < amountMinor ? `${description}, the rest` : description,
-        amountMinor: openMinor,
-        lineId: null,
-      })),
-    ];
+    const items = [...waiting.items.map(waitingItem), ...invoices.map(openItem)];
+    return { items: items.slice(0, MOST_OPEN), total: waiting.total + invoices.length };
   }
+}
+
+function openItem(invoice: OpenInvoiceDto): BookItemDto {
+  const { id, number, personName, description, openMinor, amountMinor } = invoice;
+  const detail = openMinor < amountMinor ? `${description}, the rest` : description;
+  return { kind: 'invoice', id, tag: number, name: personName, detail, amountMinor: openMinor, lineId: null };
 }
 
 function waitingItem({ id, receiptNumber, personName, method, amountMinor, paid }: PaymentDto): BookItemDto {

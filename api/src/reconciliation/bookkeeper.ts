@@ -1,7 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import type { EntityManager } from 'typeorm';
+import { AwaitingBankService } from '../dues/awaiting-bank.service';
 import { InvoicesService } from '../dues/invoices.service';
-import { PaymentsService } from '../dues/payments.service';
 import { candidatesIn, type Books } from './reconciliation.rules';
 
 /** Reads what the books have for a set of lines: the invoices their references name, the transfers still on their way. */
@@ -9,26 +9,38 @@ import { candidatesIn, type Books } from './reconciliation.rules';
 export class Bookkeeper {
   constructor(
     private readonly invoices: InvoicesService,
-    private readonly payments: PaymentsService,
+    private readonly awaiting: AwaitingBankService,
   ) {}
 
-  /** `hold` keeps the invoices until the transaction ends, all at once and in order, so that imports cannot block each other. */
-  async booksFor(
-    manager: EntityManager,
-    lines: readonly { description: string }[],
-    hold: boolean,
-  ): Promise<Books> {
-    const references = [...new Set(lines.flatMap(({ description }) => candidatesIn(description).flat()))];
-    const invoices = await this.invoices.byReferences(manager, references, hold);
-    const waiting = await this.payments.awaitingBank(manager);
-    const transfers = waiting
-      .filter(({ method }) => method === 'transfer')
-      .map(({ id, receiptNumber, amountMinor, paid }) => ({
-        id,
-        receiptNumber,
-        amountMinor,
-        invoiceIds: paid.map(({ invoiceId }) => invoiceId),
-      }));
+  /** What the books have now, without holding anything. */
+  async booksFor(manager: EntityManager, lines: readonly { description: string }[]): Promise<Books> {
+    const invoices = await this.invoices.byReferences(manager, referencesOn(lines), false);
+    const ids = invoices.map(({ id }) => id);
+    const waiting = await this.awaiting.transfersFor(manager, ids, false);
+    const transfers = waiting.map(({ id, receiptNumber, amountMinor, paid }) => ({
+      id,
+      receiptNumber,
+      amountMinor,
+      invoiceIds: paid.map(({ invoiceId }) => invoiceId),
+    }));
     return { invoices, transfers };
   }
+
+  /**
+   * The same, with invoices and transfers held until the transaction ends: all at once and in order, so that imports
+   * cannot block each other. Read after both are held, for a transfer taken back in between opens its invoice again.
+   */
+  async holdFor(manager: EntityManager, lines: readonly { description: string }[]): Promise<Books> {
+    const invoices = await this.invoices.byReferences(manager, referencesOn(lines), true);
+    await this.awaiting.transfersFor(
+      manager,
+      invoices.map(({ id }) => id),
+      true,
+    );
+    return this.booksFor(manager, lines);
+  }
 }
+
+const referencesOn = (lines: readonly { description: string }[]): string[] => [
+  ...new Set(lines.flatMap(({ description }) => candidatesIn(description).flat())),
+];

@@ -1,24 +1,15 @@
-import {
-  Body,
-  Controller,
-  Get,
-  HttpCode,
-  Param,
-  ParseUUIDPipe,
-  Post,
-  Query,
-  UploadedFile,
-  UseInterceptors,
-} from '@nestjs/common';
-import { FileInterceptor } from '@nestjs/platform-express';
-import { ApiBody, ApiConsumes, ApiTags } from '@nestjs/swagger';
+import { Body, Controller, Get, HttpCode, Param, Post, Query, UploadedFile } from '@nestjs/common';
+import { ApiBody, ApiTags } from '@nestjs/swagger';
 import { Access, CurrentActor } from '../common/access';
 import type { Actor } from '../common/actor';
+import { TakesFile } from '../common/one-file';
 import { PageQueryDto } from '../common/paging.dto';
+import { ParseIdPipe } from '../common/parse-id.pipe';
 import { MatchLineDto } from './dto/match-line.dto';
 import { StatementDetailDto, StatementDto, StatementLineDto, StatementsPageDto } from './dto/statement.dto';
 import { ReconciliationService } from './reconciliation.service';
-import { StatementImportService, type UploadedStatement } from './statement-import.service';
+import type { UploadedStatement } from './statement-file';
+import { StatementImportService } from './statement-import.service';
 
 const LARGEST_BYTES = 1024 * 1024;
 
@@ -36,7 +27,6 @@ export class ReconciliationController {
    */
   @Post('statements')
   @Access({ roles: ['treasurer'] })
-  @ApiConsumes('multipart/form-data')
   @ApiBody({
     schema: {
       type: 'object',
@@ -44,7 +34,7 @@ export class ReconciliationController {
       properties: { file: { type: 'string', format: 'binary' } },
     },
   })
-  @UseInterceptors(FileInterceptor('file', { limits: { fileSize: LARGEST_BYTES, files: 1, fields: 0 } }))
+  @TakesFile('file', { bytes: LARGEST_BYTES })
   import(
     @CurrentActor() actor: Actor,
     @UploadedFile() file: UploadedStatement | undefined,
@@ -63,7 +53,7 @@ export class ReconciliationController {
   @Access({ roles: ['treasurer'] })
   show(
     @CurrentActor() actor: Actor,
-    @Param('statementId', ParseUUIDPipe) statementId: string,
+    @Param('statementId', ParseIdPipe) statementId: string,
   ): Promise<StatementDetailDto> {
     return this.reconciliation.show(actor, statementId);
   }
@@ -74,7 +64,7 @@ export class ReconciliationController {
   @Access({ roles: ['treasurer'] })
   match(
     @CurrentActor() actor: Actor,
-    @Param('lineId', ParseUUIDPipe) lineId: string,
+    @Param('lineId', ParseIdPipe) lineId: string,
     @Body() choice: MatchLineDto,
   ): Promise<StatementLineDto> {
     return this.reconciliation.match(actor, lineId, choice);
@@ -85,7 +75,7 @@ export class ReconciliationController {
   @Access({ roles: ['treasurer'] })
   takeBack(
     @CurrentActor() actor: Actor,
-    @Param('lineId', ParseUUIDPipe) lineId: string,
+    @Param('lineId', ParseIdPipe) lineId: string,
   ): Promise<StatementLineDto> {
     return this.reconciliation.takeBack(actor, lineId);
   }

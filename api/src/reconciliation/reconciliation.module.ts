@@ -6,9 +6,11 @@ import { LedgerModule } from '../ledger/ledger.module';
 import { BankStatement } from './bank-statement.entity';
 import { BookItems } from './book-items';
 import { Bookkeeper } from './bookkeeper';
+import { LineSettler } from './line-settler';
 import { Matcher } from './matcher';
 import { ReconciliationController } from './reconciliation.controller';
 import { ReconciliationService } from './reconciliation.service';
+import { SelfMatching } from './self-matching';
 import { StatementImportService } from './statement-import.service';
 import { StatementsRepository } from './statements.repository';
 
@@ -18,8 +20,10 @@ import { StatementsRepository } from './statements.repository';
   providers: [
     BookItems,
     Bookkeeper,
+    LineSettler,
     Matcher,
     ReconciliationService,
+    SelfMatching,
     StatementImportService,
     StatementsRepository,
   ],

@@ -3,34 +3,29 @@ import { DataSource, type EntityManager } from 'typeorm';
 import { requireRole, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { addDays, clubDay, writeDay } from '../common/club-day';
-import { commonProblems, fieldError } from '../common/common.errors';
-import { minorDigits, sumMinor, writeMinor } from '../common/minor-units';
+import { fieldError } from '../common/common.errors';
+import { translatingConstraints } from '../common/constraint';
+import { sumMinor, writeMinor } from '../common/minor-units';
+import { retryingOnce } from '../common/retrying';
 import { ClubService } from '../club/club.service';
 import { ACCOUNTS } from '../ledger/account.entity';
 import { LedgerService } from '../ledger/ledger.service';
 import { BankStatement } from './bank-statement.entity';
-import { Bookkeeper } from './bookkeeper';
 import type { StatementDto } from './dto/statement.dto';
 import { marked, type MarkedLine } from './fingerprint';
-import { Matcher } from './matcher';
-import { reconciliationProblems } from './reconciliation.errors';
-import { findByReference } from './reconciliation.rules';
-import { BadLine, readStatement, type StatementFile } from './statement-csv.rules';
+import { MATCH_REFUSALS, reconciliationProblems } from './reconciliation.errors';
+import { SelfMatching } from './self-matching';
+import type { StatementFile } from './statement-csv.rules';
+import { fileNameOf, readUploaded, type UploadedStatement } from './statement-file';
 import { StatementLine } from './statement-line.entity';
 import { StatementsRepository } from './statements.repository';
-
-export interface UploadedStatement {
-  originalname: string;
-  buffer: Buffer;
-}
 
 @Injectable()
 export class StatementImportService {
   constructor(
     private readonly dataSource: DataSource,
     private readonly statements: StatementsRepository,
-    private readonly books: Bookkeeper,
-    private readonly matcher: Matcher,
+    private readonly selfMatching: SelfMatching,
     private readonly ledger: LedgerService,
     private readonly club: ClubService,
     private readonly clock: Clock,
@@ -46,32 +41,13 @@ export class StatementImportService {
     requireRole(actor, 'treasurer');
     if (!file) throw fieldError('file', 'Choose the statement’s file.');
     const { timeZone, currency } = await this.club.settings();
-    const fileName = nameOf(file);
+    const fileName = fileNameOf(file);
     const today = clubDay(this.clock.now(), timeZone);
-    const read = this.read(file, fileName, currency, today);
-    const id = await this.dataSource.transaction((manager) =>
-      this.keep(manager, actor, fileName, read, currency),
-    );
+    const read = readUploaded(file, fileName, currency, today);
+    const work = () =>
+      this.dataSource.transaction((manager) => this.keep(manager, actor, fileName, read, currency));
+    const id = await translatingConstraints(() => retryingOnce(work), MATCH_REFUSALS);
     return this.statements.one(id);
-  }
-
-  private read(
-    { buffer }: UploadedStatement,
-    fileName: string,
-    currency: string,
-    today: string,
-  ): StatementFile {
-    try {
-      return readStatement(textOf(buffer), currency, minorDigits(currency), today);
-    } catch (error) {
-      if (!(error instanceof BadLine)) throw error;
-      const detail = `${fileName}, line ${error.line}: ${error.reason} Nothing was kept.`;
-      const errors = [{ pointer: '#/file', detail }];
-      throw reconciliationProblems['statement-unreadable'](detail, {
-        errors,
-        extra: { line: error.line, fileName },
-      });
-    }
   }
 
   private async keep(
@@ -98,7 +74,8 @@ export class StatementImportService {
       position: (last?.position ?? 0) + 1,
       knownLines: known.size,
     });
-    await this.matchByThemselves(manager, actor, statement, currency);
+    const lines = await this.statements.linesOf(manager, statement.id);
+    await this.selfMatching.match(manager, lines, actor.personId, currency);
     return statement.id;
   }
 
@@ -149,34 +126,6 @@ export class StatementImportService {
     await manager.getRepository(StatementLine).save(rows, { chunk: 500 });
     return statement;
   }
-
-  private async matchByThemselves(
-    manager: EntityManager,
-    actor: Actor,
-    statement: BankStatement,
-    currency: string,
-  ): Promise<void> {
-    const lines = await this.statements.linesOf(manager, statement.id);
-    await this.books.booksFor(manager, lines, true);
-    for (const line of lines) {
-      // Read anew for every line: the one before may have paid the same invoice.
-      const books = await this.books.booksFor(manager, [line], false);
-      const finding = findByReference(line, books, currency);
-      const because = { how: 'by itself' as const, reasons: finding.reasons, matchedById: actor.personId };
-      if (finding.kind === 'transfer')
-        await this.matcher.toPayment(
-          manager,
-          line,
-          { id: finding.transfer.id, method: 'transfer', madePayment: false },
-          because,
-        );
-      if (finding.kind === 'invoices') {
-        const [{ personId } = { personId: '' }] = finding.invoices;
-        const invoiceIds = finding.invoices.map(({ id }) => id);
-        await this.matcher.toInvoices(manager, line, { personId, invoiceIds }, because);
-      }
-    }
-  }
 }
 
 export const keyOf = ({ fingerprint, occurrence }: Pick<MarkedLine, 'fingerprint' | 'occurrence'>): string =>
@@ -193,25 +142,4 @@ function follows(
   throw reconciliationProblems['statement-does-not-follow'](
     `This one opens at ${write(openingMinor)}; the last statement, to ${writeDay(last.toOn)}, closed at ${write(last.closingMinor)}. Import what lies between first. Nothing was kept.`,
   );
-}
-
-/** @throws DomainError `wrong-kind-of-file` when the bytes are no text. */
-function textOf(buffer: Buffer): string {
-  try {
-    const text = new TextDecoder('utf-8', { fatal: true }).decode(buffer);
-    if (!text.includes('\u0000')) return text;
-  } catch {
-    // Not UTF-8: said below.
-  }
-  throw commonProblems['wrong-kind-of-file'](
-    'The file is not text in UTF-8. Save the statement as CSV and choose that. Nothing was kept.',
-  );
-}
-
-/** Browsers send the name as bytes that the parser reads as Latin-1. */
-function nameOf({ originalname }: UploadedStatement): string {
-  const name = Buffer.from(originalname, 'latin1')
-    .toString('utf8')
-    .replaceAll(/[\u0000-\u001f/\\]/g, '');
-  return name.slice(-120) || 'statement.csv';
 }

@@ -1,4 +1,4 @@
-type Line = [day: string, description: string, amountMinor: number];
+type Line = readonly [day: string, description: string, amountMinor: number];
 
 const decimal = (minor: number): string => {
   const text = String(Math.abs(minor)).padStart(3, '0');

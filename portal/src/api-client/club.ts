@@ -1,4 +1,5 @@
 import { queryOptions, useQuery } from '@tanstack/react-query';
+import { setClubCurrency } from '../lib/club-currency';
 import { setClubZone } from '../lib/club-zone';
 import { api, unwrap } from './client';
 import type { components } from './schema';
@@ -8,6 +9,7 @@ export type Club = components['schemas']['ClubDto'];
 async function getClub(): Promise<Club> {
   const club = await unwrap(api.GET('/api/club'));
   setClubZone(club.timeZone);
+  setClubCurrency(club.currency);
   return club;
 }
 

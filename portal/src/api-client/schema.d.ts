@@ -267,6 +267,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/builds/mine/summary": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** How far one's own builds are: the states of their stages, and nothing of what is in them. */
+        get: operations["Builds.mySummaries"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/builds/{buildId}": {
         parameters: {
             query?: never;
@@ -454,56 +471,6 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
-    "/api/builds/{buildId}/stages/{stageId}/worksheets": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        /** Puts a calculation of the level bench on a stage. */
-        post: operations["Worksheets.put"];
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
-    };
-    "/api/builds/{buildId}/worksheets": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /** Calculations put on this build. */
-        get: operations["Worksheets.list"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
-    };
-    "/api/builds/{buildId}/worksheets/{worksheetId}": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        put?: never;
-        post?: never;
-        delete: operations["Worksheets.takeBack"];
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
-    };
     "/api/clearances": {
         parameters: {
             query?: never;
@@ -564,23 +531,6 @@ export interface paths {
         /** The club's name, zone and currency. */
         get: operations["Club.front"];
         put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
-    };
-    "/api/club/rules": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        get?: never;
-        /** Chooses by which rules the calculators judge what may be sent. */
-        put: operations["Club.chooseRules"];
         post?: never;
         delete?: never;
         options?: never;
@@ -784,6 +734,23 @@ export interface paths {
         get: operations["Invoices.cardPayment"];
         put?: never;
         post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/invoices/{invoiceId}/card-payment/check": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Asks the card service itself, for the page that has waited long enough for its word. */
+        post: operations["Invoices.check"];
         delete?: never;
         options?: never;
         head?: never;
@@ -1095,6 +1062,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/tiers/people": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Who is on which tier, by name. */
+        get: operations["Dues.people"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/treasury/summary": {
         parameters: {
             query?: never;
@@ -1141,14 +1125,14 @@ export interface components {
         };
         AssignTierDto: {
             /** Format: uuid */
+            personId: string;
+            /** Format: uuid */
             tierId: string;
             /**
              * Format: date
              * @description The first day it holds.
              */
             fromOn: string;
-            /** Format: uuid */
-            personId: string;
         };
         BankDetailsDto: {
             accountName: string;
@@ -1356,6 +1340,16 @@ export interface components {
             /** @description Oldest first. */
             events: components["schemas"]["StageEventDto"][];
         };
+        BuildSummaryDto: {
+            id: string;
+            planName: string;
+            /** @example 7 */
+            serial: number;
+            endedAt: string | null;
+            /** @description The stage its builder is on. */
+            currentStageId: string | null;
+            stages: components["schemas"]["StageSummaryDto"][];
+        };
         CancelNightDto: {
             reason: string;
         };
@@ -1396,13 +1390,13 @@ export interface components {
             startsAt?: string;
             /** Format: date-time */
             endsAt?: string;
+            benchIds?: string[];
+            mentorIds?: string[];
+            stageIds?: string[];
             title?: string;
             /** @description Not fewer than are coming. More moves the waiting list up. */
             places?: number;
             note?: string;
-            benchIds?: string[];
-            mentorIds?: string[];
-            stageIds?: string[];
         };
         CheckedNightDto: {
             /**
@@ -1422,10 +1416,6 @@ export interface components {
         CheckoutDto: {
             /** @description The card service's page; the browser goes there. */
             url: string;
-        };
-        ChooseRulesDto: {
-            /** @enum {string} */
-            ruleSet: "US-97" | "IARU-R1";
         };
         ClearanceDto: {
             /** Format: date */
@@ -1448,11 +1438,6 @@ export interface components {
             perPage: number;
         };
         ClubDto: {
-            /**
-             * @description By which rules the calculators judge what may be sent. The licence and local rules decide.
-             * @enum {string}
-             */
-            ruleSet: "US-97" | "IARU-R1";
             name: string;
             address: string;
             contactEmail: string;
@@ -1469,13 +1454,17 @@ export interface components {
             /** @description Accounts of the demo club; empty anywhere else. */
             demoAccounts: components["schemas"]["DemoAccountDto"][];
         };
+        ComingTierDto: {
+            tierName: string;
+            fromOn: string;
+        };
         CreateBookingDto: {
+            /** @description Benches and instruments, 1 to 8: all of them are booked, or none. */
+            resourceIds: string[];
             /** Format: date-time */
             startsAt: string;
             /** Format: date-time */
             endsAt: string;
-            /** @description Benches and instruments, 1 to 8: all of them are booked, or none. */
-            resourceIds: string[];
             /**
              * Format: uuid
              * @description Book it for one of your groups.
@@ -1505,6 +1494,15 @@ export interface components {
             email: string;
             role: string;
         };
+        DuesRunDto: {
+            description: string;
+            /** @description The last due day among them. */
+            dueOn: string;
+            raisedMinor: number;
+            paidMinor: number;
+            count: number;
+            paidCount: number;
+        };
         FieldProblemDto: {
             /**
              * @description Where in the request.
@@ -1514,15 +1512,15 @@ export interface components {
             detail: string;
         };
         GrantClearanceDto: {
+            /** Format: uuid */
+            personId: string;
+            /** Format: uuid */
+            kindId: string;
             /**
              * Format: date
              * @description Last day on which it holds; leave it out for no end.
              */
             until?: string;
-            /** Format: uuid */
-            personId: string;
-            /** Format: uuid */
-            kindId: string;
         };
         GroupDto: {
             id: string;
@@ -1711,8 +1709,13 @@ export interface components {
                 [key: string]: string;
             };
             /**
+             * Format: uuid
+             * @description What it was read on; asked for where the check names a kind of instrument.
+             */
+            instrumentId?: string;
+            /**
              * Format: date-time
-             * @description When it was taken, for one that waited on a device; now where left out.
+             * @description When it was taken, for one that waited on a device; now where left out. Not before the stage opened.
              */
             takenAt?: string;
             /**
@@ -1720,8 +1723,6 @@ export interface components {
              * @example oscilloscope
              */
             method: string;
-            /** Format: uuid */
-            instrumentId?: string;
             /** @description The tick beside a grave caution; asked for with every reading of such a stage. */
             cautionAcknowledged?: boolean;
         };
@@ -1926,6 +1927,12 @@ export interface components {
             page: number;
             perPage: number;
         };
+        PeopleOnTiersPageDto: {
+            items: components["schemas"]["PersonOnTierDto"][];
+            total: number;
+            page: number;
+            perPage: number;
+        };
         PeoplePageDto: {
             items: components["schemas"]["PersonDto"][];
             total: number;
@@ -1937,6 +1944,15 @@ export interface components {
             id: string;
             name: string;
             roles: ("member" | "mentor" | "steward" | "treasurer" | "organiser")[];
+        };
+        PersonOnTierDto: {
+            personId: string;
+            personName: string;
+            /** @description Today's; null while none was given. */
+            tierId: string | null;
+            tierName: string | null;
+            /** @description The next change that was set for a later day. */
+            coming: components["schemas"]["ComingTierDto"] | null;
         };
         PersonRefDto: {
             id: string;
@@ -2011,16 +2027,16 @@ export interface components {
             endsAt: string;
             /** @description Days to leave out of the series (EXDATE). A day that is no night of it changes nothing. */
             skip?: string[];
-            /** @description Left out for a single night. */
-            repeat?: components["schemas"]["RepeatDto"];
-            /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
-            instead?: components["schemas"]["InsteadDto"][];
             /** @description Benches the night holds; none for an evening without. */
             benchIds?: string[];
             /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
             mentorIds?: string[];
             /** @description Stages in focus. */
             stageIds?: string[];
+            /** @description Left out for a single night. */
+            repeat?: components["schemas"]["RepeatDto"];
+            /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
+            instead?: components["schemas"]["InsteadDto"][];
             title: string;
             places: number;
             note?: string;
@@ -2055,6 +2071,12 @@ export interface components {
             endsAt: string;
             /** @description Days to leave out of the series (EXDATE). A day that is no night of it changes nothing. */
             skip?: string[];
+            /** @description Benches the night holds; none for an evening without. */
+            benchIds?: string[];
+            /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
+            mentorIds?: string[];
+            /** @description Stages in focus. */
+            stageIds?: string[];
             title?: string;
             places?: number;
             note?: string;
@@ -2064,12 +2086,6 @@ export interface components {
             repeat?: components["schemas"]["RepeatDto"];
             /** @description Nights of the series that have other benches or mentors. A day that is no night of it changes nothing. */
             instead?: components["schemas"]["InsteadDto"][];
-            /** @description Benches the night holds; none for an evening without. */
-            benchIds?: string[];
-            /** @description Mentors on duty, at least one. Left out: whoever schedules it. */
-            mentorIds?: string[];
-            /** @description Stages in focus. */
-            stageIds?: string[];
         };
         ProblemDto: {
             /**
@@ -2085,33 +2101,14 @@ export interface components {
             instance: string;
             errors?: components["schemas"]["FieldProblemDto"][];
         };
-        PutWorksheetDto: {
-            /** @enum {string} */
-            family: "conversions" | "readings" | "mixing" | "pads" | "chain" | "filters" | "matching" | "guards";
-            /**
-             * @description The query of the page's address.
-             * @example LO=23.067&IF=8.867
-             */
-            inputs: string;
-            /** @description The result as plain lines. */
-            result: string;
-        };
-        QuarterDto: {
-            from: string;
-            to: string;
-            raisedMinor: number;
-            paidMinor: number;
-            count: number;
-            paidCount: number;
-        };
         RaiseInvoiceDto: {
+            /** Format: uuid */
+            personId: string;
             /**
              * Format: date
              * @description Not before today.
              */
             dueOn: string;
-            /** Format: uuid */
-            personId: string;
             /** @enum {string} */
             kind: "dues" | "course fee" | "kit";
             description: string;
@@ -2257,6 +2254,14 @@ export interface components {
             /** @example Two turns off the output winding brought the gain down. */
             note?: string;
         };
+        StageSummaryDto: {
+            /** @enum {string} */
+            state: "not started" | "on the bench" | "with mentor" | "sent back" | "signed off" | "locked";
+            id: string;
+            position: number;
+            /** @example Pre-driver */
+            name: string;
+        };
         StartBuildDto: {
             /** Format: uuid */
             planId: string;
@@ -2318,24 +2323,24 @@ export interface components {
             perPage: number;
         };
         TakePaymentDto: {
+            /** Format: uuid */
+            personId: string;
             /**
              * Format: date
              * @description Today or before.
              */
             receivedOn: string;
-            /** Format: uuid */
-            personId: string;
-            /** @enum {string} */
-            method: "cash" | "cheque" | "transfer";
-            amountMinor: number;
             /** @description Paid in this order; what is left over is credit on account. */
             invoiceIds: string[];
-            note?: string;
             /**
              * Format: uuid
              * @description Chosen once by the form: the same key again answers with the payment already taken.
              */
             clientKey: string;
+            /** @enum {string} */
+            method: "cash" | "cheque" | "transfer";
+            amountMinor: number;
+            note?: string;
         };
         TakenDto: {
             resourceId: string;
@@ -2368,7 +2373,8 @@ export interface components {
             asOf: string;
             today: string;
             currency: string;
-            dues: components["schemas"]["QuarterDto"];
+            /** @description Null until dues are raised. */
+            dues: components["schemas"]["DuesRunDto"] | null;
             holdings: components["schemas"]["HoldingsDto"];
             aged: components["schemas"]["AgeBandDto"][];
             openCount: number;
@@ -2415,16 +2421,6 @@ export interface components {
              * @enum {string}
              */
             outcome: "acted" | "noted" | "needs a look" | "known";
-        };
-        WorksheetDto: {
-            id: string;
-            stageId: string;
-            /** @enum {string} */
-            family: "readings" | "conversions" | "mixing" | "pads" | "chain" | "filters" | "matching" | "guards";
-            inputs: string;
-            result: string;
-            /** @example 2026-10-15T19:46:00Z */
-            at: string;
         };
     };
     responses: never;
@@ -3032,6 +3028,34 @@ export interface operations {
             };
         };
     };
+    "Builds.mySummaries": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["BuildSummaryDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
     "Builds.show": {
         parameters: {
             query?: never;
@@ -3451,100 +3475,6 @@ export interface operations {
             };
         };
     };
-    "Worksheets.put": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                buildId: string;
-                stageId: string;
-            };
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["PutWorksheetDto"];
-            };
-        };
-        responses: {
-            201: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["WorksheetDto"];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Worksheets.list": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                buildId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            200: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["WorksheetDto"][];
-                };
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
-    "Worksheets.takeBack": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                buildId: string;
-                worksheetId: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            204: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
     "Clearances.list": {
         parameters: {
             query?: {
@@ -3694,36 +3624,6 @@ export interface operations {
             };
         };
     };
-    "Club.chooseRules": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                "application/json": components["schemas"]["ChooseRulesDto"];
-            };
-        };
-        responses: {
-            204: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content?: never;
-            };
-            /** @description A problem document */
-            default: {
-                headers: {
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["ProblemDto"];
-                };
-            };
-        };
-    };
     "Dues.mine": {
         parameters: {
             query?: never;
@@ -3844,10 +3744,10 @@ export interface operations {
             query?: {
                 page?: number;
                 perPage?: number;
-                /** @description For which day the instrument would be used; today unless told. */
-                on?: string;
                 /** @description Only instruments of this kind. */
                 kindId?: string;
+                /** @description For which day the instrument would be used; today unless told. */
+                on?: string;
             };
             header?: never;
             path?: never;
@@ -4008,9 +3908,9 @@ export interface operations {
             query?: {
                 page?: number;
                 perPage?: number;
+                personId?: string;
                 /** @description `open`: anything left to pay, late or not. */
                 state?: "open" | "late" | "paid";
-                personId?: string;
             };
             header?: never;
             path?: never;
@@ -4098,6 +3998,36 @@ export interface operations {
         };
     };
     "Invoices.cardPayment": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                invoiceId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CardPaymentDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Invoices.check": {
         parameters: {
             query?: never;
             header?: never;
@@ -4737,6 +4667,37 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Dues.people": {
+        parameters: {
+            query?: {
+                page?: number;
+                perPage?: number;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PeopleOnTiersPageDto"];
+                };
             };
             /** @description A problem document */
             default: {

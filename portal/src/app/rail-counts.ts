@@ -1,5 +1,5 @@
 import { useMe } from '../api-client/session';
-import { useMyBuilds } from '../features/builds/api/builds';
+import { useMyBuildSummaries } from '../features/builds/api/builds';
 import { useReviews } from '../features/builds/api/reviews';
 import { useDuesCount } from '../features/dues/use-dues-count';
 import { useTreasuryCount } from '../features/treasury/use-treasury-count';
@@ -15,7 +15,7 @@ export interface RailCount {
 /** Counts by path, put together here from the hooks of the features, since no feature may know another. */
 export function useRailCounts(): Partial<Record<string, RailCount>> {
   const me = useMe();
-  const builds = useMyBuilds();
+  const builds = useMyBuildSummaries();
   const dues = useDuesCount();
   const treasury = useTreasuryCount();
   const reviews = useReviews(me.hasRole('mentor'));

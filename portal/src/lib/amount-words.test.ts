@@ -30,6 +30,8 @@ describe('an amount on a receipt', () => {
     [5, 'EUR', 'Zero euros 05'],
     [100_000_000, 'GBP', '1000000.00 GBP'],
     [2400, 'SEK', '24.00 SEK'],
+    [2400, 'JPY', '2400 JPY'],
+    [2400, 'KWD', '2.400 KWD'],
   ])('writes %i of %s as “%s”', (minor, currency, words) => {
     expect(amountWords(minor, currency)).toBe(words);
   });

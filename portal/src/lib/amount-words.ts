@@ -1,25 +1,7 @@
-const SMALL = [
-  'zero',
-  'one',
-  'two',
-  'three',
-  'four',
-  'five',
-  'six',
-  'seven',
-  'eight',
-  'nine',
-  'ten',
-  'eleven',
-  'twelve',
-  'thirteen',
-  'fourteen',
-  'fifteen',
-  'sixteen',
-  'seventeen',
-  'eighteen',
-  'nineteen',
-];
+import { formatAmount, minorDigits } from './money';
+import { SMALL_NUMBERS } from './number-words';
+import { capital } from './text';
+
 const TENS = ['', '', 'twenty', 'thirty', 'forty', 'fifty', 'sixty', 'seventy', 'eighty', 'ninety'];
 const UNITS: Record<string, [one: string, many: string]> = {
   GBP: ['pound', 'pounds'],
@@ -36,7 +18,7 @@ const UNITS: Record<string, [one: string, many: string]> = {
 export function numberWords(value: number): string {
   if (!Number.isInteger(value) || value < 0 || value > 999_999)
     throw new RangeError(`${value} has no words here.`);
-  if (value < 20) return SMALL[value] ?? '';
+  if (value < 20) return SMALL_NUMBERS[value] ?? '';
   if (value < 100) return joined(TENS[Math.floor(value / 10)] ?? '', value % 10, '-');
   if (value < 1000) return joined(`${numberWords(Math.floor(value / 100))} hundred`, value % 100, ' and ');
   const rest = value % 1000;
@@ -52,11 +34,11 @@ const joined = (words: string, rest: number, by: string): string =>
  */
 export function amountWords(amountMinor: number, currency: string): string {
   const unit = UNITS[currency];
-  const whole = Math.floor(amountMinor / 100);
-  const rest = amountMinor % 100;
-  if (!unit || amountMinor < 0 || whole > 999_999) return `${(amountMinor / 100).toFixed(2)} ${currency}`;
-  const words = `${numberWords(whole)} ${whole === 1 ? unit[0] : unit[1]}`;
-  return (
-    words.charAt(0).toUpperCase() + words.slice(1) + (rest === 0 ? '' : ` ${String(rest).padStart(2, '0')}`)
-  );
+  const digits = minorDigits(currency);
+  const whole = Math.floor(amountMinor / 10 ** digits);
+  const rest = amountMinor % 10 ** digits;
+  if (!unit || amountMinor < 0 || whole > 999_999)
+    return `${formatAmount(amountMinor, currency).replaceAll(',', '')} ${currency}`;
+  const words = capital(`${numberWords(whole)} ${whole === 1 ? unit[0] : unit[1]}`);
+  return rest === 0 ? words : `${words} ${String(rest).padStart(digits, '0')}`;
 }

@@ -42,9 +42,6 @@ export function dateText(date: string): string {
   return `${day.day} ${nameOfMonth(day).slice(0, 3)} ${day.year}`;
 }
 
-/** 'October'. */
-export const monthName = (date: string): string => nameOfMonth(Temporal.PlainDate.from(date));
-
 /** 'October 2026'. */
 export function monthText(date: string): string {
   const day = Temporal.PlainDate.from(date);

@@ -1,24 +1,15 @@
+import { SMALL_NUMBERS } from './number-words';
+
 /** The true minus, as wide as the plus. */
 export const MINUS = '−';
 
-const WORDS = [
-  'no',
-  'one',
-  'two',
-  'three',
-  'four',
-  'five',
-  'six',
-  'seven',
-  'eight',
-  'nine',
-  'ten',
-  'eleven',
-  'twelve',
-];
+const MOST_IN_WORDS = 12;
 
 /** A count in words up to twelve, then in figures: 'two', '13'; nought is 'no'. */
-export const countWord = (count: number): string => WORDS[count] ?? String(count);
+export function countWord(count: number): string {
+  if (count === 0) return 'no';
+  return (count <= MOST_IN_WORDS && SMALL_NUMBERS[count]) || String(count);
+}
 
 export const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
 

@@ -8,7 +8,8 @@ import {
   longDayText,
   monthText,
 } from './club-time-text';
-import { formatAmount, formatMoney, readMoney } from './money';
+import { setClubCurrency } from './club-currency';
+import { exampleAmount, formatAmount, formatMoney, readMoney } from './money';
 import { capital, counted, countWord, fixed, initials, listText, plusMinus, signed } from './text';
 
 describe('dates in words', () => {
@@ -35,6 +36,21 @@ describe('dates in words', () => {
 });
 
 describe('money', () => {
+  afterEach(() => setClubCurrency('GBP'));
+
+  it('is written in the club’s currency, with as many decimals as ISO 4217 gives it', () => {
+    setClubCurrency('JPY');
+    expect([formatMoney(2400), formatAmount(-1234567), exampleAmount()]).toEqual([
+      '2,400 JPY',
+      '−1,234,567',
+      '24',
+    ]);
+    expect([readMoney('2,400'), readMoney('24.5')]).toEqual([2400, undefined]);
+    setClubCurrency('KWD');
+    expect([formatMoney(2400), exampleAmount()]).toEqual(['2.400 KWD', '24.000']);
+    expect([readMoney('2.4'), readMoney('2.4001')]).toEqual([2400, undefined]);
+  });
+
   it('shows the pound, pence, thousands and a true minus', () => {
     expect(formatMoney(2400)).toBe('£24.00');
     expect(formatMoney(-2400)).toBe('−£24.00');

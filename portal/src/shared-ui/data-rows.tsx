@@ -18,49 +18,59 @@ export function DataRows<T>({ label, columns, rows, rowKey, onOpen, openKey, foo
             component="li"
             key={rowKey(row)}
             sx={{
+              display: 'flex',
+              alignItems: 'center',
+              gap: '12px',
               py: '9px',
               borderBottom: '1px solid',
               borderColor: 'token.rule',
               ...(rowKey(row) === openKey && { backgroundColor: 'token.sheet' }),
             }}
           >
-            <Box sx={{ display: 'flex', alignItems: 'center', justifyContent: 'space-between', gap: '12px' }}>
+            <Box sx={{ flex: 1, minWidth: 0 }}>
               <Box
-                {...(onOpen ? { component: 'button', type: 'button', onClick: () => onOpen(row) } : {})}
+                sx={{ display: 'flex', alignItems: 'center', justifyContent: 'space-between', gap: '12px' }}
+              >
+                <Box
+                  {...(onOpen ? { component: 'button', type: 'button', onClick: () => onOpen(row) } : {})}
+                  sx={{
+                    p: 0,
+                    border: 0,
+                    background: 'none',
+                    color: 'inherit',
+                    font: 'inherit',
+                    fontWeight: 700,
+                    textAlign: 'left',
+                    minHeight: onOpen ? 36 : 0,
+                  }}
+                >
+                  {at('first').map((column) => (
+                    <Fragment key={column.key}>{column.cell(row)} </Fragment>
+                  ))}
+                </Box>
+                <Box sx={{ flex: 'none', display: 'flex', gap: '8px', textAlign: 'right' }}>
+                  {at('end').map((column) => (
+                    <Fragment key={column.key}>{column.cell(row)}</Fragment>
+                  ))}
+                </Box>
+              </Box>
+              <Box
                 sx={{
-                  p: 0,
-                  border: 0,
-                  background: 'none',
-                  color: 'inherit',
-                  font: 'inherit',
-                  fontWeight: 700,
-                  textAlign: 'left',
-                  minHeight: onOpen ? 36 : 0,
+                  display: 'flex',
+                  flexWrap: 'wrap',
+                  gap: '2px 10px',
+                  typography: 'small',
+                  color: 'token.ink2',
                 }}
               >
-                {at('first').map((column) => (
-                  <Fragment key={column.key}>{column.cell(row)} </Fragment>
-                ))}
-              </Box>
-              <Box sx={{ flex: 'none', display: 'flex', gap: '8px', textAlign: 'right' }}>
-                {at('end').map((column) => (
-                  <Fragment key={column.key}>{column.cell(row)}</Fragment>
+                {at('second').map((column) => (
+                  <span key={column.key}>{column.cell(row)}</span>
                 ))}
               </Box>
             </Box>
-            <Box
-              sx={{
-                display: 'flex',
-                flexWrap: 'wrap',
-                gap: '2px 10px',
-                typography: 'small',
-                color: 'token.ink2',
-              }}
-            >
-              {at('second').map((column) => (
-                <span key={column.key}>{column.cell(row)}</span>
-              ))}
-            </Box>
+            {at('act').map((column) => (
+              <Fragment key={column.key}>{column.cell(row)}</Fragment>
+            ))}
           </Box>
         ))}
       </Box>

@@ -7,8 +7,11 @@ export interface Column<T> {
   /** Money and readings stand at the right. */
   align?: 'left' | 'right';
   width?: string | number;
-  /** On a phone: in the row's first line, at its right end, in the second line (the default), or left out. */
-  phone?: 'first' | 'end' | 'second' | 'hidden';
+  /**
+   * On a phone: in the row's first line, at its right end, in the second line (the default), a button at the end of
+   * both, or left out.
+   */
+  phone?: 'first' | 'end' | 'second' | 'act' | 'hidden';
   sort?: { direction: 'ascending' | 'descending' | 'none'; onSort: () => void };
 }
 

@@ -8,6 +8,7 @@ import { setupServer } from 'msw/node';
 export const server = setupServer(
   http.get('*/api/builds/mine', () => HttpResponse.json([])),
   http.get('*/api/builds/:buildId/worksheets', () => HttpResponse.json([])),
+  http.get('*/api/builds/mine/summary', () => HttpResponse.json([])),
   http.get('*/api/invoices/mine', () => HttpResponse.json([])),
   http.get('*/api/reviews', () =>
     HttpResponse.json({ items: [], total: 0, page: 1, perPage: 100, lastSignOffAt: null }),

@@ -129,6 +129,7 @@ export class OneBuild {
       [this.inventory.kind('Spectrum analyzer')]: 'FR-031',
       [this.inventory.kind('Multimeter')]: this.dice.pick(['FR-051', 'FR-054', 'FR-055']),
       [this.inventory.kind('Frequency counter')]: 'FR-034',
+      [this.inventory.kind('Dummy load and wattmeter')]: 'FR-060',
     };
     const tag = tags[instrumentKindId ?? ''];
     return tag === undefined ? undefined : this.inventory.instrument(tag);

@@ -1,17 +1,15 @@
-import { Transform } from 'class-transformer';
-import { ArrayMaxSize, ArrayMinSize, ArrayUnique, IsArray, IsOptional, IsUUID } from 'class-validator';
-import { IsInstant } from '../../common/validators';
+import { ArrayMinSize } from 'class-validator';
+import { AreIds, IsId, IsInstant, MayBeLeftOut } from '../../common/validators';
 
 const MOST_RESOURCES = 8;
 
 export class CreateBookingDto {
   /** Benches and instruments, 1 to 8: all of them are booked, or none. */
-  @Transform(({ value }: { value: unknown }) => (Array.isArray(value) ? value.map(lowerCased) : value))
-  @IsArray()
   @ArrayMinSize(1, { message: 'Choose at least one bench or instrument' })
-  @ArrayMaxSize(MOST_RESOURCES, { message: 'One booking holds at most 8 benches and instruments' })
-  @IsUUID(undefined, { each: true })
-  @ArrayUnique({ message: 'One bench or instrument stands in the list twice' })
+  @AreIds(MOST_RESOURCES, {
+    tooMany: 'One booking holds at most 8 benches and instruments',
+    twice: 'One bench or instrument stands in the list twice',
+  })
   resourceIds: string[];
 
   @IsInstant()
@@ -21,17 +19,12 @@ export class CreateBookingDto {
   endsAt: string;
 
   /** Book it for one of your groups. */
-  @IsOptional()
-  @IsUUID()
+  @MayBeLeftOut()
+  @IsId()
   groupId?: string;
 
   /** The check of the plan you will work on. */
-  @IsOptional()
-  @IsUUID()
+  @MayBeLeftOut()
+  @IsId()
   checkId?: string;
-}
-
-/** Two spellings of one id are one id, here and in the database. */
-function lowerCased(value: unknown): unknown {
-  return typeof value === 'string' ? value.toLowerCase() : value;
 }

@@ -1,5 +1,4 @@
-import { IsOptional, IsUUID } from 'class-validator';
-import { IsInstant } from '../../common/validators';
+import { IsId, IsInstant, MayBeLeftOut } from '../../common/validators';
 
 /** A stretch of at most 62 days; what touches it is listed. */
 export class ListBookingsQueryDto {
@@ -10,7 +9,7 @@ export class ListBookingsQueryDto {
   to: string;
 
   /** Only bookings that hold this bench or instrument. */
-  @IsOptional()
-  @IsUUID()
+  @MayBeLeftOut()
+  @IsId()
   resourceId?: string;
 }

@@ -1,6 +1,6 @@
 import { IsInt, Max, Min } from 'class-validator';
-import { IsInstant, IsWords } from '../../common/validators';
-import { AreIds, MayBeLeftOut, MOST } from './night-fields';
+import { AreIds, IsInstant, IsWords, MayBeLeftOut } from '../../common/validators';
+import { MOST } from './night-fields';
 
 /** What is to be different about one night; what is left out stays. */
 export class ChangeNightDto {

@@ -12,9 +12,9 @@ import {
   Min,
   ValidateNested,
 } from 'class-validator';
-import { IsDay, IsInstant, IsWords } from '../../common/validators';
+import { AreIds, IsDay, IsInstant, IsWords, MayBeLeftOut } from '../../common/validators';
 import { MOST_NIGHTS } from '../repeat.rules';
-import { AreDays, AreIds, MayBeLeftOut, MOST } from './night-fields';
+import { AreDays, MOST } from './night-fields';
 
 /** How a series goes on after its first night. */
 export class RepeatDto {
@@ -116,4 +116,7 @@ export class NightWordsDto {
 export class PlanNightsDto extends IntersectionType(NightTimesDto, NightWordsDto) {}
 
 /** The same, half typed: what is not needed to look for clashes may be missing. */
-export class PreviewNightsDto extends IntersectionType(NightTimesDto, PartialType(NightWordsDto)) {}
+export class PreviewNightsDto extends IntersectionType(
+  NightTimesDto,
+  PartialType(NightWordsDto, { skipNullProperties: false }),
+) {}

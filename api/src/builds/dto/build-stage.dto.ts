@@ -10,6 +10,7 @@ import {
   standingsOf,
   standingsOfChecks,
   stateOf,
+  type BuildOutline,
   type BuildRecord,
 } from '../build-record';
 import { STAGE_EVENT_KINDS, type StageEventKind } from '../build-stage-event.entity';
@@ -63,7 +64,7 @@ export class BuildStageDto {
 
 type People = ReadonlyMap<string, Person>;
 
-export function shownState(record: BuildRecord, stage: Stage): { state: StageState; lock: string | null } {
+export function shownState(record: BuildOutline, stage: Stage): { state: StageState; lock: string | null } {
   const standings = standingsOf(record);
   const index = standings.findIndex(({ stageId }) => stageId === stage.id);
   const standing = standings[index];

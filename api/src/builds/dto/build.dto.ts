@@ -1,4 +1,4 @@
-import { IsUUID } from 'class-validator';
+import { IsId } from '../../common/validators';
 import type { Person } from '../../people/person.entity';
 import { levelPointDto, LevelPointDto } from '../../plans/dto/plan-edition.dto';
 import type { BuildRecord } from '../build-record';
@@ -8,7 +8,7 @@ import { personRef, PersonRefDto } from './person-ref.dto';
 
 /** Which plan to build; its newest edition is taken. */
 export class StartBuildDto {
-  @IsUUID()
+  @IsId()
   planId: string;
 }
 

@@ -1,7 +1,6 @@
 import { ApiProperty } from '@nestjs/swagger';
-import { IsOptional } from 'class-validator';
 import type { Person } from '../../people/person.entity';
-import { IsWords } from '../../common/validators';
+import { IsWords, MayBeLeftOut } from '../../common/validators';
 import type { PhotoFacts } from '../build-record';
 import type { CheckMark } from '../check-mark.entity';
 import { personRef, PersonRefDto } from './person-ref.dto';
@@ -21,7 +20,7 @@ export function markDto({ id, byPersonId, at }: CheckMark, people: ReadonlyMap<s
 /** Goes with the picture in the form. */
 export class AddPhotoDto {
   /** @example Underside, joints */
-  @IsOptional()
+  @MayBeLeftOut()
   @IsWords(120, 0)
   caption?: string;
 }

@@ -1,6 +1,6 @@
 import { ApiProperty } from '@nestjs/swagger';
-import { IsBoolean, IsObject, IsOptional, IsUUID } from 'class-validator';
-import { IsInstant, IsWords } from '../../common/validators';
+import { IsBoolean, IsObject } from 'class-validator';
+import { IsId, IsInstant, IsWords, MayBeLeftOut } from '../../common/validators';
 import { VERDICTS, type KeptVerdict, type Reading } from '../reading.entity';
 
 /** A reading as it was typed. What it comes to is worked out here and nowhere else. */
@@ -14,17 +14,18 @@ export class KeepReadingDto {
   @IsObject()
   entry: Record<string, string>;
 
-  @IsOptional()
-  @IsUUID()
+  /** What it was read on; asked for where the check names a kind of instrument. */
+  @MayBeLeftOut()
+  @IsId()
   instrumentId?: string;
 
-  /** When it was taken, for one that waited on a device; now where left out. */
-  @IsOptional()
+  /** When it was taken, for one that waited on a device; now where left out. Not before the stage opened. */
+  @MayBeLeftOut()
   @IsInstant()
   takenAt?: string;
 
   /** The tick beside a grave caution; asked for with every reading of such a stage. */
-  @IsOptional()
+  @MayBeLeftOut()
   @IsBoolean()
   cautionAcknowledged?: boolean;
 }

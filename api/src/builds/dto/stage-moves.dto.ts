@@ -1,10 +1,9 @@
-import { IsOptional } from 'class-validator';
-import { IsWords } from '../../common/validators';
+import { IsWords, MayBeLeftOut } from '../../common/validators';
 
 /** A word that goes with a stage to its mentor, or with a sign-off to the builder. */
 export class StageNoteDto {
   /** @example Two turns off the output winding brought the gain down. */
-  @IsOptional()
+  @MayBeLeftOut()
   @IsWords(1000, 0)
   note?: string;
 }

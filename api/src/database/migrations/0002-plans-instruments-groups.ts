@@ -33,7 +33,6 @@ export class PlansInstrumentsGroups1700000000002 implements MigrationInterface {
     await queryRunner.query(
       `CREATE TABLE "plan_check" ("id" uuid NOT NULL DEFAULT gen_random_uuid(), "stage_id" uuid NOT NULL, "position" integer NOT NULL, "kind" text NOT NULL, "title" text NOT NULL, "instruction" text NOT NULL DEFAULT '', "is_required" boolean NOT NULL DEFAULT true, "method" text, "unit" text, "window_low" double precision, "window_high" double precision, "target" double precision, "defaults" jsonb NOT NULL DEFAULT '{}', "from_check_ids" uuid array NOT NULL DEFAULT '{}', "level_point_id" uuid, "instrument_kind_id" uuid, CONSTRAINT "plan_check_position_once" UNIQUE ("stage_id", "position"), CONSTRAINT "plan_check_window" CHECK (window_low IS NULL OR window_high IS NULL OR window_low < window_high), CONSTRAINT "plan_check_measure_complete" CHECK ((kind = 'measure') = (method IS NOT NULL AND unit IS NOT NULL)), CONSTRAINT "plan_check_kind_known" CHECK (kind IN ('tick', 'measure', 'photo', 'safety', 'mentor''s eyes')), CONSTRAINT "plan_check_pk" PRIMARY KEY ("id"))`,
     );
-    await queryRunner.query(`ALTER TABLE "person" ALTER COLUMN "roles" SET DEFAULT '{member}'`);
     await queryRunner.query(
       `ALTER TABLE "build_group_member" ADD CONSTRAINT "build_group_member_of_group" FOREIGN KEY ("group_id") REFERENCES "build_group"("id") ON DELETE CASCADE ON UPDATE NO ACTION`,
     );
@@ -79,7 +78,6 @@ export class PlansInstrumentsGroups1700000000002 implements MigrationInterface {
       `ALTER TABLE "build_group_member" DROP CONSTRAINT "build_group_member_is_person"`,
     );
     await queryRunner.query(`ALTER TABLE "build_group_member" DROP CONSTRAINT "build_group_member_of_group"`);
-    await queryRunner.query(`ALTER TABLE "person" ALTER COLUMN "roles" SET DEFAULT ARRAY['member'`);
     await queryRunner.query(`DROP TABLE "plan_check"`);
     await queryRunner.query(`DROP TABLE "level_point"`);
     await queryRunner.query(`DROP TABLE "stage"`);

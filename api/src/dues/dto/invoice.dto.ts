@@ -1,13 +1,13 @@
-import { IsIn, IsInt, IsOptional, IsUUID, Max, Min } from 'class-validator';
+import { IsIn, IsInt, Max, Min } from 'class-validator';
 import { PageQueryDto } from '../../common/paging.dto';
-import { IsDay, IsWords } from '../../common/validators';
+import { IsDay, IsId, IsWords, MayBeLeftOut } from '../../common/validators';
 import { daysLate, openOf, stateOf, type InvoiceState } from '../dues.rules';
 import { INVOICE_KINDS, type InvoiceKind } from '../invoice.entity';
 import type { InvoiceRow } from '../invoices.repository';
 import { printReference } from '../../common/creditor-reference.rules';
 
 export class RaiseInvoiceDto {
-  @IsUUID()
+  @IsId()
   personId: string;
 
   @IsIn(INVOICE_KINDS)
@@ -32,12 +32,12 @@ export type InvoiceFilter = (typeof INVOICE_FILTERS)[number];
 
 export class ListInvoicesQueryDto extends PageQueryDto {
   /** `open`: anything left to pay, late or not. */
-  @IsOptional()
+  @MayBeLeftOut()
   @IsIn(INVOICE_FILTERS)
   state?: InvoiceFilter;
 
-  @IsOptional()
-  @IsUUID()
+  @MayBeLeftOut()
+  @IsId()
   personId?: string;
 }
 

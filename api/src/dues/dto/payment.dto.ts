@@ -1,16 +1,6 @@
-import {
-  ArrayMaxSize,
-  ArrayUnique,
-  IsArray,
-  IsIn,
-  IsInt,
-  IsOptional,
-  IsUUID,
-  Max,
-  Min,
-} from 'class-validator';
+import { IsIn, IsInt, Max, Min } from 'class-validator';
 import { PageQueryDto } from '../../common/paging.dto';
-import { IsDay, IsWords } from '../../common/validators';
+import { AreIds, IsDay, IsId, IsWords, MayBeLeftOut } from '../../common/validators';
 import { METHODS, type Method } from '../payment.entity';
 
 /** Ways of paying that are handed to the treasurer; a card pays on the card service's page. */
@@ -18,7 +8,7 @@ export const TAKEN_METHODS = ['cash', 'cheque', 'transfer'] as const;
 export type TakenMethod = (typeof TAKEN_METHODS)[number];
 
 export class TakePaymentDto {
-  @IsUUID()
+  @IsId()
   personId: string;
 
   @IsIn(TAKEN_METHODS)
@@ -34,27 +24,24 @@ export class TakePaymentDto {
   receivedOn: string;
 
   /** Paid in this order; what is left over is credit on account. */
-  @IsArray()
-  @ArrayMaxSize(20)
-  @ArrayUnique()
-  @IsUUID(undefined, { each: true })
+  @AreIds(20)
   invoiceIds: string[];
 
-  @IsOptional()
+  @MayBeLeftOut()
   @IsWords(200)
   note?: string;
 
   /** Chosen once by the form: the same key again answers with the payment already taken. */
-  @IsUUID()
+  @IsId()
   clientKey: string;
 }
 
 export class ListPaymentsQueryDto extends PageQueryDto {
-  @IsOptional()
-  @IsUUID()
+  @MayBeLeftOut()
+  @IsId()
   personId?: string;
 
-  @IsOptional()
+  @MayBeLeftOut()
   @IsIn(METHODS)
   method?: Method;
 }

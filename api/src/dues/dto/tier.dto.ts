@@ -1,6 +1,6 @@
 import { ApiProperty } from '@nestjs/swagger';
-import { IsInt, IsUUID, Max, Min } from 'class-validator';
-import { IsDay, IsWords } from '../../common/validators';
+import { IsInt, Max, Min } from 'class-validator';
+import { IsDay, IsId, IsWords } from '../../common/validators';
 import type { Tier } from '../tier.entity';
 
 export class CreateTierDto {
@@ -22,16 +22,39 @@ export class CreateTierDto {
 }
 
 export class AssignTierDto {
-  @IsUUID()
+  @IsId()
   personId: string;
 
   @ApiProperty({ format: 'uuid' })
-  @IsUUID()
+  @IsId()
   tierId: string;
 
   /** The first day it holds. */
   @IsDay()
   fromOn: string;
+}
+
+export class ComingTierDto {
+  tierName: string;
+  fromOn: string;
+}
+
+/** Somebody of the club, and the tier they are on. */
+export class PersonOnTierDto {
+  personId: string;
+  personName: string;
+  /** Today's; null while none was given. */
+  tierId: string | null;
+  tierName: string | null;
+  /** The next change that was set for a later day. */
+  coming: ComingTierDto | null;
+}
+
+export class PeopleOnTiersPageDto {
+  items: PersonOnTierDto[];
+  total: number;
+  page: number;
+  perPage: number;
 }
 
 export class TierDto {

@@ -6,10 +6,12 @@ export class AgeBandDto {
   openMinor: number;
 }
 
-/** Invoices with a due day in the running calendar quarter. */
-export class QuarterDto {
-  from: string;
-  to: string;
+/** The newest run of dues: the invoices raised in the same words, at most half a year apart. */
+export class DuesRunDto {
+  /** @example Dues, October to December */
+  description: string;
+  /** The last due day among them. */
+  dueOn: string;
   raisedMinor: number;
   paidMinor: number;
   count: number;
@@ -43,7 +45,8 @@ export class TreasurySummaryDto {
   asOf: string;
   today: string;
   currency: string;
-  dues: QuarterDto;
+  /** Null until dues are raised. */
+  dues: DuesRunDto | null;
   holdings: HoldingsDto;
   aged: AgeBandDto[];
   openCount: number;

@@ -1,29 +1,28 @@
 import { ApiProperty } from '@nestjs/swagger';
-import { IsOptional, IsUUID } from 'class-validator';
 import { PageQueryDto } from '../../common/paging.dto';
-import { IsDay } from '../../common/validators';
+import { IsDay, IsId, MayBeLeftOut } from '../../common/validators';
 import type { Clearance } from '../clearance.entity';
 
 export class GrantClearanceDto {
-  @IsUUID()
+  @IsId()
   personId: string;
 
-  @IsUUID()
+  @IsId()
   kindId: string;
 
   /** Last day on which it holds; leave it out for no end. */
-  @IsOptional()
+  @MayBeLeftOut()
   @IsDay()
   until?: string;
 }
 
 export class ListClearancesQueryDto extends PageQueryDto {
-  @IsOptional()
-  @IsUUID()
+  @MayBeLeftOut()
+  @IsId()
   personId?: string;
 
-  @IsOptional()
-  @IsUUID()
+  @MayBeLeftOut()
+  @IsId()
   kindId?: string;
 }
 

@@ -1,22 +1,21 @@
-import { IsOptional, IsUUID } from 'class-validator';
 import { PageQueryDto } from '../../common/paging.dto';
-import { IsDay } from '../../common/validators';
+import { IsDay, IsId, MayBeLeftOut } from '../../common/validators';
 
 /** For which day the instrument would be used; today unless told. */
 export class UseDayQueryDto {
-  @IsOptional()
+  @MayBeLeftOut()
   @IsDay()
   on?: string;
 }
 
 export class ListInstrumentsQueryDto extends PageQueryDto {
   /** Only instruments of this kind. */
-  @IsOptional()
-  @IsUUID()
+  @MayBeLeftOut()
+  @IsId()
   kindId?: string;
 
   /** For which day the instrument would be used; today unless told. */
-  @IsOptional()
+  @MayBeLeftOut()
   @IsDay()
   on?: string;
 }

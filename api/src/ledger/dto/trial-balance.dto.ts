@@ -1,11 +1,10 @@
-import { IsOptional } from 'class-validator';
-import { IsDay } from '../../common/validators';
+import { IsDay, MayBeLeftOut } from '../../common/validators';
 import type { AccountKind } from '../account.entity';
 import type { TrialBalance } from '../ledger.rules';
 
 export class TrialBalanceQueryDto {
   /** The last day that counts; today unless named. */
-  @IsOptional()
+  @MayBeLeftOut()
   @IsDay()
   on?: string;
 }

@@ -1,17 +1,17 @@
-import { IsIn, IsOptional } from 'class-validator';
+import { IsIn } from 'class-validator';
 import { ROLES, type Role } from '../../common/actor';
 import { PageQueryDto } from '../../common/paging.dto';
-import { IsWords } from '../../common/validators';
+import { IsWords, MayBeLeftOut } from '../../common/validators';
 import { PersonDto } from './person.dto';
 
 export class ListPeopleQueryDto extends PageQueryDto {
   /** Only holders of this role. */
-  @IsOptional()
+  @MayBeLeftOut()
   @IsIn(ROLES)
   role?: Role;
 
   /** Only names that have these letters in them. */
-  @IsOptional()
+  @MayBeLeftOut()
   @IsWords(80)
   name?: string;
 }

@@ -1,7 +1,10 @@
-import { screen } from '@testing-library/react';
+import { screen, waitFor } from '@testing-library/react';
 import { http, HttpResponse } from 'msw';
 import { describe, expect, it } from 'vitest';
 import { aBuild, aCheck, aReading, aStage } from '../../features/builds/testing/build.fixture';
+import { DUES_KEY } from '../../features/dues/api/dues';
+import { setClubCurrency } from '../../lib/club-currency';
+import { clubDay, instantOf } from '../../lib/club-time';
 import { renderPage, TAMSIN } from '../../testing/render';
 import { server } from '../../testing/server';
 import TonightPage from './TonightPage';
@@ -85,5 +88,44 @@ describe('tonight', () => {
     );
     expect(await screen.findByRole('link', { name: 'Open the reading' })).toBeVisible();
     expect(await screen.findByRole('alert')).toBeVisible();
+  });
+
+  it('shows two invoices alike as two, in the club’s currency, and follows what is changed on the dues page', async () => {
+    setClubCurrency('JPY');
+    const alike = (id: string) => ({ id, description: 'Kit, 3 of 4', openMinor: 3600, dueOn: '2026-11-30' });
+    let invoices = [alike('one'), alike('other')];
+    const { queryClient } = open(
+      TAMSIN,
+      http.get('*/api/invoices/mine', () => HttpResponse.json(invoices)),
+    );
+    expect(await screen.findAllByText('3,600 JPY, due Mon 30 Nov.')).toHaveLength(2);
+    const links = screen.getAllByRole('link', { name: 'Pay: Kit, 3 of 4' });
+    expect(links.map((link) => link.getAttribute('href'))).toEqual([
+      '/dues?invoice=one',
+      '/dues?invoice=other',
+    ]);
+    invoices = [];
+    await queryClient.invalidateQueries({ queryKey: DUES_KEY });
+    await waitFor(() => expect(screen.queryByText('Needs you')).toBeNull());
+    setClubCurrency('GBP');
+  });
+
+  it('follows a booking that is cancelled in the bench book', async () => {
+    const begin = clubDay();
+    const bench = { id: 'b3', tag: 'Bench 3', name: 'Bench 3', kind: 'bench' };
+    let bookings = [
+      {
+        ...{ id: 'k', kind: 'session', mine: true, personId: TAMSIN.id, personName: 'Tamsin Ardley' },
+        ...{ startsAt: instantOf(begin, 19 * 60), endsAt: instantOf(begin, 21 * 60), resources: [bench] },
+      },
+    ];
+    const { queryClient } = open(
+      TAMSIN,
+      http.get('*/api/bookings', () => HttpResponse.json(bookings)),
+    );
+    expect(await screen.findByText('Yours until 21:00')).toBeVisible();
+    bookings = [];
+    await queryClient.invalidateQueries({ queryKey: ['bookings'] });
+    await waitFor(() => expect(screen.queryByText('Yours until 21:00')).toBeNull());
   });
 });

@@ -1,6 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import Box from '@mui/material/Box';
 import Typography from '@mui/material/Typography';
+import type { BuildNight } from '../../features/build-nights/api/nights';
 import { clubDay } from '../../lib/club-time';
 import { formatSpan, longDayText } from '../../lib/club-time-text';
 import { listText } from '../../lib/text';
@@ -8,7 +9,7 @@ import { PageTitle } from '../../shared-ui/page-title';
 import { BenchRow } from './bench-row';
 import { BeforeYouSwitchOn, BuildStrip } from './build-strip';
 import { ComingUp } from './coming-up';
-import { dayBookingsQuery, nightsAround, nightsQuery, type BuildNight } from './evening';
+import { comingNightsQuery, dayBookingsQuery, nightsAround } from './evening';
 import { NeedsYou } from './needs-you';
 import { NextStep } from './next-step';
 import { useNow } from './use-now';
@@ -18,9 +19,9 @@ import { YourEvening } from './your-evening';
 export default function TonightPage() {
   const now = useNow();
   const day = clubDay(now);
-  const nights = useQuery(nightsQuery(day));
+  const nights = useQuery(comingNightsQuery(day));
   const bookings = useQuery(dayBookingsQuery(day));
-  const { tonight } = nightsAround(nights.data?.items ?? [], day);
+  const { tonight } = nightsAround(nights.data ?? [], day);
   const bench = (bookings.data ?? [])
     .filter(({ mine, kind }) => mine && kind === 'session')
     .flatMap(({ resources }) => resources)

@@ -1,12 +1,13 @@
 import { useQuery } from '@tanstack/react-query';
 import Box from '@mui/material/Box';
 import Typography from '@mui/material/Typography';
+import { benchesQuery, type Booking } from '../../features/bench-book/api/bench-book';
 import { minutesBetween } from '../../lib/club-time';
 import { formatTime } from '../../lib/club-time-text';
 import { capital, counted } from '../../lib/text';
 import { AssetTag } from '../../shared-ui/asset-tag';
 import { SectionHeading } from '../../shared-ui/section-heading';
-import { benchesQuery, dayBookingsQuery, type Booking } from './evening';
+import { dayBookingsQuery } from './evening';
 
 const isOn = ({ startsAt, endsAt }: Booking, now: Date): boolean =>
   minutesBetween(startsAt, now) >= 0 && minutesBetween(now, endsAt) > 0;
@@ -15,7 +16,7 @@ const isOn = ({ startsAt, endsAt }: Booking, now: Date): boolean =>
 export function BenchRow({ day, now }: { day: string; now: Date }) {
   const benches = useQuery(benchesQuery);
   const bookings = useQuery(dayBookingsQuery(day));
-  if (!benches.data || !bookings.data || benches.data.items.length === 0) return null;
+  if (!benches.data || !bookings.data || benches.data.length === 0) return null;
   const sessions = bookings.data.filter((booking) => booking.kind === 'session' && isOn(booking, now));
   const people = new Set(sessions.map(({ personId }) => personId)).size;
   return (
@@ -38,7 +39,7 @@ export function BenchRow({ day, now }: { day: string; now: Date }) {
           overflowX: 'auto',
         }}
       >
-        {benches.data.items.map(({ id, tag }) => (
+        {benches.data.map(({ id, tag }) => (
           <Bench
             key={id}
             tag={tag}

@@ -2,7 +2,7 @@ import Box from '@mui/material/Box';
 import Typography from '@mui/material/Typography';
 import { minutesBetween, wallOf, type Instant } from '../../lib/club-time';
 import { clockText, formatTime } from '../../lib/club-time-text';
-import type { Booking } from './evening';
+import type { Booking } from '../../features/bench-book/api/bench-book';
 
 interface EveningChartProps {
   bookings: readonly Booking[];

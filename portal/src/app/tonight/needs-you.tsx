@@ -7,13 +7,17 @@ import { useMe } from '../../api-client/session';
 import { useMyBuilds } from '../../features/builds/api/builds';
 import { useReviews } from '../../features/builds/api/reviews';
 import { checkPath } from '../../features/builds/logic/stage';
+import { myInvoicesQuery } from '../../features/dues/api/dues';
+import { instrumentListQuery } from '../../features/instruments/api/instruments';
+import { summaryQuery } from '../../features/treasury/api/treasury';
 import { dayText } from '../../lib/club-time-text';
 import { capital, counted } from '../../lib/text';
 import { formatMoney } from '../../lib/money';
 import { SectionHeading } from '../../shared-ui/section-heading';
-import { instrumentsQuery, myInvoicesQuery, treasuryQuery } from './evening';
 
 interface Need {
+  /** Two alike invoices have the same words. */
+  id: string;
   title: string;
   detail: string;
   act: string;
@@ -26,13 +30,14 @@ function useNeeds(): Need[] {
   const builds = useMyBuilds();
   const reviews = useReviews(me.hasRole('mentor'));
   const invoices = useQuery(myInvoicesQuery);
-  const instruments = useQuery({ ...instrumentsQuery, enabled: me.hasRole('steward') });
-  const treasury = useQuery({ ...treasuryQuery, enabled: me.hasRole('treasurer') });
+  const instruments = useQuery({ ...instrumentListQuery, enabled: me.hasRole('steward') });
+  const treasury = useQuery({ ...summaryQuery, enabled: me.hasRole('treasurer') });
   const waiting = (reviews.data?.items ?? []).filter(({ isOwn }) => !isOwn);
-  const broken = (instruments.data?.items ?? []).filter(({ condition }) => condition !== 'ready');
+  const broken = (instruments.data ?? []).filter(({ condition }) => condition !== 'ready');
   const needs: Need[] = [];
   if (waiting.length > 0)
     needs.push({
+      id: 'reviews',
       title: `${capital(counted(waiting.length, 'stage'))} waiting for a mentor`,
       detail: `${waiting[0]?.builder.name}, stage ${waiting[0]?.stagePosition} ${waiting[0]?.stageName}, has waited longest.`,
       act: 'Review',
@@ -40,6 +45,7 @@ function useNeeds(): Need[] {
     });
   if (broken.length > 0)
     needs.push({
+      id: 'instruments',
       title: `${capital(counted(broken.length, 'instrument'))} not ready`,
       detail: broken.map(({ tag }) => tag).join(', '),
       act: 'Open',
@@ -47,6 +53,7 @@ function useNeeds(): Need[] {
     });
   if (treasury.data && treasury.data.latePeople > 0)
     needs.push({
+      id: 'late dues',
       title: `Dues late from ${counted(treasury.data.latePeople, 'person', 'people')}`,
       detail: `${formatMoney(treasury.data.lateMinor)} past its day.`,
       act: 'Open',
@@ -56,6 +63,7 @@ function useNeeds(): Need[] {
     const back = build.stages.find(({ state }) => state === 'sent back');
     if (back)
       needs.push({
+        id: back.id,
         title: `Stage ${back.position} ${back.name} was sent back`,
         detail: back.events.at(-1)?.note ?? '',
         act: 'Open',
@@ -68,6 +76,7 @@ function useNeeds(): Need[] {
       build.stages.filter(({ state }) => state === 'signed off').length * 2 >= build.stages.length
     )
       needs.push({
+        id: `licence ${build.id}`,
         title: 'Show your licence to an organiser',
         detail: `Stage ${last.position} ${last.name} stays locked until then.`,
         act: 'How',
@@ -77,6 +86,7 @@ function useNeeds(): Need[] {
   const open = (invoices.data ?? []).filter(({ openMinor }) => openMinor > 0);
   for (const { id, description, openMinor, dueOn } of open.slice(0, 2))
     needs.push({
+      id,
       title: description,
       detail: `${formatMoney(openMinor)}, due ${dayText(dueOn)}.`,
       act: 'Pay',
@@ -95,10 +105,10 @@ export function NeedsYou() {
         Needs you
       </SectionHeading>
       <Box component="ul" sx={{ m: 0, p: 0, listStyle: 'none' }}>
-        {needs.map(({ title, detail, act, path }) => (
+        {needs.map(({ id, title, detail, act, path }) => (
           <Box
             component="li"
-            key={title}
+            key={id}
             sx={{
               display: 'flex',
               justifyContent: 'space-between',

@@ -6,15 +6,15 @@ import { EmptyState } from '../../shared-ui/empty-state';
 import { LoadingBars } from '../../shared-ui/loading-bars';
 import { ProblemAlert } from '../../shared-ui/problem-alert';
 import { SectionHeading } from '../../shared-ui/section-heading';
-import { dayBookingsQuery, nightsAround, nightsQuery } from './evening';
+import { comingNightsQuery, dayBookingsQuery, nightsAround } from './evening';
 import { EveningChart } from './evening-chart';
 
 /** What one has tonight, on quarter-hours; where there is nothing, when the next night is. */
 export function YourEvening({ day, now }: { day: string; now: Date }) {
   const bookings = useQuery(dayBookingsQuery(day));
-  const nights = useQuery(nightsQuery(day));
+  const nights = useQuery(comingNightsQuery(day));
   const failed = [bookings, nights].find(({ isError }) => isError);
-  const { tonight, next } = nightsAround(nights.data?.items ?? [], day);
+  const { tonight, next } = nightsAround(nights.data ?? [], day);
   const mine = (bookings.data ?? []).filter(({ mine: isMine, kind }) => isMine && kind === 'session');
   const starts = [tonight?.startsAt, ...mine.map(({ startsAt }) => startsAt)]
     .filter((at) => at !== undefined)

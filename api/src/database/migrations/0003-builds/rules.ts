@@ -1,4 +1,4 @@
-/** What no program may get round, however it reaches the database. The names are matched by `builds.errors.ts`. */
+/** What no program may get round, however it reaches the database. */
 export const BUILD_RULES = [
   `CREATE FUNCTION broken(rule text, words text) RETURNS void LANGUAGE plpgsql AS $$
    BEGIN

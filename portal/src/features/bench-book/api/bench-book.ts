@@ -45,6 +45,12 @@ export const bookingsQuery = (from: string, days: number) =>
     refetchInterval: REFRESH_MS,
   });
 
+/** One's own. */
+export const myBookingsQuery = queryOptions({
+  queryKey: [...BOOKINGS_KEY, 'mine'],
+  queryFn: () => unwrap(api.GET('/api/bookings/mine')),
+});
+
 export const myGroupsQuery = queryOptions({
   queryKey: ['groups', 'mine'],
   queryFn: () => unwrap(api.GET('/api/groups/mine')),

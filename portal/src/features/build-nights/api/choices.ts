@@ -11,7 +11,7 @@ export interface Choice {
 
 /** The benches that can be had, in the order they stand. */
 export const benchChoicesQuery = queryOptions({
-  queryKey: ['benches'],
+  queryKey: ['benches', 'choices'],
   queryFn: async (): Promise<Choice[]> => {
     const { items } = await unwrap(api.GET('/api/benches', { params: { query: MOST } }));
     return items.map(({ id, tag }) => ({ value: id, label: tag }));

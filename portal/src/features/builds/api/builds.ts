@@ -18,6 +18,11 @@ const myBuildsQuery = queryOptions({
   queryFn: () => unwrap(api.GET('/api/builds/mine')),
 });
 
+const summariesQuery = queryOptions({
+  queryKey: [...BUILDS, 'summaries'],
+  queryFn: () => unwrap(api.GET('/api/builds/mine/summary')),
+});
+
 const buildQuery = (buildId: string) =>
   queryOptions({
     queryKey: [...BUILDS, buildId],
@@ -42,6 +47,8 @@ export const instrumentsQuery = (buildId: string, checkId: string) =>
   });
 
 export const useMyBuilds = () => useQuery(myBuildsQuery);
+/** Only how far they are: what a page asks that shows none of what is in them. */
+export const useMyBuildSummaries = () => useQuery(summariesQuery);
 export const useBuild = (buildId: string) => useQuery(buildQuery(buildId));
 
 /** A mutation after which builds, and the queue of those who wait, are asked anew. */

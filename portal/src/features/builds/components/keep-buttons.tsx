@@ -12,6 +12,12 @@ export function KeepButtons({ form, isShort = false }: { form: ReadingFormState;
         Keep, tick the caution first
       </WaitingButton>
     );
+  if (form.waitsFor)
+    return (
+      <WaitingButton reason={form.waitsFor.reason} fullWidth={isShort}>
+        Keep, {form.waitsFor.short}
+      </WaitingButton>
+    );
   const tighter = live.state === 'read' && live.verdict === 'too close to call' ? live.tighter : undefined;
   const keep = (
     <Button

@@ -45,6 +45,15 @@ export function ReadingCard({ form, stage, testPoint }: ReadingCardProps) {
         </Typography>
       )}
       <ReadingFields form={form} testPoint={testPoint} />
+      {form.waitsFor && form.instrumentsProblem && (
+        <Box sx={{ mt: '10px' }}>
+          <ProblemAlert
+            title="The instruments did not load"
+            error={form.instrumentsProblem}
+            onRetry={form.askForInstruments}
+          />
+        </Box>
+      )}
       {isPhone && <MildCautions cautions={stage.cautions} />}
       <CautionTicks form={form} />
       {isPhone ? (

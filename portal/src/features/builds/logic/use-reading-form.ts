@@ -6,6 +6,7 @@ import { useDraft } from '../../../shared-ui/use-draft';
 import { useToast } from '../../../shared-ui/toasts';
 import { instrumentsQuery, useKeepReading, type BuildCheck, type BuildStage } from '../api/builds';
 import { gravesOf } from './cautions';
+import { instrumentWait } from './instrument-wait';
 import { fieldsOf, liveReading, startEntry, type Entry, type Live } from './live-reading';
 import { readingSentence } from './words';
 
@@ -52,6 +53,11 @@ export function useReadingForm(
   const { entry } = draft.value;
   const offered = choices.data ?? [];
   const instrument = chosenOf(offered, draft.value.instrumentId);
+  const waitsFor = instrumentWait(check, {
+    offered: choices.data,
+    hasFailed: choices.isError,
+    isChosen: instrument !== undefined,
+  });
   const live = useMemo(
     () => liveReading(check, entry, instrument?.amplitudeAccuracyDb),
     [check, entry, instrument?.amplitudeAccuracyDb],
@@ -77,7 +83,7 @@ export function useReadingForm(
   const keep = () => {
     if (keeping.isPending) return;
     setLeft(names);
-    if (live.state !== 'read' || !isTicked) return;
+    if (live.state !== 'read' || !isTicked || waitsFor) return;
     const cautionAcknowledged = graves.length > 0 ? isTicked : undefined;
     const body = { method: check.method ?? '', entry, instrumentId: instrument?.id, cautionAcknowledged };
     carryOut(keeping, body, {
@@ -97,6 +103,10 @@ export function useReadingForm(
     setTick: (kind: string, isOn: boolean) =>
       setTicks((before) => (isOn ? [...before, kind] : before.filter((other) => other !== kind))),
     instruments: offered,
+    /** Why nothing can be kept yet: what it was read on is not known. */
+    waitsFor,
+    instrumentsProblem: choices.error ?? undefined,
+    askForInstruments: () => void choices.refetch(),
     instrumentId: instrument?.id ?? '',
     setInstrument: (instrumentId: string) => draft.setValue({ ...draft.value, instrumentId }),
     problem: isOnAField ? undefined : (keeping.error ?? undefined),

@@ -108,6 +108,61 @@ describe('the stage page', () => {
     expect(screen.getByRole('button', { name: 'Keep this reading' })).toBeEnabled();
   });
 
+  describe('where the check names a kind of instrument', () => {
+    const scope = (reason: string | null) => ({
+      ...{ id: 'scope', tag: 'FR-021', name: 'Two channels', kind: 'Oscilloscope', reason },
+      ...{ calibrationDueOn: '2027-01-31', amplitudeAccuracyDb: null },
+    });
+    const typed = async (answer: () => Response | Promise<Response>) => {
+      const { user } = open(aStage({ checks: [aCheck({ instrumentKindId: 'scopes' })] }));
+      server.use(http.get('*/api/builds/build/checks/:checkId/instruments', answer));
+      await user.type(await field('Volts per division'), '10m');
+      await user.type(await field('Divisions, peak to peak'), '6.7');
+      return user;
+    };
+
+    it('offers Keep once the instruments have come, and names the one that is chosen', async () => {
+      let arrive = (): void => undefined;
+      const arrived = new Promise<void>((resolve) => {
+        arrive = resolve;
+      });
+      const sent: unknown[] = [];
+      const user = await typed(async () => {
+        await arrived;
+        return HttpResponse.json([scope(null)]);
+      });
+      server.use(
+        http.post('*/api/builds/build/checks/output/readings', async ({ request }) => {
+          sent.push(await request.json());
+          return HttpResponse.json(aReading(), { status: 201 });
+        }),
+      );
+      const waiting = screen.getByRole('button', { name: 'Keep, instruments are loading' });
+      await user.click(waiting);
+      await user.type(await field('Divisions, peak to peak'), '{Enter}');
+      expect(sent).toEqual([]);
+      arrive();
+      await user.click(await screen.findByRole('button', { name: 'Keep this reading' }));
+      await waitFor(() => expect(sent).toMatchObject([{ instrumentId: 'scope' }]));
+    });
+
+    it('says that none can be used, instead of keeping a reading without one', async () => {
+      await typed(() => HttpResponse.json([scope('FR-021 is in repair.')]));
+      const button = await screen.findByRole('button', { name: 'Keep, choose an instrument first' });
+      expect(button).toHaveAccessibleDescription(/None of the instruments can be used just now/);
+    });
+
+    it('offers another try when the list does not load', async () => {
+      const user = await typed(() => HttpResponse.error());
+      expect(await screen.findByRole('button', { name: 'Keep, the instruments did not load' })).toBeVisible();
+      server.use(
+        http.get('*/api/builds/build/checks/:checkId/instruments', () => HttpResponse.json([scope(null)])),
+      );
+      await user.click(screen.getByRole('button', { name: /Try again/ }));
+      expect(await screen.findByRole('button', { name: 'Keep this reading' })).toBeVisible();
+    });
+  });
+
   it('says in the button how many checks are left before a mentor can look', async () => {
     open();
     const button = await screen.findByRole('button', { name: /Send to mentor, 1 check left/ });

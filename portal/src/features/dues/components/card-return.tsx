@@ -1,13 +1,11 @@
 import Box from '@mui/material/Box';
 import Link from '@mui/material/Link';
 import { useQueryClient } from '@tanstack/react-query';
-import { useEffect, useState, type ReactNode } from 'react';
+import { useEffect, type ReactNode } from 'react';
 import { Banner } from '../../../shared-ui/banner';
 import { ProblemAlert } from '../../../shared-ui/problem-alert';
 import { StateMark } from '../../../shared-ui/states/shape';
-import { DUES_KEY, useCardPayment } from '../api/dues';
-
-const PATIENCE_MS = 20_000;
+import { DUES_KEY, useCardCheck, useCardPayment } from '../api/dues';
 
 interface CardReturnProps {
   invoiceId: string;
@@ -21,7 +19,12 @@ interface CardReturnProps {
 export function CardReturn({ invoiceId, how, onReceipt, onDone }: CardReturnProps) {
   const query = useCardPayment(invoiceId);
   const client = useQueryClient();
-  const isSlow = useAfter(PATIENCE_MS);
+  const check = useCardCheck(invoiceId);
+  const { isGivenUp } = query;
+  const { isIdle, mutate: ask } = check;
+  useEffect(() => {
+    if (isGivenUp && isIdle) ask();
+  }, [isGivenUp, isIdle, ask]);
   const { state, receiptId } = query.data ?? {};
   useEffect(() => {
     if (state === 'paid') void client.invalidateQueries({ queryKey: DUES_KEY, predicate: isOverview });
@@ -53,31 +56,56 @@ export function CardReturn({ invoiceId, how, onReceipt, onDone }: CardReturnProp
         You left the card page. Nothing was taken.
       </Banner>
     );
-  return <Checking isSlow={isSlow} isConfirming={state === 'confirming'} />;
+  if (isGivenUp && (check.isSuccess || check.isError))
+    return (
+      <StillUnknown
+        isConfirming={state === 'confirming'}
+        isSilent={check.isError}
+        onAgain={() => ask()}
+        close={close}
+      />
+    );
+  return <Checking isConfirming={state === 'confirming'} />;
 }
 
-/** The lists, not the question that is being asked once a second. */
+/** The lists, not the question that is being asked. */
 const isOverview = ({ queryKey }: { queryKey: readonly unknown[] }): boolean =>
   queryKey[1] !== 'card-payment';
 
-function useAfter(waitMs: number): boolean {
-  const [isAfter, setIsAfter] = useState(false);
-  useEffect(() => {
-    const timer = setTimeout(() => setIsAfter(true), waitMs);
-    return () => clearTimeout(timer);
-  }, [waitMs]);
-  return isAfter;
-}
-
-function Checking({ isSlow, isConfirming }: { isSlow: boolean; isConfirming: boolean }) {
-  const more = isConfirming
-    ? 'Your bank has yet to confirm the payment. You can leave this page; the receipt comes by mail.'
-    : isSlow
-      ? 'The card service has not answered yet. You can leave this page; it is checked on, and the receipt comes by mail.'
-      : '';
+function Checking({ isConfirming }: { isConfirming: boolean }) {
   return (
     <Note shape="half" colour="trace" title="Checking.">
-      No money is taken twice. {more}
+      No money is taken twice. {isConfirming && 'Your bank has yet to confirm the payment.'}
+    </Note>
+  );
+}
+
+interface StillUnknownProps {
+  isConfirming: boolean;
+  /** The card service could not be asked. */
+  isSilent: boolean;
+  onAgain: () => void;
+  close: ReactNode;
+}
+
+/** The card service was asked and does not say either: nothing more is asked until the person wants it. */
+function StillUnknown({ isConfirming, isSilent, onAgain, close }: StillUnknownProps) {
+  return (
+    <Note
+      shape="half"
+      colour="trace"
+      title={isConfirming ? 'Your bank has yet to confirm.' : 'Not known yet.'}
+    >
+      {isSilent
+        ? 'The card service does not answer just now. '
+        : isConfirming
+          ? 'That may take a day. '
+          : 'The card service has no payment for this invoice yet. '}
+      No money is taken twice. If it was paid, the receipt comes by mail; you can leave this page.{' '}
+      <Link component="button" onClick={onAgain}>
+        Try again
+      </Link>
+      . {close}
     </Note>
   );
 }

@@ -1,6 +1,6 @@
-import { screen, waitFor, within } from '@testing-library/react';
+import { act, fireEvent, screen, waitFor, within } from '@testing-library/react';
 import { http, HttpResponse } from 'msw';
-import { describe, expect, it, vi } from 'vitest';
+import { afterEach, describe, expect, it, vi } from 'vitest';
 import { addDays, clubDay } from '../../../lib/club-time';
 import { renderPage } from '../../../testing/render';
 import { server } from '../../../testing/server';
@@ -150,6 +150,71 @@ describe('Dues', () => {
     expect(await screen.findByText(/No money is taken twice/)).toBeVisible();
     expect(await screen.findByText('Paid by card.', {}, { timeout: 3000 })).toBeVisible();
     expect(screen.getByRole('button', { name: 'See the receipt' })).toBeVisible();
+  });
+
+  describe('when the card service’s word does not come', () => {
+    afterEach(() => vi.useRealTimers());
+
+    /** Comes back from the card page and waits, with a clock of the test's own. */
+    const waitAtThePage = (check: () => Response | Promise<Response>) => {
+      const asked: number[] = [];
+      let checks = 0;
+      vi.useFakeTimers({ toFake: ['setTimeout', 'clearTimeout', 'setInterval', 'clearInterval', 'Date'] });
+      const begin = Date.now();
+      server.use(
+        http.get('*/api/invoices/:id/card-payment', () => {
+          asked.push(Math.round((Date.now() - begin) / 1000));
+          return HttpResponse.json({ state: 'open', openMinor: 2400, receiptId: null });
+        }),
+        http.post('*/api/invoices/:id/card-payment/check', () => {
+          checks += 1;
+          return check();
+        }),
+      );
+      show([], dues(), `/dues?invoice=${ID}&card=returned`);
+      const wait = async (seconds: number) => {
+        for (let second = 0; second < seconds; second += 1)
+          await act(() => vi.advanceTimersByTimeAsync(1000));
+      };
+      return { asked, wait, checks: () => checks };
+    };
+
+    it('asks at growing distances, then has the card service asked once, and stops with plain words', async () => {
+      const { asked, wait, checks } = waitAtThePage(() =>
+        HttpResponse.json({ state: 'open', openMinor: 2400, receiptId: null }),
+      );
+      await wait(60);
+      expect(checks()).toBe(0);
+      await wait(120);
+      expect(checks()).toBe(1);
+      expect(asked).toHaveLength(7);
+      const distances = asked.slice(1).map((at, index) => at - (asked[index] ?? 0));
+      expect(
+        distances.every((distance, index) => index === 0 || distance > (distances[index - 1] ?? 0)),
+      ).toBe(true);
+      expect(screen.getByText(/The card service has no payment for this invoice yet/)).toBeVisible();
+      fireEvent.click(screen.getByRole('button', { name: 'Try again' }));
+      await wait(3);
+      expect(checks()).toBe(2);
+    });
+
+    it('shows what the card service itself says', async () => {
+      const { wait } = waitAtThePage(() =>
+        HttpResponse.json({ state: 'paid', openMinor: 0, receiptId: PAYMENT }),
+      );
+      await wait(80);
+      expect(screen.getByText('Paid by card.')).toBeVisible();
+    });
+
+    it('says that the card service does not answer, and that nothing is taken twice', async () => {
+      const { wait } = waitAtThePage(() =>
+        HttpResponse.json({ type: '/problems/card-service-silent', status: 409 }, { status: 409 }),
+      );
+      await wait(80);
+      expect(screen.getByText(/The card service does not answer just now/)).toHaveTextContent(
+        'No money is taken twice',
+      );
+    });
   });
 
   it('says plainly that the card was not charged', async () => {

@@ -10,10 +10,11 @@ export type StatementLine = components['schemas']['StatementLineDto'];
 export type BookItem = components['schemas']['BookItemDto'];
 export type Totals = components['schemas']['TotalsDto'];
 export type TakePayment = components['schemas']['TakePaymentDto'];
+export type RaiseInvoice = components['schemas']['RaiseInvoiceDto'];
 type MatchLine = components['schemas']['MatchLineDto'];
 
 /** Everything of the treasury hangs together: what one act changes, all of it may show. */
-const TREASURY_KEY = ['treasury'] as const;
+export const TREASURY_KEY = ['treasury'] as const;
 const OPEN_PER_PAGE = 25;
 
 export const summaryQuery = queryOptions({
@@ -58,10 +59,13 @@ export const statementQuery = (statementId: string) =>
       unwrap(api.GET('/api/reconciliation/statements/{statementId}', { params: { path: { statementId } } })),
   });
 
-function useTreasuryMutation<Input, Output>(mutationFn: (input: Input) => Promise<Output>) {
+export function useTreasuryMutation<Input, Output>(mutationFn: (input: Input) => Promise<Output>) {
   const client = useQueryClient();
   return useMutation({ mutationFn, onSuccess: () => client.invalidateQueries({ queryKey: TREASURY_KEY }) });
 }
+
+export const useRaiseInvoice = () =>
+  useTreasuryMutation((body: RaiseInvoice) => unwrap(api.POST('/api/invoices', { body })));
 
 export const useTakePayment = () =>
   useTreasuryMutation((body: TakePayment) => unwrap(api.POST('/api/payments', { body })));

@@ -1,7 +1,7 @@
 import Box from '@mui/material/Box';
 import Typography from '@mui/material/Typography';
 import type { ReactNode } from 'react';
-import { dayText, monthName } from '../../../lib/club-time-text';
+import { dayText } from '../../../lib/club-time-text';
 import { formatAmount, formatMoney } from '../../../lib/money';
 import type { Summary } from '../api/treasury';
 import { cashAndCardMinor, heldMinor, partsOf } from '../holdings';
@@ -38,7 +38,7 @@ export function Figures({ summary }: { summary: Summary }) {
       </Figure>
       <Figure label="All the club holds" value={money(heldMinor(holdings))}>
         {[holdings.currentAccountMinor, ...partsOf(holdings).map(([, minor]) => minor)]
-          .map(formatAmount)
+          .map((minor) => formatAmount(minor))
           .join(' + ')}
       </Figure>
     </Box>
@@ -46,22 +46,32 @@ export function Figures({ summary }: { summary: Summary }) {
 }
 
 function DuesIn({ summary: { dues, currency } }: { summary: Summary }) {
-  const { from, to, raisedMinor, paidMinor, count, paidCount } = dues;
+  if (!dues)
+    return (
+      <Figure label="Dues in" value={formatMoney(0, currency)}>
+        No dues were raised yet.
+      </Figure>
+    );
+  const { description, dueOn, raisedMinor, paidMinor, count, paidCount } = dues;
   const share = raisedMinor === 0 ? 0 : paidMinor / raisedMinor;
   return (
     <Figure
-      label={`Dues in, ${monthName(from)} to ${monthName(to)}`}
+      label={`Dues in, ${runName(description)}`}
       value={formatMoney(paidMinor, currency)}
       beside={`of ${formatAmount(raisedMinor)} raised`}
     >
       <Box aria-hidden sx={{ my: '8px', height: 13, border: '1px solid', borderColor: 'token.ink' }}>
         <Box sx={{ width: `${share * 100}%`, height: '100%', backgroundColor: 'token.green' }} />
       </Box>
-      {paidCount} of {count} invoices, {formatAmount(raisedMinor - paidMinor)} to come by{' '}
-      {dayText(to).slice(4)}
+      {paidCount} of {count} invoices
+      {paidMinor < raisedMinor &&
+        `, ${formatAmount(raisedMinor - paidMinor)} to come by ${dayText(dueOn).slice(4)}`}
     </Figure>
   );
 }
+
+/** 'December to February' of 'Dues, December to February'. */
+const runName = (description: string): string => description.replace(/^dues,\s*/i, '');
 
 interface FigureProps {
   label: string;

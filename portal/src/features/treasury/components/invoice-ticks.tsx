@@ -8,7 +8,7 @@ import { CheckField } from '../../../shared-ui/fields/check-field';
 import { LoadingBars } from '../../../shared-ui/loading-bars';
 import { ProblemAlert } from '../../../shared-ui/problem-alert';
 import { openOfPersonQuery } from '../api/treasury';
-import type { PaymentFields } from './payment-fields';
+import type { PaymentFields } from '../payment-fields';
 
 interface InvoiceTicksProps {
   control: Control<PaymentFields>;

@@ -62,6 +62,7 @@ const columnsFor = (onTake: (invoice: OpenInvoice) => void): Column<OpenInvoice>
     ),
     align: 'right',
     width: 92,
+    phone: 'act',
   },
 ];
 

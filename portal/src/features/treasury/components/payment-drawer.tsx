@@ -1,7 +1,4 @@
-import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
-import Typography from '@mui/material/Typography';
-import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import { useForm, useWatch, type UseFormReturn } from 'react-hook-form';
 import { carryOut } from '../../../api-client/carry-out';
@@ -9,14 +6,17 @@ import { ProblemError } from '../../../api-client/problem-error';
 import { applyProblemToForm } from '../../../api-client/problem-to-form';
 import { clubDay } from '../../../lib/club-time';
 import { formatAmount, formatMoney } from '../../../lib/money';
+import { newId } from '../../../lib/new-id';
 import { DockedDrawer } from '../../../shared-ui/docked-drawer';
-import { FormSelect, FormText, FormToggle } from '../../../shared-ui/form/form-fields';
+import { FormText, FormToggle } from '../../../shared-ui/form/form-fields';
 import { ProblemAlert } from '../../../shared-ui/problem-alert';
 import { useToast } from '../../../shared-ui/toasts';
 import { useFormDraft } from '../../../shared-ui/use-form-draft';
-import { peopleQuery, useTakeBackPayment, useTakePayment, type OpenInvoice } from '../api/treasury';
+import { useTakeBackPayment, useTakePayment, type OpenInvoice } from '../api/treasury';
+import { amountFault, emptyPayment, paymentBody, type PaymentFields } from '../payment-fields';
+import { DrawerForm } from './drawer-form';
 import { InvoiceTicks } from './invoice-ticks';
-import { amountFault, emptyPayment, paymentBody, type PaymentFields } from './payment-fields';
+import { MemberSelect } from './member-select';
 
 interface PaymentDrawerProps {
   /** The invoice it was opened on, if it was. */
@@ -32,7 +32,7 @@ const METHODS = [
 ] as const;
 
 const startOf = (invoice: OpenInvoice | undefined): PaymentFields => ({
-  ...emptyPayment(clubDay(), crypto.randomUUID()),
+  ...emptyPayment(clubDay(), newId()),
   ...(invoice && {
     personId: invoice.personId,
     invoiceIds: [invoice.id],
@@ -60,8 +60,7 @@ export function PaymentDrawer({ invoice, currency, onClose }: PaymentDrawerProps
       },
       onError: (error) => {
         applyProblemToForm(setError, error, ['personId', 'receivedOn', 'note']);
-        if (error instanceof ProblemError && error.is('payment-key-used'))
-          setValue('clientKey', crypto.randomUUID());
+        if (error instanceof ProblemError && error.is('payment-key-used')) setValue('clientKey', newId());
       },
     }),
   );
@@ -96,34 +95,10 @@ interface PaymentFormProps {
 }
 
 function PaymentForm({ form: { control, setValue }, keptFrom, currency, error, onSubmit }: PaymentFormProps) {
-  const people = useQuery(peopleQuery);
   const personId = useWatch({ control, name: 'personId' });
   return (
-    <Box
-      component="form"
-      onSubmit={(event) => {
-        event.preventDefault();
-        onSubmit();
-      }}
-      sx={{ display: 'grid', gap: '14px' }}
-      noValidate
-    >
-      {keptFrom && (
-        <Typography variant="small" role="status">
-          {keptFrom}
-        </Typography>
-      )}
-      <FormSelect
-        control={control}
-        name="personId"
-        label="From"
-        rules={{ required: 'Choose who paid.' }}
-        options={[
-          { value: '', label: 'Choose' },
-          ...(people.data?.items ?? []).map(({ id, name }) => ({ value: id, label: name })),
-        ]}
-      />
-      {people.isError && <ProblemAlert error={people.error} onRetry={() => void people.refetch()} />}
+    <DrawerForm keptFrom={keptFrom} onSubmit={onSubmit}>
+      <MemberSelect control={control} name="personId" label="From" missing="Choose who paid." />
       {personId && <InvoiceTicks key={personId} control={control} setValue={setValue} personId={personId} />}
       <FormToggle control={control} name="method" label="How" options={METHODS} />
       <FormText
@@ -150,7 +125,6 @@ function PaymentForm({ form: { control, setValue }, keptFrom, currency, error, o
         hint="For the books, such as a cheque’s number."
       />
       {error !== null && <ProblemAlert error={error} title="The payment was not taken." />}
-      <input type="submit" hidden />
-    </Box>
+    </DrawerForm>
   );
 }

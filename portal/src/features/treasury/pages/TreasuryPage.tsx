@@ -2,6 +2,7 @@ import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
+import { clubCurrency } from '../../../lib/club-currency';
 import { clubDay } from '../../../lib/club-time';
 import { formatInClubZone, monthText } from '../../../lib/club-time-text';
 import { Banner } from '../../../shared-ui/banner';
@@ -13,16 +14,19 @@ import { statementsQuery, summaryQuery, type OpenInvoice, type Summary } from '.
 import { AgedDues } from '../components/aged-dues';
 import { Figures } from '../components/figures';
 import { ImportDrawer } from '../components/import-drawer';
+import { InvoiceDrawer } from '../components/invoice-drawer';
 import { OpenDues } from '../components/open-dues';
 import { PaymentDrawer } from '../components/payment-drawer';
 import { StatementsList } from '../components/statements-list';
+import { TiersDrawer } from '../components/tiers-drawer';
 import { UnmatchedLines } from '../components/unmatched-lines';
 
-type Drawer = { kind: 'import' } | { kind: 'payment'; invoice?: OpenInvoice };
+type Drawer = { kind: 'import' | 'invoice' | 'tiers' } | { kind: 'payment'; invoice?: OpenInvoice };
 
 export default function TreasuryPage() {
   const [drawer, setDrawer] = useState<Drawer>();
   const summary = useQuery(summaryQuery);
+  const currency = summary.data?.currency ?? clubCurrency();
   const close = () => setDrawer(undefined);
   return (
     <>
@@ -30,6 +34,10 @@ export default function TreasuryPage() {
         tab="Treasury"
         actions={
           <>
+            <Button variant="text" onClick={() => setDrawer({ kind: 'tiers' })}>
+              Tiers
+            </Button>
+            <Button onClick={() => setDrawer({ kind: 'invoice' })}>Raise an invoice</Button>
             <Button onClick={() => setDrawer({ kind: 'payment' })}>Take a payment</Button>
             <Button variant="contained" onClick={() => setDrawer({ kind: 'import' })}>
               Import a statement
@@ -45,11 +53,13 @@ export default function TreasuryPage() {
         <Treasury summary={summary.data} onTake={(invoice) => setDrawer({ kind: 'payment', invoice })} />
       )}
       <ImportDrawer open={drawer?.kind === 'import'} onClose={close} />
+      {drawer?.kind === 'invoice' && <InvoiceDrawer currency={currency} onClose={close} />}
+      {drawer?.kind === 'tiers' && <TiersDrawer currency={currency} onClose={close} />}
       {drawer?.kind === 'payment' && (
         <PaymentDrawer
           key={drawer.invoice?.id ?? 'any'}
           invoice={drawer.invoice}
-          currency={summary.data?.currency ?? 'GBP'}
+          currency={currency}
           onClose={close}
         />
       )}
@@ -65,7 +75,8 @@ function Treasury({ summary, onTake }: { summary: Summary; onTake: (invoice: Ope
       <Box
         sx={{
           display: 'grid',
-          gridTemplateColumns: { lg: 'repeat(3, minmax(0, 1fr))' },
+          // By the room there is: an open drawer takes some of a wide screen's.
+          gridTemplateColumns: 'repeat(auto-fit, minmax(min(310px, 100%), 1fr))',
           gap: '24px 32px',
           alignItems: 'start',
         }}
@@ -106,7 +117,7 @@ function Statements() {
 
 function CardNotes({ notes }: { notes: Summary['cardNotes'] }) {
   return (
-    <Banner kind="failed" title="The card service told of money that was not written down.">
+    <Banner kind="failed" title="The card service told of money that the books do not show.">
       {notes.map(({ id, note, receivedAt }) => (
         <Box key={id}>
           {formatInClubZone(receivedAt)}: {note}

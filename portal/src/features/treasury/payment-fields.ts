@@ -1,5 +1,5 @@
-import { readMoney } from '../../../lib/money';
-import type { TakePayment } from '../api/treasury';
+import { exampleAmount, readMoney } from '../../lib/money';
+import type { TakePayment } from './api/treasury';
 
 /** What the form holds while it is typed. */
 export interface PaymentFields {
@@ -26,7 +26,7 @@ export const emptyPayment = (today: string, clientKey: string): PaymentFields =>
 /** @returns what is wrong with the amount, in words, or undefined. */
 export function amountFault(text: string): string | undefined {
   const minor = readMoney(text);
-  if (minor === undefined) return 'Type an amount such as 24.00.';
+  if (minor === undefined) return `Type an amount such as ${exampleAmount()}.`;
   return minor > 0 ? undefined : 'The amount is more than nothing.';
 }
 
