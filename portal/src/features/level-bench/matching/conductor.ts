@@ -2,7 +2,7 @@ import { formatQuantity, OutOfDomainError, peakFluxTesla, skinDepthMetres } from
 import { fixed } from '../../../lib/text';
 import { atField } from '../inputs/at-field';
 import type { MatchingInputs } from './inputs';
-import { cellOf, type Sheet } from './sheet';
+import { cellOf, type Sheet } from '../results/sheet';
 import { metreText } from './windings';
 
 /** A figure over the amateur bands. */

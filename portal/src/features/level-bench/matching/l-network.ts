@@ -12,7 +12,7 @@ import {
 import { capital, fixed } from '../../../lib/text';
 import type { MatchingInputs } from './inputs';
 import { vswrText } from './match';
-import type { Figure, Sheet } from './sheet';
+import type { Figure, Sheet } from '../results/sheet';
 import { alOf } from './windings';
 
 /** One L-network of parts that can be had, and what they give. */

@@ -11,7 +11,7 @@ import {
 import { fixed, signed } from '../../../lib/text';
 import { atField } from '../inputs/at-field';
 import type { MatchingInputs } from './inputs';
-import { cellOf, type Figure, type Sheet } from './sheet';
+import { cellOf, type Figure, type Sheet } from '../results/sheet';
 
 export interface MatchSheet extends Sheet {
   kind: 'match';

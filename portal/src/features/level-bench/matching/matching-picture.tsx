@@ -1,5 +1,5 @@
 import { BandPicture } from './band-picture';
-import { FigureTable } from './figure-table';
+import { FigureTable } from '../results/figure-table';
 import { MatchPicture } from './match-picture';
 import { NetworkPicture } from './network-picture';
 import { ResonancePicture } from './resonance-picture';

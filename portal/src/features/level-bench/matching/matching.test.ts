@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { readValues } from '../inputs/read-values';
 import { INPUTS } from './inputs';
 import type { NetworkSheet } from './l-network';
-import { sheetText } from './sheet';
+import { sheetText } from '../results/sheet';
 import { work, type MatchingSheet } from './work';
 
 /** As typed on the page. */

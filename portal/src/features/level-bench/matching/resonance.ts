@@ -12,7 +12,7 @@ import {
 import { fixed } from '../../../lib/text';
 import { atField } from '../inputs/at-field';
 import type { MatchingInputs } from './inputs';
-import { cellOf, type Figure, type Sheet } from './sheet';
+import { cellOf, type Figure, type Sheet } from '../results/sheet';
 
 interface Circuit {
   hertz: number;

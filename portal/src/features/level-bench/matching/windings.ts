@@ -10,7 +10,7 @@ import {
 import { fixed, signed } from '../../../lib/text';
 import { atField } from '../inputs/at-field';
 import type { MatchingInputs } from './inputs';
-import { cellOf, type Sheet } from './sheet';
+import { cellOf, type Sheet } from '../results/sheet';
 
 /** So many whole turns and what they give. */
 export interface TurnsRow {

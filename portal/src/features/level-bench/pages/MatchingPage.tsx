@@ -7,16 +7,13 @@ import { InputGroup, Wide } from '../inputs/input-group';
 import { useBench } from '../inputs/use-bench';
 import { INPUTS } from '../matching/inputs';
 import { MatchingPicture } from '../matching/matching-picture';
-import { sheetText } from '../matching/sheet';
+import { sheetText } from '../results/sheet';
 import { work } from '../matching/work';
 import { AnswerLine } from '../results/answer-line';
 import { spokenCells } from '../results/spoken-cells';
 import { ELSEWHERE, useWorked } from '../results/use-worked';
 
 type Name = keyof typeof INPUTS;
-
-/** Those that need the whole width for their words. */
-const WIDE: readonly Name[] = ['calculation', 'known', 'find', 'findOfCoil', 'al', 'series', 'qFrom'];
 
 const NAMES = Object.keys(INPUTS) as Name[];
 
@@ -26,7 +23,6 @@ export default function MatchingPage() {
   const { result, isStale, problems } = useWorked(bench, work);
   const shown = NAMES.filter((name) => isShown(INPUTS, name, bench.texts));
   const cells = result?.cells ?? [];
-  const field = (name: Name) => <BenchField bench={bench} name={name} problems={problems} />;
   return (
     <BenchFrame
       family="matching"
@@ -37,7 +33,10 @@ export default function MatchingPage() {
       inputs={
         <>
           <InputGroup title="To work out">
-            {shown.map((name) => (WIDE.includes(name) ? <Wide key={name}>{field(name)}</Wide> : field(name)))}
+            {shown.map((name) => {
+              const field = <BenchField key={name} bench={bench} name={name} problems={problems} />;
+              return INPUTS[name].kind === 'choice' ? <Wide key={name}>{field}</Wide> : field;
+            })}
           </InputGroup>
           {result?.note && (
             <Box sx={{ mb: '18px', typography: 'small', color: 'token.ink3' }}>{result.note}</Box>

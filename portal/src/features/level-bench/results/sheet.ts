@@ -1,4 +1,4 @@
-import type { AnswerCell } from '../results/answer-line';
+import type { AnswerCell } from './answer-line';
 
 /** A figure with its name, as a row of a table and a line of text. */
 export interface Figure {

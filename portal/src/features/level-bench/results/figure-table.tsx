@@ -4,12 +4,12 @@ import { SectionHeading } from '../../../shared-ui/section-heading';
 import type { Figure } from './sheet';
 
 /** Every figure of a calculation with its name. */
-export function FigureTable({ figures }: { figures: readonly Figure[] }) {
+export function FigureTable({ figures, title = 'Figures' }: { figures: readonly Figure[]; title?: string }) {
   return (
-    <Box component="section" aria-label="Figures" sx={{ mt: '18px' }}>
-      <SectionHeading>Figures</SectionHeading>
+    <Box component="section" aria-label={title} sx={{ mt: '18px' }}>
+      <SectionHeading>{title}</SectionHeading>
       <DataTable
-        label="Figures"
+        label={title}
         columns={[
           { key: 'name', header: 'Figure', cell: ({ name }) => name },
           { key: 'figure', header: 'Value', cell: ({ figure }) => figure, align: 'right', phone: 'end' },
