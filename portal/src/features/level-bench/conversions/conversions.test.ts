@@ -109,7 +109,8 @@ describe('the drawn rule', () => {
   });
 
   it('has no more figures than there is room for', () => {
-    expect(ruleScale(worked({ dbm: '0' }), 280).ticks.map(({ db }) => db)).toEqual([-20, 0, 20]);
+    expect(ruleScale(worked({ dbm: '0' }), 200).ticks.map(({ db }) => db)).toEqual([-20, 0, 20]);
+    expect(ruleScale(worked({ dbm: '3' }), 200).ticks.map(({ db }) => db)).toEqual([-30, 0, 30]);
   });
 
   it('of a ratio has powers and voltages', () => {
@@ -124,8 +125,9 @@ describe('the drawn rule', () => {
   });
 
   it('puts the words of marks that meet above one another', () => {
-    expect(markRows([100, 150, 400], 104)).toEqual([0, 1, 0]);
+    expect(markRows([100, 150, 400], 104)).toEqual([1, 0, 0]);
     expect(markRows([150, 100, 210], 104)).toEqual([1, 0, 0]);
+    expect(markRows([7, 7, 7], 104)).toEqual([0, 1, 2]);
   });
 });
 

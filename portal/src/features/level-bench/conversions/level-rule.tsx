@@ -7,7 +7,7 @@ import type { ConversionSheet, RuleMark } from './sheet';
 
 const USUAL_WIDTH = 838;
 /** Heads of the rows at the left. */
-const GUTTER = 70;
+const GUTTER = 96;
 /** The last figure is centred on its tick. */
 const END = 34;
 

@@ -15,7 +15,7 @@ import { ratioText } from './ratio';
 import type { ConversionSheet, RuleMark } from './sheet';
 
 /** One figure of the rule: its decibels, and what they are as a power and a voltage. */
-export interface RuleTick {
+interface RuleTick {
   db: number;
   words: readonly [level: string, power: string, voltage: string];
 }
@@ -33,9 +33,9 @@ const ROOM_DB = 15;
 const LEAST_DB = 60;
 
 /** A figure needs so much room. */
-const TICK_WIDTH = 66;
+const TICK_WIDTH = 62;
 
-const STEPS = [10, 20, 50, 100, 200, 500];
+const STEPS = [10, 20, 30, 50, 100, 200, 500];
 
 function rangeOf(marks: readonly RuleMark[]): [from: number, to: number] {
   const all = marks.map(({ db }) => db);
@@ -89,15 +89,18 @@ export function ruleScale({ marks, ohms: resistance }: ConversionSheet, width: n
   };
 }
 
-/** The row over the rule in which each mark's words stand clear of those before it; the lowest row is 0. */
+/**
+ * The row over the rule in which each mark's words stand clear of the others, 0 the lowest. From right to left, so that
+ * a line down to the rule never crosses words, which stand to its right.
+ */
 export function markRows(xs: readonly number[], room: number): number[] {
-  const ends: number[] = [];
-  const order = xs.map((x, index) => ({ x, index })).sort((a, b) => a.x - b.x);
+  const starts: number[] = [];
+  const order = xs.map((x, index) => ({ x, index })).sort((a, b) => b.x - a.x);
   const rows = new Array<number>(xs.length).fill(0);
   for (const { x, index } of order) {
-    const free = ends.findIndex((end) => end <= x);
-    const row = free === -1 ? ends.length : free;
-    ends[row] = x + room;
+    const free = starts.findIndex((start) => x + room <= start);
+    const row = free === -1 ? starts.length : free;
+    starts[row] = x;
     rows[index] = row;
   }
   return rows;

@@ -39,7 +39,7 @@ export function workSum(values: ConversionValues): ConversionSheet {
         name: 'Together',
         figure: signed(together, 2),
         unit: 'dBm',
-        words: `${formatQuantity(total, 'W')}, signals of their own`,
+        words: `${formatQuantity(total, 'W')}, signals unlike one another`,
       },
       {
         name: 'In phase, at most',

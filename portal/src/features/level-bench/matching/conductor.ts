@@ -6,7 +6,7 @@ import { cellOf, type Sheet } from '../results/sheet';
 import { metreText } from './windings';
 
 /** A figure over the amateur bands. */
-export interface BandRow {
+interface BandRow {
   hertz: number;
   value: number;
 }

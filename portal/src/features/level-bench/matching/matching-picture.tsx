@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { BandPicture } from './band-picture';
 import { FigureTable } from '../results/figure-table';
 import { MatchPicture } from './match-picture';
@@ -21,12 +22,12 @@ function Picture({ sheet }: { sheet: MatchingSheet }) {
   }
 }
 
-/** Picture and table of the calculation that is chosen. */
-export function MatchingPicture({ sheet }: { sheet: MatchingSheet }) {
+/** Picture and table of the calculation that is chosen; drawn with a new result, not with every key. */
+export const MatchingPicture = memo(function MatchingPicture({ sheet }: { sheet: MatchingSheet }) {
   return (
     <>
       <Picture sheet={sheet} />
       {sheet.kind !== 'l-network' && <FigureTable figures={sheet.figures} />}
     </>
   );
-}
+});

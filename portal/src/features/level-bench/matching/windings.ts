@@ -13,7 +13,7 @@ import type { MatchingInputs } from './inputs';
 import { cellOf, type Sheet } from '../results/sheet';
 
 /** So many whole turns and what they give. */
-export interface TurnsRow {
+interface TurnsRow {
   turns: number;
   henries: number;
 }

@@ -42,7 +42,7 @@ export function returnLossText(db: number | undefined): string {
 export const kindText = ({ kind }: Pick<WorkedPad['design'], 'kind'>): string =>
   capital(kind === 'minimum loss' ? 'minimum-loss pad' : `${kind} pad`);
 
-export const worstLossText = ({ design: { worst } }: WorkedPad): string =>
+const worstLossText = ({ design: { worst } }: WorkedPad): string =>
   `${fixed(worst.leastLossDb, 2)} to ${fixed(worst.greatestLossDb, 2)} dB`;
 
 function portCell(name: string, { returnLossDb, ohms }: PadPort, worst: number | undefined): AnswerCell {

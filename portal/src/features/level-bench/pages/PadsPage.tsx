@@ -1,5 +1,3 @@
-import Box from '@mui/material/Box';
-import { SectionHeading } from '../../../shared-ui/section-heading';
 import { BenchFrame } from '../frame/bench-frame';
 import { AssumedFigures } from '../inputs/assumed-figures';
 import { BenchField } from '../inputs/bench-field';
@@ -7,10 +5,8 @@ import { InputGroup, Wide } from '../inputs/input-group';
 import { useBench } from '../inputs/use-bench';
 import { workPad, type WorkedPad } from '../pads/figures';
 import { INPUTS } from '../pads/inputs';
-import { PadPicture } from '../pads/pad-picture';
-import { PadTable } from '../pads/pad-table';
+import { PadResults } from '../pads/pad-results';
 import { PowerCautions } from '../pads/power-cautions';
-import { PowerStrip } from '../pads/power-strip';
 import { answerCells, inText, percentText } from '../pads/words';
 import { AnswerLine } from '../results/answer-line';
 import { spokenCells } from '../results/spoken-cells';
@@ -55,7 +51,11 @@ export default function PadsPage() {
           </InputGroup>
           {result && <PowerCautions worked={result} />}
           {result && (
-            <AssumedFigures figures={assumed(result)} source="Common practice.">
+            <AssumedFigures
+              figures={assumed(result)}
+              source="Common practice."
+              hasProblem={'derating' in problems || 'enoughRel' in problems}
+            >
               {field('derating')}
               {field('enoughRel')}
             </AssumedFigures>
@@ -64,16 +64,7 @@ export default function PadsPage() {
       }
       answer={<AnswerLine cells={cells} isStale={isStale} />}
     >
-      {result && (
-        <>
-          <PadPicture worked={result} />
-          <Box component="section" aria-label="Resistors" sx={{ mt: '18px' }}>
-            <SectionHeading>Resistors</SectionHeading>
-            <PadTable worked={result} />
-          </Box>
-          <PowerStrip worked={result} />
-        </>
-      )}
+      {result && <PadResults worked={result} />}
     </BenchFrame>
   );
 }

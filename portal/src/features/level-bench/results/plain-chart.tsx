@@ -4,7 +4,7 @@ import Box from '@mui/material/Box';
 import { useWidth } from '../../../shared-ui/level-diagram/use-width';
 import { token, type TokenName } from '../../../shared-ui/tokens';
 
-export interface ChartAxis {
+interface ChartAxis {
   /** With its unit: "Frequency, MHz". */
   label: string;
   from?: number;
@@ -17,12 +17,12 @@ export interface ChartAxis {
   leastStep?: number;
 }
 
-export interface ChartLine {
+interface ChartLine {
   name: string;
   values: readonly (number | null)[];
 }
 
-export interface ChartMark {
+interface ChartMark {
   axis: 'x' | 'y';
   at: number;
   words: string;
