@@ -84,13 +84,18 @@ function isWithin({ above, atLeast, below, atMost }: Domain, value: number): boo
 
 function permittedText({ above, atLeast, below, atMost, unit }: Domain): string {
   const bounds = [
-    above === undefined ? undefined : `more than ${above}`,
-    atLeast === undefined ? undefined : `at least ${atLeast}`,
-    below === undefined ? undefined : `less than ${below}`,
-    atMost === undefined ? undefined : `at most ${atMost}`,
+    above === undefined ? undefined : `more than ${readable(above)}`,
+    atLeast === undefined ? undefined : `at least ${readable(atLeast)}`,
+    below === undefined ? undefined : `less than ${readable(below)}`,
+    atMost === undefined ? undefined : `at most ${readable(atMost)}`,
   ].filter((bound) => bound !== undefined);
   const range = bounds.length === 0 ? 'any finite number' : bounds.join(' and ');
   return unit === undefined ? range : `${range} ${unit}`;
+}
+
+/** A bound that was worked out is said in as many digits as a member can use. */
+function readable(bound: number): number {
+  return Number.isInteger(bound) ? bound : Number(bound.toPrecision(6));
 }
 
 /** A lost decimal point is the usual slip at the bench: 33 typed for 3.3. */

@@ -116,14 +116,13 @@ function bridgedTee(lossDb: number, source: number): PadResistor[] {
   ];
 }
 
+/** Nearer than this to 1, the ratio of two resistances needs no pad that any part could make. */
+const LEAST_STEP = 1e-6;
+
 /** The series resistor stands on the side of the higher resistance. */
 function minimumLoss(source: number, load: number): PadResistor[] {
   const [high, low] = source > load ? [source, load] : [load, source];
-  const least = 1e-6;
-  requireWithin(
-    { input: 'loadOhms', label: 'Higher of the two resistances', above: low * (1 + least) },
-    high,
-  );
+  if (high <= low * (1 + LEAST_STEP)) throw equalError(load);
   const series: PadResistor = { name: 'R1', from: 'in', to: 'out', ohms: Math.sqrt(high * (high - low)) };
   const shunt = low * Math.sqrt(high / (high - low));
   if (source > load) return [series, { name: 'R2', from: 'out', to: 'ground', ohms: shunt }];
@@ -131,6 +130,12 @@ function minimumLoss(source: number, load: number): PadResistor[] {
     { name: 'R1', from: 'in', to: 'ground', ohms: shunt },
     { ...series, name: 'R2' },
   ];
+}
+
+function equalError(load: number): OutOfDomainError {
+  const permitted = 'another resistance than the source has';
+  const message = `A minimum-loss pad stands between different resistances: the load must be ${permitted}.`;
+  return new OutOfDomainError('loadOhms', load, permitted, message);
 }
 
 function requireBothEqual(source: number, load: number): void {

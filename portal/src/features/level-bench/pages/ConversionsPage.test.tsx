@@ -34,4 +34,13 @@ describe('the conversions', () => {
     renderPage(<ConversionsPage />, { at: `${AT}?from=dbm&watts=nonsense&dbm=20` });
     expect(await screen.findByText('+20.00')).toBeVisible();
   });
+
+  // Two signals of 0 dBm each: 10 log 2 = 3.01 dB more together.
+  it('add levels that share a resistance, and mark them on the drawn rule', async () => {
+    renderPage(<ConversionsPage />, { at: `${AT}?calculation=sum&second=0` });
+    // As the sum, and as what it is over the stronger.
+    expect(await screen.findAllByText('+3.01')).toHaveLength(2);
+    expect(screen.getByRole('img', { name: 'A rule of levels: First, Second, together +3.0' })).toBeVisible();
+    expect(screen.queryByLabelText('What is known')).not.toBeInTheDocument();
+  });
 });

@@ -1,62 +1,48 @@
-import { formatQuantity } from '@ferrite-row/levels';
-import { signed } from '../../../lib/text';
-import { DataTable } from '../../../shared-ui/data-table';
-import { SectionHeading } from '../../../shared-ui/section-heading';
-import { convert, figureRows, inText, type Converted } from '../conversions/figures';
-import { INPUTS, KNOWN } from '../conversions/inputs';
+import { work } from '../conversions/work';
+import { INPUTS } from '../conversions/inputs';
+import { LevelRule } from '../conversions/level-rule';
 import { BenchFrame } from '../frame/bench-frame';
 import { BenchField } from '../inputs/bench-field';
+import { isShown } from '../inputs/fields';
 import { InputGroup, Wide } from '../inputs/input-group';
 import { useBench } from '../inputs/use-bench';
-import { AnswerLine, type AnswerCell } from '../results/answer-line';
+import { AnswerLine } from '../results/answer-line';
+import { FigureTable } from '../results/figure-table';
+import { sheetText } from '../results/sheet';
+import { spokenCells } from '../results/spoken-cells';
 import { ELSEWHERE, useWorked } from '../results/use-worked';
 
-function answerCells({ figures, ohms }: Converted): AnswerCell[] {
-  const peakToPeak = formatQuantity(figures.voltsPeakToPeak, 'V');
-  return [
-    { name: `Level in ${formatQuantity(ohms, 'ohm')}`, figure: signed(figures.dbm, 2), unit: 'dBm' },
-    { name: 'Power', figure: formatQuantity(figures.watts, 'W') },
-    { name: 'On an oscilloscope', figure: peakToPeak, unit: 'p-p', words: 'of a sine' },
-  ];
-}
+type Name = keyof typeof INPUTS;
 
-/** dBm, watts and volts in any resistance: each figure of a level from any one of them. */
+const NAMES = Object.keys(INPUTS) as Name[];
+
+/** dBm, watts and volts in any resistance; ratios, sums, and a source with its load. */
 export default function ConversionsPage() {
   const bench = useBench('conversions', INPUTS);
-  const { result, isStale, problems } = useWorked(bench, convert);
-  const cells = result ? answerCells(result) : [];
+  const { result, isStale, problems } = useWorked(bench, work);
+  const cells = result?.cells ?? [];
+  const shown = NAMES.filter((name) => isShown(INPUTS, name, bench.texts));
   return (
     <BenchFrame
       family="conversions"
       link={bench.link}
       problem={problems[ELSEWHERE]}
-      text={result && inText(result)}
-      spoken={cells.map(({ name, figure, unit = '' }) => `${name} ${figure} ${unit}`).join('. ')}
+      text={result && sheetText(result)}
+      spoken={spokenCells(cells)}
       inputs={
-        <InputGroup title="A level">
-          <Wide>
-            <BenchField bench={bench} name="from" problems={problems} />
-          </Wide>
-          {KNOWN.map((name) => (
-            <BenchField key={name} bench={bench} name={name} problems={problems} />
-          ))}
-          <BenchField bench={bench} name="resistance" problems={problems} />
+        <InputGroup title="To convert">
+          {shown.map((name) => {
+            const field = <BenchField key={name} bench={bench} name={name} problems={problems} />;
+            return INPUTS[name].kind === 'choice' ? <Wide key={name}>{field}</Wide> : field;
+          })}
         </InputGroup>
       }
       answer={<AnswerLine cells={cells} isStale={isStale} />}
     >
       {result && (
         <>
-          <SectionHeading>Every way to say it</SectionHeading>
-          <DataTable
-            label="Every way to say it"
-            columns={[
-              { key: 'name', header: 'Figure', cell: ({ name }) => name },
-              { key: 'figure', header: 'Value', cell: ({ figure }) => figure, align: 'right', phone: 'end' },
-            ]}
-            rows={figureRows(result)}
-            rowKey={({ name, figure }) => `${name} ${figure}`}
-          />
+          <LevelRule sheet={result} />
+          <FigureTable figures={result.figures} title={result.heading} />
         </>
       )}
     </BenchFrame>

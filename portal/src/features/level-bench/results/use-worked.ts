@@ -1,6 +1,6 @@
 import { LevelsError } from '@ferrite-row/levels';
 import { useEffect, useMemo, useState } from 'react';
-import type { BenchInputs, BenchValues } from '../inputs/fields';
+import { isShown, type BenchInputs, type BenchValues } from '../inputs/fields';
 import { readValues, type TypedTexts } from '../inputs/read-values';
 import type { Bench } from '../inputs/use-bench';
 
@@ -41,7 +41,9 @@ function attempt<F extends BenchInputs, R>(
     return { result: work(read.values) };
   } catch (error) {
     if (!(error instanceof LevelsError)) throw error;
-    return { problems: { [error.input in inputs ? error.input : ELSEWHERE]: error.message } };
+    // Words at a field that is not on the page would be read by nobody.
+    const isOnPage = error.input in inputs && isShown(inputs, error.input, texts);
+    return { problems: { [isOnPage ? error.input : ELSEWHERE]: error.message } };
   }
 }
 
