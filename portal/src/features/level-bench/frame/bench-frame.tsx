@@ -67,11 +67,6 @@ export function BenchFrame(props: BenchFrameProps) {
           {problem}
         </Banner>
       )}
-      {isPhone && (
-        <Box sx={{ display: 'flex', flexWrap: 'wrap', gap: '8px' }}>
-          {copyText} {onBuild}
-        </Box>
-      )}
     </>
   );
   return (
@@ -96,7 +91,7 @@ export function BenchFrame(props: BenchFrameProps) {
         sx={{
           display: 'grid',
           gridTemplateColumns: { xs: 'minmax(0, 1fr)', md: '286px minmax(0, 1fr)' },
-          gap: '30px',
+          gap: { xs: '4px 30px', md: '30px' },
           mt: { xs: 0, md: '18px' },
           pb: { xs: '38dvh', md: 0 },
         }}
@@ -105,6 +100,11 @@ export function BenchFrame(props: BenchFrameProps) {
         <Box sx={{ minWidth: 0 }}>
           {isPhone ? <Box sx={PINNED}>{answer}</Box> : answer}
           {children}
+          {isPhone && (
+            <Box sx={{ display: 'flex', flexWrap: 'wrap', gap: '8px', mt: '16px' }}>
+              {copyText} {onBuild}
+            </Box>
+          )}
         </Box>
       </Box>
       <StillWords words={spoken} />

@@ -48,12 +48,14 @@ function attempt<F extends BenchInputs, R>(
 /**
  * What the inputs come to, as they are typed. Half-typed input keeps the last good result.
  * @param work - a constant function; what it throws of the levels package stands at the input it names.
+ * @param restMs - how long the hand must rest; 0 for a page light enough to be drawn with every key.
  */
 export function useWorked<F extends BenchInputs, R>(
   { inputs, texts }: Pick<Bench<F>, 'inputs' | 'texts'>,
   work: (values: BenchValues<F>) => R,
+  restMs = SETTLE_MS,
 ): Worked<R> {
-  const settled = useSettled(JSON.stringify(texts));
+  const settled = useSettled(JSON.stringify(texts), restMs);
   const now = useMemo(
     () => attempt(inputs, JSON.parse(settled) as TypedTexts, work),
     [inputs, settled, work],
