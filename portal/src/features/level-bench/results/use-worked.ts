@@ -28,6 +28,12 @@ export function useSettled<T>(value: T, ms = SETTLE_MS): T {
   return settled;
 }
 
+/** Where the words of a problem stand: at the input it names, or over the page. */
+export const problemAt = (
+  inputs: BenchInputs,
+  { input, message }: Pick<LevelsError, 'input' | 'message'>,
+): TypedTexts => ({ [input in inputs ? input : ELSEWHERE]: message });
+
 type Attempt<R> = { result: R } | { problems: TypedTexts };
 
 function attempt<F extends BenchInputs, R>(
@@ -41,7 +47,7 @@ function attempt<F extends BenchInputs, R>(
     return { result: work(read.values) };
   } catch (error) {
     if (!(error instanceof LevelsError)) throw error;
-    return { problems: { [error.input in inputs ? error.input : ELSEWHERE]: error.message } };
+    return { problems: problemAt(inputs, error) };
   }
 }
 
