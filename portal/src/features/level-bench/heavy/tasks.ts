@@ -1,8 +1,9 @@
 import { LevelsError } from '@ferrite-row/levels';
 import { filterBuilds } from '../filters/builds';
+import { workOut } from '../mixing/work-out';
 
 /** Work too heavy for the thread that takes the typing. What goes in and comes out crosses over as a copy: plain data only. */
-const TASKS = { filterBuilds };
+const TASKS = { filterBuilds, mixing: workOut };
 
 export type TaskName = keyof typeof TASKS;
 

@@ -22,6 +22,7 @@ export const ProductRows = memo(function ProductRows({ mixing, rows, marked }: P
           <Box
             component="li"
             key={product.name}
+            aria-current={product.name === marked || undefined}
             sx={{
               py: '6px',
               borderBottom: `1px solid ${token('rule')}`,

@@ -19,7 +19,8 @@ const TABLE = {
   borderCollapse: 'collapse',
   typography: 'small',
   '& th, & td': {
-    p: '7px 10px 7px 0',
+    p: '7px 9px 7px 0',
+    whiteSpace: 'nowrap',
     borderBottom: `1px solid ${token('rule')}`,
     fontWeight: 400,
     textAlign: 'right',
@@ -37,8 +38,8 @@ const TABLE = {
   '& tr[data-verdict="too close to call"] > *': { backgroundColor: token('brassTint') },
   '& tr[data-verdict="not yet"] > *': { backgroundColor: token('oxideTint') },
   '& tr[data-verdict] > th': { pl: '8px' },
-  '& tr[data-marked]': { outline: `1.5px solid ${token('ink')}`, outlineOffset: '-1px' },
-  '& tr[data-marked]:not([data-verdict]) > *': { backgroundColor: token('sheet') },
+  '& tr[aria-current]': { outline: `1.5px solid ${token('ink')}`, outlineOffset: '-1px' },
+  '& tr[aria-current]:not([data-verdict]) > *': { backgroundColor: token('sheet') },
 } as const;
 
 const muted = { color: 'token.ink2' } as const;
@@ -48,7 +49,7 @@ function Row({ row, mixing, isMarked }: { row: ProductRow; mixing: Mixing; isMar
   const [below, pm] = belowWanted(product);
   const isPass = product.verdict === 'pass';
   return (
-    <tr data-verdict={isPass ? undefined : product.verdict} data-marked={isMarked || undefined}>
+    <tr data-verdict={isPass ? undefined : product.verdict} aria-current={isMarked || undefined}>
       <th scope="row">
         <b>{product.name}</b>{' '}
         <Box component="span" sx={muted}>
@@ -68,7 +69,7 @@ function Row({ row, mixing, isMarked }: { row: ProductRow; mixing: Mixing; isMar
         </Box>
       </td>
       <td>
-        <Box sx={{ display: 'flex', flexWrap: 'wrap', alignItems: 'center', gap: '0 8px', pl: '12px' }}>
+        <Box sx={{ display: 'flex', flexWrap: 'wrap', alignItems: 'center', gap: '0 8px', pl: '8px' }}>
           <VerdictLine verdict={product.verdict}>
             {product.isWanted && isPass ? 'In the band' : undefined}
           </VerdictLine>
@@ -94,7 +95,7 @@ export const ProductTable = memo(function ProductTable({ mixing, rows, marked }:
           <th scope="col">After filter</th>
           <th scope="col">Below wanted, dB</th>
           <th scope="col">
-            <Box component="span" sx={{ pl: '12px' }}>
+            <Box component="span" sx={{ pl: '8px' }}>
               Against {decibels(mixing.values.goalDb)}
             </Box>
           </th>

@@ -11,13 +11,14 @@ import { MixingInputs } from '../mixing/mixing-inputs';
 import { PhoneAnswer } from '../mixing/phone-answer';
 import { Products } from '../mixing/products';
 import { TuningTable } from '../mixing/tuning-table';
-import { RULE_SETS, workOut } from '../mixing/work-out';
-import { ELSEWHERE, useWorked } from '../results/use-worked';
+import { useMixing } from '../mixing/use-mixing';
+import { RULE_SETS } from '../mixing/work-out';
+import { ELSEWHERE } from '../results/use-worked';
 
 /** Every product of a mixer, judged behind the filter after it, and the drive it is given. */
 export default function MixingPage() {
   const bench = useBench('mixing', INPUTS);
-  const { result, isStale, problems } = useWorked(bench, workOut, 0);
+  const { result, isStale, problems } = useMixing(bench);
   const isPhone = usePhone();
   const text = useMemo(() => result && copiedText(result), [result]);
   const ShownAnswer = isPhone ? PhoneAnswer : Answer;
