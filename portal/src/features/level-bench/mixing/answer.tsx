@@ -16,92 +16,91 @@ interface CellProps {
   drawing?: ReactNode;
 }
 
+/** One style for all of it: it is drawn with every key. */
 const SECTION = {
   display: 'grid',
   gridTemplateColumns: 'minmax(0, 213fr) minmax(0, 176fr) minmax(0, 449fr)',
   border: `1.5px solid ${token('ink')}`,
   borderRadius: '3px',
   backgroundColor: token('sheet'),
+  color: token('ink'),
   overflow: 'hidden',
+  '& .cell': {
+    display: 'flex',
+    flexWrap: 'wrap',
+    alignItems: 'center',
+    justifyContent: 'space-between',
+    gap: '4px 10px',
+    padding: '10px 18px 12px',
+    minHeight: 128,
+    borderLeft: `1px solid ${token('rule')}`,
+  },
+  '& .cell:first-of-type': { borderLeft: 0 },
+  '& .cell[data-caution]': { backgroundColor: token('brassTint') },
+  '& .said': { flex: '1 1 0', minWidth: 150, alignSelf: 'flex-start' },
+  '& h2, & .words': {
+    margin: 0,
+    fontSize: '0.78125rem',
+    lineHeight: '1.125rem',
+    fontWeight: 400,
+    color: token('ink2'),
+  },
+  '& .words b': { color: token('ink') },
+  '& .figure': { display: 'flex', alignItems: 'center', minHeight: 36, marginBottom: '4px', fontWeight: 700 },
+  '& .large': { fontSize: '2.0625rem', lineHeight: '2.25rem', letterSpacing: '-0.02em' },
+  '& .middle': { fontSize: '1.25rem' },
+  '& .drive': { fontSize: '1.125rem', whiteSpace: 'nowrap' },
+  '& .drive small': { fontSize: '0.84375rem' },
+  '& .large small': { fontSize: '0.875rem', fontWeight: 600, letterSpacing: 0, color: token('ink2') },
+  '&[data-stale], &[data-stale] b': { color: token('ink3') },
 } as const;
 
 function Cell({ name, figure, words, isCaution = false, drawing }: CellProps) {
   return (
-    <Box
-      sx={{
-        display: 'flex',
-        flexWrap: 'wrap',
-        alignItems: 'center',
-        justifyContent: 'space-between',
-        gap: '4px 10px',
-        p: '10px 18px 12px',
-        minHeight: 128,
-        borderLeft: `1px solid ${token('rule')}`,
-        '&:first-of-type': { borderLeft: 0 },
-        ...(isCaution && { backgroundColor: 'token.brassTint' }),
-      }}
-    >
-      <Box sx={{ flex: '1 1 0', minWidth: 150, alignSelf: 'flex-start' }}>
-        <Box component="h2" sx={{ m: 0, typography: 'small', color: 'token.ink2' }}>
-          {name}
-        </Box>
-        <Box sx={{ minHeight: 36, display: 'flex', alignItems: 'center', mb: '4px' }}>{figure}</Box>
-        <Box sx={{ typography: 'small', color: 'token.ink2' }}>{words}</Box>
-      </Box>
+    <div className="cell" data-caution={isCaution || undefined}>
+      <div className="said">
+        <h2>{name}</h2>
+        <div className="figure">{figure}</div>
+        <div className="words">{words}</div>
+      </div>
       {drawing}
-    </Box>
+    </div>
   );
 }
-
-const Unit = ({ children }: { children: ReactNode }) => (
-  <Box component="span" sx={{ fontSize: '0.875rem', fontWeight: 600, color: 'token.ink2' }}>
-    {children}
-  </Box>
-);
 
 /** The answer in words and figures: wanted frequency, sideband, and the drive with its pad. */
 export const Answer = memo(function Answer({ mixing, isStale }: { mixing: Mixing; isStale: boolean }) {
   const { wanted, values, drive } = mixing;
   const { advice, then } = driveWords(drive);
   return (
-    <Box
-      component="section"
-      aria-label="Answer"
-      sx={{ ...SECTION, color: isStale ? 'token.ink3' : 'token.ink' }}
-    >
+    <Box component="section" aria-label="Answer" data-stale={isStale || undefined} sx={SECTION}>
       <Cell
         name={`${wanted.name}, order 2`}
         figure={
-          <Box sx={{ typography: 'reading' }}>
-            {megahertz(wanted.hertz)} <Unit>MHz</Unit>
-          </Box>
+          <span className="large">
+            {megahertz(wanted.hertz)} <small>MHz</small>
+          </span>
         }
         words={placeWords(mixing)}
         isCaution={wanted.verdict !== 'pass'}
       />
       <Cell
         name="Sideband"
-        figure={<Box sx={{ fontSize: '1.25rem', fontWeight: 700 }}>{sidebandFigure(mixing)}</Box>}
+        figure={<span className="middle">{sidebandFigure(mixing)}</span>}
         words={sidebandWords(mixing)}
       />
       <Cell
         name="Drive"
         isCaution={drive.drive !== 'right'}
         figure={
-          <Box sx={{ fontSize: '1.125rem', fontWeight: 700, whiteSpace: 'nowrap' }}>
-            {signed(values.sourceDbm)}{' '}
-            <Box component="span" sx={{ fontSize: '0.84375rem' }}>
-              dBm against
-            </Box>{' '}
+          <span className="drive">
+            {signed(values.sourceDbm)} <small>dBm against</small>{' '}
             {signed(values.ratedDbm, Number.isInteger(values.ratedDbm) ? 0 : 1)}
-          </Box>
+          </span>
         }
         words={
           <>
-            <Box component="b" sx={{ color: isStale ? 'token.ink3' : 'token.ink' }}>
-              {advice}
-            </Box>{' '}
-            {then}
+            <b>{advice}</b> {then}
           </>
         }
         drawing={drive.pad && <PadDrawing pad={drive.pad} />}

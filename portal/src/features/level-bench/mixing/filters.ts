@@ -6,6 +6,7 @@ import {
   type Ladder,
   type PartQ,
 } from '@ferrite-row/levels';
+import { lastOnly } from './last-only';
 
 /**
  * Band-passes of three resonators for the bands: twice the band's width where that is 4 % of the centre or more, 4 %
@@ -109,8 +110,16 @@ export interface Curve {
   gainDb: Float64Array;
 }
 
-/** The response from 0 to the end of the axis, with more points where it is steep. */
-export function curveOf({ ladder, q, detail }: MixerFilter, maxHertz: number): Curve {
+/** What to draw of a filter: the response from 0 to the end of the axis; none where there is no filter. */
+export const curveOf = lastOnly(
+  ({ figures, maxHertz }: { figures: FilterFigures; maxHertz: number }): Curve | undefined => {
+    const filter = filterOf(figures);
+    return filter && responseOf(filter, maxHertz);
+  },
+);
+
+/** With more points where it is steep. */
+function responseOf({ ladder, q, detail }: MixerFilter, maxHertz: number): Curve {
   const along = Array.from({ length: ALONG }, (_one, index) => (maxHertz * (index + 0.5)) / ALONG);
   const inside = [...along, maxHertz, ...finePoints(detail)].filter((at) => at > 0 && at <= maxHertz);
   const hertz = Float64Array.from(inside).sort();

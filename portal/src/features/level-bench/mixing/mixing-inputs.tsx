@@ -1,12 +1,12 @@
 import Box from '@mui/material/Box';
-import { useId, useState, type ReactNode } from 'react';
+import { memo, useId, useState, type ReactNode } from 'react';
 import { Icon } from '../../../shared-ui/icon';
 import { token } from '../../../shared-ui/tokens';
 import { usePhone } from '../../../shared-ui/use-phone';
 import { AssumedFigures } from '../inputs/assumed-figures';
-import { BenchField } from '../inputs/bench-field';
 import { InputGroup, Wide } from '../inputs/input-group';
 import type { TypedTexts } from '../inputs/read-values';
+import { SteadyField } from '../inputs/steady-field';
 import type { Bench } from '../inputs/use-bench';
 import { assumedFigures } from './assumed';
 import { ASSUMED, INPUTS, OF_THE_SAMPLE, type MixingInputName, type MixingValues } from './inputs';
@@ -30,7 +30,7 @@ const OWN_FILTER = [
 /** What goes into the mixer, what drives it, and what is taken for granted. */
 export function MixingInputs({ bench, problems, values }: MixingInputsProps) {
   const isPhone = usePhone();
-  const field = (name: MixingInputName) => <BenchField key={name} {...{ bench, name, problems }} />;
+  const field = (name: MixingInputName) => <SteadyField key={name} {...{ bench, name, problems }} />;
   const filter = (
     <>
       <Wide>
@@ -45,11 +45,7 @@ export function MixingInputs({ bench, problems, values }: MixingInputsProps) {
       <Box sx={{ '& .MuiToggleButton-root': { px: '4px', fontSize: '0.8125rem' } }}>{field('ruleSet')}</Box>
     </>
   );
-  const assumed = values && (
-    <AssumedFigures figures={assumedFigures(values)} source="Class figures, common practice.">
-      {ASSUMED.map(field)}
-    </AssumedFigures>
-  );
+  const assumed = values && <Assumed {...{ bench, problems, values }} />;
   if (isPhone) {
     return (
       <>
@@ -84,6 +80,25 @@ export function MixingInputs({ bench, problems, values }: MixingInputsProps) {
     </>
   );
 }
+
+const Assumed = memo(
+  function Assumed({ bench, problems, values }: Required<MixingInputsProps>) {
+    return (
+      <AssumedFigures figures={assumedFigures(values)} source="Class figures, common practice.">
+        {ASSUMED.map((name) => (
+          <SteadyField key={name} {...{ bench, name, problems }} />
+        ))}
+      </AssumedFigures>
+    );
+  },
+  (before, after) =>
+    ASSUMED.every(
+      (name) =>
+        before.values[name] === after.values[name] &&
+        before.bench.texts[name] === after.bench.texts[name] &&
+        before.problems[name] === after.problems[name],
+    ),
+);
 
 const labelOf = (filter: string | undefined): string =>
   INPUTS.filter.options.find(({ value }) => value === filter)?.label ?? '';

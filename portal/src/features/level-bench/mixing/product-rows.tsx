@@ -34,7 +34,8 @@ export const ProductRows = memo(function ProductRows({ mixing, rows, marked }: P
           >
             <Box sx={{ display: 'flex', justifyContent: 'space-between', gap: '12px' }}>
               <span>
-                <b>{product.name}</b> {note}, {megahertz(product.hertz)}
+                <b>{product.name}</b>
+                {note && ` ${note}`}, {megahertz(product.hertz)}
               </span>
               <Box component="span" sx={{ flex: 'none' }}>
                 <VerdictLine verdict={product.verdict}>{VERDICTS[product.verdict].short}</VerdictLine>

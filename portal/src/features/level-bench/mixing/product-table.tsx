@@ -1,7 +1,8 @@
 import Box from '@mui/material/Box';
 import { memo } from 'react';
 import { fixed } from '../../../lib/text';
-import { VerdictLine } from '../../../shared-ui/states/state-line';
+import { StateMark } from '../../../shared-ui/states/shape';
+import { VERDICTS } from '../../../shared-ui/states/state-words';
 import { token } from '../../../shared-ui/tokens';
 import type { ProductRow } from './rows';
 import { afterFilter, belowWanted, decibels, megahertz, wordsOf } from './words';
@@ -35,26 +36,27 @@ const TABLE = {
   },
   '& th:first-of-type, & th:last-child, & td:last-child': { textAlign: 'left' },
   '& b': { fontWeight: 700 },
+  '& .note': { color: token('ink2') },
+  '& .against': { display: 'flex', flexWrap: 'wrap', alignItems: 'center', gap: '0 8px', paddingLeft: '8px' },
+  '& .verdict': { display: 'inline-flex', alignItems: 'center', gap: '6px', fontWeight: 600 },
+  '& tr[data-verdict="pass"] .verdict': { color: token('green') },
+  '& tr[data-verdict="too close to call"] .verdict': { color: token('brass') },
+  '& tr[data-verdict="not yet"] .verdict': { color: token('oxide') },
   '& tr[data-verdict="too close to call"] > *': { backgroundColor: token('brassTint') },
   '& tr[data-verdict="not yet"] > *': { backgroundColor: token('oxideTint') },
-  '& tr[data-verdict] > th': { pl: '8px' },
+  '& tr[data-verdict]:not([data-verdict="pass"]) > th': { pl: '8px' },
   '& tr[aria-current]': { outline: `1.5px solid ${token('ink')}`, outlineOffset: '-1px' },
-  '& tr[aria-current]:not([data-verdict]) > *': { backgroundColor: token('sheet') },
+  '& tr[aria-current][data-verdict="pass"] > *': { backgroundColor: token('sheet') },
 } as const;
-
-const muted = { color: 'token.ink2' } as const;
 
 function Row({ row, mixing, isMarked }: { row: ProductRow; mixing: Mixing; isMarked: boolean }) {
   const { product, note } = row;
   const [below, pm] = belowWanted(product);
-  const isPass = product.verdict === 'pass';
+  const { shape, words } = VERDICTS[product.verdict];
   return (
-    <tr data-verdict={isPass ? undefined : product.verdict} aria-current={isMarked || undefined}>
+    <tr data-verdict={product.verdict} aria-current={isMarked || undefined}>
       <th scope="row">
-        <b>{product.name}</b>{' '}
-        <Box component="span" sx={muted}>
-          {note}
-        </Box>
+        <b>{product.name}</b> <span className="note">{note}</span>
       </th>
       <td>{megahertz(product.hertz)}</td>
       <td>{product.order}</td>
@@ -63,20 +65,16 @@ function Row({ row, mixing, isMarked }: { row: ProductRow; mixing: Mixing; isMar
         <b>{afterFilter(product)}</b>
       </td>
       <td>
-        <b>{below}</b>{' '}
-        <Box component="span" sx={muted}>
-          {pm}
-        </Box>
+        <b>{below}</b> <span className="note">{pm}</span>
       </td>
       <td>
-        <Box sx={{ display: 'flex', flexWrap: 'wrap', alignItems: 'center', gap: '0 8px', pl: '8px' }}>
-          <VerdictLine verdict={product.verdict}>
-            {product.isWanted && isPass ? 'In the band' : undefined}
-          </VerdictLine>
-          <Box component="span" sx={muted}>
-            {wordsOf(product, mixing)}
-          </Box>
-        </Box>
+        <span className="against">
+          <span className="verdict">
+            <StateMark name={shape} size={14} />
+            {product.isWanted && product.verdict === 'pass' ? 'In the band' : words}
+          </span>
+          <span className="note">{wordsOf(product, mixing)}</span>
+        </span>
       </td>
     </tr>
   );
@@ -95,9 +93,7 @@ export const ProductTable = memo(function ProductTable({ mixing, rows, marked }:
           <th scope="col">After filter</th>
           <th scope="col">Below wanted, dB</th>
           <th scope="col">
-            <Box component="span" sx={{ pl: '8px' }}>
-              Against {decibels(mixing.values.goalDb)}
-            </Box>
+            <span className="against">Against {decibels(mixing.values.goalDb)}</span>
           </th>
         </tr>
       </thead>

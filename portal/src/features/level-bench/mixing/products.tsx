@@ -13,10 +13,28 @@ import { rowsOf } from './rows';
 import { restWords } from './words';
 import type { Mixing } from './work-out';
 
+const VIEW = ['level-bench-view', ['chart', 'table']] as const satisfies Parameters<
+  typeof usePreference<'chart' | 'table'>
+>;
+
+/** Heading, legend and switch; drawn by itself, since none of it follows from the figures. */
+const ProductsHead = memo(function ProductsHead({ hasFilter }: { hasFilter: boolean }) {
+  const [view, setView] = usePreference(...VIEW);
+  return (
+    <Box sx={{ display: 'flex', flexWrap: 'wrap', alignItems: 'center', gap: '4px 22px', mb: '4px' }}>
+      <Typography variant="h2">Products</Typography>
+      {view === 'chart' && <ChartLegend hasFilter={hasFilter} />}
+      <Box sx={{ ml: 'auto' }}>
+        <ViewSwitch value={view} drawing="chart" words="Chart" onChange={setView} />
+      </Box>
+    </Box>
+  );
+});
+
 /** Picture and table of the products; the table stands under the picture, or alone with all of them in sight. */
 export const Products = memo(function Products({ mixing }: { mixing: Mixing }) {
   const isPhone = usePhone();
-  const [view, setView] = usePreference('level-bench-view', ['chart', 'table']);
+  const [view] = usePreference(...VIEW);
   const [isAll, setIsAll] = useState(false);
   const [marked, setMarked] = useState<string>();
   const table = useRef<HTMLDivElement>(null);
@@ -35,15 +53,7 @@ export const Products = memo(function Products({ mixing }: { mixing: Mixing }) {
   const List = isPhone ? ProductRows : ProductTable;
   return (
     <Box component="section" aria-label="Products of the mixer" sx={{ mt: { xs: '4px', md: '16px' } }}>
-      {!isPhone && (
-        <Box sx={{ display: 'flex', flexWrap: 'wrap', alignItems: 'center', gap: '4px 22px', mb: '4px' }}>
-          <Typography variant="h2">Products</Typography>
-          {isChart && <ChartLegend hasFilter={mixing.curve !== undefined} />}
-          <Box sx={{ ml: 'auto' }}>
-            <ViewSwitch value={view} drawing="chart" words="Chart" onChange={setView} />
-          </Box>
-        </Box>
-      )}
+      {!isPhone && <ProductsHead hasFilter={mixing.curve !== undefined} />}
       {isChart && <ProductChart {...{ mixing, shown, rest, onMark, onTable }} />}
       <Box ref={table} tabIndex={-1} sx={{ mt: '6px', overflowX: 'auto' }}>
         <List {...{ mixing, rows, marked }} />

@@ -15,15 +15,18 @@ const NAMED_AT_MOST = 8;
 const LEAST_IN_HAND = 3;
 
 /**
- * The rows that matter: wanted, then the least in hand and what leaks straight through, then the nearest below and above
- * the band and the strongest in another amateur band. The rest follow, the least in hand first.
+ * The rows that matter: wanted, then the least in hand, what leaks straight through and the strongest in the band, then
+ * the nearest below and above it and the strongest in another amateur band. The rest follow, the least in hand first.
  */
 export function rowsOf(mixing: Mixing): { shown: ProductRow[]; rest: ProductRow[] } {
   const { wanted, others, nearestBelow, nearestAbove } = mixing;
   const least = others.filter(
     ({ verdict }, index) => index < LEAST_IN_HAND || (index === LEAST_IN_HAND && verdict !== 'pass'),
   );
-  const harmful = others.filter((product) => least.includes(product) || product.order === 1);
+  const inBand = strongest(others.filter(({ place }) => place === 'in the band'));
+  const harmful = others.filter(
+    (product) => least.includes(product) || product.order === 1 || product === inBand,
+  );
   const ranked = [wanted, ...harmful, nearestBelow, nearestAbove, strongestElsewhere(mixing)];
   const chosen = [...new Set(ranked.filter((product) => product !== undefined))].slice(0, NAMED_AT_MOST);
   const row = (product: JudgedProduct) => ({ product, note: noteOf(product, mixing) });
@@ -36,14 +39,17 @@ export function rowsOf(mixing: Mixing): { shown: ProductRow[]; rest: ProductRow[
 const bandAt = (bands: readonly AmateurBand[], hertz: number): AmateurBand | undefined =>
   bands.find(({ lowHertz, highHertz }) => hertz >= lowHertz && hertz <= highHertz);
 
-/** The product that would be heard loudest in a band it does not belong to; the plain leaks are listed anyway. */
-function strongestElsewhere({ others, bands, band }: Mixing): JudgedProduct | undefined {
+/** The strongest, as far as the picture goes, in a band it does not belong to; the plain leaks are listed anyway. */
+function strongestElsewhere({ others, bands, band, maxHertz }: Mixing): JudgedProduct | undefined {
   const elsewhere = others.filter(({ hertz, order }) => {
     const at = bandAt(bands, hertz);
-    return order > 1 && at !== undefined && at !== band;
+    return order > 1 && hertz <= maxHertz && at !== undefined && at !== band;
   });
-  return elsewhere.sort((a, b) => b.filteredDbm - a.filteredDbm)[0];
+  return strongest(elsewhere);
 }
+
+const strongest = (products: readonly JudgedProduct[]): JudgedProduct | undefined =>
+  [...products].sort((a, b) => b.filteredDbm - a.filteredDbm)[0];
 
 function noteOf(product: JudgedProduct, { nearestBelow, nearestAbove, bands }: Mixing): string {
   const { loMultiple, ifMultiple, isWanted, order, place } = product;

@@ -17,8 +17,9 @@ export function tuningWords({ tuning, values, band }: Mixing): string {
   const range = `With the LO from ${megahertz(loHertz[0])} to ${megahertz(loHertz[1])} MHz`;
   if (troubled === 0) return `${range} no other product to order ${values.maxOrder} falls in the band.`;
   const share = Math.max(1, Math.round((100 * troubled) / settings));
-  const most = counted(mostAtOnce, 'other product');
-  return `${range} up to ${most} to order ${values.maxOrder} fall in the band, at ${share} % of the settings.`;
+  const most = mostAtOnce === 1 ? 'one other product' : `up to ${counted(mostAtOnce, 'other product')}`;
+  const fall = mostAtOnce === 1 ? 'falls' : 'fall';
+  return `${range} ${most} to order ${values.maxOrder} ${fall} in the band, at ${share} % of the settings.`;
 }
 
 /** The same LO and IF as a receiver's. */

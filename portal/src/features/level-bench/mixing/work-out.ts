@@ -12,8 +12,9 @@ import {
   type MixerFigures,
   type RuleSet,
 } from '@ferrite-row/levels';
-import { curveOf, filterOf, gainOf, type Curve } from './filters';
+import { curveOf, filterOf, gainOf, type Curve, type FilterFigures } from './filters';
 import type { MixingValues } from './inputs';
+import { lastOnly } from './last-only';
 import { tuningOf, type Tuning } from './tuning';
 
 export const RULE_SETS: Record<MixingValues['ruleSet'], RuleSet> = { 'region-1': IARU_REGION_1, us: US_97 };
@@ -21,7 +22,7 @@ export const RULE_SETS: Record<MixingValues['ruleSet'], RuleSet> = { 'region-1':
 /** All that the page shows, without a function in it, so that it can cross from a worker. */
 export interface Mixing extends JudgedProducts {
   values: MixingValues;
-  /** Bands on the axis. */
+  /** Of the rule set. */
   bands: AmateurBand[];
   /** The one the wanted product lies in, or the nearest. */
   band: AmateurBand;
@@ -40,10 +41,11 @@ export interface Mixing extends JudgedProducts {
  */
 export function workOut(values: MixingValues): Mixing {
   const conversion = convert(values.loHertz, values.ifHertz, values.wanted);
-  const bands = bandsOf(RULE_SETS[values.ruleSet], today());
+  const bands = bandsOn({ ruleSet: values.ruleSet, day: today() });
   const band = nearestBand(bands, conversion.hertz);
   const drive = driveCheck(values);
-  const filter = filterOf(values);
+  const figures = filterFigures(values);
+  const filter = filterOf(figures);
   const judged = judgeProducts({
     ...values,
     loDbm: drive.deliveredDbm,
@@ -54,17 +56,28 @@ export function workOut(values: MixingValues): Mixing {
     filterPlusMinusDb: filter ? values.filterPlusMinusDb : 0,
   });
   const maxHertz = axisEnd(values.loHertz, conversion.hertz);
+  const curve = curveOf({ figures, maxHertz });
   return {
     ...judged,
     values,
-    bands: bands.filter(({ lowHertz }) => lowHertz < maxHertz),
+    bands,
     band,
     drive,
     goalDbm: judged.wanted.filteredDbm - values.goalDb,
     maxHertz,
-    ...(filter && { curve: curveOf(filter, maxHertz) }),
+    ...(curve && { curve }),
     tuning: tuningOf(values, conversion, band),
   };
+}
+
+const bandsOn = lastOnly(({ ruleSet, day }: Pick<MixingValues, 'ruleSet'> & { day: string }) =>
+  bandsOf(RULE_SETS[ruleSet], day),
+);
+
+/** Nothing else, so that the curve stays as it is while other figures are typed. */
+function filterFigures(values: MixingValues): FilterFigures {
+  const { filter, order, inductorQ, centreHertz, bandwidthHertz, resonatorHenries, cutoffHertz } = values;
+  return { filter, order, inductorQ, centreHertz, bandwidthHertz, resonatorHenries, cutoffHertz };
 }
 
 const today = (): string => new Date().toISOString().slice(0, 10);

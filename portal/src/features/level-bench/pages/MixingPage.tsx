@@ -6,6 +6,7 @@ import { useBench } from '../inputs/use-bench';
 import { Answer } from '../mixing/answer';
 import { spokenAnswer } from '../mixing/answer-words';
 import { copiedText } from '../mixing/copied-text';
+import { DriveCaution } from '../mixing/drive-caution';
 import { ASSUMED, INPUTS } from '../mixing/inputs';
 import { MixingInputs } from '../mixing/mixing-inputs';
 import { PhoneAnswer } from '../mixing/phone-answer';
@@ -36,6 +37,7 @@ export default function MixingPage() {
     >
       {result && (
         <>
+          <DriveCaution mixing={result} />
           <Products mixing={result} />
           <TuningTable mixing={result} />
           <Typography variant="small" component="p" sx={{ m: 0, mt: '14px', color: 'token.ink3' }}>
