@@ -6,6 +6,7 @@ import { PageTitle } from '../../../shared-ui/page-title';
 import { PhoneBar } from '../../../shared-ui/phone-bar';
 import { token } from '../../../shared-ui/tokens';
 import { usePhone } from '../../../shared-ui/use-phone';
+import { VisuallyHidden } from '../../../shared-ui/visually-hidden';
 import { useCopy } from '../results/copying';
 import { StillWords } from '../results/still-words';
 import { familyName, type Family } from './families';
@@ -59,6 +60,18 @@ export function BenchFrame(props: BenchFrameProps) {
       Copy as text
     </Button>
   );
+  const actions = (
+    <>
+      {copyLink}
+      {copyText}
+      {onBuild}
+    </>
+  );
+  const title = (beside?: ReactNode) => (
+    <PageTitle tab={`Level bench, ${name.toLowerCase()}`} actions={beside}>
+      Level bench, <b>{name.toLowerCase()}</b>
+    </PageTitle>
+  );
   const page = (
     <>
       {inputs}
@@ -72,20 +85,7 @@ export function BenchFrame(props: BenchFrameProps) {
   return (
     <>
       <PhoneBar title={name} backTo="/level-bench" backLabel="All families" end={copyLink} />
-      {!isPhone && (
-        <PageTitle
-          tab={`Level bench, ${name.toLowerCase()}`}
-          actions={
-            <>
-              {copyLink}
-              {copyText}
-              {onBuild}
-            </>
-          }
-        >
-          Level bench, <b>{name.toLowerCase()}</b>
-        </PageTitle>
-      )}
+      {isPhone ? <VisuallyHidden as="div">{title()}</VisuallyHidden> : title(actions)}
       <FamilyRow />
       <Box
         sx={{

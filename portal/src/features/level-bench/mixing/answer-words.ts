@@ -20,7 +20,7 @@ export function sidebandWords({ conversion: { sideband } }: Mixing): string {
     : 'Upper at the IF stays upper on the air.';
 }
 
-export interface DriveWords {
+interface DriveWords {
   /** What to do, set in bold. */
   advice: string;
   /** What comes of it. */

@@ -1,7 +1,7 @@
 import type { AmateurBand } from '@ferrite-row/levels';
 import type { Scale } from './scale';
 
-export interface BandMark {
+interface BandMark {
   /** '20', without its metres. */
   name: string;
   at: number;

@@ -44,7 +44,7 @@ const COIL_OHMS = 2 * Math.PI * 14.175;
 /** A toroid of powdered iron at HF has a Q of 150 to 200, a small capacitor one near 1,000 (common practice). */
 const BAND_Q: PartQ = { inductorQ: 165, capacitorQ: 1000 };
 
-export interface MixerFilter {
+interface MixerFilter {
   ladder: Ladder;
   q: PartQ;
   /** Where it is narrow and a curve needs more points, Hz. */

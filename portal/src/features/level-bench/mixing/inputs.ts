@@ -23,7 +23,7 @@ export const INPUTS = {
     [...BAND_FILTERS, ...OWN_FILTERS, { value: 'none', label: 'None' }],
     '20m',
   ),
-  order: quantity('Resonators, or elements', '', '3', { unitWords: 'of them', when: own }),
+  order: quantity('Order of the filter', '', '3', { unitWords: 'n', when: own }),
   inductorQ: quantity('Q of its coils', '', '165', { unitWords: 'Q', when: own }),
   centreHertz: quantity('Its centre', 'MHz', '14.175', { when: ownBandPass }),
   bandwidthHertz: quantity('Its bandwidth', 'kHz', '700', { when: ownBandPass }),

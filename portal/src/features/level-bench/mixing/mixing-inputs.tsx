@@ -5,11 +5,15 @@ import { token } from '../../../shared-ui/tokens';
 import { usePhone } from '../../../shared-ui/use-phone';
 import { AssumedFigures } from '../inputs/assumed-figures';
 import { InputGroup, Wide } from '../inputs/input-group';
-import type { TypedTexts } from '../inputs/read-values';
+import { readValues, type TypedTexts } from '../inputs/read-values';
 import { SteadyField } from '../inputs/steady-field';
 import type { Bench } from '../inputs/use-bench';
 import { assumedFigures } from './assumed';
 import { ASSUMED, INPUTS, OF_THE_SAMPLE, type MixingInputName, type MixingValues } from './inputs';
+
+const started = readValues(INPUTS, {});
+if (!started.isComplete) throw new Error('what the page starts with can be read');
+const STARTING = started.values;
 
 interface MixingInputsProps {
   bench: Bench<typeof INPUTS>;
@@ -45,7 +49,8 @@ export function MixingInputs({ bench, problems, values }: MixingInputsProps) {
       <Box sx={{ '& .MuiToggleButton-root': { px: '4px', fontSize: '0.8125rem' } }}>{field('ruleSet')}</Box>
     </>
   );
-  const assumed = values && <Assumed {...{ bench, problems, values }} />;
+  // From before anything could be worked out, so that a figure that is in the way can be mended.
+  const assumed = <Assumed {...{ bench, problems }} values={values ?? STARTING} />;
   if (isPhone) {
     return (
       <>

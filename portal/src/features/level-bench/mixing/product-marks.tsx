@@ -15,7 +15,7 @@ const THIN_TICK = 4.5;
 const DOTS = '1.6 2.6';
 
 /** The end of a stem: shape first, colour second. */
-export function EndMark({ mark: { row, x, yEnd, isOff } }: { mark: ProductMark }) {
+function EndMark({ mark: { row, x, yEnd, isOff } }: { mark: ProductMark }) {
   const { verdict, isWanted } = row.product;
   if (isWanted) {
     return (

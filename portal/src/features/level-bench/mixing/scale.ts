@@ -2,7 +2,7 @@
 export const FLOOR_DBM = -120;
 
 const SPAN_DB = 120;
-export const GRID_DB = 20;
+const GRID_DB = 20;
 
 export interface Room {
   width: number;

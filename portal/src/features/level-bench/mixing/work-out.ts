@@ -86,7 +86,7 @@ const awayFrom = ({ lowHertz, highHertz }: AmateurBand, hertz: number): number =
   Math.max(lowHertz - hertz, hertz - highHertz, 0);
 
 /** The band a frequency lies in, else the one whose edge is nearest. */
-export function nearestBand(bands: readonly AmateurBand[], hertz: number): AmateurBand {
+function nearestBand(bands: readonly AmateurBand[], hertz: number): AmateurBand {
   const [first, ...others] = bands;
   if (!first) throw new OutOfDomainError('ruleSet', '', 'one with bands', 'This rule set has no bands.');
   return others.reduce((best, band) => (awayFrom(band, hertz) < awayFrom(best, hertz) ? band : best), first);

@@ -80,4 +80,24 @@ describe('mixing', () => {
     await userEvent.click(within(assumed).getByRole('button', { name: 'Change' }));
     expect(screen.getByLabelText('Conversion loss')).toHaveValue('7.2');
   });
+
+  it('says over the page what is wrong with a figure that is folded away, and lets it be mended', async () => {
+    renderPage(<MixingPage />, { at: `${AT}?conversionLoss=-3` });
+    expect(await screen.findByText(/Figure of the mixer: -3 is outside/)).toBeVisible();
+    expect(screen.queryByRole('region', { name: 'Answer' })).not.toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: 'Change' }));
+    await userEvent.clear(screen.getByLabelText('Conversion loss'));
+    await userEvent.type(screen.getByLabelText('Conversion loss'), '6');
+    expect(await answer()).toHaveTextContent('14.200');
+  });
+
+  // 33 dBm are 2 W, of which a pad of 26 dB keeps all but 5 mW.
+  it('warns of a pad that gets hot, and of no other', async () => {
+    renderPage(<MixingPage />, { at: `${AT}?sourceDbm=33` });
+    expect(await screen.findByRole('note', { name: /Hot parts/ })).toHaveTextContent('The pad takes 2 W');
+    const source = screen.getByLabelText('LO source gives');
+    await userEvent.clear(source);
+    await userEvent.type(source, '10');
+    await waitFor(() => expect(screen.queryByRole('note')).not.toBeInTheDocument());
+  });
 });
