@@ -76,6 +76,7 @@ const PAGES: RouteObject[] = [
   page('level-bench/conversions', () => import('../features/level-bench/pages/ConversionsPage')),
   page('level-bench/pads', () => import('../features/level-bench/pages/PadsPage')),
   page('level-bench/matching', () => import('../features/level-bench/pages/MatchingPage')),
+  page('level-bench/mixing', () => import('../features/level-bench/pages/MixingPage')),
   page('dues', () => import('../features/dues/pages/DuesPage')),
   page('you', () => import('../features/you/pages/YouPage')),
   ...ROLE_ROUTES,

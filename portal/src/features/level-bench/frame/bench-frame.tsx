@@ -7,6 +7,7 @@ import { PhoneBar } from '../../../shared-ui/phone-bar';
 import { token } from '../../../shared-ui/tokens';
 import { usePhone } from '../../../shared-ui/use-phone';
 import { PutOnBuild } from '../build/put-on-build';
+import { VisuallyHidden } from '../../../shared-ui/visually-hidden';
 import { useCopy } from '../results/copying';
 import { StillWords } from '../results/still-words';
 import { familyName, type Family } from './families';
@@ -59,6 +60,18 @@ export function BenchFrame(props: BenchFrameProps) {
     </Button>
   );
   const onBuild = <PutOnBuild family={family} link={link} text={text} />;
+  const actions = (
+    <>
+      {copyLink}
+      {copyText}
+      {onBuild}
+    </>
+  );
+  const title = (beside?: ReactNode) => (
+    <PageTitle tab={`Level bench, ${name.toLowerCase()}`} actions={beside}>
+      Level bench, <b>{name.toLowerCase()}</b>
+    </PageTitle>
+  );
   const page = (
     <>
       {inputs}
@@ -67,36 +80,18 @@ export function BenchFrame(props: BenchFrameProps) {
           {problem}
         </Banner>
       )}
-      {isPhone && (
-        <Box sx={{ display: 'flex', flexWrap: 'wrap', gap: '8px' }}>
-          {copyText} {onBuild}
-        </Box>
-      )}
     </>
   );
   return (
     <>
       <PhoneBar title={name} backTo="/level-bench" backLabel="All families" end={copyLink} />
-      {!isPhone && (
-        <PageTitle
-          tab={`Level bench, ${name.toLowerCase()}`}
-          actions={
-            <>
-              {copyLink}
-              {copyText}
-              {onBuild}
-            </>
-          }
-        >
-          Level bench, <b>{name.toLowerCase()}</b>
-        </PageTitle>
-      )}
+      {isPhone ? <VisuallyHidden as="div">{title()}</VisuallyHidden> : title(actions)}
       <FamilyRow />
       <Box
         sx={{
           display: 'grid',
           gridTemplateColumns: { xs: 'minmax(0, 1fr)', md: '286px minmax(0, 1fr)' },
-          gap: '30px',
+          gap: { xs: '4px 30px', md: '30px' },
           mt: { xs: 0, md: '18px' },
           pb: { xs: '38dvh', md: 0 },
         }}
@@ -105,6 +100,11 @@ export function BenchFrame(props: BenchFrameProps) {
         <Box sx={{ minWidth: 0 }}>
           {isPhone ? <Box sx={PINNED}>{answer}</Box> : answer}
           {children}
+          {isPhone && (
+            <Box sx={{ display: 'flex', flexWrap: 'wrap', gap: '8px', mt: '16px' }}>
+              {copyText} {onBuild}
+            </Box>
+          )}
         </Box>
       </Box>
       <StillWords words={spoken} />

@@ -1,4 +1,5 @@
 import Box from '@mui/material/Box';
+import { memo } from 'react';
 import { NavLink } from 'react-router-dom';
 import { token } from '../../../shared-ui/tokens';
 import { useKeptSearch } from '../inputs/kept-inputs';
@@ -27,7 +28,7 @@ function FamilyLink({ family, name }: { family: Family; name: string }) {
 }
 
 /** The families as a row of words; each opens with what was last typed there. */
-export function FamilyRow() {
+export const FamilyRow = memo(function FamilyRow() {
   return (
     <Box
       component="nav"
@@ -44,4 +45,4 @@ export function FamilyRow() {
       ))}
     </Box>
   );
-}
+});

@@ -28,6 +28,19 @@ export function useSettled<T>(value: T, ms = SETTLE_MS): T {
   return settled;
 }
 
+/**
+ * Where the words of a problem stand: at the input it names, or over the page when that input is not on it and they
+ * would be read by nobody.
+ */
+export const problemAt = (
+  inputs: BenchInputs,
+  texts: TypedTexts,
+  { input, message }: Pick<LevelsError, 'input' | 'message'>,
+): TypedTexts => {
+  const isOnPage = input in inputs && isShown(inputs, input, texts);
+  return { [isOnPage ? input : ELSEWHERE]: message };
+};
+
 type Attempt<R> = { result: R } | { problems: TypedTexts };
 
 function attempt<F extends BenchInputs, R>(
@@ -41,21 +54,21 @@ function attempt<F extends BenchInputs, R>(
     return { result: work(read.values) };
   } catch (error) {
     if (!(error instanceof LevelsError)) throw error;
-    // Words at a field that is not on the page would be read by nobody.
-    const isOnPage = error.input in inputs && isShown(inputs, error.input, texts);
-    return { problems: { [isOnPage ? error.input : ELSEWHERE]: error.message } };
+    return { problems: problemAt(inputs, texts, error) };
   }
 }
 
 /**
  * What the inputs come to, as they are typed. Half-typed input keeps the last good result.
  * @param work - a constant function; what it throws of the levels package stands at the input it names.
+ * @param restMs - how long the hand must rest; 0 for a page light enough to be drawn with every key.
  */
 export function useWorked<F extends BenchInputs, R>(
   { inputs, texts }: Pick<Bench<F>, 'inputs' | 'texts'>,
   work: (values: BenchValues<F>) => R,
+  restMs = SETTLE_MS,
 ): Worked<R> {
-  const settled = useSettled(JSON.stringify(texts));
+  const settled = useSettled(JSON.stringify(texts), restMs);
   const now = useMemo(
     () => attempt(inputs, JSON.parse(settled) as TypedTexts, work),
     [inputs, settled, work],
