@@ -1,5 +1,5 @@
 import react from '@vitejs/plugin-react';
-import { defaultClientConditions } from 'vite';
+import { defaultClientConditions, defaultServerConditions } from 'vite';
 import { defineConfig } from 'vitest/config';
 
 const api = process.env.API_URL ?? 'http://127.0.0.1:4781';
@@ -11,6 +11,8 @@ export default defineConfig({
   plugins: [react()],
   // The levels package is read from its TypeScript source, so the browser never waits for a server build.
   resolve: { conditions: ['@ferrite-row/source', ...defaultClientConditions] },
+  // So do the specs that run in Node.
+  ssr: { resolve: { conditions: ['@ferrite-row/source', ...defaultServerConditions] } },
   server: { host: '127.0.0.1', port: 4782, proxy: { '/api': api } },
   preview: { host: '127.0.0.1', proxy: { '/api': api } },
   build: { assetsDir: 'assets', chunkSizeWarningLimit: 600 },

@@ -1,0 +1,61 @@
+import type { Verdict } from '@ferrite-row/levels';
+import { VERDICTS } from '../../../shared-ui/states/state-words';
+import type { CautionKind } from '../../../shared-ui/caution-symbols';
+
+/** A figure of the answer line. */
+export interface JudgedFigure {
+  name: string;
+  figure: string;
+  unit?: string;
+  words?: string;
+  tone?: 'plain' | 'caution';
+}
+
+export interface JudgedRow {
+  cells: readonly string[];
+  verdict?: Verdict;
+}
+
+/** A table of the results; its first column is the name. */
+export interface JudgedTable {
+  title: string;
+  heads: readonly string[];
+  rows: readonly JudgedRow[];
+  /** Said where there are no rows. */
+  none?: string;
+}
+
+/** What any of the guards comes to. It never says that something may be done. */
+export interface Judged {
+  figures: readonly JudgedFigure[];
+  tables: readonly JudgedTable[];
+  /** Where the rule or the method comes from, with its day. */
+  source: string;
+  caution: { kind: CautionKind; words: string };
+}
+
+const rowText = ({ heads, rows, none = '' }: JudgedTable): string[] =>
+  rows.length === 0
+    ? [`  ${none}`]
+    : rows.map(({ cells, verdict }) => {
+        const [name, ...rest] = cells;
+        const told = rest.flatMap((cell, index) =>
+          cell === '' ? [] : [`${heads[index + 1]?.toLowerCase() ?? ''} ${cell}`.trim()],
+        );
+        return `  ${name}: ${[...told, ...(verdict ? [VERDICTS[verdict].words.toLowerCase()] : [])].join(', ')}`;
+      });
+
+/** The same as lines for a letter, the caution last. */
+export const inText = ({ figures, tables, source, caution }: Judged): string =>
+  [
+    ...figures.map(
+      ({ name, figure, unit = '', words }) =>
+        `${name}: ${`${figure} ${unit}`.trim()}${words ? `. ${words}` : ''}`,
+    ),
+    ...tables.flatMap((table) => [`${table.title}:`, ...rowText(table)]),
+    `Source: ${source}`,
+    caution.words,
+  ].join('\n');
+
+export const spoken = ({ figures }: Judged): string =>
+  figures.map(({ name, figure, unit = '', words = '' }) => `${name} ${figure} ${unit}. ${words}`).join(' ');
