@@ -54,9 +54,10 @@ export function ChainResults({ chain, open, onOpen }: ChainResultsProps) {
         </Box>
       )}
       <Box sx={{ mt: '18px' }}>
+        {/* On a phone the diagram would scroll to its current row, away from the fields. */}
         <Diagram
           points={pointsOf(chain)}
-          currentId={open === undefined ? undefined : String(open)}
+          currentId={open === undefined || isPhone ? undefined : String(open)}
           onOpen={(id) => onOpen(Number(id))}
         />
       </Box>

@@ -6,12 +6,12 @@ import { choice, quantity, words, type BenchValues } from '../inputs/fields';
  */
 const LARKMOOR_TWENTY = [
   'Crystal filter_-6_2____-14',
-  'IF amplifier_14_1.5_4_20_9_8',
-  'Mixer_-6.5_2__8.5_-5.5_-6',
+  'IF amplifier_14_1.5_4_20_12_8',
+  'Mixer_-6.5_2__8.5_-5_-6',
   'Band-pass filter_-2.5_1.5',
-  'Pre-driver_20.5_1.5_5_24_12_10',
-  'Driver_19_1.5_6_38_26_25',
-  'Power amplifier_17_1_8_50_39.5_39',
+  'Pre-driver_20.5_1.5_5_24_15_10',
+  'Driver_19_1.5_6_38_30_25',
+  'Power amplifier_17_1_8_50_42_39',
   'Low-pass filter_-0.5_1____43',
 ].join('*');
 

@@ -16,6 +16,14 @@ interface StageFieldsProps {
 
 const HINTS: Partial<Record<string, string>> = { noiseFigureDb: 'Empty: its loss' };
 
+const BUTTONS = {
+  gridColumn: '1 / -1',
+  display: 'grid',
+  gridTemplateColumns: 'repeat(3, minmax(0, 1fr))',
+  gap: '8px',
+  '& button': { minWidth: 0, px: '4px' },
+} as const;
+
 /** The open stage: what is known of it, and where it stands. */
 export function StageFields({ stage, problemOf, onType, onUp, onDown, onRemove }: StageFieldsProps) {
   const [typing, setTyping] = useState<string>();
@@ -47,11 +55,11 @@ export function StageFields({ stage, problemOf, onType, onUp, onDown, onRemove }
           }}
         />
       ))}
-      <Box sx={{ gridColumn: '1 / -1', display: 'flex', flexWrap: 'wrap', gap: '8px' }}>
-        <Button disabled={!onUp} onClick={onUp}>
-          Move up
+      <Box sx={BUTTONS}>
+        <Button aria-label="Move up" disabled={!onUp} onClick={onUp}>
+          Up
         </Button>
-        <Button disabled={!onDown} onClick={onDown}>
+        <Button aria-label="Move down" disabled={!onDown} onClick={onDown}>
           Down
         </Button>
         <Button disabled={!onRemove} onClick={onRemove}>

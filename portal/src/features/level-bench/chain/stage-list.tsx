@@ -78,6 +78,12 @@ function Row({
   );
 }
 
+const stageId = (index: number): string => `stage-${index}`;
+
+/** Brings a stage's fields into sight, where they are opened from elsewhere on the page. */
+export const showStage = (index: number): void =>
+  document.getElementById(stageId(index))?.scrollIntoView?.({ block: 'center' });
+
 /** The stages in signal order; one of them open to be typed in. */
 export function StageList({ text, onChange, problems, open, onOpen }: StageListProps) {
   const stages = stagesOf(text);
@@ -97,6 +103,7 @@ export function StageList({ text, onChange, problems, open, onOpen }: StageListP
           return (
             <Box
               component="li"
+              id={stageId(index)}
               // A stage is where it stands; its name may be typed over at any time.
               key={index}
               sx={

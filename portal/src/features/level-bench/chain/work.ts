@@ -102,10 +102,10 @@ function reckon(values: ChainValues): WorkedChain {
   return {
     inputDbm: values.inputDbm,
     stages,
-    whole: stages[stages.length - 1] as WorkedStage,
+    whole: stages[stages.length - 1],
     leastHeadroom: leastOf(stages),
     shortfall: shortfallOf(stages),
-    twoTone: twoToneOf(rows[rows.length - 1] as ChainRow),
+    twoTone: twoToneOf(rows[rows.length - 1]),
     products: twoToneProducts(values.firstHertz, values.secondHertz),
   };
 }

@@ -8,6 +8,8 @@ const TOP = 26;
 const FOOT = 62;
 /** So many times the emission's own width is drawn to each side of it. */
 const AROUND = 4;
+/** Two labels nearer than this would meet; the dial's frequency stands under its line anyway. */
+const LABEL_ROOM = 64;
 
 const megahertz = (hertz: number): string => fixed(hertz / 1e6, 4);
 
@@ -62,9 +64,11 @@ export function BandDrawing({ picture }: { picture: BandPicture }) {
           strokeWidth="2"
           strokeDasharray="3 2"
         />
-        <text x={x(carrierHertz)} y={TOP - 8} fontWeight="700" fill={token('copper')}>
-          dial
-        </text>
+        {edges.every((edge) => Math.abs(x(edge) - x(carrierHertz)) > LABEL_ROOM) && (
+          <text x={x(carrierHertz)} y={TOP - 8} fontWeight="700" fill={token('copper')}>
+            dial
+          </text>
+        )}
         {edges.map((edge) => (
           <g key={edge}>
             <path d={`M${x(edge)} ${TOP - 6}V${FOOT + 6}`} stroke={token('oxide')} strokeWidth="2.4" />

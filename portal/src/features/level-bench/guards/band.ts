@@ -33,8 +33,8 @@ function powerFigure({ limits }: EmissionCheck): JudgedFigure {
   if (!first) return { name: 'Power', figure: 'No limit here', words: 'in this set; your licence has one' };
   const { kind, limitWatts, watts, isOver } = first;
   return {
-    name: `Power, ${kind}`,
-    figure: `at most ${formatQuantity(limitWatts, 'W')}`,
+    name: `Power, ${kind}, at most`,
+    figure: formatQuantity(limitWatts, 'W'),
     words: watts === undefined ? undefined : `it is ${formatQuantity(watts, 'W')}`,
     tone: isOver ? 'caution' : 'plain',
   };
@@ -74,8 +74,8 @@ export function judgeBand(values: GuardValues): Judged & { picture: BandPicture 
   return {
     figures: [
       {
-        name: 'It occupies',
-        ...{ figure: `${megahertz(lowHertz)} to ${megahertz(highHertz)}`, unit: 'MHz' },
+        name: 'It occupies, MHz',
+        figure: `${megahertz(lowHertz)} to ${megahertz(highHertz)}`,
         words: check.band === undefined ? 'in no band of this set' : `${check.band} band`,
       },
       {

@@ -94,7 +94,7 @@ export function judgeExposure(values: GuardValues): Judged {
     caution: {
       kind: 'RF exposure',
       words:
-        'An estimate for the far field, by the limits of the United States; national limits may be stricter and decide. Nobody touches an antenna that may be on: a burn needs no watt for minutes.',
+        'An estimate for the far field, by the limits of the United States; national limits may be stricter and decide. Nobody touches an antenna that may be on: it burns at once, whatever the average.',
     },
   };
 }

@@ -7,9 +7,12 @@ import { SectionHeading } from '../../../shared-ui/section-heading';
 import { VerdictLine } from '../../../shared-ui/states/state-line';
 import { usePhone } from '../../../shared-ui/use-phone';
 import { WindowBar } from '../../../shared-ui/window-bar';
+import { VisuallyHidden } from '../../../shared-ui/visually-hidden';
+import { ChartOrTable } from '../results/chart-or-table';
 import { BandDrawing } from './band-drawing';
 import { HeatDrawing } from './heat-drawing';
 import type { JudgedRow, JudgedTable } from './judged';
+import { SpurChart, SpurLegend } from './spur-chart';
 import type { Shown } from './work';
 
 function Section({ title, end, children }: { title: string; end?: ReactNode; children: ReactNode }) {
@@ -43,33 +46,52 @@ function columnsOf({ heads, rows }: JudgedTable, isPhone: boolean): Column<Judge
       key: 'verdict',
       header: 'Verdict',
       phone: 'end',
-      cell: ({ verdict }) =>
-        verdict && (
-          <Box sx={{ pl: { md: '16px' } }}>
-            <VerdictLine verdict={verdict} />
-          </Box>
-        ),
+      align: 'right',
+      cell: ({ verdict }) => verdict && <VerdictLine verdict={verdict} />,
     },
   ];
 }
 
-function Table({ table }: { table: JudgedTable }) {
+function Rows({ table }: { table: JudgedTable }) {
   const isPhone = usePhone();
+  if (table.rows.length === 0)
+    return (
+      <Box component="p" sx={{ m: 0, pt: '8px', color: 'token.ink2' }}>
+        {table.none}
+      </Box>
+    );
   return (
-    <Section title={table.title}>
-      {table.rows.length === 0 ? (
-        <Box component="p" sx={{ m: 0, pt: '8px', color: 'token.ink2' }}>
-          {table.none}
-        </Box>
-      ) : (
-        <DataTable
-          label={table.title}
-          columns={columnsOf(table, isPhone)}
-          rows={table.rows}
-          rowKey={({ cells }) => cells.join(' ')}
-        />
-      )}
-    </Section>
+    <DataTable
+      label={table.title}
+      columns={columnsOf(table, isPhone)}
+      rows={table.rows}
+      rowKey={({ cells }) => cells.join(' ')}
+    />
+  );
+}
+
+/** A table, behind its chart where it has one. */
+function Table({ table, spurs }: { table: JudgedTable; spurs: Shown['spurs'] }) {
+  if (!spurs)
+    return (
+      <Section title={table.title}>
+        <Rows table={table} />
+      </Section>
+    );
+  return (
+    <ChartOrTable
+      title={table.title}
+      legend={<SpurLegend picture={spurs} />}
+      chart={
+        <>
+          <SpurChart picture={spurs} />
+          <VisuallyHidden as="div">
+            <Rows table={table} />
+          </VisuallyHidden>
+        </>
+      }
+      table={<Rows table={table} />}
+    />
   );
 }
 
@@ -104,7 +126,7 @@ function Picture({ shown: { bar, heat, picture } }: { shown: Shown }) {
 
 /** Caution, picture, tables, and where the rule comes from. */
 export function GuardResults({ shown }: { shown: Shown }) {
-  const { caution, tables, source } = shown;
+  const { caution, tables, source, spurs } = shown;
   return (
     <>
       <Box sx={{ mt: '14px' }}>
@@ -112,7 +134,7 @@ export function GuardResults({ shown }: { shown: Shown }) {
       </Box>
       <Picture shown={shown} />
       {tables.map((table) => (
-        <Table key={table.title} table={table} />
+        <Table key={table.title} table={table} spurs={spurs} />
       ))}
       <Box component="p" sx={{ m: 0, mt: '14px', typography: 'small', color: 'token.ink2' }}>
         {source}

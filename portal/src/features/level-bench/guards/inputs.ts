@@ -13,7 +13,7 @@ const TODAY = new Date().toISOString().slice(0, 10);
 const MODES = [
   ...Object.entries(MODE_DUTY).map(([mode, duty]) => ({
     value: mode,
-    label: `${capital(mode)}, ${100 * duty} %`,
+    label: `${capital(mode.replace('conversational ', ''))}, ${100 * duty} %`,
   })),
   { value: 'own', label: 'Measured' },
 ];
@@ -26,7 +26,7 @@ export const INPUTS = {
   judge: choice(
     'What is to be judged',
     [
-      { value: 'instrument', label: 'An instrument before it is connected' },
+      { value: 'instrument', label: 'An instrument’s input' },
       { value: 'spurious', label: 'Spurious emissions' },
       { value: 'band', label: 'Band and privileges' },
       { value: 'exposure', label: 'RF exposure' },

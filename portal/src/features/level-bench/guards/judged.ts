@@ -34,24 +34,30 @@ export interface Judged {
   caution: { kind: CautionKind; words: string };
 }
 
-const rowText = ({ heads, rows, none = '' }: JudgedTable): string[] =>
-  rows.length === 0
-    ? [`  ${none}`]
-    : rows.map(({ cells, verdict }) => {
-        const [name, ...rest] = cells;
-        const told = rest.flatMap((cell, index) =>
-          cell === '' ? [] : [`${heads[index + 1]?.toLowerCase() ?? ''} ${cell}`.trim()],
-        );
-        return `  ${name}: ${[...told, ...(verdict ? [VERDICTS[verdict].words.toLowerCase()] : [])].join(', ')}`;
-      });
+/** A head inside a line: small, but for a unit or an abbreviation. */
+const within = (head: string): string =>
+  /^[A-Z][a-z]/.test(head) && !head.startsWith('MHz') ? head.charAt(0).toLowerCase() + head.slice(1) : head;
+
+function rowText({ heads, rows, none = '' }: JudgedTable): string[] {
+  if (rows.length === 0) return [`  ${none}`];
+  const isPair = heads.length <= 2;
+  return rows.map(({ cells: [name, ...rest], verdict }) => {
+    const told = rest.flatMap((cell, index) => {
+      if (cell === '') return [];
+      return [isPair ? cell : `${within(heads[index + 1] ?? '')} ${cell}`];
+    });
+    const all = [...told, ...(verdict ? [VERDICTS[verdict].words.toLowerCase()] : [])];
+    return all.length === 0 ? `  ${name}` : `  ${name}: ${all.join(', ')}`;
+  });
+}
+
+const figureText = ({ name, figure, unit = '', words }: JudgedFigure): string =>
+  `${name}: ${`${figure} ${unit}`.trim()}${words ? ` (${words.replace(/\.$/, '')})` : ''}`;
 
 /** The same as lines for a letter, the caution last. */
 export const inText = ({ figures, tables, source, caution }: Judged): string =>
   [
-    ...figures.map(
-      ({ name, figure, unit = '', words }) =>
-        `${name}: ${`${figure} ${unit}`.trim()}${words ? `. ${words}` : ''}`,
-    ),
+    ...figures.map(figureText),
     ...tables.flatMap((table) => [`${table.title}:`, ...rowText(table)]),
     `Source: ${source}`,
     caution.words,

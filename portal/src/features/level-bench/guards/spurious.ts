@@ -52,6 +52,12 @@ function filterOf(values: GuardValues, spurs: readonly JudgedSpur[]): HarmonicFi
   });
 }
 
+/** What the filter takes of each harmonic. */
+function takenBy(values: GuardValues, spurs: readonly JudgedSpur[]): Map<number, number | undefined> {
+  const filter = filterOf(values, spurs);
+  return new Map(needsOf(spurs).map(({ harmonic }, index) => [harmonic, filter?.takenDb[index]]));
+}
+
 function filterFigure(values: GuardValues, spurs: readonly JudgedSpur[]): JudgedFigure {
   const name = 'Low-pass that would do';
   if (spurs.length === 0) return { name, figure: 'Not known', words: 'nothing measured yet' };
@@ -78,8 +84,7 @@ function worstFigure(spurs: readonly JudgedSpur[]): JudgedFigure[] {
 }
 
 function spurTable(values: GuardValues, limit: SpuriousLimit, spurs: readonly JudgedSpur[]): JudgedTable {
-  const filter = filterOf(values, spurs);
-  const takenOf = new Map(needsOf(spurs).map(({ harmonic }, index) => [harmonic, filter?.takenDb[index]]));
+  const takenOf = takenBy(values, spurs);
   return {
     title: `Measured, against ${fixed(limit.attenuationDb)} dB`,
     heads: ['Emission', 'MHz', 'Measured, dBc', 'In hand, dB', 'Filter must take', 'It takes'],
@@ -100,8 +105,30 @@ function spurTable(values: GuardValues, limit: SpuriousLimit, spurs: readonly Ju
   };
 }
 
+/** Each emission below the carrier, as measured and with the filter, for the chart. */
+export interface SpurPicture {
+  limitDbc: number;
+  spurs: { name: string; dbc: number; filteredDbc: number | null }[];
+}
+
+function pictureOf(values: GuardValues, limit: SpuriousLimit, spurs: readonly JudgedSpur[]): SpurPicture {
+  const takenOf = takenBy(values, spurs);
+  const inOrder = [...spurs].sort((a, b) => (a.harmonic ?? 99) - (b.harmonic ?? 99));
+  return {
+    limitDbc: -limit.attenuationDb,
+    spurs: inOrder.map((spur) => {
+      const taken = takenOf.get(spur.harmonic ?? 0);
+      return {
+        name: spurName(spur),
+        dbc: spur.dbc,
+        filteredDbc: taken === undefined ? null : spur.dbc - taken,
+      };
+    }),
+  };
+}
+
 /** Spurious emissions against the rule set's limit, and the filter they ask for. */
-export function judgeSpurious(values: GuardValues): Judged {
+export function judgeSpurious(values: GuardValues): Judged & { spurs?: SpurPicture } {
   const set = ruleSetOf(values.ruleSet);
   const limit = spuriousLimit(ruleOf(values, set), values.carrierWatts);
   const spurs = spursOf(values, limit);
@@ -116,6 +143,7 @@ export function judgeSpurious(values: GuardValues): Judged {
       filterFigure(values, spurs),
     ],
     tables: [spurTable(values, limit, spurs)],
+    spurs: spurs.length === 0 ? undefined : pictureOf(values, limit, spurs),
     source: `${limit.rule}: ${limit.source}. ${sourceOf(set)}`,
     caution: {
       kind: 'licence needed',

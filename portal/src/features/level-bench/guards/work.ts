@@ -2,12 +2,18 @@ import { LevelsError, OutOfDomainError } from '@ferrite-row/levels';
 import { judgeBand, type BandPicture } from './band';
 import { judgeExposure } from './exposure';
 import { judgeHeat, type HeatPicture } from './heat';
-import { INPUTS, type GuardValues, type Judge } from './inputs';
+import { type INPUTS, type GuardValues, type Judge } from './inputs';
 import { judgeInstrument, type GuardBar } from './instrument';
 import type { Judged } from './judged';
-import { judgeSpurious } from './spurious';
+import { judgeSpurious, type SpurPicture } from './spurious';
 
-export type Shown = Judged & { judge: Judge; picture?: BandPicture; heat?: HeatPicture; bar?: GuardBar };
+export type Shown = Judged & {
+  judge: Judge;
+  picture?: BandPicture;
+  heat?: HeatPicture;
+  bar?: GuardBar;
+  spurs?: SpurPicture;
+};
 
 const JUDGES: Record<Judge, (values: GuardValues) => Omit<Shown, 'judge'>> = {
   instrument: judgeInstrument,

@@ -4,7 +4,7 @@ import { renderPage } from '../../../testing/render';
 import ChainPage from './ChainPage';
 
 const AT = '/level-bench/chain';
-const answer = () => screen.getByRole('region', { name: 'Answer' });
+const answer = () => screen.getByLabelText('Answer');
 
 describe('the chain', () => {
   it('takes a stage’s gain as it is typed, and holds every stage in the address', async () => {
@@ -26,7 +26,7 @@ describe('the chain', () => {
   it('adds, moves and removes a stage', async () => {
     renderPage(<ChainPage />, { at: `${AT}?stages=Mixer_-6*Driver_20` });
     fireEvent.click(await screen.findByText('Add a stage'));
-    fireEvent.click(screen.getByText('Move up'));
+    fireEvent.click(screen.getByLabelText('Move up'));
     const names = () =>
       within(screen.getByRole('table', { name: 'Stage by stage' }))
         .getAllByRole('rowheader')

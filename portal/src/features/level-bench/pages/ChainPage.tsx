@@ -3,8 +3,8 @@ import { useMemo, useState } from 'react';
 import { fixed, signed } from '../../../lib/text';
 import { ChainResults } from '../chain/chain-results';
 import { INPUTS } from '../chain/inputs';
-import { StageList } from '../chain/stage-list';
-import { problemIn, work, type WorkedChain } from '../chain/work';
+import { showStage, StageList } from '../chain/stage-list';
+import { problemIn, work, type WorkedChain, type WorkedStage } from '../chain/work';
 import { inText, powerText, spokenChain } from '../chain/words';
 import { BenchFrame } from '../frame/bench-frame';
 import { BenchField } from '../inputs/bench-field';
@@ -26,6 +26,9 @@ function headroomCell({ leastHeadroom }: WorkedChain): AnswerCell[] {
   ];
 }
 
+const isCompressed = ({ peakDbm, outputCompressionDbm = Infinity }: WorkedStage): boolean =>
+  peakDbm > outputCompressionDbm;
+
 function answerCells(chain: WorkedChain): AnswerCell[] {
   const { whole } = chain;
   const { noiseFigureDb, outputInterceptDbm, intermodulationDbc } = whole;
@@ -33,7 +36,10 @@ function answerCells(chain: WorkedChain): AnswerCell[] {
     {
       name: 'Out of the chain, PEP',
       ...{ figure: signed(whole.peakDbm), unit: 'dBm' },
-      words: `${powerText(whole.peakDbm)}, average ${powerText(whole.averageDbm)}`,
+      words: isCompressed(whole)
+        ? `Over where the chain gives 1 dB less, ${signed(whole.outputCompressionDbm ?? 0)} dBm`
+        : `${powerText(whole.peakDbm)}, average ${powerText(whole.averageDbm)}`,
+      tone: isCompressed(whole) ? 'caution' : 'plain',
     },
     noiseFigureDb === undefined
       ? { name: 'Noise figure', figure: 'unknown', words: 'a stage with gain has none typed' }
@@ -61,6 +67,10 @@ export default function ChainPage() {
   const [place, words] = Object.entries(stageProblems)[0] ?? [];
   // In the open stage it stands at its field.
   const isAtField = place !== undefined && open !== undefined && place.startsWith(`stages[${open}].`);
+  const openFromDiagram = (index: number) => {
+    setOpen(index);
+    showStage(index);
+  };
   return (
     <BenchFrame
       family="chain"
@@ -91,14 +101,18 @@ export default function ChainPage() {
             compression are class figures, common practice. Type your own when you have measured them.
           </Box>
           <InputGroup title="Two tones">
-            <BenchField bench={bench} name="firstHertz" problems={problems} />
-            <BenchField bench={bench} name="secondHertz" problems={problems} />
+            <Wide>
+              <BenchField bench={bench} name="firstHertz" problems={problems} />
+            </Wide>
+            <Wide>
+              <BenchField bench={bench} name="secondHertz" problems={problems} />
+            </Wide>
           </InputGroup>
         </>
       }
       answer={<AnswerLine cells={result ? answerCells(result) : []} isStale={isStale} />}
     >
-      {result && <ChainResults chain={result} open={open} onOpen={setOpen} />}
+      {result && <ChainResults chain={result} open={open} onOpen={openFromDiagram} />}
     </BenchFrame>
   );
 }
