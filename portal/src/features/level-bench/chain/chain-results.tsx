@@ -1,4 +1,5 @@
 import Box from '@mui/material/Box';
+import { memo } from 'react';
 import { DataTable } from '../../../shared-ui/data-table';
 import type { Column } from '../../../shared-ui/data-table-types';
 import { LevelDiagram } from '../../../shared-ui/level-diagram/level-diagram';
@@ -39,8 +40,8 @@ interface ChainResultsProps {
   onOpen: (index: number) => void;
 }
 
-/** Where the level went, the level diagram, every stage's figures, and two tones at the end. */
-export function ChainResults({ chain, open, onOpen }: ChainResultsProps) {
+/** Where the level went, the level diagram, every stage's figures, and two tones at the end. Drawn anew only with another result. */
+export const ChainResults = memo(function ChainResults({ chain, open, onOpen }: ChainResultsProps) {
   const isPhone = usePhone();
   const Diagram = isPhone ? LevelDiagramPhone : LevelDiagram;
   return (
@@ -90,4 +91,4 @@ export function ChainResults({ chain, open, onOpen }: ChainResultsProps) {
       </Box>
     </>
   );
-}
+});

@@ -1,5 +1,5 @@
 import Box from '@mui/material/Box';
-import type { ReactNode } from 'react';
+import { memo, type ReactNode } from 'react';
 import { CautionBox } from '../../../shared-ui/caution-box';
 import { DataTable } from '../../../shared-ui/data-table';
 import type { Column } from '../../../shared-ui/data-table-types';
@@ -125,7 +125,7 @@ function Picture({ shown: { bar, heat, picture } }: { shown: Shown }) {
 }
 
 /** Caution, picture, tables, and where the rule comes from. */
-export function GuardResults({ shown }: { shown: Shown }) {
+export const GuardResults = memo(function GuardResults({ shown }: { shown: Shown }) {
   const { caution, tables, source, spurs } = shown;
   return (
     <>
@@ -141,4 +141,4 @@ export function GuardResults({ shown }: { shown: Shown }) {
       </Box>
     </>
   );
-}
+});

@@ -76,6 +76,7 @@ export function SpurChart({ picture: { limitDbc, spurs } }: { picture: SpurPictu
         ]}
         grid={{ horizontal: true }}
         hideLegend
+        disableKeyboardNavigation
         skipAnimation
         sx={SX}
       >

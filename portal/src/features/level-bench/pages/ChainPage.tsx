@@ -1,5 +1,5 @@
 import Box from '@mui/material/Box';
-import { useMemo, useState } from 'react';
+import { useCallback, useDeferredValue, useMemo, useState } from 'react';
 import { fixed, signed } from '../../../lib/text';
 import { ChainResults } from '../chain/chain-results';
 import { INPUTS } from '../chain/inputs';
@@ -67,10 +67,12 @@ export default function ChainPage() {
   const [place, words] = Object.entries(stageProblems)[0] ?? [];
   // In the open stage it stands at its field.
   const isAtField = place !== undefined && open !== undefined && place.startsWith(`stages[${open}].`);
-  const openFromDiagram = (index: number) => {
+  // The diagram gives way to the next key.
+  const drawn = useDeferredValue(result);
+  const openFromDiagram = useCallback((index: number) => {
     setOpen(index);
     showStage(index);
-  };
+  }, []);
   return (
     <BenchFrame
       family="chain"
@@ -112,7 +114,7 @@ export default function ChainPage() {
       }
       answer={<AnswerLine cells={result ? answerCells(result) : []} isStale={isStale} />}
     >
-      {result && <ChainResults chain={result} open={open} onOpen={openFromDiagram} />}
+      {drawn && <ChainResults chain={drawn} open={open} onOpen={openFromDiagram} />}
     </BenchFrame>
   );
 }

@@ -1,3 +1,4 @@
+import { useDeferredValue } from 'react';
 import { BenchFrame } from '../frame/bench-frame';
 import { GuardResults } from '../guards/guard-results';
 import { INPUTS, shownOf, type Judge } from '../guards/inputs';
@@ -22,6 +23,8 @@ export default function GuardsPage() {
   const judge = bench.texts.judge as Judge;
   // While another is being worked out, the last one's result does not belong to what is asked.
   const shown = result?.judge === judge ? result : undefined;
+  // The drawings give way to the next key.
+  const drawn = useDeferredValue(shown);
   return (
     <BenchFrame
       family="guards"
@@ -44,7 +47,7 @@ export default function GuardsPage() {
       }
       answer={<AnswerLine cells={shown?.figures ?? []} isStale={isStale} />}
     >
-      {shown && <GuardResults shown={shown} />}
+      {drawn?.judge === judge && <GuardResults shown={drawn} />}
     </BenchFrame>
   );
 }

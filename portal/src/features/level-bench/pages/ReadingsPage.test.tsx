@@ -16,7 +16,7 @@ describe('the readings', () => {
     fireEvent.change(divisions, { target: { value: '6.7' } });
     expect(await screen.findByText('+0.50')).toBeVisible();
     expect(screen.getByText('± 0.39 dB at 95 %')).toBeVisible();
-    expect(within(screen.getByLabelText('Against the window')).getByText('Pass')).toBeVisible();
+    expect(await within(screen.getByLabelText('Against the window')).findByText('Pass')).toBeVisible();
     await waitFor(() =>
       expect(router.state.location.search).toBe(
         '?oscilloscope.voltsPerDivision=10m&oscilloscope.divisionsPeakToPeak=6.7',

@@ -1,4 +1,5 @@
 import Box from '@mui/material/Box';
+import { memo, useDeferredValue } from 'react';
 import { CautionBox } from '../../../shared-ui/caution-box';
 import { DataTable } from '../../../shared-ui/data-table';
 import { SectionHeading } from '../../../shared-ui/section-heading';
@@ -50,7 +51,8 @@ function answerCells(worked: WorkedReading): AnswerCell[] {
   ];
 }
 
-function Results({ worked }: { worked: WorkedReading }) {
+/** Drawn anew only with another result, not with every key. */
+const Results = memo(function Results({ worked }: { worked: WorkedReading }) {
   const rows = budgetRows(worked.reading);
   const others = otherFigures(worked.reading);
   return (
@@ -89,13 +91,15 @@ function Results({ worked }: { worked: WorkedReading }) {
       )}
     </>
   );
-}
+});
 
 /** What an instrument shows, as a figure, how sure it is, and whether it lies in its window. */
 export default function ReadingsPage() {
   const bench = useBench('readings', INPUTS);
   const { result, isStale, problems } = useWorked(bench, work);
   const way = WAYS.find(({ value }) => value === bench.texts.way)?.value ?? 'oscilloscope';
+  // The chart gives way to the next key.
+  const drawn = useDeferredValue(result);
   const spoken = result && [
     sentence(result),
     result.verdict && `${VERDICTS[result.verdict].words}. ${result.advice}`,
@@ -110,7 +114,7 @@ export default function ReadingsPage() {
       inputs={<ReadingInputs bench={bench} way={way} problems={problems} />}
       answer={<AnswerLine cells={result ? answerCells(result) : []} isStale={isStale} />}
     >
-      {result && <Results worked={result} />}
+      {drawn && <Results worked={drawn} />}
     </BenchFrame>
   );
 }

@@ -60,6 +60,7 @@ export function BudgetChart({ rows }: { rows: readonly BudgetRow[] }) {
           ]}
           grid={{ vertical: true }}
           hideLegend
+          disableKeyboardNavigation
           skipAnimation
           sx={SX}
         />

@@ -84,7 +84,6 @@ function tableInputs(): Entries {
   return [
     [key('volts'), quantity('Voltage shown', 'V', '1.66', { when })],
     [key('readToVolts'), quantity('Read to within', 'V', '5m', { when })],
-    [key('padsInLineDb'), quantity('Pads in line', 'dB', '20', { when })],
     ...TABLE_POINTS.flatMap((point): Entries => {
       const [dbm = '', volts = ''] = TABLE_STARTS[point - 1] ?? [];
       return [
@@ -92,6 +91,7 @@ function tableInputs(): Entries {
         [key(`volts${point}`), { ...optional(`Shows ${point}`, 'V', { when }), start: volts }],
       ];
     }),
+    [key('padsInLineDb'), quantity('Pads in line', 'dB', '20', { when })],
   ];
 }
 
