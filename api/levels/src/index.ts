@@ -248,7 +248,9 @@ export type { BaseUnit, Prefix, QuantityUnit } from './quantity-units';
 export { decimalsFor, formatAtLeast, formatAtMost, formatFixed, formatReading, formatSigned } from './format';
 export { formatQuantity, formatUnderstood } from './format-quantity';
 
-export { ENTRY_METHODS, entryFields, methodGives } from './entry-fields';
+export { ENTRY_METHODS, entryFields, METER_UNITS, methodGives, methodUnit } from './entry-fields';
 export type { EntryField, EntryMethod } from './entry-fields';
-export { ASSUMED, meterUnitOf, readEntry, readingFromInputs, scopeInput } from './entry';
-export type { Assumptions, Entry, ReadEntry } from './entry';
+export { meterUnitOf, readEntry } from './entry';
+export type { Entry, ReadEntry } from './entry';
+export { ASSUMED, readingFromInputs, scopeInput } from './entry-readings';
+export type { Assumptions } from './entry-readings';

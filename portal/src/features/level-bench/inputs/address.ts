@@ -8,7 +8,7 @@ export function textsOf(inputs: BenchInputs, search: string): TypedTexts {
     const text = query.get(name);
     if (text === null) return [];
     if (input.kind === 'choice' && !input.options.some(({ value }) => value === text)) return [];
-    return [[name, text.slice(0, LONGEST)]];
+    return [[name, text.slice(0, input.kind === 'words' ? input.longest : LONGEST)]];
   });
   return Object.fromEntries(known) as TypedTexts;
 }

@@ -1,6 +1,7 @@
 import { useState } from 'react';
 import { SelectField } from '../../../shared-ui/fields/select-field';
 import { QuantityField } from '../../../shared-ui/fields/quantity-field';
+import { TextField } from '../../../shared-ui/fields/text-field';
 import { ToggleField } from '../../../shared-ui/fields/toggle-field';
 import { isShown, type BenchInputs } from './fields';
 import type { TypedTexts } from './read-values';
@@ -36,6 +37,11 @@ export function BenchField<F extends BenchInputs>({ bench, name, problems }: Ben
         onBlur={() => setIsTyping(false)}
         error={isTyping ? undefined : problems[name]}
       />
+    );
+  }
+  if (input.kind === 'words') {
+    return (
+      <TextField {...common} name={name} onChange={type} error={problems[name]} maxLength={input.longest} />
     );
   }
   const isWide = input.options.length > SIDE_BY_SIDE || input.options.some(({ label }) => label.length > 16);

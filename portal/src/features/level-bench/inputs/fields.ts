@@ -29,13 +29,30 @@ export interface ChoiceInput<T extends string = string> {
   hint?: ReactNode;
 }
 
-export type BenchInput = QuantityInput | ChoiceInput;
+/** Text a page reads in its own way: a day, a list of stages. */
+export interface WordsInput {
+  kind: 'words';
+  label: string;
+  start: string;
+  /** Letters an address may bring. */
+  longest: number;
+  when?: ShownWhen;
+  hint?: ReactNode;
+}
+
+export type BenchInput = QuantityInput | ChoiceInput | WordsInput;
 
 /** Inputs of a page by name. Name them as the levels package does, so that its errors land on their field. */
 export type BenchInputs = Readonly<Record<string, BenchInput>>;
 
 type ValueOf<I extends BenchInput> =
-  I extends ChoiceInput<infer T> ? T : I extends { isOptional: true } ? number | undefined : number;
+  I extends ChoiceInput<infer T>
+    ? T
+    : I extends WordsInput
+      ? string
+      : I extends { isOptional: true }
+        ? number | undefined
+        : number;
 
 /** What a calculation is given: numbers in SI units and the chosen words. */
 export type BenchValues<F extends BenchInputs> = { [K in keyof F]: ValueOf<F[K]> };
@@ -68,6 +85,12 @@ export const choice = <const T extends string>(
   start: NoInfer<T>,
   more: Pick<ChoiceInput, 'when' | 'hint'> = {},
 ): ChoiceInput<T> => ({ kind: 'choice', label, options, start, ...more });
+
+export const words = (
+  label: string,
+  start: string,
+  more: Pick<WordsInput, 'longest'> & Pick<WordsInput, 'when' | 'hint'>,
+): WordsInput => ({ kind: 'words', label, start, ...more });
 
 /** Whether an input is on the page, given what is chosen. */
 export const isShown = (

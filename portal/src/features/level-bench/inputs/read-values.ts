@@ -25,7 +25,7 @@ const inBaseUnits = (value: number, { unit }: QuantityInput): number =>
 export function readValues<F extends BenchInputs>(inputs: F, texts: TypedTexts): ReadValues<F> {
   const read = Object.entries(inputs).map(([name, input]): [string, Read] => {
     const text = isShown(inputs, name, texts) ? (texts[name] ?? input.start) : input.start;
-    return [name, input.kind === 'choice' ? { value: text } : readQuantity(input, text)];
+    return [name, input.kind === 'quantity' ? readQuantity(input, text) : { value: text }];
   });
   const open = read.filter(([, one]) => !('value' in one));
   if (open.length > 0) {

@@ -4,6 +4,7 @@ import { PageTitle } from '../../../shared-ui/page-title';
 import { token } from '../../../shared-ui/tokens';
 import { usePhone } from '../../../shared-ui/use-phone';
 import { FAMILIES, familyPath } from '../frame/families';
+import { withWayInNames } from '../readings/ways';
 
 const ROW = {
   display: 'block',
@@ -17,7 +18,14 @@ const ROW = {
 export default function LevelBenchPage() {
   const isPhone = usePhone();
   const { search } = useLocation();
-  if (!isPhone) return <Navigate to={{ pathname: familyPath('readings'), search }} replace />;
+  // An address with a way of reading in it is from when this was the readings' own page.
+  const isReading = new URLSearchParams(search).has('way');
+  if (isPhone && !isReading) return <Families />;
+  const to = { pathname: familyPath('readings'), search: isReading ? withWayInNames(search) : search };
+  return <Navigate to={to} replace />;
+}
+
+function Families() {
   return (
     <>
       <PageTitle tab="Level bench">
