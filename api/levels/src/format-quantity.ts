@@ -56,7 +56,11 @@ function prefixFor(size: number, base: BaseUnit, smallestNumber: number): Prefix
 export function formatUnderstood(value: number, unit: QuantityUnit): string {
   const size = Math.abs(value);
   const { prefix, base } = splitUnit(unit);
-  const isLong = BASE_UNITS[base].prefixes.length > 0 && base !== 'ohm' && prefix === undefined && (size < 1 || size >= 1e6);
+  const isLong =
+    BASE_UNITS[base].prefixes.length > 0 &&
+    base !== 'ohm' &&
+    prefix === undefined &&
+    (size < 1 || size >= 1e6);
   const isBeyondText = size >= 1e15 || (size > 0 && size < 1e-6);
   if (isLong || isBeyondText) return formatQuantity(value, unit, 12);
   const [whole = '', fraction] = String(Number(size.toPrecision(12))).split('.');

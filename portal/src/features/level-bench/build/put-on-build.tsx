@@ -78,8 +78,8 @@ function ChooseStage({ family, link, text, place, onDone }: ChooseStageProps) {
         options={stages.map(({ id, words }) => ({ value: id, label: words }))}
       />
       <Typography sx={{ mt: '10px' }}>
-        It stands beside the readings as a note, with what you typed, and opens here again. No verdict rests on
-        it.
+        It stands beside the readings as a note, with what you typed, and opens here again. No verdict rests
+        on it.
       </Typography>
       {putting.isError && <ProblemAlert error={putting.error} title="It was not put there." />}
     </ConfirmDialog>

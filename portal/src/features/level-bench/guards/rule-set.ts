@@ -2,7 +2,7 @@ import { IARU_REGION_1, US_97, type RuleSet } from '@ferrite-row/levels';
 
 const RULE_SETS: Record<RuleSet['id'], RuleSet> = { 'IARU-R1': IARU_REGION_1, 'US-97': US_97 };
 
-/** What stands in the field until somebody chooses: the set the club goes by. */
+/** What stands in the field where the club's own set is not known. */
 export const USUAL_RULE_SET: RuleSet['id'] = 'IARU-R1';
 
 export const RULE_SET_CHOICES = Object.values(RULE_SETS).map(({ id, title }) => ({

@@ -42,6 +42,7 @@ export function useHeavy<N extends TaskName>(
 
   const outcome = done?.input === input ? done?.outcome : undefined;
   if (outcome && 'failure' in outcome) throw new Error(`${task}: ${outcome.failure}`);
-  const problems: TypedTexts = outcome && 'problem' in outcome ? problemAt(page.inputs, page.texts, outcome.problem) : {};
+  const problems: TypedTexts =
+    outcome && 'problem' in outcome ? problemAt(page.inputs, page.texts, outcome.problem) : {};
   return { result: done?.result, isStale: !outcome || !('result' in outcome), problems };
 }

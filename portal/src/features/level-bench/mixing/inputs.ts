@@ -33,10 +33,10 @@ export const INPUTS = {
   ruleSet: choice(
     'Bands of',
     [
-      { value: 'region-1', label: 'Region 1' },
-      { value: 'us', label: 'US' },
+      { value: 'IARU-R1', label: 'Region 1' },
+      { value: 'US-97', label: 'US' },
     ],
-    'region-1',
+    'IARU-R1',
   ),
   ratedDbm: quantity('Rated LO level', 'dBm', '+7.0'),
   sourceDbm: quantity('LO source gives', 'dBm', '10'),

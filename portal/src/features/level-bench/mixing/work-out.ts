@@ -17,7 +17,10 @@ import type { MixingValues } from './inputs';
 import { lastOnly } from './last-only';
 import { tuningOf, type Tuning } from './tuning';
 
-export const RULE_SETS: Record<MixingValues['ruleSet'], RuleSet> = { 'region-1': IARU_REGION_1, us: US_97 };
+export const RULE_SETS: Record<MixingValues['ruleSet'], RuleSet> = {
+  'IARU-R1': IARU_REGION_1,
+  'US-97': US_97,
+};
 
 /** All that the page shows, without a function in it, so that it can cross from a worker. */
 export interface Mixing extends JudgedProducts {

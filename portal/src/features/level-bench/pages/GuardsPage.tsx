@@ -6,6 +6,7 @@ import { inText, spoken } from '../guards/judged';
 import { work } from '../guards/work';
 import { BenchField } from '../inputs/bench-field';
 import { InputGroup, Wide } from '../inputs/input-group';
+import { useClubInputs } from '../inputs/use-club-inputs';
 import { useBench } from '../inputs/use-bench';
 import { AnswerLine } from '../results/answer-line';
 import { ELSEWHERE, useWorked } from '../results/use-worked';
@@ -18,7 +19,7 @@ const isWide = (name: string): boolean => {
 
 /** Instruments, spurious emissions, bands, exposure and heat: what a rule or a part allows, and what it takes to keep to it. */
 export default function GuardsPage() {
-  const bench = useBench('guards', INPUTS);
+  const bench = useBench('guards', useClubInputs(INPUTS));
   const { result, isStale, problems } = useWorked(bench, work);
   const judge = bench.texts.judge as Judge;
   // While another is being worked out, the last one's result does not belong to what is asked.

@@ -3,6 +3,7 @@ import { useMemo } from 'react';
 import { usePhone } from '../../../shared-ui/use-phone';
 import { BenchFrame } from '../frame/bench-frame';
 import { useBench } from '../inputs/use-bench';
+import { useClubInputs } from '../inputs/use-club-inputs';
 import { Answer } from '../mixing/answer';
 import { spokenAnswer } from '../mixing/answer-words';
 import { copiedText } from '../mixing/copied-text';
@@ -18,7 +19,7 @@ import { ELSEWHERE } from '../results/use-worked';
 
 /** Every product of a mixer, judged behind the filter after it, and the drive it is given. */
 export default function MixingPage() {
-  const bench = useBench('mixing', INPUTS);
+  const bench = useBench('mixing', useClubInputs(INPUTS));
   const { result, isStale, problems } = useMixing(bench);
   const isPhone = usePhone();
   const text = useMemo(() => result && copiedText(result), [result]);
