@@ -471,6 +471,56 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/builds/{buildId}/stages/{stageId}/worksheets": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Puts a calculation of the level bench on a stage. */
+        post: operations["Worksheets.put"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/worksheets": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Calculations put on this build. */
+        get: operations["Worksheets.list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/builds/{buildId}/worksheets/{worksheetId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete: operations["Worksheets.takeBack"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/clearances": {
         parameters: {
             query?: never;
@@ -531,6 +581,23 @@ export interface paths {
         /** The club's name, zone and currency. */
         get: operations["Club.front"];
         put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/club/rules": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        /** Chooses by which rules the calculators judge what may be sent. */
+        put: operations["Club.chooseRules"];
         post?: never;
         delete?: never;
         options?: never;
@@ -1417,6 +1484,10 @@ export interface components {
             /** @description The card service's page; the browser goes there. */
             url: string;
         };
+        ChooseRulesDto: {
+            /** @enum {string} */
+            ruleSet: "US-97" | "IARU-R1";
+        };
         ClearanceDto: {
             /** Format: date */
             grantedOn: string;
@@ -1438,6 +1509,11 @@ export interface components {
             perPage: number;
         };
         ClubDto: {
+            /**
+             * @description By which rules the calculators judge what may be sent. The licence and local rules decide.
+             * @enum {string}
+             */
+            ruleSet: "US-97" | "IARU-R1";
             name: string;
             address: string;
             contactEmail: string;
@@ -2101,6 +2177,17 @@ export interface components {
             instance: string;
             errors?: components["schemas"]["FieldProblemDto"][];
         };
+        PutWorksheetDto: {
+            /** @enum {string} */
+            family: "conversions" | "readings" | "mixing" | "pads" | "chain" | "filters" | "matching" | "guards";
+            /**
+             * @description The query of the page's address.
+             * @example LO=23.067&IF=8.867
+             */
+            inputs: string;
+            /** @description The result as plain lines. */
+            result: string;
+        };
         RaiseInvoiceDto: {
             /** Format: uuid */
             personId: string;
@@ -2421,6 +2508,16 @@ export interface components {
              * @enum {string}
              */
             outcome: "acted" | "noted" | "needs a look" | "known";
+        };
+        WorksheetDto: {
+            id: string;
+            stageId: string;
+            /** @enum {string} */
+            family: "readings" | "conversions" | "mixing" | "pads" | "chain" | "filters" | "matching" | "guards";
+            inputs: string;
+            result: string;
+            /** @example 2026-10-15T19:46:00Z */
+            at: string;
         };
     };
     responses: never;
@@ -3475,6 +3572,100 @@ export interface operations {
             };
         };
     };
+    "Worksheets.put": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                stageId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PutWorksheetDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["WorksheetDto"];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Worksheets.list": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["WorksheetDto"][];
+                };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Worksheets.takeBack": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                buildId: string;
+                worksheetId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
     "Clearances.list": {
         parameters: {
             query?: {
@@ -3612,6 +3803,36 @@ export interface operations {
                 content: {
                     "application/json": components["schemas"]["ClubDto"];
                 };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Club.chooseRules": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChooseRulesDto"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
             };
             /** @description A problem document */
             default: {
