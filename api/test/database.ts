@@ -1,5 +1,7 @@
 import { randomBytes } from 'node:crypto';
 import { Client } from 'pg';
+import { DataSource } from 'typeorm';
+import { databaseOptions } from '../src/database/options';
 
 /** Where the tests may make databases; `npm test` starts that server, `node api/scripts/database.mjs` does by hand. */
 function adminUrl(): string {
@@ -40,3 +42,7 @@ export async function createDatabase(): Promise<{ url: string; drop: () => Promi
   await asAdmin(`CREATE DATABASE ${name} TEMPLATE ${templateName()}`);
   return { url: urlOf(name), drop: () => asAdmin(`DROP DATABASE ${name} WITH (FORCE)`) };
 }
+
+/** The tables of such a database as the API's own code sees them. */
+export const openDatabase = (url: string): Promise<DataSource> =>
+  new DataSource(databaseOptions(url)).initialize();

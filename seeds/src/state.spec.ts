@@ -1,16 +1,14 @@
-import { databaseOptions } from '@ferrite-row/api/database/options';
-import { DataSource } from 'typeorm';
-import { createDatabase } from '../../api/test/database';
+import { createDatabase, openDatabase } from '../../api/test/database';
 import { beginSeeding, endSeeding, stateOfClub, wipe } from './state';
 
 describe('whether to seed', () => {
-  let database: DataSource;
+  let database: Awaited<ReturnType<typeof openDatabase>>;
   let drop: () => Promise<void>;
 
   beforeEach(async () => {
     const made = await createDatabase();
     drop = made.drop;
-    database = await new DataSource(databaseOptions(made.url)).initialize();
+    database = await openDatabase(made.url);
   });
   afterEach(async () => {
     await database.destroy();

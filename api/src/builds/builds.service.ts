@@ -1,5 +1,5 @@
 import { Injectable } from '@nestjs/common';
-import { DataSource, IsNull } from 'typeorm';
+import { DataSource } from 'typeorm';
 import { requireMember, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { fieldError } from '../common/common.errors';

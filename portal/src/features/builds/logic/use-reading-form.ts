@@ -33,6 +33,28 @@ function fieldErrors(error: unknown): Record<string, string> {
 const chosenOf = <T extends { id: string; reason: string | null }>(offered: readonly T[], id: string) =>
   offered.find((instrument) => instrument.id === id) ?? offered.find(({ reason }) => reason === null);
 
+/** What it may be read on, and what it is. */
+function useInstruments(buildId: string, check: BuildCheck, chosenId: string) {
+  const choices = useQuery({
+    ...instrumentsQuery(buildId, check.id),
+    enabled: fieldsOf(check).length > 0,
+  });
+  const instruments = choices.data ?? [];
+  const instrument = chosenOf(instruments, chosenId);
+  return {
+    instruments,
+    instrument,
+    /** Why nothing can be kept yet: what it was read on is not known. */
+    waitsFor: instrumentWait(check, {
+      offered: choices.data,
+      hasFailed: choices.isError,
+      isChosen: instrument !== undefined,
+    }),
+    instrumentsProblem: choices.error ?? undefined,
+    askForInstruments: () => void choices.refetch(),
+  };
+}
+
 /** The form of one measured check: what is typed, what it comes to, and keeping it. */
 export function useReadingForm(
   buildId: string,
@@ -49,15 +71,8 @@ export function useReadingForm(
   const keeping = useKeepReading(buildId, check.id);
   const [left, setLeft] = useState<readonly string[]>([]);
   const [ticks, setTicks] = useState<readonly string[]>([]);
-  const choices = useQuery({ ...instrumentsQuery(buildId, check.id), enabled: fields.length > 0 });
   const { entry } = draft.value;
-  const offered = choices.data ?? [];
-  const instrument = chosenOf(offered, draft.value.instrumentId);
-  const waitsFor = instrumentWait(check, {
-    offered: choices.data,
-    hasFailed: choices.isError,
-    isChosen: instrument !== undefined,
-  });
+  const { instrument, waitsFor, ...instruments } = useInstruments(buildId, check, draft.value.instrumentId);
   const live = useMemo(
     () => liveReading(check, entry, instrument?.amplitudeAccuracyDb),
     [check, entry, instrument?.amplitudeAccuracyDb],
@@ -102,11 +117,8 @@ export function useReadingForm(
     leave: (name: string) => setLeft((before) => [...new Set([...before, name])]),
     setTick: (kind: string, isOn: boolean) =>
       setTicks((before) => (isOn ? [...before, kind] : before.filter((other) => other !== kind))),
-    instruments: offered,
-    /** Why nothing can be kept yet: what it was read on is not known. */
+    ...instruments,
     waitsFor,
-    instrumentsProblem: choices.error ?? undefined,
-    askForInstruments: () => void choices.refetch(),
     instrumentId: instrument?.id ?? '',
     setInstrument: (instrumentId: string) => draft.setValue({ ...draft.value, instrumentId }),
     problem: isOnAField ? undefined : (keeping.error ?? undefined),
