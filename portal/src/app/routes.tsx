@@ -74,6 +74,7 @@ const PAGES: RouteObject[] = [
   page('instruments', () => import('../features/instruments/pages/InstrumentsPage')),
   page('level-bench', () => import('../features/level-bench/pages/LevelBenchPage')),
   page('level-bench/conversions', () => import('../features/level-bench/pages/ConversionsPage')),
+  page('level-bench/filters', () => import('../features/level-bench/pages/FiltersPage')),
   page('dues', () => import('../features/dues/pages/DuesPage')),
   page('you', () => import('../features/you/pages/YouPage')),
   ...ROLE_ROUTES,

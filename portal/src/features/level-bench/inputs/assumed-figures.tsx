@@ -8,13 +8,16 @@ interface AssumedFiguresProps {
   figures: readonly (readonly [name: string, figure: string])[];
   /** Where they come from: "Class figures, common practice." */
   source: string;
+  /** One of them cannot be used as it is: its field is shown with what is wrong. */
+  hasProblem?: boolean;
   /** The fields to type one's own, shown on Change. */
   children?: ReactNode;
 }
 
 /** Figures nobody typed, listed so that nobody is fooled by them; they can be typed over. */
-export function AssumedFigures({ figures, source, children }: AssumedFiguresProps) {
-  const [isOpen, setIsOpen] = useState(false);
+export function AssumedFigures({ figures, source, hasProblem = false, children }: AssumedFiguresProps) {
+  const [isAsked, setIsAsked] = useState(false);
+  const isOpen = isAsked || hasProblem;
   return (
     <Box component="section" aria-label="Figures assumed" sx={{ mb: '18px' }}>
       <Typography
@@ -55,7 +58,7 @@ export function AssumedFigures({ figures, source, children }: AssumedFiguresProp
             variant="text"
             sx={{ minHeight: 0, p: 0, verticalAlign: 'baseline', textDecoration: 'underline' }}
             aria-expanded={isOpen}
-            onClick={() => setIsOpen(!isOpen)}
+            onClick={() => setIsAsked(!isOpen)}
           >
             {isOpen ? 'Close' : 'Change'}
           </Button>

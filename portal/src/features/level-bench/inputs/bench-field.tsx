@@ -10,13 +10,20 @@ interface BenchFieldProps<F extends BenchInputs> {
   bench: Bench<F>;
   name: keyof F & string;
   problems: TypedTexts;
+  /** A choice that opens from its field, however few there are: for half a column. */
+  isList?: boolean;
 }
 
 /** More choices than this open from a field instead of lying side by side. */
 const SIDE_BY_SIDE = 4;
 
 /** One input of a page: a quantity, or a choice with all of it in sight when it is small. */
-export function BenchField<F extends BenchInputs>({ bench, name, problems }: BenchFieldProps<F>) {
+export function BenchField<F extends BenchInputs>({
+  bench,
+  name,
+  problems,
+  isList = false,
+}: BenchFieldProps<F>) {
   const [isTyping, setIsTyping] = useState(false);
   const input = bench.inputs[name];
   if (!input || !isShown(bench.inputs, name, bench.texts)) return null;
@@ -38,7 +45,8 @@ export function BenchField<F extends BenchInputs>({ bench, name, problems }: Ben
       />
     );
   }
-  const isWide = input.options.length > SIDE_BY_SIDE || input.options.some(({ label }) => label.length > 16);
+  const isWide =
+    isList || input.options.length > SIDE_BY_SIDE || input.options.some(({ label }) => label.length > 16);
   const Field = isWide ? SelectField : ToggleField;
   return <Field {...common} onChange={type} error={problems[name]} options={input.options} />;
 }

@@ -1,0 +1,48 @@
+import { useMemo } from 'react';
+import { usePhone } from '../../../shared-ui/use-phone';
+import { FilterAssumptions, FilterInputs } from '../filters/filter-inputs';
+import { workFilter } from '../filters/figures';
+import { FilterResults } from '../filters/filter-results';
+import { INPUTS } from '../filters/inputs';
+import { judge } from '../filters/judged';
+import { PartsTable } from '../filters/parts-table';
+import { answerCells, inText, spokenAnswer } from '../filters/words';
+import { BenchFrame } from '../frame/bench-frame';
+import { useHeavy } from '../heavy/use-heavy';
+import { useBench } from '../inputs/use-bench';
+import { AnswerLine } from '../results/answer-line';
+import { ELSEWHERE, useWorked } from '../results/use-worked';
+
+/** Ladders and resonators as real parts will make them, against what a transmitter's rule asks. */
+export default function FiltersPage() {
+  const bench = useBench('filters', INPUTS);
+  const isPhone = usePhone();
+  const { result: figures, isStale, problems: unread } = useWorked(bench, workFilter);
+  const spread = useHeavy('filterBuilds', figures?.asked, INPUTS);
+  const problems = { ...unread, ...spread.problems };
+  const judged = useMemo(() => figures && judge(figures, spread.result), [figures, spread.result]);
+  const cells = useMemo(() => (figures && judged ? answerCells(figures, judged) : []), [figures, judged]);
+  return (
+    <BenchFrame
+      family="filters"
+      link={bench.link}
+      problem={problems[ELSEWHERE]}
+      text={figures && judged && inText(figures, judged)}
+      spoken={figures && judged ? spokenAnswer(figures, judged) : ''}
+      inputs={
+        <>
+          <FilterInputs bench={bench} problems={problems} figures={figures} />
+          {figures && !isPhone && (
+            <PartsTable ladder={figures.fitted} isTrimmed={figures.values.kind === 'band-pass'} />
+          )}
+          <FilterAssumptions bench={bench} problems={problems} figures={figures} />
+        </>
+      }
+      answer={<AnswerLine cells={cells} isStale={isStale} />}
+    >
+      {figures && judged && (
+        <FilterResults figures={figures} judged={judged} built={spread.result} isStale={spread.isStale} />
+      )}
+    </BenchFrame>
+  );
+}
