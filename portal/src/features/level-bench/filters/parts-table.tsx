@@ -1,11 +1,17 @@
 import type { FittedLadder } from '@ferrite-row/levels';
 import Box from '@mui/material/Box';
 import Typography from '@mui/material/Typography';
+import { memo } from 'react';
 import { partCount, partRows } from './parts';
 import { smallTable } from './small-table';
 
+interface PartsTableProps {
+  ladder: FittedLadder;
+  isTrimmed: boolean;
+}
+
 /** What the book says, and what will be fitted. */
-export function PartsTable({ ladder, isTrimmed }: { ladder: FittedLadder; isTrimmed: boolean }) {
+export const PartsTable = memo(function PartsTable({ ladder, isTrimmed }: PartsTableProps) {
   return (
     <Box component="section" aria-label="Parts to fit" sx={{ mb: '18px' }}>
       <Typography
@@ -50,4 +56,4 @@ export function PartsTable({ ladder, isTrimmed }: { ladder: FittedLadder; isTrim
       </Typography>
     </Box>
   );
-}
+});

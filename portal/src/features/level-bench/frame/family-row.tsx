@@ -1,5 +1,6 @@
 import Box from '@mui/material/Box';
-import { NavLink } from 'react-router-dom';
+import { memo } from 'react';
+import { NavLink, useLocation } from 'react-router-dom';
 import { token } from '../../../shared-ui/tokens';
 import { useKeptSearch } from '../inputs/kept-inputs';
 import { FAMILIES, familyPath, type Family } from './families';
@@ -18,6 +19,8 @@ const LINK = {
 } as const;
 
 function FamilyLink({ family, name }: { family: Family; name: string }) {
+  // What is kept is written together with the address.
+  useLocation();
   const search = useKeptSearch(family);
   return (
     <Box component={NavLink} to={`${familyPath(family)}${search}`} sx={LINK}>
@@ -27,7 +30,7 @@ function FamilyLink({ family, name }: { family: Family; name: string }) {
 }
 
 /** The families as a row of words; each opens with what was last typed there. */
-export function FamilyRow() {
+export const FamilyRow = memo(function FamilyRow() {
   return (
     <Box
       component="nav"
@@ -44,4 +47,4 @@ export function FamilyRow() {
       ))}
     </Box>
   );
-}
+});

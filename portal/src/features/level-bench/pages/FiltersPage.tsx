@@ -22,13 +22,17 @@ export default function FiltersPage() {
   const problems = { ...unread, ...spread.problems };
   const judged = useMemo(() => figures && judge(figures, spread.result), [figures, spread.result]);
   const cells = useMemo(() => (figures && judged ? answerCells(figures, judged) : []), [figures, judged]);
+  const text = useMemo(() => figures && judged && inText(figures, judged), [figures, judged]);
+  const spoken = useMemo(() => (figures && judged ? spokenAnswer(figures, judged) : ''), [figures, judged]);
+  // The same element while nothing of it changed: a key then draws its own field and no more.
+  const answer = useMemo(() => <AnswerLine cells={cells} isStale={isStale} />, [cells, isStale]);
   return (
     <BenchFrame
       family="filters"
       link={bench.link}
       problem={problems[ELSEWHERE]}
-      text={figures && judged && inText(figures, judged)}
-      spoken={figures && judged ? spokenAnswer(figures, judged) : ''}
+      text={text}
+      spoken={spoken}
       inputs={
         <>
           <FilterInputs bench={bench} problems={problems} figures={figures} />
@@ -38,7 +42,7 @@ export default function FiltersPage() {
           <FilterAssumptions bench={bench} problems={problems} figures={figures} />
         </>
       }
-      answer={<AnswerLine cells={cells} isStale={isStale} />}
+      answer={answer}
     >
       {figures && judged && (
         <FilterResults figures={figures} judged={judged} built={spread.result} isStale={spread.isStale} />
