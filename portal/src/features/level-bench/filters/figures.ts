@@ -48,15 +48,21 @@ function closeLook({ kind, centreHertz, bandwidthHertz }: FilterValues) {
   return { lowHertz: centreHertz - 1.5 * bandwidthHertz, highHertz: centreHertz + 1.5 * bandwidthHertz };
 }
 
-/** Said here in per cent, as it was typed. */
-function requireTolerance({ toleranceRel }: FilterValues): void {
-  if (toleranceRel >= 0 && toleranceRel <= 0.5) return;
-  throw outside('toleranceRel', 'Part tolerance', toleranceRel, '0 to 50 %');
+const GREATEST_SEED = 2 ** 32 - 1;
+
+/** What the builds will be made from, checked before they are: in the units it was typed in, and at once. */
+function requireSpread({ toleranceRel, seed }: FilterValues): void {
+  if (!(toleranceRel >= 0 && toleranceRel <= 0.5)) {
+    throw outside('toleranceRel', 'Part tolerance', toleranceRel, '0 to 50 %');
+  }
+  if (!Number.isInteger(seed) || seed < 0 || seed > GREATEST_SEED) {
+    throw outside('seed', 'Seed of the builds', seed, `a whole number from 0 to ${GREATEST_SEED}`);
+  }
 }
 
 /** What a filter does, as its parts will make it. */
 export function workFilter(values: FilterValues): FilterFigures {
-  requireTolerance(values);
+  requireSpread(values);
   const fitted = fittedLadder(exactLadder(values), values);
   const { inductorQ, capacitorQ, toleranceRel, seed } = values;
   const q = { inductorQ, capacitorQ };

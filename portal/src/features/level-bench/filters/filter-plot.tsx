@@ -56,7 +56,7 @@ export const FilterPlot = memo(function FilterPlot({ figures, judged, built, isS
         <Drawing {...{ figures, judged, built, isStale, width }} />
         {row && <PlotCursor row={row} x={hertzToX(figures.axis, width)(row.hertz)} width={width} />}
       </Box>
-      <Box role="status" sx={{ minHeight: 20, pl: `${GUTTER}px`, typography: 'small', color: 'token.ink2' }}>
+      <Box role="status" sx={{ minHeight: 36, pl: `${GUTTER}px`, typography: 'small', color: 'token.ink2' }}>
         {row && rowWords(row)}
       </Box>
     </Box>

@@ -41,7 +41,13 @@ export const FilterResults = memo(function FilterResults({
         <CautionBox kind="load before power" name="Your licence and local rules decide.">
           <b>Measure it</b> into a dummy load before On the air.
         </CautionBox>
-        {isPhone && <PartsTable ladder={figures.fitted} isTrimmed={figures.values.kind === 'band-pass'} />}
+        {isPhone && (
+          <PartsTable
+            ladder={figures.fitted}
+            toleranceRel={figures.values.toleranceRel}
+            isTrimmed={figures.values.kind === 'band-pass'}
+          />
+        )}
       </ResponseSection>
     </>
   );

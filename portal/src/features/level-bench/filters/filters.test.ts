@@ -8,8 +8,8 @@ import { axisFor } from './frequencies';
 import { INPUTS, type FilterValues } from './inputs';
 import { judge } from './judged';
 import { limitsOf, misfitWords, ruleWords } from './limits';
-import { partRows } from './parts';
-import { inText } from './words';
+import { farOffWords, partRows } from './parts';
+import { inText } from './letter';
 
 /** The page as it starts, but for what is given. */
 function values(typed: Record<string, string> = {}): FilterValues {
@@ -29,6 +29,14 @@ describe('a filter', () => {
       ['L2, L4', '705 nH', '13 turns, 710 nH'],
       ['C3', '370 pF', '220 + 150 pF'],
     ]);
+  });
+
+  // 567 nH want 11.6 turns at 4.2 nH per turn squared; twelve make 605 nH, 6.7 % more.
+  it('says which parts come out further off than they scatter', () => {
+    const far = (typed: Record<string, string>) =>
+      farOffWords(workFilter(values({ order: '3', ...typed })).fitted, 0.05);
+    expect(far({})).toMatch(/^Further off than the parts scatter: L2 6\.\d % high\./);
+    expect(far({ alNanohenry: '1' })).toBeUndefined();
   });
 
   // A 5-element Butterworth takes 30.11 dB at twice its edge: 10·log(1 + 2^10), Matthaei's formula. Nearest parts move it
@@ -88,6 +96,7 @@ describe('a filter', () => {
     expect(refused({ thirdDbc: '-900' })).toBe('thirdDbc');
     expect(refused({ inductorQ: '0' })).toBe('inductorQ');
     expect(refused({ toleranceRel: '80' })).toBe('toleranceRel');
+    expect(refused({ seed: '1.5' })).toBe('seed');
   });
 });
 

@@ -12,7 +12,7 @@ import { named } from './field-names';
 import type { FilterValues } from './inputs';
 
 /** A_L in nH per turn squared; the field gives henries. */
-export const coreOf = ({ alNanohenry }: Pick<FilterValues, 'alNanohenry'>): number =>
+const coreOf = ({ alNanohenry }: Pick<FilterValues, 'alNanohenry'>): number =>
   Number((alNanohenry * 1e9).toPrecision(12));
 
 const rippleOf = ({ family, returnLossDb }: FilterValues): { rippleDb?: number } =>

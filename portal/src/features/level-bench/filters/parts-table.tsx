@@ -2,16 +2,18 @@ import type { FittedLadder } from '@ferrite-row/levels';
 import Box from '@mui/material/Box';
 import Typography from '@mui/material/Typography';
 import { memo } from 'react';
-import { partCount, partRows } from './parts';
+import { farOffWords, partCount, partRows } from './parts';
 import { smallTable } from './small-table';
 
 interface PartsTableProps {
   ladder: FittedLadder;
+  toleranceRel: number;
+  /** A band-pass of resonators. */
   isTrimmed: boolean;
 }
 
 /** What the book says, and what will be fitted. */
-export const PartsTable = memo(function PartsTable({ ladder, isTrimmed }: PartsTableProps) {
+export const PartsTable = memo(function PartsTable({ ladder, toleranceRel, isTrimmed }: PartsTableProps) {
   return (
     <Box component="section" aria-label="Parts to fit" sx={{ mb: '18px' }}>
       <Typography
@@ -50,7 +52,7 @@ export const PartsTable = memo(function PartsTable({ ladder, isTrimmed }: PartsT
         </tbody>
       </Box>
       <Typography variant="small" component="p" sx={{ m: 0, mt: '6px', color: 'token.ink3' }}>
-        {partCount(ladder)}; two values with a plus lie in parallel.
+        {farOffWords(ladder, toleranceRel)} {partCount(ladder)}; two values with a plus lie in parallel.
         {isTrimmed &&
           ' A trimmer across each resonator takes up what the parts scatter, common practice; the builds here are without.'}
       </Typography>

@@ -1,5 +1,5 @@
-import { formatQuantity, type FittedElement, type FittedLadder } from '@ferrite-row/levels';
-import { capital, counted } from '../../../lib/text';
+import { ENOUGH_REL, formatQuantity, type FittedElement, type FittedLadder } from '@ferrite-row/levels';
+import { capital, counted, fixed } from '../../../lib/text';
 
 export interface PartRow {
   /** "C1, C5". */
@@ -51,4 +51,16 @@ export function partCount({ elements }: FittedLadder): string {
   const coils = elements.filter(({ part }) => part === 'inductor').length;
   const capacitors = elements.reduce((sum, { fitted }) => sum + (fitted?.parts.length ?? 0), 0);
   return `${capital(counted(capacitors, 'capacitor'))} and ${counted(coils, 'coil')}`;
+}
+
+/** Parts that come out further off than they scatter, in words; whole turns on a large core are seldom near. */
+export function farOffWords(ladder: FittedLadder, toleranceRel: number): string | undefined {
+  const off = partRows(ladder)
+    .filter(({ errorRel }) => Math.abs(errorRel) > Math.max(toleranceRel, ENOUGH_REL))
+    .map(
+      ({ names, errorRel }) =>
+        `${names} ${fixed(Math.abs(errorRel) * 100)} % ${errorRel < 0 ? 'low' : 'high'}`,
+    );
+  if (off.length === 0) return undefined;
+  return `Further off than the parts scatter: ${off.join('; ')}. Another core or a finer series comes nearer.`;
 }

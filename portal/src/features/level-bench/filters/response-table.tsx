@@ -6,26 +6,24 @@ import type { ResponseRow } from './response-rows';
 import { smallTable } from './small-table';
 import { megahertz } from './words';
 
-const span = (from: number | undefined, to: number | undefined): string =>
-  from === undefined || to === undefined ? '' : `${fixed(from)} to ${fixed(Math.min(to, 99.9))}`;
+const HEADERS = ['MHz', 'Gain', '95 % between', 'Return loss', '95 % between', 'Needed', 'Worst', 'Verdict'];
 
-/** The plot as a table. */
+/** A loss of a few tenths is told to the hundredth. */
+const gain = (db: number): string => fixed(db, db > -1 ? 2 : 1);
+
+const returnLoss = (db: number): string => fixed(Math.min(db, 99.9));
+
+const span = (from: number | undefined, to: number | undefined, words: (db: number) => string): string =>
+  from === undefined || to === undefined ? '' : `${words(from)} to ${words(to)}`;
+
+/** The plot as a table, in dB. */
 export function ResponseTable({ rows }: { rows: readonly ResponseRow[] }) {
   return (
     <Box tabIndex={0} role="group" aria-label="Response as a table" sx={{ overflowX: 'auto' }}>
       <Box component="table" aria-label="Response" sx={smallTable(30)}>
         <thead>
           <tr>
-            {[
-              'MHz',
-              'Gain, dB',
-              '95 % between',
-              'Return loss, dB',
-              '95 % between',
-              'Needed',
-              'Worst',
-              'Verdict',
-            ].map((header, index) => (
+            {HEADERS.map((header, index) => (
               <th key={index} scope="col">
                 {header}
               </th>
@@ -37,10 +35,10 @@ export function ResponseTable({ rows }: { rows: readonly ResponseRow[] }) {
             ({ hertz, gainDb, gainFromDb, gainToDb, returnLossDb, returnFromDb, returnToDb, limit }) => (
               <tr key={hertz}>
                 <th scope="row">{megahertz(hertz, 2)}</th>
-                <td>{fixed(gainDb, gainDb > -1 ? 2 : 1)}</td>
-                <td>{span(gainFromDb, gainToDb)}</td>
-                <td>{fixed(Math.min(returnLossDb, 99.9))}</td>
-                <td>{span(returnFromDb, returnToDb)}</td>
+                <td>{gain(gainDb)}</td>
+                <td>{span(gainFromDb, gainToDb, gain)}</td>
+                <td>{returnLoss(returnLossDb)}</td>
+                <td>{span(returnFromDb, returnToDb, returnLoss)}</td>
                 <td>{limit && fixed(limit.neededDb)}</td>
                 <td>{limit?.worstDb !== undefined && fixed(limit.worstDb)}</td>
                 <td>

@@ -1,7 +1,7 @@
 import type { FittedElement, FittedLadder } from '@ferrite-row/levels';
 
 /** Where an element stands: its middle on the line, or the node its leg hangs from. */
-export interface PlacedElement {
+interface PlacedElement {
   element: FittedElement;
   x: number;
 }

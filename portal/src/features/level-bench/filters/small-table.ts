@@ -8,7 +8,7 @@ export const smallTable = (rowHeight: number) =>
     fontSize: '0.8125rem',
     '& th, & td': {
       height: rowHeight,
-      p: '2px 0 2px 8px',
+      p: '2px 0 2px 6px',
       borderBottom: `1px solid ${token('rule')}`,
       fontWeight: 400,
       textAlign: 'right',

@@ -11,11 +11,14 @@ const TOP = 18;
 const FOOT = 62;
 const HEIGHT = 80;
 
-/** Words end before the frame does, on whichever side there is room. */
-const anchorAt = (x: number, width: number, isLimit: boolean) => {
-  if (isLimit) return x + 84 > width ? ({ textAnchor: 'end', x: x - 5 } as const) : { x: x + 5 };
-  return { textAnchor: 'middle', x: Math.min(Math.max(x, 16), width - 16) } as const;
-};
+/** Room for "needed 22.0" and for "26.1". */
+const WORDS = { needed: 76, taken: 30 } as const;
+
+/** Beside its line, on the side away from the other one unless the frame ends there. */
+function beside(x: number, other: number, width: number, room: number) {
+  const isLeft = x <= other ? x > room : x + room > width;
+  return isLeft ? ({ x: x - 5, textAnchor: 'end' } as const) : ({ x: x + 5, textAnchor: 'start' } as const);
+}
 
 function Bars({ limit, builds, width }: { limit: JudgedLimit; builds: Float64Array; width: number }) {
   const { from, step, counts } = histogramOf(builds);
@@ -25,7 +28,7 @@ function Bars({ limit, builds, width }: { limit: JudgedLimit; builds: Float64Arr
   ];
   const x = (db: number) => 4 + ((db - low) / (high - low)) * (width - 8);
   const most = Math.max(...counts);
-  const isApart = Math.abs(x(limit.neededDb) - x(limit.takenDb)) > 100;
+  const [needed, taken] = [x(limit.neededDb), x(limit.takenDb)];
   return (
     <>
       <g fill={token('green')} fillOpacity="0.55">
@@ -37,14 +40,14 @@ function Bars({ limit, builds, width }: { limit: JudgedLimit; builds: Float64Arr
         })}
       </g>
       <path d={`M0 ${FOOT}H${width}`} stroke={token('edge')} />
-      <path d={`M${x(limit.neededDb)} 4V${FOOT}`} stroke={token('oxide')} strokeWidth="2" />
-      <path d={`M${x(limit.takenDb)} ${TOP - 4}V${FOOT}`} stroke={token('ink')} strokeWidth="2" />
+      <path d={`M${needed} 2V${FOOT}`} stroke={token('oxide')} strokeWidth="2" />
+      <path d={`M${taken} 2V${FOOT}`} stroke={token('ink')} strokeWidth="2" />
       <g fontSize="11" fontWeight="700">
-        <text {...anchorAt(x(limit.neededDb), width, true)} y={13} fill={token('oxide')}>
-          {isApart ? `needed ${fixed(limit.neededDb)}` : ''}
+        <text {...beside(needed, taken, width, WORDS.needed)} y={11} fill={token('oxide')}>
+          {`needed ${fixed(limit.neededDb)}`}
         </text>
-        <text {...anchorAt(x(limit.takenDb), width, false)} y={11} fill={token('ink')}>
-          {isApart ? fixed(limit.takenDb) : ''}
+        <text {...beside(taken, needed, width, WORDS.taken)} y={11} fill={token('ink')}>
+          {fixed(limit.takenDb)}
         </text>
       </g>
       <g fontSize="10.5" fontWeight="600" fill={token('ink2')} textAnchor="middle">

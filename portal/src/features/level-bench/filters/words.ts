@@ -4,16 +4,14 @@ import type { AnswerCell } from '../results/answer-line';
 import { BUILDS } from './builds';
 import type { FilterFigures } from './figures';
 import { inHand, tightest, type Judged, type JudgedLimit, type JudgedReturnLoss } from './judged';
-import { ruleWords } from './limits';
-import { partRows } from './parts';
 import type { ResponseRow } from './response-rows';
 
 export const megahertz = (hertz: number, decimals = 1): string => fixed(hertz / 1e6, decimals);
 
-const grouped = (count: number): string => count.toLocaleString('en-GB');
+export const grouped = (count: number): string => count.toLocaleString('en-GB');
 
 /** "all 1,000", "979 of 1,000". */
-export const buildsWord = (count: number): string =>
+const buildsWord = (count: number): string =>
   count === BUILDS
     ? `all ${grouped(BUILDS)}`
     : `${count === 0 ? 'none' : grouped(count)} of ${grouped(BUILDS)}`;
@@ -34,17 +32,20 @@ export const returnLossWords = ({ wantedDb, passing }: JudgedReturnLoss): string
     ? `${fixed(wantedDb, 0)} wanted`
     : `${Number(wantedDb.toPrecision(3))} or more in ${buildsWord(passing)}`;
 
+function passingWords(passing: number): string {
+  if (passing === BUILDS) return 'All of them pass';
+  if (passing === 0) return 'None of them passes';
+  return `${capital(buildsWord(passing))} ${passing === 1 ? 'passes' : 'pass'}`;
+}
+
 /** What the histogram shows, as a sentence. */
 export function spreadWords({ passing, worstDb }: JudgedLimit): string | undefined {
   if (passing === undefined || worstDb === undefined) return undefined;
-  const how =
-    passing === BUILDS
-      ? 'All of them pass'
-      : `${capital(buildsWord(passing))} ${passing === 1 ? 'passes' : 'pass'}`;
-  return `${how}. The least is ${fixed(worstDb)} dB.`;
+  return `${passingWords(passing)}. The least is ${fixed(worstDb)} dB.`;
 }
 
-const nameOf = ({ name, hertz }: JudgedLimit): string => `${capital(name)}, ${megahertz(hertz)} MHz`;
+/** "Second harmonic, 28.0 MHz". */
+export const nameOf = ({ name, hertz }: JudgedLimit): string => `${capital(name)}, ${megahertz(hertz)} MHz`;
 
 const SHOWN = 2;
 
@@ -115,45 +116,6 @@ export function plotSummary(figures: FilterFigures, { limits, returnLoss }: Judg
   ]
     .filter(Boolean)
     .join(' ');
-}
-
-const KINDS = { 'low-pass': 'Low-pass', 'high-pass': 'High-pass', 'band-pass': 'Band-pass' } as const;
-
-function designWords({ values }: FilterFigures): string {
-  const { kind, family, order, resonators } = values;
-  const mhz = (hertz: number) => `${Number((hertz / 1e6).toPrecision(6))} MHz`;
-  const size = kind === 'band-pass' ? `${resonators} resonators` : `${order} elements`;
-  const edge = {
-    'low-pass': `edge ${mhz(values.cutoffHertz)}`,
-    'high-pass': `edge ${mhz(values.lowEdgeHertz)}`,
-    'band-pass': `centre ${mhz(values.centreHertz)}, bandwidth ${mhz(values.bandwidthHertz)}`,
-  }[kind];
-  const match =
-    family === 'Chebyshev' ? `, return loss ${Number(values.returnLossDb.toPrecision(3))} dB` : '';
-  return `${KINDS[kind]}, ${family}, ${size}, ${edge}${match}, ${formatQuantity(values.sourceOhms, 'ohm')}`;
-}
-
-/** All of it as plain lines, for a letter. */
-export function inText(figures: FilterFigures, judged: Judged): string {
-  const { values, fitted, against } = figures;
-  const tolerance = Number((values.toleranceRel * 100).toPrecision(3));
-  return [
-    designWords(figures),
-    ...partRows(fitted).map(({ names, exact, nearest }) => `${names}: ${nearest} (exact ${exact})`),
-    `Coil Q ${values.inductorQ}, capacitor Q ${values.capacitorQ}, parts ± ${tolerance} %, ${grouped(BUILDS)} builds from seed ${values.seed}`,
-    ...(against.rule
-      ? [
-          `${against.rule.rule}: ${ruleWords(against.rule, against.carrierWatts)} Source: ${against.rule.source}.`,
-        ]
-      : []),
-    ...judged.limits.map(
-      (limit) =>
-        `${nameOf(limit)}: ${fixed(limit.takenDb)} dB taken, ${fixed(limit.neededDb)} needed, ${inHandWords(limit)}: ${limit.verdict}`,
-    ),
-    `Return loss in the band: ${fixed(judged.returnLoss.db)} dB, ${returnLossWords(judged.returnLoss)}`,
-    `Insertion loss: ${fixed(figures.insertionLossDb, 2)} dB, ${formatQuantity(figures.heatWatts, 'W')} lost as heat`,
-    'Your licence and local rules decide. Measure it into a dummy load before it goes on the air.',
-  ].join('\n');
 }
 
 /** A frequency of the plot, as it is read out: "28.0 MHz. Gain −26.3 dB, …". */

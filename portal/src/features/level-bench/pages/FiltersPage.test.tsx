@@ -50,4 +50,11 @@ describe('the filters page', () => {
       /^28\.00−26\.\d.*22\.024\.\dPass$/,
     );
   });
+
+  it('opens a link to what cannot be with words at its field, and no empty result', async () => {
+    renderPage(<FiltersPage />, { at: `${AT}?seed=1.5` });
+    expect(await screen.findByText(/^Seed of the builds: needed is a whole number/)).toBeVisible();
+    expect(screen.getByText(/^The filter shows here once/)).toBeVisible();
+    expect(screen.queryByLabelText('Answer')).not.toBeInTheDocument();
+  });
 });

@@ -6,7 +6,8 @@ import { FilterResults } from '../filters/filter-results';
 import { INPUTS } from '../filters/inputs';
 import { judge } from '../filters/judged';
 import { PartsTable } from '../filters/parts-table';
-import { answerCells, inText, spokenAnswer } from '../filters/words';
+import { inText } from '../filters/letter';
+import { answerCells, spokenAnswer } from '../filters/words';
 import { BenchFrame } from '../frame/bench-frame';
 import { useHeavy } from '../heavy/use-heavy';
 import { useBench } from '../inputs/use-bench';
@@ -25,7 +26,10 @@ export default function FiltersPage() {
   const text = useMemo(() => figures && judged && inText(figures, judged), [figures, judged]);
   const spoken = useMemo(() => (figures && judged ? spokenAnswer(figures, judged) : ''), [figures, judged]);
   // The same element while nothing of it changed: a key then draws its own field and no more.
-  const answer = useMemo(() => <AnswerLine cells={cells} isStale={isStale} />, [cells, isStale]);
+  const answer = useMemo(
+    () => (cells.length > 0 ? <AnswerLine cells={cells} isStale={isStale} /> : null),
+    [cells, isStale],
+  );
   return (
     <BenchFrame
       family="filters"
@@ -37,15 +41,21 @@ export default function FiltersPage() {
         <>
           <FilterInputs bench={bench} problems={problems} figures={figures} />
           {figures && !isPhone && (
-            <PartsTable ladder={figures.fitted} isTrimmed={figures.values.kind === 'band-pass'} />
+            <PartsTable
+              ladder={figures.fitted}
+              toleranceRel={figures.values.toleranceRel}
+              isTrimmed={figures.values.kind === 'band-pass'}
+            />
           )}
           <FilterAssumptions bench={bench} problems={problems} figures={figures} />
         </>
       }
       answer={answer}
     >
-      {figures && judged && (
+      {figures && judged ? (
         <FilterResults figures={figures} judged={judged} built={spread.result} isStale={spread.isStale} />
+      ) : (
+        <p>The filter shows here once every input can be read; what is amiss stands at its field.</p>
       )}
     </BenchFrame>
   );
