@@ -80,6 +80,7 @@ const PAGES: RouteObject[] = [
   page('level-bench/readings', () => import('../features/level-bench/pages/ReadingsPage')),
   page('level-bench/chain', () => import('../features/level-bench/pages/ChainPage')),
   page('level-bench/guards', () => import('../features/level-bench/pages/GuardsPage')),
+  page('level-bench/filters', () => import('../features/level-bench/pages/FiltersPage')),
   page('dues', () => import('../features/dues/pages/DuesPage')),
   page('you', () => import('../features/you/pages/YouPage')),
   ...ROLE_ROUTES,

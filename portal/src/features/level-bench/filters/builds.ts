@@ -22,6 +22,7 @@ export interface BuildsAsked extends PartQ {
 }
 
 export interface FilterBuilds {
+  limitHertz: Float64Array;
   bands: SpreadBands;
   /** For each of `limitHertz`: every build's rejection against the carrier, dB. */
   rejectionsDb: Float64Array[];
@@ -40,11 +41,12 @@ export function filterBuilds(asked: BuildsAsked): FilterBuilds {
   const atLimits = built(Float64Array.of(carrierHertz, ...limitHertz));
   const inBand = built(bandHertz);
   return {
+    limitHertz,
     bands: spreadBands(built(plotHertz), PERCENTILES),
     rejectionsDb: Array.from(limitHertz, (_hertz, index) =>
       eachBuild((build) => {
         const row = build * (limitHertz.length + 1);
-        return (atLimits.gainDb[row] ?? NaN) - (atLimits.gainDb[row + index + 1] ?? NaN);
+        return atLimits.gainDb[row] - atLimits.gainDb[row + index + 1];
       }),
     ),
     bandReturnLossDb: eachBuild((build) =>

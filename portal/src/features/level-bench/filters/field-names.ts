@@ -13,3 +13,7 @@ export function named<R>(names: Readonly<Record<string, string>>, work: () => R)
     throw new OutOfDomainError(names[input] ?? input, value, permitted, message, suggestion);
   }
 }
+
+/** An error for a field of the page, in its own words and units: "Part tolerance: needed is 0 to 50 %." */
+export const outside = (input: string, label: string, value: number, permitted: string): OutOfDomainError =>
+  new OutOfDomainError(input, value, permitted, `${label}: needed is ${permitted}.`);

@@ -1,6 +1,6 @@
 import Box from '@mui/material/Box';
 import { memo } from 'react';
-import { NavLink } from 'react-router-dom';
+import { NavLink, useLocation } from 'react-router-dom';
 import { token } from '../../../shared-ui/tokens';
 import { useKeptSearch } from '../inputs/kept-inputs';
 import { FAMILIES, familyPath, type Family } from './families';
@@ -19,6 +19,8 @@ const LINK = {
 } as const;
 
 function FamilyLink({ family, name }: { family: Family; name: string }) {
+  // What is kept is written together with the address.
+  useLocation();
   const search = useKeptSearch(family);
   return (
     <Box component={NavLink} to={`${familyPath(family)}${search}`} sx={LINK}>

@@ -1,4 +1,4 @@
-import { useEffect, useState } from 'react';
+import { startTransition, useEffect, useState } from 'react';
 import type { BenchInputs } from '../inputs/fields';
 import type { TypedTexts } from '../inputs/read-values';
 import { problemAt, type Worked } from '../results/use-worked';
@@ -31,11 +31,14 @@ export function useHeavy<N extends TaskName>(
     latestOnly(
       (wanted: TaskInput<N>) => ask(task, wanted),
       (worked, outcome) =>
-        setDone((before) => ({
-          input: worked,
-          outcome,
-          result: 'result' in outcome ? outcome.result : before?.result,
-        })),
+        // In slices, so that a key pressed meanwhile comes first.
+        startTransition(() =>
+          setDone((before) => ({
+            input: worked,
+            outcome,
+            result: 'result' in outcome ? outcome.result : before?.result,
+          })),
+        ),
     ),
   );
   useEffect(() => want(input), [want, input]);

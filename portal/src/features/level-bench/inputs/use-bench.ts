@@ -1,4 +1,4 @@
-import { useEffect, useState } from 'react';
+import { useCallback, useEffect, useState } from 'react';
 import { useLocation, useNavigate } from 'react-router-dom';
 import { useDraftOwner } from '../../../shared-ui/draft-owner';
 import type { Family } from '../frame/families';
@@ -15,7 +15,8 @@ export interface Bench<F extends BenchInputs> {
   inputs: F;
   /** Text of every input, as typed or as it started. */
   texts: TypedTexts;
-  type: (name: keyof F & string, text: string) => void;
+  /** The same function as long as the page stands. */
+  type: (name: string, text: string) => void;
   /** The address that holds all this, for a link to somebody else. */
   link: () => string;
 }
@@ -52,13 +53,18 @@ export function useBench<F extends BenchInputs>(family: Family, inputs: F): Benc
     return () => clearTimeout(timer);
   }, [family, inputs, navigate, owner, typed, written]);
 
+  const type = useCallback(
+    (name: string, text: string) => setTyped((before) => ({ ...before, [name]: text })),
+    [],
+  );
+
   return {
     family,
     inputs,
     texts: Object.fromEntries(
       Object.entries(inputs).map(([name, { start }]) => [name, typed[name] ?? start]),
     ),
-    type: (name, text) => setTyped((before) => ({ ...before, [name]: text })),
+    type,
     link: () => {
       const query = searchOf(inputs, typed);
       return `${location.origin}${pathname}${query && `?${query}`}`;

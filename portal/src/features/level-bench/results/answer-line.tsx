@@ -34,7 +34,7 @@ export function AnswerLine({ cells, isStale }: AnswerLineProps) {
         display: 'grid',
         gridTemplateColumns: {
           xs: cells.length > 1 ? '1fr 1fr' : '1fr',
-          md: cells.map(({ share = 1 }) => `minmax(0, ${share}fr)`).join(' '),
+          lg: cells.map(({ share = 1 }) => `minmax(0, ${share}fr)`).join(' '),
         },
         border: '1.5px solid',
         borderColor: 'token.ink',

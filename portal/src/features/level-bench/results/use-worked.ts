@@ -1,5 +1,5 @@
 import { LevelsError } from '@ferrite-row/levels';
-import { useEffect, useMemo, useState } from 'react';
+import { startTransition, useEffect, useMemo, useState } from 'react';
 import { isShown, type BenchInputs, type BenchValues } from '../inputs/fields';
 import { readValues, type TypedTexts } from '../inputs/read-values';
 import type { Bench } from '../inputs/use-bench';
@@ -18,11 +18,11 @@ export interface Worked<R> {
   problems: TypedTexts;
 }
 
-/** A value once it has rested for 80 ms. */
+/** A value once it has rested for 80 ms. What follows from it is drawn in slices, and gives way to the next key. */
 export function useSettled<T>(value: T, ms = SETTLE_MS): T {
   const [settled, setSettled] = useState(value);
   useEffect(() => {
-    const timer = setTimeout(() => setSettled(value), ms);
+    const timer = setTimeout(() => startTransition(() => setSettled(value)), ms);
     return () => clearTimeout(timer);
   }, [value, ms]);
   return settled;
