@@ -11,7 +11,7 @@ import {
   scanProducts,
   spreadBands,
 } from '../dist/index.js';
-import { plainObjectResponse } from './plain-object-complex.mjs';
+import { libraryResponse } from './library-response.mjs';
 
 const say = (text) => process.stdout.write(`${text}\n`);
 /** A package that may be there or not; what is not installed is not measured, and the output says so. */
@@ -62,7 +62,7 @@ function products() {
   );
 }
 
-async function response() {
+function response() {
   const nine = {
     family: 'Chebyshev',
     order: 9,
@@ -81,16 +81,7 @@ async function response() {
   say(
     `Response of 9 elements at 2,001 frequencies: ${middle(Array.from({ length: 31 }, () => timed(ours))).toFixed(3)} ms`,
   );
-  // The library goes first and alone: two kinds of number through one piece of code would slow both.
-  const library = await optional('complex.js');
-  if (library === undefined) {
-    say('  complex.js: not installed, so not compared (20 at least is asked for)');
-    against('plain-object complex class (own baseline, no library)', () =>
-      plainObjectResponse(ladder, hertz, 180),
-    );
-  } else {
-    against('complex.js (20 at least)', () => plainObjectResponse(ladder, hertz, 180, library.default));
-  }
+  against('complex.js (20 at least)', () => libraryResponse(ladder, hertz, 180));
 }
 
 function spread() {
@@ -154,6 +145,6 @@ async function size() {
 }
 
 products();
-await response();
+response();
 spread();
 await size();

@@ -2,7 +2,6 @@ import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query
 import { api, unwrap } from '../../../api-client/client';
 import type { components } from '../../../api-client/schema';
 
-export type Worksheet = components['schemas']['WorksheetDto'];
 type PutWorksheet = components['schemas']['PutWorksheetDto'];
 type Build = components['schemas']['BuildDto'];
 

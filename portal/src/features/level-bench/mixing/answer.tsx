@@ -3,7 +3,7 @@ import { memo, type ReactNode } from 'react';
 import { signed } from '../../../lib/text';
 import { token } from '../../../shared-ui/tokens';
 import { driveWords, placeWords, sidebandFigure, sidebandWords } from './answer-words';
-import { PadDrawing } from './pad-drawing';
+import { DrivePad } from './drive-pad';
 import { megahertz } from './words';
 import type { Mixing } from './work-out';
 
@@ -103,7 +103,7 @@ export const Answer = memo(function Answer({ mixing, isStale }: { mixing: Mixing
             <b>{advice}</b> {then}
           </>
         }
-        drawing={drive.pad && <PadDrawing pad={drive.pad} />}
+        drawing={drive.pad && <DrivePad pad={drive.pad} />}
       />
     </Box>
   );

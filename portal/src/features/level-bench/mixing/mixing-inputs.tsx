@@ -6,7 +6,7 @@ import { usePhone } from '../../../shared-ui/use-phone';
 import { AssumedFigures } from '../inputs/assumed-figures';
 import { InputGroup, Wide } from '../inputs/input-group';
 import { readValues, type TypedTexts } from '../inputs/read-values';
-import { SteadyField } from '../inputs/steady-field';
+import { BenchField } from '../inputs/bench-field';
 import type { Bench } from '../inputs/use-bench';
 import { assumedFigures } from './assumed';
 import { ASSUMED, INPUTS, OF_THE_SAMPLE, type MixingInputName, type MixingValues } from './inputs';
@@ -34,7 +34,7 @@ const OWN_FILTER = [
 /** What goes into the mixer, what drives it, and what is taken for granted. */
 export function MixingInputs({ bench, problems, values }: MixingInputsProps) {
   const isPhone = usePhone();
-  const field = (name: MixingInputName) => <SteadyField key={name} {...{ bench, name, problems }} />;
+  const field = (name: MixingInputName) => <BenchField key={name} {...{ bench, name, problems }} />;
   const filter = (
     <>
       <Wide>
@@ -91,7 +91,7 @@ const Assumed = memo(
     return (
       <AssumedFigures figures={assumedFigures(values)} source="Class figures, common practice.">
         {ASSUMED.map((name) => (
-          <SteadyField key={name} {...{ bench, name, problems }} />
+          <BenchField key={name} {...{ bench, name, problems }} />
         ))}
       </AssumedFigures>
     );

@@ -19,7 +19,7 @@ export default function FiltersPage() {
   const bench = useBench('filters', INPUTS);
   const isPhone = usePhone();
   const { result: figures, isStale, problems: unread } = useWorked(bench, workFilter);
-  const spread = useHeavy('filterBuilds', figures?.asked, INPUTS);
+  const spread = useHeavy('filterBuilds', figures?.asked, bench);
   const problems = { ...unread, ...spread.problems };
   const judged = useMemo(() => figures && judge(figures, spread.result), [figures, spread.result]);
   const cells = useMemo(() => (figures && judged ? answerCells(figures, judged) : []), [figures, judged]);

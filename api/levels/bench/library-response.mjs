@@ -1,32 +1,9 @@
 // A ladder's response the way one writes it with a general complex-number library: a new object for every number, a
-// matrix for every element. It stands in for such a library while none is installed; a library may be handed in.
-
-/** Immutable complex numbers, as libraries have them. */
-class PlainObjectComplex {
-  constructor(re, im) {
-    this.re = re;
-    this.im = im;
-  }
-  add(other) {
-    return new PlainObjectComplex(this.re + other.re, this.im + other.im);
-  }
-  mul(other) {
-    return new PlainObjectComplex(
-      this.re * other.re - this.im * other.im,
-      this.re * other.im + this.im * other.re,
-    );
-  }
-  inverse() {
-    const size = this.re * this.re + this.im * this.im;
-    return new PlainObjectComplex(this.re / size, -this.im / size);
-  }
-  abs() {
-    return Math.hypot(this.re, this.im);
-  }
-}
+// matrix for every element.
+import Complex from 'complex.js';
 
 /** Gain over frequency, dB; coils of a finite Q, capacitors without loss. */
-export function plainObjectResponse(ladder, hertz, inductorQ, Complex = PlainObjectComplex) {
+export function libraryResponse(ladder, hertz, inductorQ) {
   const number = (re, im = 0) => new Complex(re, im);
   const { sourceOhms, loadOhms } = ladder;
   return Array.from(hertz, (frequency) => {
