@@ -11,6 +11,7 @@ import { browserStep } from './lib/testing/browser.mjs';
 import { drift } from './lib/testing/drift.mjs';
 import { gates } from './lib/testing/gates.mjs';
 import { help, readOptions } from './lib/testing/options.mjs';
+import { restartStep } from './lib/testing/restart.mjs';
 import { runners } from './lib/testing/runners.mjs';
 import { closingLine, inWords } from './lib/testing/tally.mjs';
 import { openThrowAway } from './lib/testing/throw-away.mjs';
@@ -22,7 +23,7 @@ import { openThrowAway } from './lib/testing/throw-away.mjs';
  */
 
 /** @type {Step[]} */
-const steps = [...gates, ...drift, ...runners, browserStep];
+const steps = [...gates, ...drift, restartStep, ...runners, browserStep];
 
 /**
  * @param {Step[]} chosen

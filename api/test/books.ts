@@ -1,6 +1,6 @@
 import type supertest from 'supertest';
 import type { Actor } from '../src/common/actor';
-import { ClubService } from '../src/club/club.service';
+import { ClubService, type ClubSettings } from '../src/club/club.service';
 import { LedgerService } from '../src/ledger/ledger.service';
 import type {
   StatementDetailDto,
@@ -11,12 +11,13 @@ import { startTestApp, TEST_NOW, type TestApp } from './app';
 import { treasurer } from './factories/dues.factory';
 import { someoneWith } from './factories/person.factory';
 
-const LARKMOOR = {
+const LARKMOOR: ClubSettings = {
   name: 'Larkmoor Radio Builders',
   address: 'Millbeck Hall, Larkmoor',
   contactEmail: 'treasurer@larkmoor.example',
   timeZone: 'Europe/London',
   currency: 'GBP',
+  ruleSet: 'IARU-R1',
   accountNumber: '00-41-17 3006 4417',
   accountName: 'Larkmoor Radio Builders',
 };

@@ -54,7 +54,10 @@ describe('worksheets', () => {
   });
 
   it('stand on a stage of that build only', async () => {
-    await started.agent.post(started.at(`/stages/${NOBODY}/worksheets`)).send(SHEET).expect(404);
+    await started.agent
+      .post(started.at(`/stages/${NOBODY}/worksheets`))
+      .send(SHEET)
+      .expect(404);
   });
 });
 

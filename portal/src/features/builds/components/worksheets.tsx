@@ -27,7 +27,11 @@ export function Worksheets({ buildId, stageId, isOwn }: WorksheetsProps) {
       <SectionHeading>From the level bench</SectionHeading>
       {takingBack.isError && <ProblemAlert error={takingBack.error} title="It still stands there." />}
       {sheets.map((sheet) => (
-        <Sheet key={sheet.id} sheet={sheet} onTakeBack={isOwn ? () => takingBack.mutate(sheet.id) : undefined} />
+        <Sheet
+          key={sheet.id}
+          sheet={sheet}
+          onTakeBack={isOwn ? () => takingBack.mutate(sheet.id) : undefined}
+        />
       ))}
     </Box>
   );

@@ -37,7 +37,7 @@ const SHAPES: Record<PadDrawingProps['size'], Shape> = {
     heights: [140, 176],
     lines: [56, 94],
     bridge: 40,
-    margin: 0.22,
+    margin: 0.26,
     box: { length: 58, breadth: 18 },
     font: 14,
   },
