@@ -22,6 +22,9 @@ import { openThrowAway } from './lib/testing/throw-away.mjs';
  * @typedef {import('./lib/testing/step.mjs').Outcome} Outcome
  */
 
+/** Compilers and linters make much that lives a moment: a larger nursery spares them a tenth of their time. */
+const ROOMY = { NODE_OPTIONS: '--max-semi-space-size=64' };
+
 /** @type {Step[]} */
 const steps = [...gates, ...drift, restartStep, ...runners, browserStep];
 
@@ -37,7 +40,7 @@ async function setUp(chosen, session) {
   if (usesCluster) debian.add('postgresql');
   await installMissing(run, [...debian], session.signal);
   const cluster = usesCluster ? await clusterOf(run, true, session.signal) : null;
-  return { run, cluster, env: { ...withoutOurs(process.env), TZ: 'UTC' }, signal: session.signal };
+  return { run, cluster, env: { ...withoutOurs(process.env), ...ROOMY, TZ: 'UTC' }, signal: session.signal };
 }
 
 /** @param {Step} step @param {Bench} bench @returns {Promise<Outcome>} */

@@ -27,7 +27,7 @@ export function DemoAccounts({ accounts, onChoose }: DemoAccountsProps) {
       <Box sx={{ display: 'flex', flexWrap: 'wrap', gap: '8px' }}>
         {accounts.map(({ email, role }) => (
           <Button key={email} size="small" title={email} onClick={() => onChoose(email, DEMO_PASSWORD)}>
-            {capital(role)}
+            {email === 'member2@larkmoor.example' ? 'Second member' : capital(role)}
           </Button>
         ))}
       </Box>
