@@ -71,7 +71,7 @@ describe('a field that is not there', () => {
 
   const send = (method: string, route: string, body: unknown) => {
     const address = route.replaceAll(/\{[^}]+\}/g, ANY_ID);
-    return (method === 'patch' ? everybody.patch(address) : everybody.post(address)).send(body as object);
+    return everybody[method as 'post' | 'put' | 'patch'](address).send(body as object);
   };
   const detailAt = (body: unknown, pointer: string): string | undefined =>
     (body as { errors?: { pointer: string; detail: string }[] }).errors?.find(
