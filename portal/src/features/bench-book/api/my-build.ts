@@ -1,5 +1,3 @@
-import { queryOptions } from '@tanstack/react-query';
-import { api, unwrap } from '../../../api-client/client';
 import type { components } from '../../../api-client/schema';
 
 type Build = components['schemas']['BuildDto'];
@@ -22,8 +20,3 @@ export function openChecks(builds: readonly Build[], askedCheckId: string): Open
     ),
   );
 }
-
-export const myBuildsQuery = queryOptions({
-  queryKey: ['builds', 'mine'],
-  queryFn: () => unwrap(api.GET('/api/builds/mine')),
-});

@@ -1,11 +1,12 @@
 import Box from '@mui/material/Box';
 import { useQuery } from '@tanstack/react-query';
 import { useWatch, type UseFormReturn } from 'react-hook-form';
+import { myBuildsQuery } from '../../../api-client/my-builds';
 import { lengthText } from '../../../lib/club-time-text';
 import { FormSelect, FormText } from '../../../shared-ui/form/form-fields';
 import { ProblemAlert } from '../../../shared-ui/problem-alert';
 import { bookingsQuery, instrumentsQuery, myGroupsQuery, type Bench, type FreeTime } from '../api/bench-book';
-import { myBuildsQuery, openChecks } from '../api/my-build';
+import { openChecks } from '../api/my-build';
 import {
   clockProblem,
   endProblem,

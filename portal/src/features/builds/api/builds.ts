@@ -1,5 +1,6 @@
 import { queryOptions, useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import { api, unwrap } from '../../../api-client/client';
+import { myBuildsQuery, myBuildSummariesQuery } from '../../../api-client/my-builds';
 import type { components } from '../../../api-client/schema';
 
 export type Build = components['schemas']['BuildDto'];
@@ -12,16 +13,6 @@ type KeepReading = components['schemas']['KeepReadingDto'];
 
 /** Everything about builds; whatever is written to one makes all of it stale. */
 const BUILDS = ['builds'] as const;
-
-const myBuildsQuery = queryOptions({
-  queryKey: [...BUILDS, 'mine'],
-  queryFn: () => unwrap(api.GET('/api/builds/mine')),
-});
-
-const summariesQuery = queryOptions({
-  queryKey: [...BUILDS, 'summaries'],
-  queryFn: () => unwrap(api.GET('/api/builds/mine/summary')),
-});
 
 const buildQuery = (buildId: string) =>
   queryOptions({
@@ -47,8 +38,7 @@ export const instrumentsQuery = (buildId: string, checkId: string) =>
   });
 
 export const useMyBuilds = () => useQuery(myBuildsQuery);
-/** Only how far they are: what a page asks that shows none of what is in them. */
-export const useMyBuildSummaries = () => useQuery(summariesQuery);
+export const useMyBuildSummaries = () => useQuery(myBuildSummariesQuery);
 export const useBuild = (buildId: string) => useQuery(buildQuery(buildId));
 
 /** A mutation after which builds, and the queue of those who wait, are asked anew. */

@@ -3,12 +3,13 @@ import Typography from '@mui/material/Typography';
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import { carryOut } from '../../../api-client/carry-out';
+import { myBuildSummariesQuery } from '../../../api-client/my-builds';
 import { ConfirmDialog } from '../../../shared-ui/confirm-dialog';
 import { SelectField } from '../../../shared-ui/fields/select-field';
 import { ProblemAlert } from '../../../shared-ui/problem-alert';
 import { useToast } from '../../../shared-ui/toasts';
 import type { Family } from '../frame/families';
-import { liveBuildsQuery, placeOf, usePutWorksheet, type Place } from './worksheets';
+import { placeOf, usePutWorksheet, type Place } from './worksheets';
 
 interface PutOnBuildProps {
   family: Family;
@@ -21,7 +22,7 @@ interface PutOnBuildProps {
 /** Puts a result on a stage of one's own build, for oneself and for the mentor who looks at it. */
 export function PutOnBuild({ family, link, text }: PutOnBuildProps) {
   const [isOpen, setIsOpen] = useState(false);
-  const builds = useQuery(liveBuildsQuery);
+  const builds = useQuery(myBuildSummariesQuery);
   const place = placeOf(builds.data ?? []);
   if (!place) return null;
   return (

@@ -1,14 +1,9 @@
-import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
+import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { api, unwrap } from '../../../api-client/client';
 import type { components } from '../../../api-client/schema';
 
 type PutWorksheet = components['schemas']['PutWorksheetDto'];
-type Build = components['schemas']['BuildDto'];
-
-export const liveBuildsQuery = queryOptions({
-  queryKey: ['builds', 'mine'],
-  queryFn: () => unwrap(api.GET('/api/builds/mine')),
-});
+type BuildSummary = components['schemas']['BuildSummaryDto'];
 
 /** Where a calculation can be put: the stages of one's build under way, and the one that is on the bench. */
 export interface Place {
@@ -17,7 +12,7 @@ export interface Place {
   currentStageId: string;
 }
 
-export function placeOf(builds: readonly Build[]): Place | undefined {
+export function placeOf(builds: readonly BuildSummary[]): Place | undefined {
   const build = builds.find(({ endedAt }) => endedAt === null);
   if (!build) return undefined;
   const stages = build.stages.map(({ id, position, name }) => ({ id, words: `${position} ${name}` }));

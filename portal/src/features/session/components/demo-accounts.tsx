@@ -12,6 +12,12 @@ interface DemoAccountsProps {
   onChoose: (email: string, password: string) => void;
 }
 
+/** The role, counted from the second holder on: 'Member', 'Member 2'. */
+function nameOf(upTo: DemoAccountsProps['accounts'], role: string): string {
+  const count = upTo.filter((account) => account.role === role).length;
+  return count === 1 ? capital(role) : `${capital(role)} ${count}`;
+}
+
 /** In the demo club only: its accounts, one press to fill the form. */
 export function DemoAccounts({ accounts, onChoose }: DemoAccountsProps) {
   if (accounts.length === 0) return null;
@@ -25,9 +31,9 @@ export function DemoAccounts({ accounts, onChoose }: DemoAccountsProps) {
         <span style={{ whiteSpace: 'nowrap' }}>{DEMO_PASSWORD}</span>.
       </Typography>
       <Box sx={{ display: 'flex', flexWrap: 'wrap', gap: '8px' }}>
-        {accounts.map(({ email, role }) => (
+        {accounts.map(({ email, role }, index) => (
           <Button key={email} size="small" title={email} onClick={() => onChoose(email, DEMO_PASSWORD)}>
-            {email === 'member2@larkmoor.example' ? 'Second member' : capital(role)}
+            {nameOf(accounts.slice(0, index + 1), role)}
           </Button>
         ))}
       </Box>
