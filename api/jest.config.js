@@ -1,6 +1,6 @@
 /**
  * One Jest for everything that runs on the server: the API, the levels package, the fakes and the seeds.
- * swc does not check types; `tsc` is its own gate.
+ * swc does not check types; lint does.
  */
 module.exports = {
   testEnvironment: 'node',

@@ -1,5 +1,6 @@
 import reactHooks from 'eslint-plugin-react-hooks';
 import tseslint from 'typescript-eslint';
+import { typeErrors } from './lib/testing/type-errors.rule.mjs';
 
 export default tseslint.config(
   {
@@ -18,7 +19,9 @@ export default tseslint.config(
   {
     linterOptions: { reportUnusedDisableDirectives: 'error' },
     languageOptions: { parserOptions: { projectService: true } },
+    plugins: { house: { rules: { 'type-errors': typeErrors } } },
     rules: {
+      'house/type-errors': 'error',
       eqeqeq: 'error',
       'no-console': 'error',
       '@typescript-eslint/consistent-type-imports': [

@@ -9,10 +9,10 @@ import { runSession } from './lib/session.mjs';
 import { withoutOurs } from './lib/product/settings.mjs';
 import { browserStep } from './lib/testing/browser.mjs';
 import { drift } from './lib/testing/drift.mjs';
-import { gates } from './lib/testing/gates.mjs';
+import { buildStep, gates, lintPortal, lintServer } from './lib/testing/gates.mjs';
 import { help, readOptions } from './lib/testing/options.mjs';
 import { restartStep } from './lib/testing/restart.mjs';
-import { runners } from './lib/testing/runners.mjs';
+import { jestStep, scriptsStep, vitestStep } from './lib/testing/runners.mjs';
 import { closingLine, inWords } from './lib/testing/tally.mjs';
 import { openThrowAway } from './lib/testing/throw-away.mjs';
 
@@ -25,8 +25,23 @@ import { openThrowAway } from './lib/testing/throw-away.mjs';
 /** Compilers and linters make much that lives a moment: a larger nursery spares them a tenth of their time. */
 const ROOMY = { NODE_OPTIONS: '--max-semi-space-size=64' };
 
-/** @type {Step[]} */
-const steps = [...gates, ...drift, restartStep, ...runners, browserStep];
+/**
+ * The order is a matter of time on two cores: the long ones that use a core each go first, side by side, the short
+ * ones fill what is left, and the runners that use every core come last.
+ * @type {Step[]}
+ */
+const steps = [
+  buildStep,
+  lintPortal,
+  browserStep,
+  lintServer,
+  restartStep,
+  ...gates,
+  ...drift,
+  scriptsStep,
+  vitestStep,
+  jestStep,
+];
 
 /**
  * @param {Step[]} chosen

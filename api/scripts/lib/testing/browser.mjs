@@ -61,7 +61,6 @@ export const browserStep = {
   name: 'browser',
   about: 'the stories, in Chromium against the built product',
   needs: ['build'],
-  alone: true,
   usesCluster: true,
   debian: ['chromium', 'fonts-liberation'],
   work: browser,

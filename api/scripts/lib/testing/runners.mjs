@@ -44,17 +44,22 @@ function vitest(bench) {
   return runnerOutcome(bench, command, report, countJest);
 }
 
-/** @type {import('./step.mjs').Step[]} */
-export const runners = [
-  { name: 'scripts', about: 'specs of these commands', work: scripts },
-  // Both use every core themselves, and what they time should not wait for a compiler.
-  { name: 'vitest', about: 'specs of the portal', alone: true, work: vitest },
-  {
-    name: 'jest',
-    about: 'specs of the API, the levels, the fakes and the seeds',
-    alone: true,
-    usesCluster: true,
-    debian: ['ngspice'],
-    work: jest,
-  },
-];
+/** @typedef {import('./step.mjs').Step} Step */
+
+/** @type {Step} */
+export const scriptsStep = { name: 'scripts', about: 'specs of these commands', work: scripts };
+
+// Both use every core themselves, and what they time should not wait for a compiler.
+
+/** @type {Step} */
+export const vitestStep = { name: 'vitest', about: 'specs of the portal', alone: true, work: vitest };
+
+/** @type {Step} */
+export const jestStep = {
+  name: 'jest',
+  about: 'specs of the API, the levels, the fakes and the seeds',
+  alone: true,
+  usesCluster: true,
+  debian: ['ngspice'],
+  work: jest,
+};

@@ -51,9 +51,14 @@ export const gateOutcome = (isOk, output) => ({
  * A gate that is one of package.json's scripts.
  * @param {Bench} bench
  * @param {string} script
+ * @param {string[]} args
  */
-export async function npmGate(bench, script) {
-  const { isOk, output } = await runCommand(bench, { name: script, ...npm(['run', '--silent', script]) });
+export async function npmGate(bench, script, args = []) {
+  const name = [script, ...args].join(' ').replaceAll(/[^\w :-]/g, '');
+  const { isOk, output } = await runCommand(bench, {
+    name,
+    ...npm(['run', '--silent', script, '--', ...args]),
+  });
   return gateOutcome(isOk, output);
 }
 
