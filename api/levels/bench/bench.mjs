@@ -12,6 +12,7 @@ import {
   spreadBands,
 } from '../dist/index.js';
 import { libraryResponse } from './library-response.mjs';
+import { addedToPages } from './pages.mjs';
 
 const say = (text) => process.stdout.write(`${text}\n`);
 /** A package that may be there or not; what is not installed is not measured, and the output says so. */
@@ -136,12 +137,16 @@ async function gzipped({ rolldown }, names) {
 async function size() {
   const bundler = await optional('rolldown');
   if (bundler === undefined) return say('Size: no bundler installed, so not measured');
-  const families = offeredByFamily();
-  const whole = await gzipped(bundler, [...families.values()].flat());
-  say(`Size of everything, minified and gzipped: ${whole.toFixed(1)} kB (25 at most)`);
-  for (const [family, names] of families) {
-    say(`  ${family} with all it needs: ${(await gzipped(bundler, names)).toFixed(1)} kB`);
+  const all = [...offeredByFamily().values()].flat();
+  const pages = await addedToPages(bundler);
+  const heaviest = Math.max(...pages.map(([, kilobytes]) => kilobytes));
+  say(`What the package adds to a page of the portal, gzipped: ${heaviest.toFixed(1)} kB (25 at most)`);
+  for (const [page, kilobytes] of pages.filter(([, kilobytes]) => kilobytes >= 0.05)) {
+    say(`  ${page}: ${kilobytes.toFixed(1)} kB`);
   }
+  const free = pages.filter(([, kilobytes]) => kilobytes < 0.05).map(([page]) => page);
+  say(`  nothing: ${free.join(', ')}`);
+  say(`All it offers, were it loaded at once: ${(await gzipped(bundler, all)).toFixed(1)} kB`);
 }
 
 products();
