@@ -22,7 +22,7 @@ export async function sayWhile(doing, work) {
   say(`${doing} …`);
   const from = performance.now();
   const result = await work();
-  say(`  done in ${seconds(performance.now() - from)}`);
+  say(`  done in ${seconds(performance.now() - from)}: ${doing}`);
   return result;
 }
 

@@ -69,23 +69,29 @@ async function install(children, logs, missing) {
 }
 
 /**
- * @param {import('../processes/children.mjs').Children} children
- * @param {string} logs
  * @param {DebianPackage[]} wanted
+ * @returns {DebianPackage[]} those that are not there
  * @throws {PlainError} naming what to install, when we may not do it ourselves
  */
-export async function installDebian(children, logs, wanted) {
+export function missingFromDebian(wanted) {
   const missing = wanted.filter((name) => !isInstalled[name]());
-  if (missing.length === 0) return;
   const names = missing.join(' ');
-  if (process.getuid?.() !== 0) {
-    throw new PlainError(
-      `Missing from this machine: ${names}. As root: apt-get install --no-install-recommends ${names}`,
-    );
-  }
+  if (missing.length === 0 || process.getuid?.() === 0) return missing;
+  throw new PlainError(
+    `Missing from this machine: ${names}. As root: apt-get install --no-install-recommends ${names}`,
+  );
+}
+
+/**
+ * @param {import('../processes/children.mjs').Children} children
+ * @param {string} logs
+ * @param {DebianPackage[]} missing
+ */
+export async function installDebian(children, logs, missing) {
+  if (missing.length === 0) return;
   const work = () => install(children, logs, missing);
   const isNewServer = missing.includes('postgresql');
-  await sayWhile(`Installing from Debian: ${names}`, () =>
+  await sayWhile(`Installing from Debian: ${missing.join(' ')}`, () =>
     isNewServer ? withoutSystemCluster(work) : work(),
   );
 }

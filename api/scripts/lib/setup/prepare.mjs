@@ -1,6 +1,6 @@
 import { mkdirSync } from 'node:fs';
 import { buildStale } from './builds.mjs';
-import { installDebian } from './debian.mjs';
+import { installDebian, missingFromDebian } from './debian.mjs';
 import { withLock } from '../processes/lock.mjs';
 import { installPackages } from './packages.mjs';
 import { inRoot } from '../paths.mjs';
@@ -32,9 +32,12 @@ function oneAtATime(signal, work) {
  */
 export function installMissing({ children, logs }, wanted, signal) {
   return oneAtATime(signal, async () => {
-    await installDebian(children, logs, wanted);
+    const missing = missingFromDebian(wanted);
+    const both = [installDebian(children, logs, missing), installPackages(children, logs, signal)];
+    // Side by side, for both mostly wait for the network; and to the end, for Debian's must not be cut short.
+    const ends = await Promise.allSettled(both);
+    for (const end of ends) if (end.status === 'rejected') throw end.reason;
     signal.throwIfAborted();
-    await installPackages(children, logs, signal);
   });
 }
 
