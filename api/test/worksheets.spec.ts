@@ -53,6 +53,19 @@ describe('worksheets', () => {
     expect(response.body.errors).toEqual([expect.objectContaining({ pointer })]);
   });
 
+  it('are twelve on a stage at most, however many come at once, and one taken back makes room', async () => {
+    const full = await startedBuild(test);
+    const put = () => full.agent.post(full.stageAt('Source', 'worksheets')).send(SHEET);
+    const statuses = (await Promise.all(Array.from({ length: 16 }, put))).map(({ status }) => status);
+    expect(statuses.filter((status) => status === 201)).toHaveLength(12);
+    expect(statuses.filter((status) => status === 409)).toHaveLength(4);
+    const [first] = (await full.agent.get(full.at('/worksheets'))).body;
+    const refused = await put().expect(409);
+    expect(refused.body.type).toMatch(/worksheets-enough$/);
+    await full.agent.delete(full.at(`/worksheets/${first.id}`)).expect(204);
+    await put().expect(201);
+  });
+
   it('stand on a stage of that build only', async () => {
     await started.agent
       .post(started.at(`/stages/${NOBODY}/worksheets`))
