@@ -4,6 +4,7 @@ import { createPortal } from 'react-dom';
 import { DrawerPanel, type DrawerPanelProps } from './drawer-panel';
 import { token } from './tokens';
 import { useEscape } from './use-escape';
+import { useToastsAbove } from './use-toasts-above';
 
 /** The height of a sheet that leaves the page in sight over it. */
 export const HALF_SHEET = '42dvh';
@@ -17,6 +18,7 @@ export function PhoneSheet(panel: Omit<DrawerPanelProps, 'grip'>) {
   const root = useRef<HTMLElement>(null);
   const [isTall, setIsTall] = useState(false);
   useEscape(root, panel.onClose);
+  useToastsAbove(root);
   useEffect(() => {
     const opener = document.activeElement;
     root.current?.focus({ preventScroll: true });

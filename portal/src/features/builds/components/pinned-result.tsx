@@ -1,7 +1,9 @@
 import Box from '@mui/material/Box';
 import Typography from '@mui/material/Typography';
+import { useRef } from 'react';
 import { createPortal } from 'react-dom';
 import { VerdictChip } from '../../../shared-ui/states/verdict-chip';
+import { useToastsAbove } from '../../../shared-ui/use-toasts-above';
 import { useKeyboardUp } from '../logic/use-keyboard-up';
 import type { ReadingFormState } from '../logic/use-reading-form';
 import { readingWords } from '../logic/words';
@@ -14,9 +16,12 @@ const BOTTOM_BAR = 62;
 export function PinnedResult({ form }: { form: ReadingFormState }) {
   const hidden = useKeyboardUp();
   const isShort = hidden !== undefined;
+  const bar = useRef<HTMLElement>(null);
+  useToastsAbove(bar);
   return createPortal(
     <Box
       component="section"
+      ref={bar}
       aria-label="Result"
       sx={{
         position: 'fixed',

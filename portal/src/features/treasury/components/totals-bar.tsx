@@ -1,5 +1,7 @@
 import Box from '@mui/material/Box';
+import { useRef } from 'react';
 import { formatMoney } from '../../../lib/money';
+import { useToastsAbove } from '../../../shared-ui/use-toasts-above';
 import type { StatementLine, Totals } from '../api/treasury';
 import { afterMatch } from '../settling';
 
@@ -14,10 +16,13 @@ interface TotalsBarProps {
 export function TotalsBar({ totals, currency, settling }: TotalsBarProps) {
   const money = (minor: number) => formatMoney(minor, currency);
   const { openingMinor, matchedMinor, booksMinor, statementMinor, earlierMinor, differenceMinor } = totals;
+  const bar = useRef<HTMLElement>(null);
+  useToastsAbove(bar);
   const isEven = differenceMinor === 0;
   return (
     <Box
       component="section"
+      ref={bar}
       aria-label="Running difference"
       sx={{
         position: 'sticky',
