@@ -88,7 +88,8 @@ export class MemberBookingsService {
     const { usableUntil } = await this.instruments.judge(manager, actor.personId, resourceIds, span.endsAt);
     const window = searchWindow(span, this.clock.now(), usableUntil);
     const nearest = window ? await this.nearestFree(resourceIds, span, window, timeZone) : [];
-    return overlap(await this.repository.findClashes(resourceIds, [span]), nearest, timeZone);
+    const clashes = await this.repository.findClashes(resourceIds, [span]);
+    return overlap(clashes, nearest, { zone: timeZone, personId: actor.personId });
   }
 
   /** While the workshop is open; at any hour only when there is nothing else. */

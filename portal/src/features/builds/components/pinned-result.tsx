@@ -45,6 +45,7 @@ export function PinnedResult({ form }: { form: ReadingFormState }) {
 
 function LongForm({ form }: { form: ReadingFormState }) {
   const shown = shownLive(form);
+  const colour = shown?.isStale ? 'token.ink3' : 'token.ink2';
   return (
     <>
       {shown ? (
@@ -52,22 +53,26 @@ function LongForm({ form }: { form: ReadingFormState }) {
           <Box sx={{ display: 'flex', justifyContent: 'space-between', gap: '12px' }}>
             <div>
               <BigValue {...shown} />
-              <Typography variant="small" component="p" sx={{ m: 0, color: 'token.ink2' }}>
+              <Typography variant="small" component="p" sx={{ m: 0, color: colour }}>
                 {uncertaintyText(shown.read)}
               </Typography>
             </div>
             <Box sx={{ textAlign: 'right', pt: '6px' }}>
-              <VerdictChip verdict={shown.read.verdict} />
-              <Typography variant="small" component="p" sx={{ m: 0, mt: '4px', color: 'token.ink2' }}>
+              <VerdictChip verdict={shown.read.verdict} isStale={shown.isStale} />
+              <Typography variant="small" component="p" sx={{ m: 0, mt: '4px', color: colour }}>
                 {secondValues(shown.read)}
               </Typography>
             </Box>
           </Box>
           <Box sx={{ my: '8px' }}>
-            <LiveWindow check={form.check} read={shown.read} />
+            <LiveWindow check={form.check} {...shown} />
           </Box>
           {shown.read.advice && (
-            <Typography variant="small" component="p" sx={{ mt: 0, mb: '8px' }}>
+            <Typography
+              variant="small"
+              component="p"
+              sx={{ mt: 0, mb: '8px', color: shown.isStale ? colour : 'token.ink' }}
+            >
               {shown.read.advice}
             </Typography>
           )}
@@ -100,7 +105,7 @@ function ShortForm({ form }: { form: ReadingFormState }) {
         )}
       </Typography>
       <Box sx={{ display: 'flex', alignItems: 'center', gap: '8px' }}>
-        {shown && <VerdictChip verdict={shown.read.verdict} narrow />}
+        {shown && <VerdictChip verdict={shown.read.verdict} isStale={shown.isStale} narrow />}
         <KeepButtons form={form} isShort />
       </Box>
     </Box>

@@ -84,6 +84,8 @@ export function useReadingForm(
   };
   const setEntry = (name: string, text: string) => {
     keeping.reset();
+    // Half typed again: its error waits until the field is left again.
+    setLeft((before) => before.filter((other) => other !== name));
     draft.setValue({ ...draft.value, entry: { ...entry, [name]: text } });
   };
   const keep = () => {

@@ -4,9 +4,9 @@ import { LevelDiagramPhone } from '../../../shared-ui/level-diagram/level-diagra
 import { LoadingBars } from '../../../shared-ui/loading-bars';
 import { PageTitle } from '../../../shared-ui/page-title';
 import { PhoneBar } from '../../../shared-ui/phone-bar';
-import { ProblemAlert } from '../../../shared-ui/problem-alert';
 import { usePhone } from '../../../shared-ui/use-phone';
 import { useBuild, type Build } from '../api/builds';
+import { BuildProblem } from '../components/no-such-build';
 import { checkPath, levelPointsOf } from '../logic/stage';
 import { useLevelOnDevice } from '../logic/use-level-on-device';
 import { serialText } from '../logic/words';
@@ -16,7 +16,7 @@ export default function LevelPage() {
   const { buildId = '' } = useParams();
   const build = useBuild(buildId);
   if (build.isPending) return <LoadingBars rows={8} label="Opening the level diagram" />;
-  if (build.isError) return <ProblemAlert error={build.error} onRetry={() => void build.refetch()} />;
+  if (build.isError) return <BuildProblem error={build.error} onRetry={() => void build.refetch()} />;
   return <Levels build={build.data} />;
 }
 
