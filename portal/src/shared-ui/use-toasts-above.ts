@@ -4,10 +4,10 @@ import { useEffect, type RefObject } from 'react';
 export const TOAST_LIFT = '--fr-toast-lift';
 
 /** Keeps toasts above a bar that stands at the foot of the page, however high it grows. */
-export function useToastsAbove(bar: RefObject<HTMLElement | null>): void {
+export function useToastsAbove(bar: RefObject<HTMLElement | null>, isOn = true): void {
   useEffect(() => {
     const { current } = bar;
-    if (!current) return;
+    if (!current || !isOn) return;
     const { style } = document.documentElement;
     const lift = () => style.setProperty(TOAST_LIFT, `${current.offsetHeight}px`);
     lift();
@@ -18,5 +18,5 @@ export function useToastsAbove(bar: RefObject<HTMLElement | null>): void {
       watch?.disconnect();
       style.removeProperty(TOAST_LIFT);
     };
-  }, [bar]);
+  }, [bar, isOn]);
 }

@@ -2,6 +2,7 @@ import { configure, screen, waitFor, within } from '@testing-library/react';
 import { http, HttpResponse } from 'msw';
 import { beforeEach, describe, expect, it, vi } from 'vitest';
 import type { components } from '../../../api-client/schema';
+import { asPhone } from '../../../testing/as-phone';
 import { renderPage, TAMSIN } from '../../../testing/render';
 import { server } from '../../../testing/server';
 import BenchBookPage from './BenchBookPage';
@@ -291,12 +292,7 @@ describe('the Bench book', () => {
   });
 
   it('fills the form in beside the lanes on a phone, which stay in use above it', async () => {
-    const isNarrow = (query: string) => query.includes('max-width');
-    vi.stubGlobal('matchMedia', (query: string) => ({
-      ...{ matches: isNarrow(query), media: query },
-      ...{ addEventListener: () => undefined, removeEventListener: () => undefined },
-      ...{ addListener: () => undefined, removeListener: () => undefined },
-    }));
+    asPhone();
     const { user } = await openForm('/bench-book?day=2026-10-17');
     const sheet = screen.getByRole('complementary', { name: 'Book a bench' });
     expect(within(sheet).getByRole('heading', { name: 'Bench 3, Sat 17 October' })).toBeVisible();

@@ -2,6 +2,7 @@ import { screen } from '@testing-library/react';
 import { http, HttpResponse } from 'msw';
 import { beforeEach, describe, expect, it, vi } from 'vitest';
 import { keepDraft } from '../../../lib/drafts';
+import { asPhone } from '../../../testing/as-phone';
 import { renderPage, TAMSIN } from '../../../testing/render';
 import { server } from '../../../testing/server';
 import { readingPlace } from '../logic/reading-draft';
@@ -14,11 +15,7 @@ const REST = { probeRatio: '10', loadOhms: '50' };
 
 describe('the page of levels on a phone', () => {
   beforeEach(() => {
-    vi.stubGlobal('matchMedia', (media: string) => ({
-      ...{ matches: media.includes('max-width'), media },
-      ...{ addEventListener: () => undefined, removeEventListener: () => undefined },
-      ...{ addListener: () => undefined, removeListener: () => undefined },
-    }));
+    asPhone();
     return () => vi.unstubAllGlobals();
   });
   const kept = aStage({ checks: [aCheck({ readings: [aReading()] })] });
