@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { closedStretches, isClosedIn } from './opening-hours';
+import { closedAllDay, closedStretches, isClosedIn } from './opening-hours';
 
 /** Saturdays from ten to eight. */
 const WEEK = [{ weekday: 6, opensMinute: 600, closesMinute: 1200 }];
@@ -17,6 +17,11 @@ describe('the workshop', () => {
   it('is never said to be closed when the club gives no hours, nor on a day open from midnight to midnight', () => {
     expect(closedStretches([], SUNDAY)).toEqual([]);
     expect(closedStretches([{ weekday: 7, opensMinute: 0, closesMinute: 1440 }], SUNDAY)).toEqual([]);
+  });
+
+  it('is closed all day where other days have hours and this one has none', () => {
+    expect([closedAllDay(WEEK, SATURDAY), closedAllDay(WEEK, SUNDAY)]).toEqual([false, true]);
+    expect(closedAllDay([], SUNDAY)).toBe(false);
   });
 
   it('is open for a stretch that ends as it closes, and closed for one a minute longer', () => {

@@ -43,3 +43,7 @@ export function closedStretches(week: readonly OpenDay[], date: string): Stretch
 /** Whether the workshop is closed at any time between two minutes of a day. */
 export const isClosedIn = (week: readonly OpenDay[], date: string, { from, to }: Stretch): boolean =>
   closedStretches(week, date).some((closed) => from < closed.to && to > closed.from);
+
+/** Whether nobody opens the workshop on a day at all. */
+export const closedAllDay = (week: readonly OpenDay[], date: string): boolean =>
+  week.length > 0 && openDayOf(week, date) === undefined;
