@@ -23,8 +23,7 @@ describe('opening hours', () => {
   beforeEach(() => test.clock.set(TEST_NOW));
   afterAll(() => test.close());
 
-  const put = (days: unknown, who = organiser) =>
-    who.agent.put('/api/club/opening-hours').send({ days });
+  const put = (days: unknown, who = organiser) => who.agent.put('/api/club/opening-hours').send({ days });
   const shown = async (): Promise<unknown> =>
     ((await test.http().get('/api/club').expect(200)).body as { openingHours: unknown }).openingHours;
 

@@ -125,7 +125,9 @@ describe('the frame', () => {
     open(TAMSIN, '/build');
     await userEvent.click(await screen.findByRole('button', { name: 'More' }));
     const sheet = within(await screen.findByRole('dialog'));
-    expect(await sheet.findByRole('link', { name: new RegExp(`Build nights ?${dayText(day)}, coming`) })).toBeVisible();
+    expect(
+      await sheet.findByRole('link', { name: new RegExp(`Build nights ?${dayText(day)}, coming`) }),
+    ).toBeVisible();
     expect(await sheet.findByRole('link', { name: /Groups ?Thursday five/ })).toBeVisible();
     expect(await sheet.findByRole('link', { name: /Instruments ?2, one out of use/ })).toBeVisible();
   });

@@ -97,7 +97,9 @@ function ShortForm({ form }: { form: ReadingFormState }) {
       <Typography component="p" noWrap sx={{ m: 0, color: shown?.isStale ? 'token.ink3' : 'token.ink' }}>
         {words && (
           <>
-            <b>{words.value}</b>{' '}
+            <Box component="b" sx={{ fontSize: '1.375rem' }}>
+              {words.value}
+            </Box>{' '}
             <Typography variant="small" component="span">
               {words.plusMinus} {words.unit}
             </Typography>
