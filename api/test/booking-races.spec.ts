@@ -57,7 +57,7 @@ describe('racing for benches and instruments', () => {
     expect(tally(answers)).toEqual({ 201: 1, 409: 49 });
     expect(await itemsOf([id])).toHaveLength(1);
     for (const { body } of answers.filter(({ status }) => status === 409)) {
-      expect(body.detail).toContain(`${tag} went to Some One, Fri 16 Jan, 14:00 to 16:00.`);
+      expect(body.detail).toContain(`You already have ${tag} then, Fri 16 Jan, 14:00 to 16:00.`);
       expect(body.nearestFree).toHaveLength(3);
     }
   });

@@ -91,6 +91,15 @@ describe('booking benches and instruments', () => {
     expect(await rows()).toBe(before);
   });
 
+  it('says who has it, and to whoever has it already that it is their own', async () => {
+    const { id, tag } = await bench(test);
+    await book([id]).expect(201);
+    const detailFor = async (who?: typeof other): Promise<unknown> =>
+      ((await book([id], {}, who).expect(409)).body as { detail: unknown }).detail;
+    expect(await detailFor(other)).toContain(`${tag} went to Some One, Fri 16 Jan, 14:00 to 16:00.`);
+    expect(await detailFor()).toContain(`You already have ${tag} then, Fri 16 Jan, 14:00 to 16:00.`);
+  });
+
   it('shows everybody who has what, and offers cancelling to nobody it is not for', async () => {
     const { id } = await bench(test);
     await book([id]).expect(201);

@@ -1,8 +1,16 @@
 import { expect, test, type Page } from '@playwright/test';
 import { signIn } from './helpers';
 
-/** A day far enough ahead that nothing else is booked there, and near enough that the analyzer is still calibrated. */
-const DAY = new Date(Date.now() + 60 * 24 * 3_600_000).toISOString().slice(0, 10);
+/**
+ * A Wednesday, on which the workshop is open, far enough ahead that nothing else is booked there, and near enough that
+ * the analyzer is still calibrated.
+ */
+const DAY = wednesdayAfter(new Date(Date.now() + 54 * 24 * 3_600_000));
+
+function wednesdayAfter(day: Date): string {
+  const ahead = (3 - day.getUTCDay() + 7) % 7;
+  return new Date(day.getTime() + ahead * 24 * 3_600_000).toISOString().slice(0, 10);
+}
 
 async function fill(page: Page, from: string, to: string): Promise<void> {
   await page.getByRole('button', { name: 'Book a bench' }).click();

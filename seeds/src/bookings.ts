@@ -27,12 +27,12 @@ const booking = (
 const A_WEEK: readonly DemoBooking[] = [
   booking('mairi', 0, [18, 0], 2, 3),
   booking('priya', 0, [18, 30], 1, undefined, 'FR-031'),
-  booking('ansel', 0, [10, 0], 3, 6, 'FR-051'),
+  booking('ansel', 0, [14, 0], 3, 6, 'FR-051'),
   booking('tobias', 1, [14, 0], 2, 3, 'FR-023'),
   booking('rhoda', 1, [19, 0], 2, 5, 'FR-022'),
   booking('lena', 2, [19, 0], 2, 3),
   booking('marek', 2, [18, 0], 1.5, 4, 'FR-031', 'FR-052'),
-  booking('idris', 2, [10, 0], 2, 2, 'FR-034'),
+  booking('idris', 2, [14, 0], 2, 2, 'FR-034'),
   booking('tamsin', 3, [14, 0], 1.5, 3, 'FR-021'),
   booking('bea', 3, [15, 30], 2, 2, 'FR-021'),
   booking('noor', 4, [17, 0], 2, 3, 'FR-014'),
@@ -40,7 +40,7 @@ const A_WEEK: readonly DemoBooking[] = [
   { ...booking('kofi', 5, [16, 30], 1, undefined, 'FR-031'), isThisWeekOnly: true },
   booking('priya', 5, [12, 0], 1, 3),
   booking('jonty', 5, [18, 0], 2, 3, 'FR-032'),
-  booking('yusra', 6, [11, 0], 2.5, 6, 'FR-051', 'FR-022'),
+  booking('yusra', 5, [13, 0], 2.5, 6, 'FR-051', 'FR-022'),
 ];
 
 /** This week and next, each booked a few days ahead as members do. */

@@ -74,6 +74,17 @@ describe('the demo club', () => {
     expect([due.length, inRepair.length]).toEqual([1, 1]);
   });
 
+  it('has every booking and every night while the workshop is open', async () => {
+    const outside = `SELECT starts_at FROM booking WHERE NOT EXISTS (
+      SELECT 1 FROM opening_hours,
+        LATERAL (SELECT starts_at AT TIME ZONE 'Europe/London' AS from_wall, ends_at AT TIME ZONE 'Europe/London' AS to_wall) AS wall
+      WHERE weekday = extract(isodow FROM from_wall)
+        AND from_wall >= date_trunc('day', from_wall) + make_interval(mins => opens_minute)
+        AND to_wall <= date_trunc('day', from_wall) + make_interval(mins => closes_minute))`;
+    expect(await ask(0, 'SELECT weekday FROM opening_hours')).toHaveLength(6);
+    expect([await ask(0, outside), await ask(1, outside)]).toEqual([[], []]);
+  });
+
   it('has builds on every stage', async () => {
     const stages = await ask<{ position: number }>(
       0,

@@ -1,5 +1,6 @@
 import { Passwords } from '@ferrite-row/api/auth/passwords';
 import { ClubService } from '@ferrite-row/api/club/club.service';
+import { OpeningHoursService } from '@ferrite-row/api/club/opening-hours.service';
 import type { Actor } from '@ferrite-row/api/common/actor';
 import type { SettableClock } from '@ferrite-row/api/common/clock';
 import type { ServiceContext } from '@ferrite-row/api/context';
@@ -7,7 +8,7 @@ import { PeopleService } from '@ferrite-row/api/people/people.service';
 import { seedBookings } from './bookings';
 import { publishPlan, seedBuilds } from './builds/builds';
 import { calendarAround } from './calendar';
-import { CLUB } from './club';
+import { CLUB, OPENING_HOURS } from './club';
 import { seedGroups } from './groups';
 import { seedInventory } from './inventory';
 import { seedMoney } from './money/year';
@@ -32,6 +33,7 @@ export async function seedDemoClub(context: ServiceContext, clock: SettableClock
   await context.get(ClubService).set(CLUB);
   const people = await seedPeople(context);
   const set: StageSet = { context, clock, calendar, as: (key) => found(people, key) };
+  await context.get(OpeningHoursService).set(set.as('greta'), { days: [...OPENING_HOURS] });
   const inventory = await seedInventory(set);
   const groups = await seedGroups(set);
   const plan = await publishPlan(set);

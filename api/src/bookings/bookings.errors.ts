@@ -10,9 +10,13 @@ export const bookingProblems = defineProblems({
   'not-bookable': { status: 422, title: 'Not to be booked like this' },
 });
 
-/** Who has what, and when else everything is free. */
-export function overlap(clashes: readonly Clash[], nearestFree: readonly Span[], zone: string): DomainError {
-  const who = clashes.map((clash) => clashWords(clash, zone)).join(' ');
+/** Who has what, in words for the person who asked, and when else everything is free. */
+export function overlap(
+  clashes: readonly Clash[],
+  nearestFree: readonly Span[],
+  { zone, personId }: { zone: string; personId: string },
+): DomainError {
+  const who = clashes.map((clash) => clashWords(clash, zone, personId)).join(' ');
   const what = who || 'Somebody had it a moment ago.';
   const takenBy = clashes.map(({ resourceId, resourceTag, startsAt, endsAt, ...clash }) => {
     return { resourceId, resourceTag, by: holderOf(clash), startsAt, endsAt };
@@ -42,9 +46,12 @@ export function notBookable(
   });
 }
 
-function clashWords(clash: Clash, zone: string): string {
-  const verb = clash.kind === 'build night' ? 'is held for' : 'went to';
-  return `${clash.resourceTag} ${verb} ${holderOf(clash)}, ${spanWords(clash, zone)}.`;
+function clashWords(clash: Clash, zone: string, personId: string): string {
+  const { kind, resourceTag } = clash;
+  const when = spanWords(clash, zone);
+  if (kind === 'build night') return `${resourceTag} is held for ${holderOf(clash)}, ${when}.`;
+  if (clash.personId === personId) return `You already have ${resourceTag} then, ${when}.`;
+  return `${resourceTag} went to ${holderOf(clash)}, ${when}.`;
 }
 
 function holderOf({ kind, title, personName }: Pick<Clash, 'kind' | 'title' | 'personName'>): string {

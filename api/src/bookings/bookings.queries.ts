@@ -15,18 +15,20 @@ export const FIND_CLASHES = `
   ORDER BY wanted.ordinal, item.starts_at, resource.position, resource.tag`;
 
 /**
- * $1 resource ids, $2 wanted start, $3 wanted length in seconds, $4 and $5 the window, $6 the club's zone.
+ * $1 resource ids, $2 wanted start, $3 wanted length in seconds, $4 and $5 starts and ends of the
+ * stretches to look in, $6 the club's zone.
  *
- * Free is the window less everything any of them is booked for. Each gap that is long enough offers the place in it
+ * Free is those stretches less everything any of them is booked for. Each gap that is long enough offers the place in it
  * that lies nearest to the wanted time; and the same wall time of the days around, where that is free, because a
  * member who is free at 19:30 today is likelier free at 19:30 tomorrow than at midnight.
  */
 export const FIND_NEAREST_FREE = `
   WITH wish AS (
     SELECT $2::timestamptz AS starts_at, make_interval(secs => $3) AS length,
-           tstzrange($4::timestamptz, $5::timestamptz, '[)') AS search
+           (SELECT range_agg(tstzrange(within.starts_at, within.ends_at, '[)'))
+            FROM unnest($4::timestamptz[], $5::timestamptz[]) AS within(starts_at, ends_at)) AS search
   ), gap AS (
-    SELECT unnest(tstzmultirange(wish.search) - coalesce(
+    SELECT unnest(wish.search - coalesce(
       (SELECT range_agg(tstzrange(item.starts_at, item.ends_at, '[)'))
        FROM booking_item item
        WHERE item.resource_id = ANY ($1::uuid[]) AND item.holds

@@ -84,20 +84,21 @@ export class BookingsRepository {
     ]);
   }
 
-  /** Up to three times within the window at which all of them are free as long as wanted, the nearest first. */
+  /** Up to three times within one of the stretches at which all of them are free as long as wanted, the nearest first. */
   async findNearestFree(
     resourceIds: readonly string[],
     wanted: Span,
-    window: Span,
+    stretches: readonly Span[],
     zone: string,
   ): Promise<Span[]> {
+    if (stretches.length === 0) return [];
     const lengthMs = wanted.endsAt.getTime() - wanted.startsAt.getTime();
     return this.dataSource.query<Span[]>(FIND_NEAREST_FREE, [
       resourceIds,
       wanted.startsAt,
       lengthMs / 1000,
-      window.startsAt,
-      window.endsAt,
+      stretches.map(({ startsAt }) => startsAt),
+      stretches.map(({ endsAt }) => endsAt),
       zone,
     ]);
   }

@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { DataSource, type EntityManager } from 'typeorm';
 import { ClubService } from '../club/club.service';
+import { OpeningHoursService } from '../club/opening-hours.service';
 import { requireMember, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { commonProblems, fieldError } from '../common/common.errors';
@@ -27,6 +28,7 @@ export class MemberBookingsService {
     private readonly instruments: InstrumentUseService,
     private readonly groups: GroupsService,
     private readonly club: ClubService,
+    private readonly hours: OpeningHoursService,
     private readonly clock: Clock,
   ) {}
 
@@ -85,8 +87,21 @@ export class MemberBookingsService {
     const { manager } = this.dataSource;
     const { usableUntil } = await this.instruments.judge(manager, actor.personId, resourceIds, span.endsAt);
     const window = searchWindow(span, this.clock.now(), usableUntil);
-    const nearest = window ? await this.repository.findNearestFree(resourceIds, span, window, timeZone) : [];
-    return overlap(await this.repository.findClashes(resourceIds, [span]), nearest, timeZone);
+    const nearest = window ? await this.nearestFree(resourceIds, span, window, timeZone) : [];
+    const clashes = await this.repository.findClashes(resourceIds, [span]);
+    return overlap(clashes, nearest, { zone: timeZone, personId: actor.personId });
+  }
+
+  /** While the workshop is open; at any hour only when there is nothing else. */
+  private async nearestFree(
+    resourceIds: readonly string[],
+    span: Span,
+    window: Span,
+    zone: string,
+  ): Promise<Span[]> {
+    const open = await this.hours.openWithin(window, zone);
+    const found = await this.repository.findNearestFree(resourceIds, span, open, zone);
+    return found.length > 0 ? found : this.repository.findNearestFree(resourceIds, span, [window], zone);
   }
 }
 

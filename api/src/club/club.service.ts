@@ -4,6 +4,7 @@ import { Repository, type EntityManager } from 'typeorm';
 import { requireRole, ROLES, type Actor } from '../common/actor';
 import { Environment } from '../config/environment';
 import { Club } from './club.entity';
+import { OpeningHoursService } from './opening-hours.service';
 import type { ChooseRulesDto, ClubDto, DemoAccountDto } from './dto/club.dto';
 
 export type ClubSettings = Omit<Club, 'id'>;
@@ -12,14 +13,15 @@ export type ClubSettings = Omit<Club, 'id'>;
 export class ClubService {
   constructor(
     @InjectRepository(Club) private readonly clubs: Repository<Club>,
+    private readonly hours: OpeningHoursService,
     private readonly environment: Environment,
   ) {}
 
   /** Open to everybody: the name over the door. */
   async front(): Promise<ClubDto> {
     const { name, address, contactEmail, timeZone, currency, ruleSet } = await this.settings();
-    const demoAccounts = this.demoAccounts();
-    return { name, address, contactEmail, timeZone, currency, ruleSet, demoAccounts };
+    const [openingHours, demoAccounts] = [await this.hours.week(), this.demoAccounts()];
+    return { name, address, contactEmail, timeZone, currency, ruleSet, openingHours, demoAccounts };
   }
 
   /** An organiser chooses by which rules the calculators judge. */

@@ -16,6 +16,7 @@ import { Photo } from '../builds/photo.entity';
 import { Reading } from '../builds/reading.entity';
 import { Worksheet } from '../builds/worksheet.entity';
 import { Club } from '../club/club.entity';
+import { OpeningHours } from '../club/opening-hours.entity';
 import { Checkout } from '../dues/checkout.entity';
 import { Invoice } from '../dues/invoice.entity';
 import { Payment } from '../dues/payment.entity';
@@ -71,6 +72,7 @@ export const entities = [
   LevelPoint,
   LineMatch,
   Mail,
+  OpeningHours,
   Payment,
   PaymentAllocation,
   PaymentEvent,

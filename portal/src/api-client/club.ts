@@ -17,3 +17,8 @@ async function getClub(): Promise<Club> {
 const clubQuery = queryOptions({ queryKey: ['club'], queryFn: getClub, staleTime: Infinity });
 
 export const useClub = () => useQuery(clubQuery);
+
+const NO_HOURS: Club['openingHours'] = [];
+
+/** When the workshop is open; empty while it is not known, or when the club gives no hours. */
+export const useOpeningHours = (): Club['openingHours'] => useClub().data?.openingHours ?? NO_HOURS;

@@ -578,9 +578,26 @@ export interface paths {
             path?: never;
             cookie?: never;
         };
-        /** The club's name, zone and currency. */
+        /** The club's name, zone, currency and opening hours. */
         get: operations["Club.front"];
         put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/club/opening-hours": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        /** Says when the workshop is open, the whole week at once. */
+        put: operations["Club.setOpeningHours"];
         post?: never;
         delete?: never;
         options?: never;
@@ -1527,6 +1544,8 @@ export interface components {
              * @example GBP
              */
             currency: string;
+            /** @description The days on which the workshop is open, Monday first; empty when the club gives no hours. */
+            openingHours: components["schemas"]["OpenDayDto"][];
             /** @description Accounts of the demo club; empty anywhere else. */
             demoAccounts: components["schemas"]["DemoAccountDto"][];
         };
@@ -1946,6 +1965,23 @@ export interface components {
             instance: string;
             errors?: components["schemas"]["FieldProblemDto"][];
         };
+        OpenDayDto: {
+            /**
+             * @description ISO 8601: Monday is 1, Sunday 7.
+             * @example 4
+             */
+            weekday: number;
+            /**
+             * @description Minutes since midnight.
+             * @example 720
+             */
+            opensMinute: number;
+            /**
+             * @description Minutes since midnight; 1440 is the midnight that ends the day.
+             * @example 1320
+             */
+            closesMinute: number;
+        };
         OpenInvoiceDto: {
             id: string;
             /** @example D-0412 */
@@ -2307,6 +2343,9 @@ export interface components {
         };
         SendBackDto: {
             note: string;
+        };
+        SetOpeningHoursDto: {
+            days: components["schemas"]["OpenDayDto"][];
         };
         SettlingAccountDto: {
             code: string;
@@ -3803,6 +3842,36 @@ export interface operations {
                 content: {
                     "application/json": components["schemas"]["ClubDto"];
                 };
+            };
+            /** @description A problem document */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    "Club.setOpeningHours": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SetOpeningHoursDto"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
             };
             /** @description A problem document */
             default: {

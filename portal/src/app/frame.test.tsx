@@ -1,10 +1,12 @@
-import { render, screen, waitFor } from '@testing-library/react';
+import { render, screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { http, HttpResponse } from 'msw';
 import { createMemoryRouter, RouterProvider } from 'react-router-dom';
 import { makeQueryClient } from '../api-client/query-client';
 import type { Me } from '../api-client/session';
 import { ME_KEY } from '../api-client/session';
+import { addDays, clubDay, instantOf } from '../lib/club-time';
+import { dayText } from '../lib/club-time-text';
 import { TAMSIN } from '../testing/render';
 import { server } from '../testing/server';
 import { Providers } from './providers';
@@ -107,6 +109,27 @@ describe('the frame', () => {
     await screen.findByText('the build');
     await userEvent.keyboard('gt');
     expect(router.state.location.pathname).toBe('/build');
+  });
+
+  it('says the news of a page in words under More', async () => {
+    const day = addDays(clubDay(), 2);
+    const mine = { state: 'coming', line: null };
+    const night = { cancelledAt: null, mine, startsAt: instantOf(day, 1140), endsAt: instantOf(day, 1320) };
+    server.use(
+      http.get('*/api/build-nights', () => HttpResponse.json({ items: [night] })),
+      http.get('*/api/groups', () => HttpResponse.json({ items: [{ name: 'Thursday five', mine: true }] })),
+      http.get('*/api/instruments', () =>
+        HttpResponse.json({ items: [{ condition: 'ready' }, { condition: 'in repair' }] }),
+      ),
+    );
+    open(TAMSIN, '/build');
+    await userEvent.click(await screen.findByRole('button', { name: 'More' }));
+    const sheet = within(await screen.findByRole('dialog'));
+    expect(
+      await sheet.findByRole('link', { name: new RegExp(`Build nights ?${dayText(day)}, coming`) }),
+    ).toBeVisible();
+    expect(await sheet.findByRole('link', { name: /Groups ?Thursday five/ })).toBeVisible();
+    expect(await sheet.findByRole('link', { name: /Instruments ?2, one out of use/ })).toBeVisible();
   });
 
   it('begins with the skip link', async () => {

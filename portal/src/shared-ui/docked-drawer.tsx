@@ -1,17 +1,21 @@
 import Box from '@mui/material/Box';
 import Drawer from '@mui/material/Drawer';
-import { useEffect, useRef, type ReactNode, type RefObject } from 'react';
+import { useEffect, useRef, type ReactNode } from 'react';
 import { createPortal } from 'react-dom';
 import type { DrawerPanelProps } from './drawer-panel';
 import { DrawerPanel } from './drawer-panel';
 import { useDrawerSlot } from './drawer-slot';
+import { PhoneSheet } from './phone-sheet';
 import { token } from './tokens';
+import { useEscape } from './use-escape';
 import { useNarrow, usePhone } from './use-phone';
 
 interface DockedDrawerProps extends Omit<DrawerPanelProps, 'grip'> {
   open: boolean;
   /** 362 unless the content wants more, at most 452. */
   width?: number;
+  /** On a phone: over the page, or beside it, half high, so that the page can be used meanwhile. */
+  phone?: 'over' | 'beside';
 }
 
 /**
@@ -19,11 +23,12 @@ interface DockedDrawerProps extends Omit<DrawerPanelProps, 'grip'> {
  * tablet, a bottom sheet with a grip on a phone. Escape closes it; focus goes back to what opened it. It closes
  * without asking, so forms inside keep a draft.
  */
-export function DockedDrawer({ open, width = 362, ...panel }: DockedDrawerProps) {
+export function DockedDrawer({ open, width = 362, phone = 'over', ...panel }: DockedDrawerProps) {
   const slot = useDrawerSlot();
   const isPhone = usePhone();
   const isNarrow = useNarrow();
   if (!isNarrow) return open ? dock(<Docked width={width} {...panel} />, slot) : null;
+  if (isPhone && phone === 'beside') return open && <PhoneSheet {...panel} />;
   return (
     <Drawer
       open={open}
@@ -44,29 +49,12 @@ export function DockedDrawer({ open, width = 362, ...panel }: DockedDrawerProps)
         },
       }}
     >
-      <DrawerPanel {...panel} grip={isPhone} />
+      <DrawerPanel {...panel} grip={isPhone ? 'drawn' : undefined} />
     </Drawer>
   );
 }
 
 const dock = (drawer: ReactNode, slot: HTMLElement | null) => (slot ? createPortal(drawer, slot) : drawer);
-
-/** Escape closes while the focus is in the drawer, or nowhere because the pressed button is gone. */
-function useEscape(root: RefObject<HTMLElement | null>, onClose: () => void): void {
-  const close = useRef(onClose);
-  useEffect(() => {
-    close.current = onClose;
-  });
-  useEffect(() => {
-    const onKey = (event: KeyboardEvent) => {
-      if (event.key !== 'Escape' || event.defaultPrevented) return;
-      const { activeElement } = document;
-      if (activeElement === document.body || root.current?.contains(activeElement)) close.current();
-    };
-    document.addEventListener('keydown', onKey);
-    return () => document.removeEventListener('keydown', onKey);
-  }, [root]);
-}
 
 function Docked({ width, ...panel }: DrawerPanelProps & { width: number }) {
   const root = useRef<HTMLElement>(null);

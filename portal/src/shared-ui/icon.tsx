@@ -69,6 +69,7 @@ const PATHS = {
   down: <path d="M5 9l7 7 7-7" />,
   up: <path d="M5 15l7-7 7 7" />,
   plus: <path d="M12 4.5v15M4.5 12h15" />,
+  filter: <path d="M4 7h16M7 12h10M10 17h4" />,
   search: (
     <>
       <circle cx="10.5" cy="10.5" r="6" />

@@ -52,7 +52,14 @@ export function PhoneBar({ title, subtitle, backTo, backLabel, end }: PhoneBarPr
         </Box>
       )}
       <Box sx={{ flex: 1, minWidth: 0 }}>
-        <Typography noWrap sx={{ fontWeight: 700, lineHeight: '18px' }}>
+        <Typography
+          noWrap
+          sx={{
+            fontSize: subtitle ? '0.96875rem' : '1.0625rem',
+            fontWeight: 700,
+            lineHeight: subtitle ? '18px' : '24px',
+          }}
+        >
           {title}
         </Typography>
         {subtitle && (

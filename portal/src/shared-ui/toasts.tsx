@@ -2,6 +2,7 @@ import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
 import Snackbar from '@mui/material/Snackbar';
 import { createContext, useCallback, useContext, useState, type ReactNode } from 'react';
+import { TOAST_LIFT } from './use-toasts-above';
 
 interface Toast {
   id: number;
@@ -12,6 +13,7 @@ interface Toast {
 type Say = (words: string, undo?: () => void) => void;
 
 const SHOWN_MS = 8000;
+const LIFT = `var(${TOAST_LIFT}, 0px)`;
 const Saying = createContext<Say>(() => undefined);
 
 /**
@@ -40,7 +42,11 @@ export function ToastProvider({ children }: { children: ReactNode }) {
         autoHideDuration={SHOWN_MS}
         onClose={(_event, reason) => reason !== 'clickaway' && close()}
         anchorOrigin={{ vertical: 'bottom', horizontal: 'left' }}
-        sx={{ left: { xs: 16, md: 252 }, right: { xs: 16, md: 'auto' }, bottom: { xs: 76, md: 24 } }}
+        sx={{
+          left: { xs: 16, md: 252 },
+          right: { xs: 16, md: 'auto' },
+          bottom: { xs: `calc(76px + ${LIFT})`, md: `calc(24px + ${LIFT})` },
+        }}
       >
         <Box
           role="status"

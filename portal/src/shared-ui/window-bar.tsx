@@ -11,8 +11,8 @@ export interface WindowBarProps {
   /** Scale shown; a reading outside of it stands at the edge. Left out: the window and its reading with room around. */
   from?: number;
   to?: number;
-  /** Ring and whisker: copper while being entered or too close, green when it passes, ink when kept. */
-  tone?: Extract<TokenName, 'copper' | 'green' | 'ink' | 'oxide'>;
+  /** Ring and whisker: copper while being entered or too close, green when it passes, ink when kept, ink3 when stale. */
+  tone?: Extract<TokenName, 'copper' | 'green' | 'ink' | 'ink3' | 'oxide'>;
   /** Without figures, for a row of a list. */
   compact?: boolean;
   unit?: string;

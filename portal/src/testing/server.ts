@@ -7,7 +7,7 @@ const CLUB = {
     address: 'Millbeck Hall, Larkmoor',
     contactEmail: 'desk@larkmoor.example',
   },
-  ...{ timeZone: 'Europe/London', currency: 'GBP', ruleSet: 'IARU-R1', demoAccounts: [] },
+  ...{ timeZone: 'Europe/London', currency: 'GBP', ruleSet: 'IARU-R1', openingHours: [], demoAccounts: [] },
 };
 
 /**

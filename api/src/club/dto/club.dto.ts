@@ -1,6 +1,7 @@
 import { ApiProperty } from '@nestjs/swagger';
 import { IsIn } from 'class-validator';
 import { CLUB_RULE_SETS, type ClubRuleSet } from '../club.entity';
+import { OpenDayDto } from './opening-hours.dto';
 
 /** What the sign-in page may know before anybody has signed in. */
 export class ClubDto {
@@ -16,6 +17,8 @@ export class ClubDto {
   /** By which rules the calculators judge what may be sent. The licence and local rules decide. */
   @ApiProperty({ enum: CLUB_RULE_SETS })
   ruleSet: ClubRuleSet;
+  /** The days on which the workshop is open, Monday first; empty when the club gives no hours. */
+  openingHours: OpenDayDto[];
   /** Accounts of the demo club; empty anywhere else. */
   demoAccounts: DemoAccountDto[];
 }

@@ -8,6 +8,7 @@ import { PersonMark } from '../../shared-ui/person-mark';
 import { ThemeChoice } from '../../shared-ui/theme-choice';
 import { token } from '../../shared-ui/tokens';
 import { BOTTOM_PATHS, OWN_PAGES, ROLE_PAGES } from '../pages';
+import { useMoreNews } from '../more-news';
 import { useRailCounts } from '../rail-counts';
 import { MoreRow } from './more-row';
 import { SignOutButton } from './sign-out-button';
@@ -27,6 +28,7 @@ const Heading = ({ children }: { children: string }) => (
 export function MoreSheet({ open, onClose }: MoreSheetProps) {
   const me = useMe();
   const counts = useRailCounts();
+  const news = useMoreNews(open);
   const rest = OWN_PAGES.filter(({ path }) => !BOTTOM_PATHS.includes(path));
   const also = me.roles.filter((role) => role !== 'member');
   return (
@@ -58,7 +60,12 @@ export function MoreSheet({ open, onClose }: MoreSheetProps) {
         }}
       />
       {rest.map((page) => (
-        <MoreRow key={page.path} page={page} news={counts[page.path]} onClick={onClose} />
+        <MoreRow
+          key={page.path}
+          page={page}
+          news={counts[page.path] ?? { news: news[page.path] }}
+          onClick={onClose}
+        />
       ))}
       {ROLE_PAGES.filter(({ role }) => me.hasRole(role)).map(({ role, words, pages }) => (
         <Box key={role}>

@@ -1,10 +1,11 @@
 import { screen, waitFor } from '@testing-library/react';
 import { http, HttpResponse } from 'msw';
-import { describe, expect, it } from 'vitest';
+import { afterEach, describe, expect, it, vi } from 'vitest';
 import { aBuild, aCheck, aReading, aStage } from '../../features/builds/testing/build.fixture';
 import { DUES_KEY } from '../../features/dues/api/dues';
 import { setClubCurrency } from '../../lib/club-currency';
 import { clubDay, instantOf } from '../../lib/club-time';
+import { asPhone } from '../../testing/as-phone';
 import { renderPage, TAMSIN } from '../../testing/render';
 import { server } from '../../testing/server';
 import TonightPage from './TonightPage';
@@ -26,6 +27,8 @@ const open = (me = TAMSIN, ...handlers: Parameters<typeof server.use>) => {
 };
 
 describe('tonight', () => {
+  afterEach(() => vi.unstubAllGlobals());
+
   it('leads to the check to go on with, and shows its last reading', async () => {
     const stage = aStage({ checks: [aCheck({ readings: [aReading()] })], cautions: ['load before power'] });
     open(
@@ -33,12 +36,24 @@ describe('tonight', () => {
       http.get('*/api/builds/mine', () => HttpResponse.json([aBuild(stage)])),
     );
     expect(await screen.findByRole('heading', { name: 'Settle the output level at TP9' })).toBeVisible();
-    expect(screen.getByText('+0.37 ± 0.47 dBm')).toBeVisible();
+    expect(screen.getByText('+0.37')).toBeVisible();
+    expect(screen.getByText('± 0.47 dBm')).toBeVisible();
     expect(screen.getByRole('link', { name: 'Open the reading' })).toHaveAttribute(
       'href',
       '/build/build/stages/stage-9?check=output',
     );
     expect(screen.getByText('Before you switch on')).toBeVisible();
+  });
+
+  it('says window and last reading in one line on a phone', async () => {
+    asPhone();
+    const stage = aStage({ checks: [aCheck({ readings: [aReading()] })] });
+    open(
+      TAMSIN,
+      http.get('*/api/builds/mine', () => HttpResponse.json([aBuild(stage)])),
+    );
+    const next = await screen.findByRole('region', { name: 'Next' });
+    expect(next).toHaveTextContent('Window 0.0 to +3.0 dBm, last reading +0.37 ± 0.47');
   });
 
   it('says what needs a member: a stage sent back, with the mentor’s word', async () => {

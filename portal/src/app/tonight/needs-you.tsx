@@ -1,5 +1,6 @@
 import { useQuery } from '@tanstack/react-query';
 import Box from '@mui/material/Box';
+import Button from '@mui/material/Button';
 import Link from '@mui/material/Link';
 import Typography from '@mui/material/Typography';
 import { Link as RouterLink } from 'react-router-dom';
@@ -13,6 +14,7 @@ import { summaryQuery } from '../../features/treasury/api/treasury';
 import { dayText } from '../../lib/club-time-text';
 import { capital, counted } from '../../lib/text';
 import { formatMoney } from '../../lib/money';
+import { usePhone } from '../../shared-ui/use-phone';
 import { SectionHeading } from '../../shared-ui/section-heading';
 
 interface Need {
@@ -98,6 +100,7 @@ function useNeeds(): Need[] {
 /** The page's one copper heading. */
 export function NeedsYou() {
   const needs = useNeeds();
+  const isPhone = usePhone();
   if (needs.length === 0) return null;
   return (
     <section aria-labelledby="needs-you">
@@ -131,9 +134,20 @@ export function NeedsYou() {
                 minHeight: { xs: 44, md: 0 },
               }}
             >
-              <Link component={RouterLink} to={path} aria-label={`${act}: ${title}`} sx={{ fontWeight: 700 }}>
-                {act}
-              </Link>
+              {isPhone ? (
+                <Button component={RouterLink} to={path} aria-label={`${act}: ${title}`}>
+                  {act}
+                </Button>
+              ) : (
+                <Link
+                  component={RouterLink}
+                  to={path}
+                  aria-label={`${act}: ${title}`}
+                  sx={{ fontWeight: 700 }}
+                >
+                  {act}
+                </Link>
+              )}
             </Box>
           </Box>
         ))}

@@ -3,14 +3,15 @@ import Button from '@mui/material/Button';
 import Typography from '@mui/material/Typography';
 import { Link } from 'react-router-dom';
 import { formatInClubZone } from '../../lib/club-time-text';
-import { useMyBuilds, type Build, type BuildCheck } from '../../features/builds/api/builds';
+import { useMyBuilds, type Build, type BuildCheck, type Reading } from '../../features/builds/api/builds';
 import { checkPath, findStage, nextCheck, readingInForce } from '../../features/builds/logic/stage';
-import { readingSentence, windowText } from '../../features/builds/logic/words';
+import { readingWords, windowText } from '../../features/builds/logic/words';
 import { EmptyState } from '../../shared-ui/empty-state';
 import { Icon } from '../../shared-ui/icon';
 import { LoadingBars } from '../../shared-ui/loading-bars';
 import { ProblemAlert } from '../../shared-ui/problem-alert';
 import { VerdictChip } from '../../shared-ui/states/verdict-chip';
+import { usePhone } from '../../shared-ui/use-phone';
 import { WindowBar } from '../../shared-ui/window-bar';
 
 /** What to do next, where, and with what: the one open thing on the page. */
@@ -62,6 +63,8 @@ function Step({ build, bench }: { build: Build; bench?: string }) {
   const { title, act, path, where } = wordsOf(build);
   const stage = findStage(build, build.currentStageId);
   const check = stage && stage.state !== 'with mentor' ? nextCheck(stage) : undefined;
+  const isMeasured = check?.kind === 'measure';
+  const isPhone = usePhone();
   return (
     <Box
       component="section"
@@ -71,7 +74,7 @@ function Step({ build, bench }: { build: Build; bench?: string }) {
         borderColor: 'token.ink',
         borderRadius: '3px',
         backgroundColor: 'token.sheet',
-        p: '18px 20px',
+        p: { xs: '14px 16px 16px', md: '18px 20px' },
       }}
     >
       <Box
@@ -87,9 +90,16 @@ function Step({ build, bench }: { build: Build; bench?: string }) {
           <Typography variant="small" component="p" sx={{ m: 0, color: 'token.ink2' }}>
             {bench ? `Next at ${bench}, ${where}` : `Next, ${where}`}
           </Typography>
-          <Typography variant="h2" sx={{ fontSize: '1.375rem', lineHeight: '1.9375rem' }}>
+          <Typography
+            variant="h2"
+            sx={{
+              fontSize: { xs: '1.125rem', md: '1.375rem' },
+              lineHeight: { xs: '1.5rem', md: '1.9375rem' },
+            }}
+          >
             {title}
           </Typography>
+          {isPhone && isMeasured && <ShortReading check={check} />}
         </div>
         <Button
           variant="contained"
@@ -101,8 +111,29 @@ function Step({ build, bench }: { build: Build; bench?: string }) {
           {act}
         </Button>
       </Box>
-      {check?.kind === 'measure' && <LastReading check={check} />}
+      {!isPhone && isMeasured && <LastReading check={check} />}
     </Box>
+  );
+}
+
+/** A phone's one line: the window, and the last reading beside it. */
+function ShortReading({ check }: { check: BuildCheck }) {
+  const reading = readingInForce(check);
+  const words = reading && readingWords(reading, 2);
+  return (
+    <Typography variant="small" component="p" sx={{ m: '2px 0 0' }}>
+      Window <b>{windowText(check)}</b>,{' '}
+      {words ? (
+        <>
+          last reading{' '}
+          <b>
+            {words.value} {words.plusMinus}
+          </b>
+        </>
+      ) : (
+        'no reading yet'
+      )}
+    </Typography>
   );
 }
 
@@ -127,7 +158,7 @@ function LastReading({ check }: { check: BuildCheck }) {
             <Typography variant="small" component="p" sx={{ m: 0, color: 'token.ink2' }}>
               Last reading, {formatInClubZone(reading.takenAt)}
             </Typography>
-            <b>{readingSentence(reading)}</b>
+            <ReadingFigures reading={reading} />
           </div>
           <VerdictChip verdict={reading.verdict} />
         </>
@@ -148,6 +179,19 @@ function LastReading({ check }: { check: BuildCheck }) {
           />
         </Box>
       )}
+    </Box>
+  );
+}
+
+/** The value large, its uncertainty small beside it. */
+function ReadingFigures({ reading }: { reading: Reading }) {
+  const { value, plusMinus, unit } = readingWords(reading, 2);
+  return (
+    <Box component="span" sx={{ fontWeight: 700, fontSize: '1.1875rem', lineHeight: '1.5rem' }}>
+      {value}{' '}
+      <Typography variant="small" component="span" sx={{ color: 'token.ink2' }}>
+        {unit === 'MHz' ? `MHz ${plusMinus}` : `${plusMinus} ${unit}`}
+      </Typography>
     </Box>
   );
 }

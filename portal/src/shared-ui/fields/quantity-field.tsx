@@ -54,7 +54,10 @@ export function QuantityField({
     <TextField
       {...rest}
       value={parts.number}
-      onChange={(text) => onChange(choices ? joinUnit(text, parts.unit, unit) : text)}
+      onChange={(text) => {
+        setWasLeft(false);
+        onChange(choices ? joinUnit(text, parts.unit, unit) : text);
+      }}
       onBlur={() => {
         setWasLeft(true);
         onBlur?.();

@@ -2,6 +2,7 @@ import InputAdornment from '@mui/material/InputAdornment';
 import MuiTextField from '@mui/material/TextField';
 import type { ChangeEvent, HTMLInputAutoCompleteAttribute, ReactNode, Ref } from 'react';
 import { hintLine } from './hint-line';
+import { roomWords, tooLongWords } from './text-length';
 
 export interface TextFieldProps {
   label: string;
@@ -15,6 +16,7 @@ export interface TextFieldProps {
   /** Inside the field behind a hairline: a unit, a length of time, a button. */
   end?: ReactNode;
   rows?: number;
+  /** Never cut: what is too long is said, and counted. */
   maxLength?: number;
   autoComplete?: HTMLInputAutoCompleteAttribute;
   inputMode?: 'text' | 'decimal' | 'numeric' | 'email';
@@ -36,16 +38,17 @@ export function TextField({
   inputMode,
   ...rest
 }: TextFieldProps) {
+  const fault = error ?? tooLongWords(rest.value, maxLength);
   return (
     <MuiTextField
       {...rest}
       onChange={(event: ChangeEvent<HTMLInputElement>) => onChange(event.target.value)}
-      error={Boolean(error)}
-      helperText={hintLine(error, hint)}
+      error={Boolean(fault)}
+      helperText={hintLine(fault, roomWords(rest.value, maxLength) ?? hint)}
       multiline={rows !== undefined}
       minRows={rows}
       slotProps={{
-        htmlInput: { maxLength, inputMode },
+        htmlInput: { inputMode },
         input: end ? { endAdornment: <InputAdornment position="end">{end}</InputAdornment> } : undefined,
         inputLabel: { required: false },
       }}

@@ -9,10 +9,13 @@ interface VerdictChipProps {
   verdict: Verdict;
   /** "Too close" in a narrow place; read aloud in full. */
   narrow?: boolean;
+  /** Of the last good result, while what is typed cannot be read. */
+  isStale?: boolean;
 }
 
-export function VerdictChip({ verdict, narrow = false }: VerdictChipProps) {
-  const { shape, colour, tint, words, short } = VERDICTS[verdict];
+export function VerdictChip({ verdict, narrow = false, isStale = false }: VerdictChipProps) {
+  const { shape, words, short, ...own } = VERDICTS[verdict];
+  const { colour, tint } = isStale ? ({ colour: 'ink3', tint: 'sheet' } as const) : own;
   return (
     <Box
       component="span"

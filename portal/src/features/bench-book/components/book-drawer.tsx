@@ -1,12 +1,17 @@
 import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
+import Typography from '@mui/material/Typography';
 import { useEffect } from 'react';
 import { useWatch, type UseFormReturn } from 'react-hook-form';
 import { DockedDrawer } from '../../../shared-ui/docked-drawer';
 import { useOnline } from '../../../shared-ui/use-online';
 import { WaitingButton } from '../../../shared-ui/waiting-button';
 import type { Bench, Booking, FreeTime } from '../api/bench-book';
-import { timesOf, wishOf, type BookingValues } from '../form/booking-values';
+import { useOpeningHours } from '../../../api-client/club';
+import { StateMark } from '../../../shared-ui/states/shape';
+import { longDayText } from '../../../lib/club-time-text';
+import { usePhone } from '../../../shared-ui/use-phone';
+import { closedWords, timesOf, wishOf, type BookingValues } from '../form/booking-values';
 import { BookForm } from './book-form';
 import { useBooking } from './use-booking';
 
@@ -26,6 +31,7 @@ const FORM_ID = 'book-a-bench';
 /** The form "Book a bench". Closing keeps what is typed; a lost race leaves it untouched. */
 export function BookDrawer({ open, form, onClose, onBooked, keptFrom, ...rest }: BookDrawerProps) {
   const booking = useBooking(onBooked);
+  const isPhone = usePhone();
   const { setError, handleSubmit, getValues, reset } = form;
   const { refusal } = booking;
   useEffect(() => {
@@ -45,6 +51,8 @@ export function BookDrawer({ open, form, onClose, onBooked, keptFrom, ...rest }:
     <DockedDrawer
       open={open}
       title="Book a bench"
+      head={isPhone ? <SheetHead form={form} benches={rest.benches} /> : undefined}
+      phone="beside"
       onClose={onClose}
       footer={<Footer form={form} isBusy={booking.isBusy} onClose={onClose} />}
     >
@@ -73,8 +81,11 @@ function Footer({ form, isBusy, onClose }: Pick<BookDrawerProps, 'form' | 'onClo
   const values = useWatch({ control: form.control, compute: (now) => ({ ...now }) });
   const isNothing = values.benchId === '' && values.instrumentIds.length === 0;
   const isTimed = wishOf(values) !== undefined;
+  const closed = closedWords(values, useOpeningHours());
+  const isPhone = usePhone();
   return (
-    <Box sx={{ display: 'grid', gridTemplateColumns: '1fr auto', gap: '8px' }}>
+    <Box sx={{ display: 'grid', gridTemplateColumns: { xs: '1fr', md: '1fr auto' }, gap: '8px' }}>
+      {closed && <ClosedLine words={closed} />}
       {!isOnline ? (
         <WaitingButton fullWidth>Needs a connection</WaitingButton>
       ) : isNothing ? (
@@ -84,7 +95,38 @@ function Footer({ form, isBusy, onClose }: Pick<BookDrawerProps, 'form' | 'onClo
           {isTimed ? `Book ${values.from} to ${values.to}` : 'Book'}
         </Button>
       )}
-      <Button onClick={onClose}>Cancel</Button>
+      {!isPhone && <Button onClick={onClose}>Cancel</Button>}
+    </Box>
+  );
+}
+
+/** What the sheet is about, because its bench and day stand further down: 'Bench 3, Sat 17 October'. */
+function SheetHead({ form, benches }: Pick<BookDrawerProps, 'form' | 'benches'>) {
+  const [benchId, day] = useWatch({ control: form.control, name: ['benchId', 'day'] });
+  const bench = benches.find(({ id }) => id === benchId)?.tag ?? 'No bench';
+  return (
+    <Typography variant="h2" sx={{ fontSize: '1.1875rem', lineHeight: '1.5rem' }}>
+      {[bench, day && longDayText(day).replace(/^(\w{3})\w*/, '$1')].filter(Boolean).join(', ')}
+    </Typography>
+  );
+}
+
+/** No refusal: somebody with a key may be there. */
+function ClosedLine({ words }: { words: string }) {
+  return (
+    <Box
+      role="status"
+      sx={{
+        gridColumn: '1 / -1',
+        display: 'flex',
+        gap: '8px',
+        typography: 'small',
+        fontWeight: 600,
+        color: 'token.brass',
+      }}
+    >
+      <StateMark name="diamond" size={16} />
+      {words}
     </Box>
   );
 }

@@ -1,11 +1,19 @@
 import Box from '@mui/material/Box';
 import { useQuery } from '@tanstack/react-query';
-import { useWatch, type UseFormReturn } from 'react-hook-form';
+import { useWatch, type Control, type UseFormReturn } from 'react-hook-form';
 import { myBuildsQuery } from '../../../api-client/my-builds';
 import { lengthText } from '../../../lib/club-time-text';
 import { FormSelect, FormText } from '../../../shared-ui/form/form-fields';
 import { ProblemAlert } from '../../../shared-ui/problem-alert';
-import { bookingsQuery, instrumentsQuery, myGroupsQuery, type Bench, type FreeTime } from '../api/bench-book';
+import { usePhone } from '../../../shared-ui/use-phone';
+import {
+  bookingsQuery,
+  instrumentsQuery,
+  myGroupsQuery,
+  type Bench,
+  type Booking,
+  type FreeTime,
+} from '../api/bench-book';
 import { openChecks } from '../api/my-build';
 import {
   clockProblem,
@@ -33,7 +41,10 @@ interface BookFormProps {
 
 const PAIR = { display: 'grid', gridTemplateColumns: '1fr 1fr', gap: '12px 10px', mb: '14px' } as const;
 
-/** Bench, day, from, to, what for, and instruments. What was refused stands where it can be mended. */
+/**
+ * Bench, day, from, to, what for, and instruments. What was refused stands where it can be mended. A phone's half-high
+ * sheet names bench and day in its head, so times and instruments come first there.
+ */
 export function BookForm(props: BookFormProps) {
   const { form, benches, laneIds, askedCheckId, refusal, failure, isBusy, onTake, onRetry } = props;
   const { control, setValue, getValues } = form;
@@ -42,7 +53,24 @@ export function BookForm(props: BookFormProps) {
   const day = values.day || getValues('day');
   const taken = useQuery({ ...bookingsQuery(day, 1), enabled: times !== undefined }).data ?? [];
   const instruments = useQuery(instrumentsQuery(day)).data ?? [];
-  const bench = holderOf(values.benchId, times, taken);
+  const isPhone = usePhone();
+  const place = (
+    <BenchAndDay control={control} benches={benches} holder={holderOf(values.benchId, times, taken)} />
+  );
+  const hours = <Times control={control} minutes={times?.minutes} />;
+  const purpose = <WorkingOn form={form} askedCheckId={askedCheckId} />;
+  const rows = (
+    <InstrumentRows
+      instruments={instruments}
+      laneIds={laneIds}
+      chosen={values.instrumentIds}
+      times={times}
+      bookings={taken}
+      errors={refusal?.resources ?? {}}
+      hasHeading={!isPhone}
+      onChange={(chosen) => setValue('instrumentIds', chosen, { shouldDirty: true })}
+    />
+  );
   return (
     <>
       {refusal?.detail && (
@@ -55,54 +83,71 @@ export function BookForm(props: BookFormProps) {
           <ProblemAlert error={failure} title="The booking was not made." onRetry={onRetry} />
         </Box>
       )}
-      <Box sx={PAIR}>
-        <FormSelect
-          control={control}
-          name="benchId"
-          label="Bench"
-          options={[
-            ...benches.map(({ id, tag }) => ({ value: id, label: tag })),
-            { value: '', label: 'No bench' },
-          ]}
-          hint={bench && holderWords(bench)}
-        />
-        <FormText
-          control={control}
-          name="day"
-          label="Day"
-          type="date"
-          rules={{ required: 'Choose a day.' }}
-        />
-        <FormText
-          control={control}
-          name="from"
-          label="From"
-          inputMode="numeric"
-          rules={{
-            validate: (text: string, all: BookingValues) =>
-              clockProblem(text) ?? skippedProblem(all.day, text) ?? true,
-          }}
-        />
-        <FormText
-          control={control}
-          name="to"
-          label="To"
-          inputMode="numeric"
-          end={times && times.minutes > 0 ? lengthText(times.minutes) : undefined}
-          rules={{ validate: (_text: string, all: BookingValues) => endProblem(all) ?? true }}
-        />
-      </Box>
-      <WorkingOn form={form} askedCheckId={askedCheckId} />
-      <InstrumentRows
-        instruments={instruments}
-        laneIds={laneIds}
-        chosen={values.instrumentIds}
-        times={times}
-        bookings={taken}
-        errors={refusal?.resources ?? {}}
-        onChange={(chosen) => setValue('instrumentIds', chosen, { shouldDirty: true })}
-      />
+      {isPhone ? (
+        <>
+          {hours}
+          {rows}
+          {place}
+          {purpose}
+        </>
+      ) : (
+        <>
+          {place}
+          {hours}
+          {purpose}
+          {rows}
+        </>
+      )}
     </>
+  );
+}
+
+interface BenchAndDayProps {
+  control: Control<BookingValues>;
+  benches: readonly Bench[];
+  holder: Booking | undefined;
+}
+
+function BenchAndDay({ control, benches, holder }: BenchAndDayProps) {
+  return (
+    <Box sx={PAIR}>
+      <FormSelect
+        control={control}
+        name="benchId"
+        label="Bench"
+        options={[
+          ...benches.map(({ id, tag }) => ({ value: id, label: tag })),
+          { value: '', label: 'No bench' },
+        ]}
+        hint={holder && holderWords(holder)}
+      />
+      <FormText control={control} name="day" label="Day" type="date" rules={{ required: 'Choose a day.' }} />
+    </Box>
+  );
+}
+
+function Times({ control, minutes = 0 }: { control: Control<BookingValues>; minutes: number | undefined }) {
+  return (
+    <Box sx={PAIR}>
+      <FormText
+        control={control}
+        name="from"
+        label="From"
+        inputMode="numeric"
+        rules={{
+          validate: (text: string, all: BookingValues) =>
+            clockProblem(text) ?? skippedProblem(all.day, text) ?? true,
+        }}
+      />
+      <FormText
+        control={control}
+        name="to"
+        label="To"
+        inputMode="numeric"
+        end={minutes > 0 ? lengthText(minutes) : undefined}
+        rules={{ validate: (_text: string, all: BookingValues) => endProblem(all) ?? true }}
+      />
+    </Box>
   );
 }
 

@@ -8,6 +8,7 @@ import { ProblemAlert } from '../../../shared-ui/problem-alert';
 import { usePhone } from '../../../shared-ui/use-phone';
 import type { Booking } from '../api/bench-book';
 import type { BookView } from '../book-view';
+import { useOpeningHours } from '../../../api-client/club';
 import type { BookingValues } from '../form/booking-values';
 import type { Lane } from '../lanes/lane';
 import { BookingList } from './booking-list';
@@ -33,6 +34,7 @@ export function BookWeek(props: BookWeekProps) {
   const { view, dates, lanes, bookings, control, isFormOpen, openId, onPick, onOpen, onBook } = props;
   const wishes = useWishes(control, isFormOpen);
   const isPhone = usePhone();
+  const hours = useOpeningHours();
   if (bookings.isPending) return <LoadingBars rows={8} label="Loading bookings" />;
   if (!bookings.data) return <ProblemAlert error={bookings.error} onRetry={() => void bookings.refetch()} />;
   return (
@@ -52,7 +54,10 @@ export function BookWeek(props: BookWeekProps) {
           lanes={lanes}
           bookings={bookings.data}
           wishes={wishes}
+          hours={hours}
+          week={dates}
           hasDays={!isPhone}
+          isUnderSheet={isPhone && isFormOpen}
           onPick={onPick}
           onOpen={onOpen}
         />

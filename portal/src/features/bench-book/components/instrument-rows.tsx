@@ -16,6 +16,7 @@ interface InstrumentRowsProps {
   /** Of the day that is typed. */
   bookings: readonly Booking[];
   errors: Readonly<Record<string, string>>;
+  hasHeading: boolean;
   onChange: (chosen: string[]) => void;
 }
 
@@ -23,7 +24,7 @@ const SHOWN = 5;
 
 /** The instruments to choose from: in the lanes or chosen first, then those that may be had, then the others. */
 export function InstrumentRows(props: InstrumentRowsProps) {
-  const { instruments, laneIds, chosen, times, bookings, errors, onChange } = props;
+  const { instruments, laneIds, chosen, times, bookings, errors, hasHeading, onChange } = props;
   const [showsAll, setShowsAll] = useState(false);
   // Ticking a row must not make it jump, so the order is by what was chosen when the list was opened.
   const [first] = useState(() => [...laneIds, ...chosen]);
@@ -35,7 +36,7 @@ export function InstrumentRows(props: InstrumentRowsProps) {
     onChange(isChosen ? [...chosen, id] : chosen.filter((other) => other !== id));
   return (
     <section aria-label="Instruments">
-      <SectionHeading>Instruments</SectionHeading>
+      {hasHeading && <SectionHeading>Instruments</SectionHeading>}
       {shown.map((instrument) => (
         <InstrumentRow
           key={instrument.id}

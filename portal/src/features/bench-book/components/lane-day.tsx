@@ -4,11 +4,13 @@ import { clockText } from '../../../lib/club-time-text';
 import { token } from '../../../shared-ui/tokens';
 import type { Booking } from '../api/bench-book';
 import type { Block } from '../lanes/blocks';
-import { SLOTS } from '../lanes/cursor';
+import type { Extent } from '../lanes/extent';
+import { closedStretches, type OpenDay } from '../../../lib/opening-hours';
 import { hatchOf } from '../lanes/hatches';
 import type { Lane } from '../lanes/lane';
-import { SLOT_PX } from '../lanes/lane-sizes';
+import { MINUTE_PX, SLOT_PX } from '../lanes/lane-sizes';
 import { hoursText, LaneBlock } from './lane-block';
+import { ClosedHatch } from './closed-hatch';
 import { LaneCursor, LaneHatch, LaneWish, NowLine } from './lane-marks';
 import { useLanePointer } from './use-lane-pointer';
 
@@ -33,6 +35,8 @@ interface LaneDayProps {
   blocks: readonly Block[];
   wishes: readonly Wish[];
   cursor: { lane: number; slot: number; length: number } | undefined;
+  hours: readonly OpenDay[];
+  extent: Extent;
   isWide: boolean;
   onPick: (picked: Picked) => void;
   onOpen: (booking: Booking) => void;
@@ -40,7 +44,7 @@ interface LaneDayProps {
 
 /** The drawing of one day over its cells, and what a pointer does there. */
 export function LaneDay(props: LaneDayProps) {
-  const { date, lanes, blocks, wishes, cursor, isWide, onPick, onOpen } = props;
+  const { date, lanes, blocks, wishes, cursor, hours, extent, isWide, onPick, onOpen } = props;
   const laneCount = lanes.length;
   const pointer = useLanePointer(laneCount, (index, from, to) => {
     const lane = lanes[index];
@@ -51,45 +55,57 @@ export function LaneDay(props: LaneDayProps) {
   return (
     <Box
       aria-hidden
-      {...pointer.handlers}
-      style={{ gridColumn: `span ${laneCount}`, backgroundSize: `${100 / laneCount}% 100%, auto, auto` }}
-      sx={DAY}
+      style={{ gridColumn: `span ${laneCount}`, height: (extent.to - extent.from) * MINUTE_PX }}
+      sx={WINDOW}
     >
-      {lanes.map(({ id, instrument }, index) => {
-        const words = hatchOf(instrument, date, clubDay());
-        return words && <LaneHatch key={id} lane={index} laneCount={laneCount} words={words} />;
-      })}
-      {blocks.map((block) => (
-        <LaneBlock
-          key={block.key}
-          block={block}
-          laneCount={laneCount}
-          isInstrument={lanes[block.lane]?.kind === 'instrument'}
-          isWide={isWide}
-          onOpen={() => onOpen(block.booking)}
-        />
-      ))}
-      {wishes.map(({ laneId, from, to }) => {
-        const lane = lanes.findIndex(({ id }) => id === laneId);
-        if (lane < 0) return null;
-        return <LaneWish key={laneId} {...{ lane, laneCount, from, to }} words={wishWords({ from, to })} />;
-      })}
-      {pointer.drawn && (
-        <LaneWish {...pointer.drawn} laneCount={laneCount} words={wishWords(pointer.drawn)} />
-      )}
-      <NowLine date={date} />
-      {cursor && <LaneCursor {...cursor} laneCount={laneCount} />}
+      <Box
+        {...pointer.handlers}
+        style={{ top: -extent.from * MINUTE_PX, backgroundSize: `${100 / laneCount}% 100%, auto, auto` }}
+        sx={DAY}
+      >
+        {closedStretches(hours, date).map((closed) => (
+          <ClosedHatch key={closed.from} {...closed} extent={extent} />
+        ))}
+        {lanes.map(({ id, instrument }, index) => {
+          const words = hatchOf(instrument, date, clubDay());
+          return words && <LaneHatch key={id} lane={index} laneCount={laneCount} words={words} />;
+        })}
+        {blocks.map((block) => (
+          <LaneBlock
+            key={block.key}
+            block={block}
+            laneCount={laneCount}
+            isInstrument={lanes[block.lane]?.kind === 'instrument'}
+            isWide={isWide}
+            onOpen={() => onOpen(block.booking)}
+          />
+        ))}
+        {wishes.map(({ laneId, from, to }) => {
+          const lane = lanes.findIndex(({ id }) => id === laneId);
+          if (lane < 0) return null;
+          return <LaneWish key={laneId} {...{ lane, laneCount, from, to }} words={wishWords({ from, to })} />;
+        })}
+        {pointer.drawn && (
+          <LaneWish {...pointer.drawn} laneCount={laneCount} words={wishWords(pointer.drawn)} />
+        )}
+        <NowLine date={date} />
+        {cursor && <LaneCursor {...cursor} laneCount={laneCount} />}
+      </Box>
     </Box>
   );
 }
 
 const LINE = token('rule');
 
+/** Shows of the day what the week's hours ask for; clipped rather than hidden, so that words inside may stick. */
+const WINDOW = { position: 'relative', overflow: 'clip', borderLeft: `1px solid ${token('edge')}` } as const;
+
 /** Hours ruled, half hours dotted, lanes parted; the day's own edge stands out. Drawn by the background, not by cells. */
 const DAY = {
-  position: 'relative',
-  height: SLOT_PX * SLOTS,
-  borderLeft: `1px solid ${token('edge')}`,
+  position: 'absolute',
+  left: 0,
+  right: 0,
+  height: 24 * 60 * MINUTE_PX,
   cursor: 'cell',
   touchAction: 'pan-y',
   backgroundImage: [

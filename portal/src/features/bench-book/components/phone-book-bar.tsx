@@ -1,5 +1,6 @@
 import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
+import { Icon } from '../../../shared-ui/icon';
 import { PhoneBar } from '../../../shared-ui/phone-bar';
 import { VisuallyHidden } from '../../../shared-ui/visually-hidden';
 import { ViewSwitch } from '../../../shared-ui/view-switch';
@@ -11,7 +12,8 @@ interface PhoneBookBarProps {
   view: BookView;
   all: readonly Lane[];
   shown: readonly Lane[];
-  onBook: () => void;
+  /** Left out while the form is open: then the lanes have the room. */
+  onBook?: () => void;
 }
 
 /** The head of the page on a phone: its name and what is shown in the bar, then lanes or list and the form. */
@@ -31,23 +33,27 @@ export function PhoneBookBar({ view, all, shown, onBook }: PhoneBookBarProps) {
               shown={shown}
               onChange={view.showTags}
               label={`${shown.length} shown, choose`}
+              isPlain
             >
+              <Icon name="filter" size={18} />
               {shown.length} shown
             </LaneMenu>
           )
         }
       />
-      <Box sx={{ display: 'flex', justifyContent: 'space-between', gap: '8px', mb: '8px' }}>
-        <ViewSwitch
-          value={isLanes ? 'lanes' : 'table'}
-          drawing="lanes"
-          words="Lanes"
-          onChange={(next) => view.showKind(next === 'table' ? 'list' : 'lanes')}
-        />
-        <Button variant="contained" onClick={onBook}>
-          Book a bench
-        </Button>
-      </Box>
+      {onBook && (
+        <Box sx={{ display: 'flex', justifyContent: 'space-between', gap: '8px', mb: '8px' }}>
+          <ViewSwitch
+            value={isLanes ? 'lanes' : 'table'}
+            drawing="lanes"
+            words="Lanes"
+            onChange={(next) => view.showKind(next === 'table' ? 'list' : 'lanes')}
+          />
+          <Button variant="contained" onClick={onBook}>
+            Book a bench
+          </Button>
+        </Box>
+      )}
     </>
   );
 }

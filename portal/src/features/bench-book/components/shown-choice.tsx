@@ -53,7 +53,8 @@ export function LaneMenu({
   onChange,
   label,
   children,
-}: ShownChoiceProps & { label: string; children: ReactNode }) {
+  isPlain = false,
+}: ShownChoiceProps & { label: string; children: ReactNode; isPlain?: boolean }) {
   const [anchor, setAnchor] = useState<HTMLElement | null>(null);
   const tags = shown.map(({ tag }) => tag);
   const toggle = (tag: string) => {
@@ -64,6 +65,7 @@ export function LaneMenu({
     <>
       <Button
         size="small"
+        variant={isPlain ? 'text' : 'outlined'}
         aria-haspopup="menu"
         aria-expanded={anchor !== null}
         aria-label={label}

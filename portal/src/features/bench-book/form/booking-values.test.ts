@@ -1,5 +1,13 @@
 import { describe, expect, it } from 'vitest';
-import { endProblem, readTimes, startingValues, timesOf, wishOf, type BookingValues } from './booking-values';
+import {
+  closedWords,
+  endProblem,
+  readTimes,
+  startingValues,
+  timesOf,
+  wishOf,
+  type BookingValues,
+} from './booking-values';
 
 const values = (overrides: Partial<BookingValues> = {}): BookingValues => ({
   benchId: 'b3',
@@ -40,15 +48,41 @@ describe('the times of the form', () => {
   });
 
   it('start with the next full hour, and with tomorrow evening when today is nearly over', () => {
-    expect(startingValues(new Date('2026-10-15T12:12:00Z'))).toMatchObject({
+    expect(startingValues([], new Date('2026-10-15T12:12:00Z'))).toMatchObject({
       day: '2026-10-15',
       from: '14:00',
       to: '16:00',
     });
-    expect(startingValues(new Date('2026-10-15T21:30:00Z'))).toMatchObject({
+    expect(startingValues([], new Date('2026-10-15T21:30:00Z'))).toMatchObject({
       day: '2026-10-16',
       from: '19:00',
     });
+  });
+
+  it('start while the workshop is open: when it opens today, else on the next evening it is', () => {
+    // Thursdays and Saturdays; the 15th is a Thursday, its wall an hour ahead of UTC.
+    const hours = [
+      { weekday: 4, opensMinute: 720, closesMinute: 1320 },
+      { weekday: 6, opensMinute: 600, closesMinute: 1200 },
+    ];
+    const starts = (now: string) => {
+      const { day, from } = startingValues(hours, new Date(now));
+      return `${day} ${from}`;
+    };
+    expect(starts('2026-10-15T07:00:00Z')).toBe('2026-10-15 12:00');
+    expect(starts('2026-10-15T12:12:00Z')).toBe('2026-10-15 14:00');
+    expect(starts('2026-10-15T19:30:00Z')).toBe('2026-10-17 10:00');
+    expect(starts('2026-10-17T18:30:00Z')).toBe('2026-10-22 19:00');
+  });
+
+  it('say when nobody opens the workshop then, and nothing while they cannot be read', () => {
+    const hours = [{ weekday: 6, opensMinute: 600, closesMinute: 1200 }];
+    const words = 'The workshop is closed at that time. Agree with an organiser who opens it.';
+    expect(closedWords(values(), hours)).toBeUndefined();
+    expect(closedWords(values({ to: '20:15' }), hours)).toBe(words);
+    expect(closedWords(values({ day: '2026-10-18' }), hours)).toBe(words);
+    expect(closedWords(values({ day: '2026-10-18' }), [])).toBeUndefined();
+    expect(closedWords(values({ to: '20:' }), hours)).toBeUndefined();
   });
 
   it('take over a free time that was offered, its midnight as 24:00', () => {

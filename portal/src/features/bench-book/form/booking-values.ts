@@ -1,5 +1,6 @@
-import { addDays, clubDay, instantOf, minutesBetween, readClock, wallOf } from '../../../lib/club-time';
+import { addDays, instantOf, minutesBetween, readClock, wallOf } from '../../../lib/club-time';
 import { clockText } from '../../../lib/club-time-text';
+import { isClosedIn, openDayOf, type OpenDay } from '../../../lib/opening-hours';
 import type { BookingWish, FreeTime } from '../api/bench-book';
 
 /** What the form holds, as typed. */
@@ -20,9 +21,12 @@ export interface TypedTimes {
   minutes: number;
 }
 
-const DAY = /^\d{4}-\d{2}-\d{2}$/;
+/** A whole calendar day, as a field of dates gives it. */
+export const DAY = /^\d{4}-\d{2}-\d{2}$/;
 const USUAL_MINUTES = 120;
 const LAST_START = 22 * 60;
+/** When people come after work. */
+const USUAL_START = 19 * 60;
 
 /** The typed day and times as instants, or undefined while they cannot be read. */
 export function readTimes({
@@ -61,15 +65,54 @@ export function endProblem({ day, from, to }: BookingValues): string | undefined
     : 'It ends before it has begun. Choose a later end.';
 }
 
-/** The two hours that come next, on the hour; tomorrow's when today is nearly over. */
-export function startingValues(now: Date = new Date()): BookingValues {
+/** The two hours that come next, on the hour, while the workshop is open; on a later day when today has no room left. */
+export function startingValues(hours: readonly OpenDay[] = [], now: Date = new Date()): BookingValues {
   const { date, minute } = wallOf(now);
   const next = Math.ceil(minute / 60) * 60;
-  const isLate = next > LAST_START;
-  const day = isLate ? addDays(clubDay(now), 1) : date;
-  const from = isLate ? 19 * 60 : next;
-  const times = { from: clockText(from), to: clockText(from + USUAL_MINUTES) };
-  return { benchId: '', day, ...times, groupId: '', checkId: '', instrumentIds: [] };
+  const today = startOn(date, Math.max(next, openDayOf(hours, date)?.opensMinute ?? 0), hours);
+  const times = timesFrom(today ?? laterStart(date, hours));
+  return { benchId: '', ...times, groupId: '', checkId: '', instrumentIds: [] };
+}
+
+/** Two hours of a day to come: its evening, or from when the workshop opens. */
+export const startingTimes = (hours: readonly OpenDay[], day: string) =>
+  timesFrom(eveningOf(day, hours) ?? { day, from: USUAL_START });
+
+const timesFrom = ({ day, from }: Start) => ({
+  day,
+  from: clockText(from),
+  to: clockText(from + USUAL_MINUTES),
+});
+
+interface Start {
+  day: string;
+  from: number;
+}
+
+function startOn(day: string, from: number, hours: readonly OpenDay[]): Start | undefined {
+  const fits = from <= LAST_START && !isClosedIn(hours, day, { from, to: from + USUAL_MINUTES });
+  return fits ? { day, from } : undefined;
+}
+
+const eveningOf = (day: string, hours: readonly OpenDay[]): Start | undefined =>
+  startOn(day, USUAL_START, hours) ?? startOn(day, openDayOf(hours, day)?.opensMinute ?? 0, hours);
+
+/** The first evening of the days ahead on which the workshop is open, or whenever it opens then. */
+function laterStart(today: string, hours: readonly OpenDay[]): Start {
+  const ahead = Array.from({ length: 7 }, (_, index) => addDays(today, index + 1));
+  const starts = ahead.map((day) => eveningOf(day, hours));
+  return starts.find((start) => start !== undefined) ?? { day: addDays(today, 1), from: USUAL_START };
+}
+
+/** Words for times in which nobody opens the workshop; undefined when it is open, or the times cannot be read. */
+export function closedWords(
+  { day, from, to }: Pick<BookingValues, 'day' | 'from' | 'to'>,
+  hours: readonly OpenDay[],
+): string | undefined {
+  const [start, end] = [readClock(from), readClock(to)];
+  if (!DAY.test(day) || start === undefined || end === undefined || end <= start) return undefined;
+  if (!isClosedIn(hours, day, { from: start, to: end })) return undefined;
+  return 'The workshop is closed at that time. Agree with an organiser who opens it.';
 }
 
 /** What is sent, or undefined while something is missing or cannot be read. */

@@ -1,6 +1,13 @@
+import type { Extent } from './extent';
+
 /** Half hours of a day: what the arrow keys move by. */
-export const SLOTS = 48;
 export const SLOT_MINUTES = 30;
+
+/** The half hours that are drawn: the first of them, and the one after the last. */
+export const slotsOf = ({ from, to }: Extent): { first: number; end: number } => ({
+  first: from / SLOT_MINUTES,
+  end: to / SLOT_MINUTES,
+});
 
 /** The place in the lanes that the keyboard is at: `column` counts lanes through all days shown. */
 export interface Cursor {
@@ -18,12 +25,18 @@ const clamp = (value: number, least: number, most: number): number => Math.min(m
  * Arrows move by half an hour and lane by lane; with Shift, up and down stretch; Home and End go to the first and
  * the last lane, Page Up and Page Down by three hours.
  */
-export function moved(cursor: Cursor, key: string, isShift: boolean, columns: number): Cursor | undefined {
+export function moved(
+  cursor: Cursor,
+  { key, isShift }: { key: string; isShift: boolean },
+  columns: number,
+  extent: Extent,
+): Cursor | undefined {
   const { column, slot, length } = cursor;
+  const { first, end } = slotsOf(extent);
   const to = (next: Partial<Cursor>): Cursor => ({
     column: clamp(next.column ?? column, 0, columns - 1),
-    slot: clamp(next.slot ?? slot, 0, SLOTS - 1),
-    length: clamp(next.length ?? 1, 1, SLOTS - clamp(next.slot ?? slot, 0, SLOTS - 1)),
+    slot: clamp(next.slot ?? slot, first, end - 1),
+    length: clamp(next.length ?? 1, 1, end - clamp(next.slot ?? slot, first, end - 1)),
   });
   if (isShift && key === 'ArrowDown') return to({ length: length + 1 });
   if (isShift && key === 'ArrowUp') return to({ length: length - 1 });

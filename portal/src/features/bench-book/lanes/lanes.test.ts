@@ -1,7 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import type { Booking, Instrument } from '../api/bench-book';
 import { blockAt, blocksOf } from './blocks';
-import { dragged, moved } from './cursor';
+import { dragged, moved, type Cursor } from './cursor';
+import { extentOf, firstSeen } from './extent';
 import { hatchOf } from './hatches';
 import { benchLane, instrumentLane, lanesShown } from './lane';
 import { daysFrom } from './segments';
@@ -54,9 +55,12 @@ describe('blocks', () => {
     ]);
   });
 
-  it('of a build night over neighbouring lanes are one', () => {
+  it('of a build night over neighbouring lanes are one, benches and instruments alike', () => {
     const night = booking(['b1', 'b2', 'b3'], { kind: 'build night', title: 'Build night 14' });
     expect(blocksOf([night], lanes, WEEK)).toMatchObject([{ lane: 0, lanes: 3, minutes: 180 }]);
+    const withAnalyzer = booking(['b1', 'i31'], { kind: 'build night', title: 'Build night 14' });
+    const pair = [bench(1), instrumentLane(instrument())];
+    expect(blocksOf([withAnalyzer], pair, WEEK)).toMatchObject([{ lane: 0, lanes: 2 }]);
     const split = booking(['b1', 'b3'], { kind: 'build night', title: 'Build night 14' });
     expect(blocksOf([split], lanes, WEEK)).toHaveLength(2);
   });
@@ -108,9 +112,46 @@ describe('the hatch over a day of an instrument', () => {
   });
 });
 
+describe('the hours a week is drawn with', () => {
+  const open = (weekday: number, opens: number, closes: number) => ({
+    weekday,
+    opensMinute: opens * 60,
+    closesMinute: closes * 60,
+  });
+  const HOURS = [open(4, 12, 22), open(6, 10, 20)];
+  const drawn = (standing: { from: number; to: number }[], hours = HOURS) => {
+    const { from, to } = extentOf(WEEK, hours, standing);
+    return [from / 60, to / 60];
+  };
+
+  it('go from the earliest opening to the latest closing', () => {
+    expect(drawn([])).toEqual([10, 22]);
+    expect(extentOf(['2026-10-15'], HOURS, [])).toEqual({ from: 720, to: 1320 });
+  });
+
+  it('grow by whole hours to what stands outside', () => {
+    expect(drawn([{ from: 9 * 60 + 30, to: 22 * 60 + 15 }])).toEqual([9, 23]);
+  });
+
+  it('are the whole day when no hours are given', () => {
+    expect(drawn([], [])).toEqual([0, 24]);
+  });
+
+  it('open at noon, or earlier when something stands before it', () => {
+    const whole = { from: 0, to: 1440 };
+    expect(firstSeen(whole, [])).toBe(720);
+    expect(firstSeen(whole, [{ from: 570, to: 600 }])).toBe(540);
+    expect(firstSeen(whole, [{ from: 30, to: 60 }])).toBe(360);
+    expect(firstSeen({ from: 840, to: 1320 }, [])).toBe(840);
+  });
+});
+
 describe('keys in the lanes', () => {
   const at = { column: 4, slot: 28, length: 3 };
-  const press = (key: string, isShift = false) => moved(at, key, isShift, 14);
+  const DAY = { from: 0, to: 1440 };
+  const from = (start: Cursor, key: string, { isShift = false, extent = DAY } = {}) =>
+    moved(start, { key, isShift }, 14, extent);
+  const press = (key: string, isShift = false) => from(at, key, { isShift });
 
   it('move by half an hour and lane by lane, and let go of the stretch', () => {
     expect(press('ArrowDown')).toEqual({ column: 4, slot: 29, length: 1 });
@@ -122,13 +163,21 @@ describe('keys in the lanes', () => {
   it('stretch with Shift, down to one half hour and up to midnight', () => {
     expect(press('ArrowDown', true)).toMatchObject({ slot: 28, length: 4 });
     expect(press('ArrowUp', true)).toMatchObject({ slot: 28, length: 2 });
-    expect(moved({ ...at, length: 1 }, 'ArrowUp', true, 14)).toMatchObject({ length: 1 });
-    expect(moved({ ...at, slot: 47, length: 1 }, 'ArrowDown', true, 14)).toMatchObject({ length: 1 });
+    expect(from({ ...at, length: 1 }, 'ArrowUp', { isShift: true })).toMatchObject({ length: 1 });
+    expect(from({ ...at, slot: 47, length: 1 }, 'ArrowDown', { isShift: true })).toMatchObject({ length: 1 });
   });
 
   it('stay inside the week and the day', () => {
-    expect(moved({ column: 13, slot: 47, length: 1 }, 'ArrowRight', false, 14)).toMatchObject({ column: 13 });
-    expect(moved({ column: 0, slot: 0, length: 1 }, 'ArrowUp', false, 14)).toMatchObject({ slot: 0 });
+    expect(from({ column: 13, slot: 47, length: 1 }, 'ArrowRight')).toMatchObject({ column: 13 });
+    expect(from({ column: 0, slot: 0, length: 1 }, 'ArrowUp')).toMatchObject({ slot: 0 });
+  });
+
+  it('stay inside the hours that are drawn', () => {
+    const extent = { from: 720, to: 1320 };
+    expect(from({ column: 0, slot: 24, length: 1 }, 'ArrowUp', { extent })).toMatchObject({ slot: 24 });
+    expect(from({ column: 0, slot: 42, length: 1 }, 'PageDown', { extent })).toMatchObject({ slot: 43 });
+    const stretched = from({ column: 0, slot: 43, length: 1 }, 'ArrowDown', { isShift: true, extent });
+    expect(stretched).toMatchObject({ slot: 43, length: 1 });
   });
 
   it('that mean nothing here are left to the page', () => {

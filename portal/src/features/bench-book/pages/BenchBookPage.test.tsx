@@ -2,6 +2,7 @@ import { configure, screen, waitFor, within } from '@testing-library/react';
 import { http, HttpResponse } from 'msw';
 import { beforeEach, describe, expect, it, vi } from 'vitest';
 import type { components } from '../../../api-client/schema';
+import { asPhone } from '../../../testing/as-phone';
 import { renderPage, TAMSIN } from '../../../testing/render';
 import { server } from '../../../testing/server';
 import BenchBookPage from './BenchBookPage';
@@ -79,7 +80,10 @@ describe('the Bench book', () => {
         return HttpResponse.json(booking({ mine: true, mayCancel: true }), { status: 201 });
       }),
     );
-    return () => vi.useRealTimers();
+    return () => {
+      vi.useRealTimers();
+      vi.unstubAllGlobals();
+    };
   });
   const refuseWith = (status: number, body: object) =>
     server.use(
@@ -248,6 +252,57 @@ describe('the Bench book', () => {
     expect(cancelled).toEqual(['mine']);
     await user.click(screen.getByRole('button', { name: 'Undo' }));
     await waitFor(() => expect(sent).toMatchObject([{ resourceIds: ['b3'], startsAt: mine.startsAt }]));
+  });
+
+  describe('of a club that is open on Thursdays and Saturdays', () => {
+    const hours = [
+      { weekday: 4, opensMinute: 720, closesMinute: 1320 },
+      { weekday: 6, opensMinute: 600, closesMinute: 1200 },
+    ];
+    beforeEach(() =>
+      server.use(
+        http.get('*/api/club', () =>
+          HttpResponse.json({ timeZone: 'Europe/London', currency: 'GBP', openingHours: hours }),
+        ),
+      ),
+    );
+    const closed = 'The workshop is closed at that time. Agree with an organiser who opens it.';
+
+    it('hatches what is closed, says it of each half hour, and draws no hour outside', async () => {
+      const { user } = renderPage(<BenchBookPage />, { at: '/bench-book?day=2026-10-16' });
+      const grid = await screen.findByRole('grid');
+      await waitFor(() => expect(grid).toHaveAttribute('aria-rowcount', String(24 + 2)));
+      expect(screen.getAllByTestId('closed-hours')).toHaveLength(5 + 1 + 1);
+      grid.focus();
+      await user.keyboard('{ArrowRight}{ArrowRight}');
+      const words = 'Fri 16 Oct 14:00, Bench 3, free, the workshop is closed';
+      expect(screen.getByRole('gridcell', { name: words })).toBeInTheDocument();
+    });
+
+    it('says before the button that nobody opens then, and still books: some have a key', async () => {
+      const { user } = await openForm('/bench-book?day=2026-10-17');
+      expect(screen.getByLabelText('Day')).toHaveValue('2026-10-17');
+      expect(screen.queryByText(closed)).not.toBeInTheDocument();
+      await retype(user, 'From', '19:00');
+      await retype(user, 'To', '21:00');
+      expect(screen.getByText(closed)).toBeVisible();
+      await user.click(screen.getByRole('button', { name: 'Book 19:00 to 21:00' }));
+      await waitFor(() => expect(sent).toHaveLength(1));
+    });
+  });
+
+  it('fills the form in beside the lanes on a phone, which stay in use above it', async () => {
+    asPhone();
+    const { user } = await openForm('/bench-book?day=2026-10-17');
+    const sheet = screen.getByRole('complementary', { name: 'Book a bench' });
+    expect(within(sheet).getByRole('heading', { name: 'Bench 3, Sat 17 October' })).toBeVisible();
+    expect(screen.getByRole('grid')).toBeInTheDocument();
+    await user.click(screen.getByRole('button', { name: 'Friday 16 October' }));
+    expect(within(sheet).getByRole('heading', { name: 'Bench 3, Fri 16 October' })).toBeVisible();
+    await user.click(within(sheet).getByRole('button', { name: 'Full height' }));
+    expect(within(sheet).getByRole('button', { name: 'Half high' })).toBeInTheDocument();
+    await user.click(within(sheet).getByRole('button', { name: 'Close Book a bench' }));
+    expect(sheet).not.toBeInTheDocument();
   });
 
   it('says so when the week cannot be loaded, with a way to try again', async () => {

@@ -75,8 +75,8 @@ function BenchBook({ view, benches, instruments }: BenchBookProps) {
     <Box onKeyDown={onKeyDown}>
       {isPhone ? (
         <>
-          <PhoneBookBar view={view} all={all} shown={lanes} onBook={openForm} />
-          <DayStrip dates={dates} day={view.day} onDay={view.showDay} />
+          <PhoneBookBar view={view} all={all} shown={lanes} onBook={book.isOpen ? undefined : openForm} />
+          <DayStrip dates={dates} day={view.day} onDay={book.showDay} />
         </>
       ) : (
         <>

@@ -1,7 +1,9 @@
 import Box from '@mui/material/Box';
+import { useOpeningHours } from '../../../api-client/club';
 import { clubDay } from '../../../lib/club-time';
 import { token } from '../../../shared-ui/tokens';
 import type { BuildNight } from '../api/nights';
+import { CLOSED_HATCH } from './month-grid-style';
 import { ruleWords } from '../night-words';
 
 interface LegendProps {
@@ -15,11 +17,14 @@ const SERIES = {
   backgroundColor: token('greenTint'),
 };
 const ONE_OFF = { border: `1px solid ${token('edge')}`, backgroundColor: token('sheet') };
+const CLOSED = { border: `1px solid ${token('rule')}`, backgroundImage: CLOSED_HATCH };
 const PLANNED = { border: `1px dashed ${token('green')}` };
 const CLASH = { border: `1px dashed ${token('oxide')}`, backgroundColor: token('oxideTint') };
 
 /** What the boxes in the month mean, each series by its name and days. */
 export function Legend({ nights, isPlanning }: LegendProps) {
+  const hours = useOpeningHours();
+  const isClosedSome = hours.length > 0 && hours.length < 7;
   const series = new Map<string, string>();
   for (const night of nights) {
     if (night.series) {
@@ -50,6 +55,7 @@ export function Legend({ nights, isPlanning }: LegendProps) {
         </Item>
       ))}
       {nights.some((night) => !night.series) && <Item look={ONE_OFF}>One-off</Item>}
+      {isClosedSome && <Item look={CLOSED}>Closed</Item>}
       {isPlanning && <Item look={PLANNED}>Being planned</Item>}
       {isPlanning && <Item look={CLASH}>Being planned, clashes</Item>}
     </Box>

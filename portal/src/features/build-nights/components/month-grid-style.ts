@@ -3,6 +3,9 @@ import { token } from '../../../shared-ui/tokens';
 const HATCH = (name: 'rule' | 'oxide') =>
   `repeating-linear-gradient(135deg, transparent 0 6px, ${token(name)} 6px 7px)`;
 
+/** A day on which nobody opens the workshop, in the month and in its legend. */
+export const CLOSED_HATCH = HATCH('rule');
+
 /** Dresses the calendar's own classes in the notebook's look; it brings its rules along and cannot be themed else. */
 export const monthGridStyle = {
   '& .fc': {
@@ -32,7 +35,9 @@ export const monthGridStyle = {
   '& .fc .fc-day-today': { boxShadow: `inset 0 3px 0 ${token('green')}` },
   '& .fc td.fc-daygrid-day:first-of-type': { borderLeft: `1px solid ${token('rule')}` },
   '& .fc td.fc-daygrid-day:last-of-type': { borderRight: `1px solid ${token('rule')}` },
+  '& .fc .fr-closed': { backgroundImage: CLOSED_HATCH },
   '& .fc .fr-picked': {
+    backgroundImage: 'none',
     backgroundColor: token('sheet'),
     outline: `1.5px solid ${token('ink')}`,
     outlineOffset: '-1.5px',

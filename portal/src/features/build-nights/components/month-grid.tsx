@@ -4,7 +4,9 @@ import interaction from '@fullcalendar/interaction';
 import FullCalendar from '@fullcalendar/react';
 import Box from '@mui/material/Box';
 import { useMemo } from 'react';
+import { useOpeningHours } from '../../../api-client/club';
 import { clubDay } from '../../../lib/club-time';
+import { closedAllDay } from '../../../lib/opening-hours';
 import type { BuildNight } from '../api/nights';
 import { mainSeries, type Entry } from '../night-view';
 import { DayHead } from './day-head';
@@ -30,6 +32,7 @@ const dayOf = (date: Date): string => date.toISOString().slice(0, 10);
 /** The month, Monday to Sunday, on the day grid; days and times are those of the club's wall. */
 export function MonthGrid({ month, nights, entries, pickedDay, onOpen, onDay, onMore }: MonthGridProps) {
   const main = useMemo(() => mainSeries(nights), [nights]);
+  const hours = useOpeningHours();
   const today = clubDay();
   const nightDays = new Set(entries.map(({ start }) => start.slice(0, 10)));
   const head = ({ date }: DayCellContentArg) => {
@@ -73,7 +76,10 @@ export function MonthGrid({ month, nights, entries, pickedDay, onOpen, onDay, on
         }}
         dateClick={({ dateStr }) => onDay(dateStr)}
         dayCellContent={head}
-        dayCellClassNames={({ date }) => (dayOf(date) === pickedDay ? ['fr-picked'] : [])}
+        dayCellClassNames={({ date }) => [
+          ...(closedAllDay(hours, dayOf(date)) ? ['fr-closed'] : []),
+          ...(dayOf(date) === pickedDay ? ['fr-picked'] : []),
+        ]}
       />
     </Box>
   );

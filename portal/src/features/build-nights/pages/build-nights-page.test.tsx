@@ -51,6 +51,24 @@ describe('the build nights page', () => {
     expect(screen.queryByRole('button', { name: 'Plan a series' })).toBeNull();
   });
 
+  it('hatches the days on which nobody opens the workshop, and says what the hatch means', async () => {
+    answers([night()]);
+    server.use(
+      http.get('*/api/club', () =>
+        HttpResponse.json({
+          timeZone: 'Europe/London',
+          openingHours: [{ weekday: 4, opensMinute: 720, closesMinute: 1320 }],
+        }),
+      ),
+    );
+    const { container } = open('/build-nights');
+    expect(await screen.findByText('Closed')).toBeVisible();
+    const hatched = [...container.querySelectorAll('.fr-closed')].map((cell) => cell.className);
+    expect(hatched.length).toBeGreaterThan(20);
+    expect(hatched.every((name) => !name.includes('fc-day-thu'))).toBe(true);
+    expect(container.querySelectorAll('.fc-day-sun.fr-closed').length).toBeGreaterThan(3);
+  });
+
   it('offers to try again when the nights cannot be fetched', async () => {
     server.use(
       http.get('*/api/build-nights', () =>

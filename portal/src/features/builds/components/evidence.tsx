@@ -115,7 +115,7 @@ function ReadingRow({ check }: { check: BuildCheck }) {
         {reading?.instrumentTag ? (
           <AssetTag>{reading.instrumentTag}</AssetTag>
         ) : (
-          <Typography variant="small" component="span" sx={{ color: 'token.ink2' }}>
+          <Typography variant="small" component="span" sx={{ color: 'token.ink2', whiteSpace: 'nowrap' }}>
             {check.method === 'gain' ? 'worked out' : check.method === 'carried' ? 'carried over' : ''}
           </Typography>
         )}

@@ -50,7 +50,7 @@ export function BigValue({ read, isStale }: { read: Read; isStale: boolean }) {
   );
 }
 
-export function LiveWindow({ check, read }: { check: BuildCheck; read: Read }) {
+export function LiveWindow({ check, read, isStale }: { check: BuildCheck; read: Read; isStale: boolean }) {
   const { windowLow, windowHigh, target, unit } = check;
   return (
     <WindowBar
@@ -60,7 +60,7 @@ export function LiveWindow({ check, read }: { check: BuildCheck; read: Read }) {
       unit={unit ?? ''}
       compact={unit === 'Hz'}
       reading={read.reading}
-      tone={read.verdict === 'pass' ? 'green' : 'copper'}
+      tone={isStale ? 'ink3' : read.verdict === 'pass' ? 'green' : 'copper'}
     />
   );
 }
@@ -75,26 +75,27 @@ export function LiveResult({ form }: { form: ReadingFormState }) {
       </Typography>
     );
   const { read, isStale } = shown;
+  const colour = isStale ? 'token.ink3' : 'token.ink2';
   return (
-    <Box sx={{ opacity: isStale ? 0.7 : 1 }}>
+    <Box>
       <Box sx={{ display: 'grid', gridTemplateColumns: 'auto minmax(0, 1fr)', gap: '0 24px' }}>
         <Box>
           <BigValue read={read} isStale={isStale} />
-          <Typography variant="small" component="p" sx={{ m: 0, color: 'token.ink2' }}>
+          <Typography variant="small" component="p" sx={{ m: 0, color: colour }}>
             {uncertaintyText(read)}
           </Typography>
-          <Typography variant="small" component="p" sx={{ m: 0, color: 'token.ink2' }}>
+          <Typography variant="small" component="p" sx={{ m: 0, color: colour }}>
             {secondValues(read)}
           </Typography>
         </Box>
         <Box sx={{ alignSelf: 'center', maxWidth: 270 }}>
-          <LiveWindow check={form.check} read={read} />
+          <LiveWindow check={form.check} {...shown} />
         </Box>
       </Box>
       <Box sx={{ display: 'flex', gap: '12px', mt: '6px', alignItems: 'flex-start' }}>
-        <VerdictChip verdict={read.verdict} />
+        <VerdictChip verdict={read.verdict} isStale={isStale} />
         {read.advice && (
-          <Typography variant="small" component="p" sx={{ m: 0 }}>
+          <Typography variant="small" component="p" sx={{ m: 0, color: isStale ? colour : 'token.ink' }}>
             {read.advice}
           </Typography>
         )}

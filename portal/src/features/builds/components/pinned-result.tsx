@@ -1,7 +1,9 @@
 import Box from '@mui/material/Box';
 import Typography from '@mui/material/Typography';
+import { useRef } from 'react';
 import { createPortal } from 'react-dom';
 import { VerdictChip } from '../../../shared-ui/states/verdict-chip';
+import { useToastsAbove } from '../../../shared-ui/use-toasts-above';
 import { useKeyboardUp } from '../logic/use-keyboard-up';
 import type { ReadingFormState } from '../logic/use-reading-form';
 import { readingWords } from '../logic/words';
@@ -14,9 +16,12 @@ const BOTTOM_BAR = 62;
 export function PinnedResult({ form }: { form: ReadingFormState }) {
   const hidden = useKeyboardUp();
   const isShort = hidden !== undefined;
+  const bar = useRef<HTMLElement>(null);
+  useToastsAbove(bar);
   return createPortal(
     <Box
       component="section"
+      ref={bar}
       aria-label="Result"
       sx={{
         position: 'fixed',
@@ -40,6 +45,7 @@ export function PinnedResult({ form }: { form: ReadingFormState }) {
 
 function LongForm({ form }: { form: ReadingFormState }) {
   const shown = shownLive(form);
+  const colour = shown?.isStale ? 'token.ink3' : 'token.ink2';
   return (
     <>
       {shown ? (
@@ -47,22 +53,26 @@ function LongForm({ form }: { form: ReadingFormState }) {
           <Box sx={{ display: 'flex', justifyContent: 'space-between', gap: '12px' }}>
             <div>
               <BigValue {...shown} />
-              <Typography variant="small" component="p" sx={{ m: 0, color: 'token.ink2' }}>
+              <Typography variant="small" component="p" sx={{ m: 0, color: colour }}>
                 {uncertaintyText(shown.read)}
               </Typography>
             </div>
             <Box sx={{ textAlign: 'right', pt: '6px' }}>
-              <VerdictChip verdict={shown.read.verdict} />
-              <Typography variant="small" component="p" sx={{ m: 0, mt: '4px', color: 'token.ink2' }}>
+              <VerdictChip verdict={shown.read.verdict} isStale={shown.isStale} />
+              <Typography variant="small" component="p" sx={{ m: 0, mt: '4px', color: colour }}>
                 {secondValues(shown.read)}
               </Typography>
             </Box>
           </Box>
           <Box sx={{ my: '8px' }}>
-            <LiveWindow check={form.check} read={shown.read} />
+            <LiveWindow check={form.check} {...shown} />
           </Box>
           {shown.read.advice && (
-            <Typography variant="small" component="p" sx={{ mt: 0, mb: '8px' }}>
+            <Typography
+              variant="small"
+              component="p"
+              sx={{ mt: 0, mb: '8px', color: shown.isStale ? colour : 'token.ink' }}
+            >
               {shown.read.advice}
             </Typography>
           )}
@@ -87,7 +97,9 @@ function ShortForm({ form }: { form: ReadingFormState }) {
       <Typography component="p" noWrap sx={{ m: 0, color: shown?.isStale ? 'token.ink3' : 'token.ink' }}>
         {words && (
           <>
-            <b>{words.value}</b>{' '}
+            <Box component="b" sx={{ fontSize: '1.375rem' }}>
+              {words.value}
+            </Box>{' '}
             <Typography variant="small" component="span">
               {words.plusMinus} {words.unit}
             </Typography>
@@ -95,7 +107,7 @@ function ShortForm({ form }: { form: ReadingFormState }) {
         )}
       </Typography>
       <Box sx={{ display: 'flex', alignItems: 'center', gap: '8px' }}>
-        {shown && <VerdictChip verdict={shown.read.verdict} narrow />}
+        {shown && <VerdictChip verdict={shown.read.verdict} isStale={shown.isStale} narrow />}
         <KeepButtons form={form} isShort />
       </Box>
     </Box>

@@ -35,3 +35,9 @@ export function instrumentWait(
     reason: 'None of the instruments can be used just now. The list says why of each.',
   };
 }
+
+/** The one chosen, or else the first that may be used. */
+export const chosenOf = <T extends { id: string; reason: string | null }>(
+  offered: readonly T[],
+  id: string,
+) => offered.find((instrument) => instrument.id === id) ?? offered.find(({ reason }) => reason === null);

@@ -6,15 +6,10 @@ import { useDraft } from '../../../shared-ui/use-draft';
 import { useToast } from '../../../shared-ui/toasts';
 import { instrumentsQuery, useKeepReading, type BuildCheck, type BuildStage } from '../api/builds';
 import { gravesOf } from './cautions';
-import { instrumentWait } from './instrument-wait';
-import { fieldsOf, liveReading, startEntry, type Entry, type Live } from './live-reading';
+import { chosenOf, instrumentWait } from './instrument-wait';
+import { fieldsOf, liveReading, startEntry, type Live } from './live-reading';
+import { readingPlace, type ReadingDraft } from './reading-draft';
 import { readingSentence } from './words';
-
-interface ReadingDraft {
-  entry: Entry;
-  /** Empty: whatever is offered first. */
-  instrumentId: string;
-}
 
 const ENTRY_POINTER = '#/entry/';
 
@@ -28,10 +23,6 @@ function fieldErrors(error: unknown): Record<string, string> {
     ]),
   );
 }
-
-/** The one chosen, or else the first that may be used. */
-const chosenOf = <T extends { id: string; reason: string | null }>(offered: readonly T[], id: string) =>
-  offered.find((instrument) => instrument.id === id) ?? offered.find(({ reason }) => reason === null);
 
 /** What it may be read on, and what it is. */
 function useInstruments(buildId: string, check: BuildCheck, chosenId: string) {
@@ -63,7 +54,7 @@ export function useReadingForm(
   onKept: (verdict: string) => void,
 ) {
   const fields = fieldsOf(check);
-  const draft = useDraft<ReadingDraft>(`reading:${buildId}:${check.id}`, {
+  const draft = useDraft<ReadingDraft>(readingPlace(buildId, check.id), {
     entry: startEntry(check),
     instrumentId: '',
   });
@@ -93,6 +84,8 @@ export function useReadingForm(
   };
   const setEntry = (name: string, text: string) => {
     keeping.reset();
+    // Half typed again: its error waits until the field is left again.
+    setLeft((before) => before.filter((other) => other !== name));
     draft.setValue({ ...draft.value, entry: { ...entry, [name]: text } });
   };
   const keep = () => {

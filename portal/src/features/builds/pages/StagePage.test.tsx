@@ -99,6 +99,51 @@ describe('the stage page', () => {
     expect(await screen.findByText(/Did you mean 3.3/)).toBeVisible();
   });
 
+  it('lets an error go while its field is typed in again', async () => {
+    const { user } = open();
+    await user.type(await field('Volts per division'), '10m');
+    await user.type(await field('Divisions, peak to peak'), '33');
+    await user.tab();
+    expect(await screen.findByText(/Did you mean 3.3/)).toBeVisible();
+    await user.type(await field('Divisions, peak to peak'), '3');
+    expect(screen.queryByText(/Did you mean/)).toBeNull();
+  });
+
+  it('shows the last good result pale while what is typed cannot be read, its verdict too', async () => {
+    const { user } = open();
+    await user.type(await field('Volts per division'), '10m');
+    await user.type(await field('Divisions, peak to peak'), '6.7');
+    const chips = () => screen.getAllByText('Pass').map(({ parentElement }) => parentElement);
+    const isPale = (chip: HTMLElement | null) =>
+      chip !== null && getComputedStyle(chip).color === 'var(--fr-palette-token-ink3)';
+    expect(chips().some(isPale)).toBe(false);
+    await user.clear(await field('Divisions, peak to peak'));
+    expect(chips().some(isPale)).toBe(true);
+    expect(isPale(screen.getByText('± 0.39 dB at 95 %'))).toBe(true);
+  });
+
+  it('says plainly that a link leads to no build, with a way back', async () => {
+    server.use(
+      http.get('*/api/builds/nowhere', () =>
+        HttpResponse.json({ status: 404, title: 'Not there', detail: 'x' }, { status: 404 }),
+      ),
+    );
+    renderPage(<StagePage />, {
+      at: '/build/nowhere/stages/stage-9',
+      path: '/build/:buildId/stages/:stageId',
+    });
+    expect(await screen.findByText('There is no such build here')).toBeVisible();
+    expect(screen.getByRole('link', { name: 'Open my build' })).toHaveAttribute('href', '/build');
+    expect(screen.queryByRole('button', { name: 'Try again' })).toBeNull();
+  });
+
+  it('says that a link leads to no stage of the build, and opens the current one', async () => {
+    server.use(http.get('*/api/builds/build', () => HttpResponse.json(aBuild())));
+    renderPage(<StagePage />, { at: '/build/build/stages/gone', path: '/build/:buildId/stages/:stageId' });
+    const link = await screen.findByRole('link', { name: 'Open the current stage' });
+    expect(link).toHaveAttribute('href', '/build/build/stages/stage-9');
+  });
+
   it('asks for the tick beside a grave caution before it offers Keep', async () => {
     const { user } = open(aStage({ cautions: ['rf power'] }));
     await user.type(await field('Volts per division'), '10m');

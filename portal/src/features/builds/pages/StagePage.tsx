@@ -2,15 +2,14 @@ import Box from '@mui/material/Box';
 import Link from '@mui/material/Link';
 import { Link as RouterLink, useNavigate, useParams, useSearchParams } from 'react-router-dom';
 import { useMe } from '../../../api-client/session';
-import { Banner } from '../../../shared-ui/banner';
 import { LoadingBars } from '../../../shared-ui/loading-bars';
 import { PageTitle } from '../../../shared-ui/page-title';
 import { PhoneBar } from '../../../shared-ui/phone-bar';
-import { ProblemAlert } from '../../../shared-ui/problem-alert';
 import { StageStrip } from '../../../shared-ui/stage-strip';
 import { StageStateLine } from '../../../shared-ui/states/state-line';
 import { usePhone } from '../../../shared-ui/use-phone';
 import { useBuild, type Build, type BuildStage } from '../api/builds';
+import { BuildProblem, NoSuchStage } from '../components/no-such-build';
 import { StageActions } from '../components/stage-actions';
 import { StageStory } from '../components/stage-story';
 import { StageRecord, StageWork } from '../components/stage-work';
@@ -28,19 +27,8 @@ export default function StagePage() {
   if (build.isPending) return <LoadingBars rows={8} label="Opening the stage" />;
   if (build.isError) return <BuildProblem error={build.error} onRetry={() => void build.refetch()} />;
   const stage = findStage(build.data, stageId);
-  if (!stage) return <Banner kind="failed" title="This build has no such stage." />;
+  if (!stage) return <NoSuchStage buildId={buildId} currentStageId={build.data.currentStageId} />;
   return <Stage build={build.data} stage={stage} />;
-}
-
-function BuildProblem({ error, onRetry }: { error: Error; onRetry: () => void }) {
-  return (
-    <>
-      <PageTitle tab="My build">
-        My <b>build</b>
-      </PageTitle>
-      <ProblemAlert error={error} onRetry={onRetry} />
-    </>
-  );
 }
 
 function Stage({ build, stage }: { build: Build; stage: BuildStage }) {

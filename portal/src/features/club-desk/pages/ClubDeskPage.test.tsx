@@ -1,6 +1,6 @@
 import { screen, waitFor, within } from '@testing-library/react';
 import { http, HttpResponse } from 'msw';
-import { describe, expect, it } from 'vitest';
+import { beforeEach, describe, expect, it } from 'vitest';
 import { renderPage } from '../../../testing/render';
 import { server } from '../../../testing/server';
 import type { Licence } from '../api/licences';
@@ -13,13 +13,20 @@ const OF_NOOR: Licence = {
   ...{ seenAt: null, seenBy: null },
 };
 
+const HOURS = [{ weekday: 6, opensMinute: 600, closesMinute: 1200 }];
+
 function open(at = '/') {
   const licences = [{ ...OF_NOOR }];
   const people = { items: [GRETA, NOOR], total: 2, page: 1, perPage: 200 };
   server.use(
     http.get('*/api/people', () => HttpResponse.json(people)),
     http.get('*/api/club', () =>
-      HttpResponse.json({ name: 'Larkmoor', timeZone: 'Europe/London', ruleSet: 'IARU-R1' }),
+      HttpResponse.json({
+        name: 'Larkmoor',
+        timeZone: 'Europe/London',
+        ruleSet: 'IARU-R1',
+        openingHours: HOURS,
+      }),
     ),
     http.get('*/api/licences', () => HttpResponse.json(licences)),
     http.post('*/api/builds/b-1/licence', () => {
@@ -66,6 +73,53 @@ describe('the club desk', () => {
     await user.click(await screen.findByRole('button', { name: /United States/ }));
     await waitFor(() => expect(chosen).toEqual([{ ruleSet: 'US-97' }]));
     expect(screen.getByText(/your licence decide/i)).toBeVisible();
+  });
+
+  describe('opening hours', () => {
+    const day = async (name: string) => within(await screen.findByRole('group', { name }));
+    const save = () => screen.getByRole('button', { name: 'Save the hours' });
+    let sent: unknown[];
+    beforeEach(() => {
+      sent = [];
+      server.use(
+        http.put('*/api/club/opening-hours', async ({ request }) => {
+          sent.push(await request.json());
+          return new HttpResponse(null, { status: 204 });
+        }),
+      );
+    });
+
+    it('are shown as they are, and sent as a whole week when one day is changed', async () => {
+      const { user } = open();
+      await waitFor(async () => expect((await day('Saturday')).getByLabelText('From')).toHaveValue('10:00'));
+      await user.type((await day('Thursday')).getByLabelText('From'), '19:00');
+      await user.type((await day('Thursday')).getByLabelText('To'), '22.30');
+      await user.click(save());
+      const thursday = { weekday: 4, opensMinute: 1140, closesMinute: 1350 };
+      await waitFor(() => expect(sent).toEqual([{ days: [thursday, ...HOURS] }]));
+      expect(await screen.findByText('Opening hours saved.')).toBeVisible();
+    });
+
+    it('get words on the field for what cannot be meant, and nothing is sent', async () => {
+      const { user } = open();
+      const monday = await day('Monday');
+      await user.type(monday.getByLabelText('From'), '20:00');
+      await user.type(monday.getByLabelText('To'), '8:00');
+      await user.type((await day('Tuesday')).getByLabelText('From'), 'noon');
+      await user.click(save());
+      expect(await monday.findByText('It closes before it has opened.')).toBeVisible();
+      expect((await day('Tuesday')).getByText('A time of day, such as 19:00.')).toBeVisible();
+      expect((await day('Tuesday')).getByText('Until when? Leave both empty when closed.')).toBeVisible();
+      expect(sent).toEqual([]);
+    });
+
+    it('are kept on the device while they are not saved', async () => {
+      const { user, unmount } = open();
+      await user.type((await day('Sunday')).getByLabelText('From'), '11:');
+      unmount();
+      open();
+      expect((await day('Sunday')).getByLabelText('From')).toHaveValue('11:');
+    });
   });
 
   it('asks before it says a licence was seen, and then names who saw it', async () => {

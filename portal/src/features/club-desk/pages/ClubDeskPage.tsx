@@ -16,6 +16,7 @@ import { useToast } from '../../../shared-ui/toasts';
 import { licencesQuery, useSeeLicence, type Licence } from '../api/licences';
 import { peopleQuery } from '../api/people';
 import { ClubRules } from '../components/club-rules';
+import { OpeningHours } from '../components/opening-hours';
 import { LicenceCell } from '../components/licence-cell';
 import { PersonCell, RolesCell } from '../components/person-cells';
 import { deskRows, lastHolders, rowsShown, SHOWN, shownOptions, type DeskRow } from '../desk';
@@ -39,6 +40,7 @@ export default function ClubDeskPage() {
       ) : people.data && licences.data ? (
         <>
           <People rows={deskRows(people.data.items, licences.data)} />
+          <OpeningHours />
           <ClubRules />
         </>
       ) : (

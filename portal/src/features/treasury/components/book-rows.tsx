@@ -42,7 +42,7 @@ export function BookRows({ books, openedId, chosenIds, onChoose }: BookRowsProps
                 <AssetTag>{item.tag}</AssetTag>
               </span>
               <Cell isBold={isOpen}>{item.name}</Cell>
-              <Cell>{item.detail}</Cell>
+              <Cell isSmall>{item.detail}</Cell>
               <Box component="span" sx={{ fontWeight: isOpen ? 700 : 400, textAlign: 'right' }}>
                 {formatAmount(item.amountMinor)}
               </Box>
@@ -55,11 +55,18 @@ export function BookRows({ books, openedId, chosenIds, onChoose }: BookRowsProps
   );
 }
 
-const Cell = ({ children, isBold = false }: { children: string; isBold?: boolean }) => (
+interface CellProps {
+  children: string;
+  isBold?: boolean;
+  isSmall?: boolean;
+}
+
+const Cell = ({ children, isBold = false, isSmall = false }: CellProps) => (
   <Box
     component="span"
     sx={{
       minWidth: 0,
+      fontSize: isSmall ? '0.78125rem' : 'inherit',
       overflow: 'hidden',
       textOverflow: 'ellipsis',
       whiteSpace: 'nowrap',
@@ -74,13 +81,14 @@ const Cell = ({ children, isBold = false }: { children: string; isBold?: boolean
 const rowStyle = (isChosen: boolean, canChoose: boolean) => ({
   position: 'relative',
   display: 'grid',
-  gridTemplateColumns: { xs: 'auto minmax(0, 1fr) auto', md: '78px minmax(0, 1fr) minmax(0, 1.1fr) 74px' },
+  gridTemplateColumns: { xs: 'auto minmax(0, 1fr) auto', md: '78px minmax(0, 1fr) minmax(0, 1.3fr) 74px' },
   alignItems: 'center',
   gap: '8px',
   width: '100%',
   height: { md: ROW },
   minHeight: ROW,
-  p: '0 8px',
+  p: { xs: '0 8px', md: '0 0 0 10px' },
+  fontSize: '0.84375rem',
   border: 0,
   borderBottom: '1px solid',
   borderColor: 'token.rule',
@@ -95,5 +103,7 @@ const rowStyle = (isChosen: boolean, canChoose: boolean) => ({
     outline: '1.5px solid',
     outlineColor: 'token.ink',
     outlineOffset: '-1.5px',
+    width: { xs: '100%', md: 'calc(100% + 10px)' },
+    pr: { md: '10px' },
   }),
 });

@@ -32,7 +32,7 @@ export function LinePanel(props: LinePanelProps) {
       aria-label="The opened line"
       sx={{
         mt: '14px',
-        p: '14px 18px',
+        p: '12px 18px',
         border: '1.5px solid',
         borderColor: 'token.ink',
         borderRadius: '3px',
@@ -40,12 +40,13 @@ export function LinePanel(props: LinePanelProps) {
       }}
     >
       <Box sx={{ display: 'flex', flexWrap: 'wrap', alignItems: 'center', gap: '10px 24px' }}>
-        <Box sx={{ flex: '1 1 320px', minWidth: 0 }}>
+        <Box sx={{ flex: '1 1 280px', minWidth: 0 }}>
           <Typography variant="h2">
             {dayText(line.day).slice(4)}, {sentenceOf(line, isMatched ? [] : choice.items, detail.currency)}
           </Typography>
           <Reasons line={line} sum={isMatched ? undefined : sumOf(line, choice.items)} />
         </Box>
+        {!isMatched && <AccountChoice {...props} />}
         {isMatched && (
           <Button loading={isBusy} onClick={onTakeBack}>
             Take back
@@ -58,7 +59,6 @@ export function LinePanel(props: LinePanelProps) {
           </Button>
         )}
       </Box>
-      {!isMatched && <AccountChoice {...props} />}
       {error !== null && error !== undefined && (
         <Box sx={{ mt: '12px' }}>
           <ProblemAlert error={error} />
@@ -93,11 +93,11 @@ function AccountChoice({ detail, choice, onChoice }: LinePanelProps) {
   return (
     <Box
       sx={{
+        flex: '0 1 auto',
         display: 'grid',
-        gridTemplateColumns: { sm: '260px minmax(0, 1fr)' },
+        gridTemplateColumns: { sm: choice.accountCode === '' ? '260px' : '220px 220px' },
         gap: '12px',
-        mt: '12px',
-        maxWidth: 720,
+        width: { xs: '100%', md: 'auto' },
       }}
     >
       <SelectField

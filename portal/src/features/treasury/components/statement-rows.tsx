@@ -30,7 +30,8 @@ export function StatementRows({ lines, openedId, onOpen }: StatementRowsProps) {
               width: '100%',
               height: { md: ROW },
               minHeight: ROW,
-              p: { xs: '6px 6px 6px 0', md: '0 6px 0 0' },
+              p: { xs: '6px 6px 6px 0', md: 0 },
+              fontSize: '0.84375rem',
               border: 0,
               borderBottom: '1px solid',
               borderColor: 'token.rule',
@@ -45,10 +46,17 @@ export function StatementRows({ lines, openedId, onOpen }: StatementRowsProps) {
                 outline: '1.5px solid',
                 outlineColor: 'token.ink',
                 outlineOffset: '-1.5px',
+                // The open thing stands proud of its column.
+                width: { xs: '100%', md: 'calc(100% + 10px)' },
+                ml: { md: '-10px' },
+                pl: { md: '10px' },
               }),
             }}
           >
-            <Box component="span" sx={{ color: 'token.ink2', pl: '6px', whiteSpace: 'nowrap' }}>
+            <Box
+              component="span"
+              sx={{ color: 'token.ink2', pl: { xs: '6px', md: 0 }, whiteSpace: 'nowrap' }}
+            >
               {dayText(day).slice(4)}
             </Box>
             <Box
@@ -65,7 +73,7 @@ export function StatementRows({ lines, openedId, onOpen }: StatementRowsProps) {
             <Box component="b" sx={{ fontWeight: state === 'matched' ? 400 : 700 }}>
               {formatAmount(amountMinor)}
             </Box>
-            <Box component="span" sx={{ gridColumn: { xs: '2 / 4', md: 'auto' } }}>
+            <Box component="span" sx={{ display: 'flex', gridColumn: { xs: '2 / 4', md: 'auto' } }}>
               {state === 'matched' ? (
                 <StateLine shape="tick" colour="green">
                   Matched

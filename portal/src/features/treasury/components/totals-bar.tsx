@@ -1,5 +1,8 @@
 import Box from '@mui/material/Box';
+import { useRef } from 'react';
 import { formatMoney } from '../../../lib/money';
+import { usePhone } from '../../../shared-ui/use-phone';
+import { useToastsAbove } from '../../../shared-ui/use-toasts-above';
 import type { StatementLine, Totals } from '../api/treasury';
 import { afterMatch } from '../settling';
 
@@ -14,21 +17,25 @@ interface TotalsBarProps {
 export function TotalsBar({ totals, currency, settling }: TotalsBarProps) {
   const money = (minor: number) => formatMoney(minor, currency);
   const { openingMinor, matchedMinor, booksMinor, statementMinor, earlierMinor, differenceMinor } = totals;
+  const bar = useRef<HTMLElement>(null);
+  useToastsAbove(bar, usePhone());
   const isEven = differenceMinor === 0;
   return (
     <Box
       component="section"
+      ref={bar}
       aria-label="Running difference"
       sx={{
-        position: 'sticky',
-        bottom: { xs: 64, md: 0 },
+        // On a wide screen the foot it stands in is what stays in sight.
+        position: { xs: 'sticky', md: 'static' },
+        bottom: 64,
         zIndex: 2,
         display: 'flex',
         flexWrap: 'wrap',
         alignItems: 'center',
-        gap: '6px 28px',
-        m: { xs: '20px -16px 0', md: '20px -32px -40px -34px' },
-        p: { xs: '8px 16px', md: '10px 32px 12px 34px' },
+        gap: { xs: '6px 28px', md: '6px 0' },
+        m: { xs: '20px -16px 0', md: '14px -32px 0 -34px' },
+        p: { xs: '8px 16px', md: '0 32px 0 34px' },
         borderTop: '1.5px solid',
         borderColor: 'token.ink',
         backgroundColor: 'token.sunk',
@@ -41,7 +48,7 @@ export function TotalsBar({ totals, currency, settling }: TotalsBarProps) {
       <Part label="Statement says" value={money(statementMinor)} />
       <Box sx={{ ml: 'auto', display: 'flex', alignItems: 'flex-end', gap: '14px' }}>
         {settling && (
-          <Box sx={{ pb: '4px', typography: 'small' }}>
+          <Box sx={{ pb: { xs: '4px', md: '18px' }, typography: 'small' }}>
             {money(afterMatch(totals, settling))} after this match
           </Box>
         )}
@@ -65,7 +72,20 @@ interface PartProps {
 
 function Part({ label, value, colour = 'token.ink', isBig = false }: PartProps) {
   return (
-    <Box role="group" aria-label={label} sx={{ textAlign: isBig ? 'right' : 'left', color: colour }}>
+    <Box
+      role="group"
+      aria-label={label}
+      sx={{
+        textAlign: isBig ? 'right' : 'left',
+        color: colour,
+        p: { md: isBig ? '10px 0 12px' : '10px 22px 12px' },
+        ...(!isBig && {
+          '&:first-of-type': { pl: 0 },
+          borderRight: { md: '1px solid' },
+          borderColor: { md: 'token.rule' },
+        }),
+      }}
+    >
       <Box sx={{ typography: 'least', color: isBig ? colour : 'token.ink2' }}>{label}</Box>
       <Box sx={{ fontWeight: 700, fontSize: isBig ? '1.5rem' : '1.1875rem', lineHeight: 1.3 }}>{value}</Box>
     </Box>

@@ -19,6 +19,7 @@ import { BooksFoot } from '../components/books-foot';
 import { BookRows } from '../components/book-rows';
 import { ImportDrawer } from '../components/import-drawer';
 import { LinePanel } from '../components/line-panel';
+import { ReconcileFoot } from '../components/reconcile-foot';
 import { StatementRows } from '../components/statement-rows';
 import { TotalsBar } from '../components/totals-bar';
 import { WiresPicture } from '../components/wires-picture';
@@ -46,7 +47,7 @@ export default function ReconcilePage() {
         tab={`Reconcile ${month}`.trim()}
         over={
           <>
-            <Link component={RouterLink} to="/treasury">
+            <Link component={RouterLink} to="/treasury" color="inherit">
               Treasury
             </Link>
             {query.data && ` / Current account, ${importedText(query.data)}`}
@@ -117,18 +118,6 @@ function Reconcile({ detail }: { detail: StatementDetail }) {
           />
         </Box>
       </Box>
-      {line && (
-        <LinePanel
-          line={line}
-          detail={detail}
-          choice={choice}
-          onChoice={settling.setChoice}
-          onAccept={settling.accept}
-          onTakeBack={settling.takeBack}
-          isBusy={settling.isBusy}
-          error={settling.error}
-        />
-      )}
       <Typography
         variant="small"
         component="p"
@@ -136,11 +125,25 @@ function Reconcile({ detail }: { detail: StatementDetail }) {
       >
         <b>A</b> accepts, <b>N</b> goes to the next line, <b>U</b> takes back the opened match.
       </Typography>
-      <TotalsBar
-        totals={detail.totals}
-        currency={detail.currency}
-        settling={isOpen && !faultOf(line, choice) ? line : undefined}
-      />
+      <ReconcileFoot>
+        {line && (
+          <LinePanel
+            line={line}
+            detail={detail}
+            choice={choice}
+            onChoice={settling.setChoice}
+            onAccept={settling.accept}
+            onTakeBack={settling.takeBack}
+            isBusy={settling.isBusy}
+            error={settling.error}
+          />
+        )}
+        <TotalsBar
+          totals={detail.totals}
+          currency={detail.currency}
+          settling={isOpen && !faultOf(line, choice) ? line : undefined}
+        />
+      </ReconcileFoot>
     </>
   );
 }
