@@ -252,5 +252,7 @@ export { ENTRY_METHODS, entryFields, METER_UNITS, methodGives, methodUnit } from
 export type { EntryField, EntryMethod } from './entry-fields';
 export { meterUnitOf, readEntry } from './entry';
 export type { Entry, ReadEntry } from './entry';
+export { assumptionsWith, figuresFor, figureWords, INSTRUMENT_FIGURES } from './instrument-figures';
+export type { FigureWords, InstrumentFigures } from './instrument-figures';
 export { ASSUMED, readingFromInputs, scopeInput } from './entry-readings';
 export type { Assumptions } from './entry-readings';

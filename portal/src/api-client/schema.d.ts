@@ -1655,6 +1655,10 @@ export interface components {
         InstrumentChoiceDto: {
             /** @description Why it cannot be chosen; null when it can. */
             reason: string | null;
+            /** @description What its sheet says and readings are worked out with, by the name the levels package has for it. */
+            figures: {
+                [key: string]: number;
+            };
             id: string;
             /** @example FR-021 */
             tag: string;
@@ -1663,8 +1667,8 @@ export interface components {
             kind: string;
             /** @description Last day of its calibration. */
             calibrationDueOn: string | null;
-            /** @description ± limit of its level readings, dB. */
-            amplitudeAccuracyDb: number | null;
+            /** @description The level that harms its input, dBm. */
+            damageLevelDbm: number | null;
         };
         InstrumentDetailDto: {
             /** @enum {string} */
@@ -1678,6 +1682,10 @@ export interface components {
             damageLevelDbm: number | null;
             /** @description ± limit of its level readings, dB. */
             amplitudeAccuracyDb: number | null;
+            /** @description All that its sheet says and readings are worked out with, by the name the levels package has for it. */
+            figures: {
+                [key: string]: number;
+            };
             /** @description Your clearance on its kind, lapsed ones too; null when you have none. */
             myClearance: components["schemas"]["MyClearanceDto"] | null;
             id: string;
@@ -1707,6 +1715,10 @@ export interface components {
             damageLevelDbm: number | null;
             /** @description ± limit of its level readings, dB. */
             amplitudeAccuracyDb: number | null;
+            /** @description All that its sheet says and readings are worked out with, by the name the levels package has for it. */
+            figures: {
+                [key: string]: number;
+            };
             /** @description Your clearance on its kind, lapsed ones too; null when you have none. */
             myClearance: components["schemas"]["MyClearanceDto"] | null;
             id: string;

@@ -8,3 +8,4 @@ export { SignInAddresses1700000000007 } from './0007-sign-in-addresses';
 export { WhatHangsTogether1700000000008 } from './0008-what-hangs-together';
 export { MoneyHoldsByItself1700000000009 } from './0009-money-holds-by-itself';
 export { WorksheetsRules1700000000010 } from './0010-worksheets-rules';
+export { InstrumentFigures1700000000011 } from './0011-instrument-figures';
