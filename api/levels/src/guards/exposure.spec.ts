@@ -149,6 +149,23 @@ describe('exposure against 47 CFR 1.1310 and OET Bulletin 65', () => {
     withinRel(densityOfField(Number(expected?.E_V_per_m)), Number(expected?.S_mW_cm2), 5e-3);
   });
 
+  it.each(exposureTable.exemption.filter(({ id }) => id.startsWith('ex-tab')))(
+    '$id: $expected.threshold_ERP_W',
+    (row) => {
+      const [low = NaN, high = NaN] = [row.inputs.f_MHz].flat();
+      const megahertz = Math.sqrt(low * high);
+      const metres = 2 * exposureExemption(megahertz * 1e6, 1, 0).nearFieldMetres;
+      // '3450 R^2/f^2', '0.0128 R^2 f' or '3.83 R^2'.
+      const [factor = '', ...powers] = String(row.expected.threshold_ERP_W).split(' ');
+      const text = powers.join(' ');
+      const ofF = text.endsWith('/f^2') ? megahertz ** -2 : text.endsWith(' f') ? megahertz : 1;
+      const { thresholdErpWatts, isApplicable } = exposureExemption(megahertz * 1e6, metres, 0);
+      withinRel(thresholdErpWatts, Number(factor) * ofF * metres ** 2, 1e-9);
+      expect(isApplicable).toBe(true);
+      expect(exposureExemption(megahertz * 1e6, 0.49 * metres, 0).isApplicable).toBe(false);
+    },
+  );
+
   it('erp-eirp: a dipole gathers 1.64 times', () => {
     withinRel(radiatedPower({ peakWatts: 1 }).eirpWatts, 1.64, 1e-3);
   });

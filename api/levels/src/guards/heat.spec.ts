@@ -105,6 +105,12 @@ describe('heat against published chains', () => {
     within(heat(worstSwing), worstWatts, 1e-9);
   });
 
+  it.each(thermalTable.wires)('$id: what a pair of wires loses', ({ inputs, expected, tolerance }) => {
+    const wire = { lengthMetres: inputs.length_m_one_way, areaSquareMetres: inputs.area_mm2 * 1e-6 };
+    withinRel(supplyDropVolts({ ...wire, amperes: inputs.I_A }), expected.drop_V, tolerance.rel);
+    withinRel(supplyDropVolts({ ...wire, amperes: 1 }), expected.R_loop_ohm, tolerance.rel);
+  });
+
   // IEC 60228 states at most 4.95 ohm for a kilometre of 4 mm² of stranded copper, 7.98 of 2.5 mm² (class 5, from
   // memory); solid pure copper of the nominal section lies some 13 % under.
   it.each([

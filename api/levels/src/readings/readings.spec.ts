@@ -1,3 +1,4 @@
+import attenuators from '../../reference/attenuators.json';
 import cascade from '../../reference/cascade.json';
 import mixers from '../../reference/mixers.json';
 import { errorOf } from '../../testing/error-of';
@@ -110,6 +111,14 @@ describe('bench readings against published ones', () => {
       within(hertz / 1e6, row('bench-01')?.products_MHz?.[index] ?? NaN, 1e-9),
     );
     withinRel(wattsFromDbm(dBm(-20)), row('bench-02')?.W ?? NaN, 1e-6);
+  });
+
+  it('through-02: −12.4 dBm behind 10 and 20 dB is +17.6 dBm at the source', () => {
+    const through = attenuators.use_checks.find(({ id }) => id === 'through-02');
+    const pads = (through?.inputs.pads_dB ?? []).reduce((sum, pad) => sum + pad, 0);
+    const at = { referenceLevelDbm: 0, dbPerDivision: 10, ...screen, padsInLineDb: pads };
+    const divisionsDown = -(through?.inputs.analyzer_dBm ?? NaN) / 10;
+    within(analyzerReading({ ...at, divisionsDown }).value, through?.expected.source_dBm ?? NaN, 1e-9);
   });
 
   it('bench-10: the rise of an edge without the oscilloscope’s own', () => {
