@@ -110,6 +110,14 @@ const INSTRUMENTS: readonly DemoInstrument[] = [
   },
   { tag: 'FR-040', kind: 'Signal generator', dueInDays: 5, damageLevelDbm: 17, amplitudeAccuracyDb: 0.7 },
   {
+    tag: 'FR-041',
+    kind: 'Log detector',
+    dueInDays: 77,
+    damageLevelDbm: 15,
+    amplitudeAccuracyDb: null,
+    figures: LOG_DETECTOR,
+  },
+  {
     tag: 'FR-051',
     kind: 'Multimeter',
     dueInDays: 174,
@@ -148,14 +156,6 @@ const INSTRUMENTS: readonly DemoInstrument[] = [
     dueInDays: null,
     damageLevelDbm: 44,
     amplitudeAccuracyDb: 0.3,
-  },
-  {
-    tag: 'FR-041',
-    kind: 'Log detector',
-    dueInDays: 77,
-    damageLevelDbm: 15,
-    amplitudeAccuracyDb: null,
-    figures: LOG_DETECTOR,
   },
 ];
 

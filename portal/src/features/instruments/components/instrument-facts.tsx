@@ -14,10 +14,12 @@ import { calibrationWords, changeWords, clearanceWords, levelWords } from '../in
 export function InstrumentFacts({ instrument }: { instrument: Instrument }) {
   const detail = useQuery(instrumentQuery(instrument.id));
   const { damageLevelDbm, amplitudeAccuracyDb, conditionNote, kind, reasons, figures } = instrument;
-  const sheet = figureWords(figures).filter(({ name }) => name !== 'amplitudeAccuracyDb');
+  const sheet = figureWords(figures)
+    .filter(({ name }) => name !== 'amplitudeAccuracyDb')
+    .map(({ label, words }): Fact => [label, words]);
   const facts: readonly Fact[] = [
     ['Calibration', calibrationWords(instrument)],
-    ['Good to', amplitudeAccuracyDb === null ? 'not stated' : `± ${fixed(amplitudeAccuracyDb)} dB`],
+    ...(amplitudeAccuracyDb === null && sheet.length > 0 ? [] : [goodTo(amplitudeAccuracyDb)]),
     kind.needsClearance
       ? ['Cleared on it', detail.data ? `${detail.data.clearedPeople} people` : '']
       : ['Clearance', clearanceWords(instrument)],
@@ -30,13 +32,7 @@ export function InstrumentFacts({ instrument }: { instrument: Instrument }) {
           A pad first wherever the level may be higher, rated for the whole power.
         </CautionBox>
       )}
-      <Facts facts={facts} />
-      {sheet.length > 0 && (
-        <>
-          <SectionHeading>Used in its readings</SectionHeading>
-          <Facts facts={sheet.map(({ label, words }) => [label, words])} />
-        </>
-      )}
+      <Facts facts={[...facts, ...sheet]} />
       {reasons.map(({ code, reason, remedy }) => (
         <Box key={code} component="p" sx={{ typography: 'small', color: 'token.brass' }}>
           {reason} {remedy}
@@ -46,6 +42,11 @@ export function InstrumentFacts({ instrument }: { instrument: Instrument }) {
     </>
   );
 }
+
+const goodTo = (decibels: number | null): Fact => [
+  'Good to',
+  decibels === null ? 'not stated' : `± ${fixed(decibels)} dB`,
+];
 
 type Fact = readonly [name: string, value: string];
 

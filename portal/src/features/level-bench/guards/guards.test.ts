@@ -224,7 +224,9 @@ describe('a heat sink', () => {
   it('tells what its supply’s wires lose, where a current is given', () => {
     // By hand: 2 × 2 m × 1.7241e-8 ohm m / 4 mm² × 20 A = 0.345 V.
     const wires = { supplyAmperes: '20', wireMetres: '2', wireSquareMillimetres: '4' };
-    expect(inText(judged('heat', wires))).toContain('Lost there and back: 345 mV');
+    expect(inText(judged('heat', wires))).toMatch(
+      /Lost there and back: 345 mV\n.*\n.*Fuse: at the supply’s end/,
+    );
     expect(inText(judged('heat'))).not.toContain('Lost there and back');
     expect(() => judged('heat', { ...wires, wireSquareMillimetres: '0' })).toThrow(
       expect.objectContaining({ input: 'wireSquareMillimetres' }),

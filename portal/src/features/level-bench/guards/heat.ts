@@ -100,6 +100,8 @@ function wireTable({
       rows: [
         { cells: ['Lost there and back', formatQuantity(volts, 'V')] },
         { cells: ['Heat in them', formatQuantity(volts * amperes, 'W')] },
+        // No figure on purpose: sizes come from the national rules for wiring.
+        { cells: ['Fuse', 'at the supply’s end, never above what the wire stands; wiring rules decide'] },
       ],
     },
   ];

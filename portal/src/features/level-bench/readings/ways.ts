@@ -20,7 +20,7 @@ const NAMES = {
   'detector-table': 'Log detector, by its table',
   'diode-probe': 'Diode probe',
   'time-base': 'Frequency by the time base',
-  'rise-time': 'Rise time without the oscilloscope’s own',
+  'rise-time': 'Rise time of an edge',
   gain: 'Gain of two levels',
   'probe-loading': 'What a probe takes',
 } as const;
