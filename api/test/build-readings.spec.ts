@@ -224,6 +224,46 @@ describe('an instrument', () => {
     expect(body.errors).toEqual([{ pointer: '#/instrumentId', detail }]);
   });
 
+  it('is worked out with: its own limits stand in the budget, in the choice, and in what can be recomputed', async () => {
+    const { started, scopes, keep } = await measured();
+    const figures = { verticalGainToleranceRel: 0.01 };
+    const better = await instrument(test, { kindId: scopes.id, calibrationDueOn: '2026-02-15', figures });
+    const plain = await instrument(test, { kindId: scopes.id, calibrationDueOn: '2026-02-15' });
+    const gainOf = async (instrumentId: string) => {
+      const { body } = await keep(instrumentId).expect(201);
+      return (body.components as { name: string; limit: number }[]).find(
+        ({ name }) => name === 'vertical gain',
+      )?.limit;
+    };
+    // To first order 20/ln 10 × 0.01 = 0.0869 dB; 3 % where nothing is stated.
+    expect(await gainOf(better.id)).toBeCloseTo(0.0869, 3);
+    expect(await gainOf(plain.id)).toBeCloseTo(0.2606, 3);
+    const [kept] = await test.dataSource.query<{ inputs: object }[]>(
+      'SELECT inputs FROM reading WHERE instrument_id = $1',
+      [better.id],
+    );
+    expect(kept?.inputs).toMatchObject(figures);
+    const { body } = await started.agent
+      .get(started.checkAt('Output level at TP1', 'instruments'))
+      .expect(200);
+    expect(body).toEqual([
+      expect.objectContaining({ id: better.id, figures, damageLevelDbm: null }),
+      expect.objectContaining({ id: plain.id, figures: {} }),
+    ]);
+  });
+
+  it('states numbers and nothing else, whoever writes them', async () => {
+    const { id } = await instrument(test);
+    const write = (figures: object) =>
+      test.dataSource.query('UPDATE instrument SET figures = $2 WHERE resource_id = $1', [
+        id,
+        JSON.stringify(figures),
+      ]);
+    await expect(write({ timeBasePpm: 'plenty' })).rejects.toThrow('instrument_figures_numbers');
+    await expect(write([1])).rejects.toThrow('instrument_figures_numbers');
+    await write({ timeBasePpm: 0.5 });
+  });
+
   it('is named in the reading with its calibration as it was then', async () => {
     const { scopes, keep } = await measured();
     const scope = await instrument(test, { kindId: scopes.id, calibrationDueOn: '2026-01-15' });

@@ -38,6 +38,7 @@ describe('instruments', () => {
       calibrationDueOn: '2026-12-09',
       damageLevelDbm: 20,
       amplitudeAccuracyDb: 0.8,
+      figures: { flatnessDb: 0.7 },
     });
     await instrument(test);
     const { body } = await member.agent.get('/api/instruments').query({ kindId: analyzer.id }).expect(200);
@@ -46,6 +47,7 @@ describe('instruments', () => {
       expect.objectContaining({
         ...{ id, tag, condition: 'ready', calibrationDueOn: '2026-12-09' },
         ...{ damageLevelDbm: 20, amplitudeAccuracyDb: 0.8, mayBook: true, reasons: [], myClearance: null },
+        figures: { amplitudeAccuracyDb: 0.8, flatnessDb: 0.7 },
         kind: expect.objectContaining({ id: analyzer.id, needsCalibration: true }),
       }),
     ]);

@@ -57,6 +57,7 @@ function typedFor(check: Check): Record<string, string> {
   const middle = check.target ?? (low !== null && high !== null ? (low + high) / 2 : (high ?? low ?? 0));
   switch (check.method) {
     case 'oscilloscope':
+    case 'two-tone-envelope':
     case 'dummy-load': {
       const level = check.method === 'dummy-load' ? 10 * Math.log10(middle * 1000) : middle;
       const { setting, divisions } = scopeEntry(level);
@@ -71,12 +72,32 @@ function typedFor(check: Check): Record<string, string> {
       };
     case 'counter':
       return { Frequency: (middle / 1e6).toFixed(6) };
+    case 'dummy-load-tap':
+      return { 'Divisions down': ((40 - 10 * Math.log10(middle * 1000)) / 2).toFixed(2) };
+    case 'intermodulation':
+      return {
+        'Tones, divisions down': '0.6',
+        'Product, divisions down': (0.6 + (6 - (high ?? 0)) / 10).toFixed(2),
+      };
+    case 'log-detector':
+      return { 'Voltage shown': ((middle + 85) * 0.025).toFixed(3) };
+    case 'diode-probe':
+      return { 'Direct voltage shown': (Math.sqrt(2 * 50 * 10 ** (middle / 10) * 1e-3) - 0.3).toFixed(2) };
+    case 'time-base':
+      return {
+        'Time per division': '50 ns',
+        'Whole cycles': '4',
+        'Divisions they take': (4 / (middle * 50e-9)).toFixed(2),
+      };
     default:
       return { Shown: String(low !== null && high === null ? low + 4 : middle), 'Read to within': '0.1' };
   }
 }
 
+/** On a phone the unit stands beside the number, and what the form filled in may stand in another than is typed here. */
 async function fillIn(page: Page, label: string, text: string): Promise<void> {
+  const unit = page.getByRole('combobox', { name: `Unit of ${label}` });
+  if (label === 'Volts per division' && (await unit.count()) > 0) await unit.selectOption('V/div');
   await page.getByRole('textbox', { name: label, exact: true }).fill(text);
 }
 
@@ -169,6 +190,30 @@ async function signOff(page: Page, position: number): Promise<void> {
   await page.getByRole('dialog').getByRole('button', { name: 'Sign off' }).click();
   await expect(page.getByText(new RegExp(`^Stage ${position} of .* signed off`))).toBeVisible();
 }
+
+test('a member at a new check finds it filled in, sees from where, and opens it on the level bench', async ({
+  page,
+}) => {
+  await signIn(page, 'jonty.peverell', '/build');
+  const build = await myBuild(page);
+  const filter = build.stages.find(({ name }) => name === 'Crystal filter');
+  const check = filter?.checks.find(({ method }) => method === 'log-detector');
+  await page.goto(`/build/${build.id}/stages/${filter?.id}?check=${check?.id}`);
+  const slope = page.getByRole('textbox', { name: 'Slope, each decibel' });
+  await expect(slope).toHaveValue('0.025');
+  await expect(slope).toHaveAccessibleDescription(/from FR-041/);
+  await expect(page.getByText(/From FR-041: .*never above \+15 dBm at its input/)).toBeVisible();
+  await expect(page.getByRole('textbox', { name: 'Read to within' })).toHaveAccessibleDescription(
+    /from (the plan|your reading of)/,
+  );
+  // 25 mV each decibel over −85 dBm: 1.5 V is −25 dBm.
+  await fillIn(page, 'Voltage shown', '1.5');
+  await expect(page.getByText('−25.00').first()).toBeVisible();
+  await page.getByRole('link', { name: 'Open in Level bench' }).click();
+  await expect(page).toHaveURL(/\/level-bench\/readings\?way=log-detector/);
+  await expect(page.getByRole('textbox', { name: 'Voltage shown' })).toHaveValue('1.5');
+  await expect(page.getByText('−25.00').first()).toBeVisible();
+});
 
 test('what was typed at the bench comes back after the tab was closed', async ({ browser }) => {
   const phone = await onAPhone(browser);

@@ -3,7 +3,13 @@ import { openContext, type ServiceContext } from '@ferrite-row/api/context';
 import { testEnvironment } from '../../api/test/app';
 import { createDatabase } from '../../api/test/database';
 import { seedDemoClub, type Counts } from './demo-club';
+import { LARKMOOR_TWENTY } from './plan/larkmoor-twenty';
 import { stateOfClub } from './state';
+
+/** How the plan's checks are read. */
+const METHODS_OF_THE_PLAN = LARKMOOR_TWENTY.stages
+  .flatMap(({ checks }) => checks.flatMap(({ measure }) => measure?.method ?? []))
+  .filter((method) => method !== 'gain' && method !== 'carried');
 
 /** The Wednesday before the clocks go back, and a Thursday evening in the middle of a night. */
 const MOMENTS = ['2026-10-21T11:00:00Z', '2027-02-04T20:30:00Z'] as const;
@@ -105,6 +111,19 @@ describe('the demo club', () => {
        FROM reading JOIN plan_check ON plan_check.id = reading.check_id JOIN stage ON stage.id = plan_check.stage_id
        JOIN build ON build.id = reading.build_id) AS all_of_them ORDER BY serial, position, place, kept_at`;
     expect(await ask(1, typed)).toEqual(await ask(0, typed));
+  });
+
+  it('has first tries of every way of reading, most of them good, some too close to call, some not yet', async () => {
+    const first = await ask<{ method: string; verdict: string }>(
+      0,
+      `SELECT DISTINCT ON (build_id, check_id) method, verdict FROM reading
+       WHERE method NOT IN ('gain', 'carried') ORDER BY build_id, check_id, kept_at`,
+    );
+    const share = (verdict: string) => first.filter((one) => one.verdict === verdict).length / first.length;
+    expect(new Set(first.map(({ method }) => method))).toEqual(new Set(METHODS_OF_THE_PLAN));
+    expect(share('pass')).toBeGreaterThan(0.8);
+    expect(share('too close to call')).toBeGreaterThan(0);
+    expect(share('not yet')).toBeGreaterThan(0);
   });
 
   it('sends none of the letters of its past', async () => {

@@ -1,6 +1,7 @@
 import { ClearancesService } from '@ferrite-row/api/instruments/clearances.service';
 import { InstrumentCareService } from '@ferrite-row/api/instruments/instrument-care.service';
 import { InventoryService } from '@ferrite-row/api/instruments/inventory.service';
+import { DETECTOR } from './detector';
 import { found, type Inventory, type StageSet } from './stage-set';
 
 interface DemoKind {
@@ -24,6 +25,7 @@ const KINDS = [
   kind('Multimeter', false, true),
   kind('Power attenuator', false, false),
   kind('Dummy load and wattmeter', false, false),
+  kind('Log detector', false, true),
 ];
 
 interface DemoInstrument {
@@ -34,22 +36,111 @@ interface DemoInstrument {
   dueInDays: number | null;
   damageLevelDbm: number | null;
   amplitudeAccuracyDb: number | null;
+  /** What else its sheet says, by the name the levels package has for it. */
+  figures?: Readonly<Record<string, number>>;
 }
+
+/** A digital oscilloscope keeps time by a crystal; the oldest one does not. Gains within 3 %: common practice. */
+const DIGITAL_SCOPE = { verticalGainToleranceRel: 0.03, timeBaseToleranceRel: 0.0001 };
+const OLD_SCOPE = { verticalGainToleranceRel: 0.03, timeBaseToleranceRel: 0.03 };
+const ANALYZER = { scaleFidelityDb: 0.4, flatnessDb: 0.7 };
+const COUNTER = { timeBasePpm: 0.5 };
+const METER = { accuracyRel: 0.008 };
+/** A detector fitted to its line with the club's generator: within half a decibel, common practice. */
+const LOG_DETECTOR = { ...DETECTOR, conformityDb: 0.5, accuracyRel: 0.003 };
 
 /** Damage levels and accuracies are those of no maker: common practice for each kind. */
 const INSTRUMENTS: readonly DemoInstrument[] = [
   { tag: 'FR-014', kind: 'Vector analyzer', dueInDays: 96, damageLevelDbm: 13, amplitudeAccuracyDb: 0.5 },
-  { tag: 'FR-021', kind: 'Oscilloscope', dueInDays: 138, damageLevelDbm: 30, amplitudeAccuracyDb: null },
-  { tag: 'FR-022', kind: 'Oscilloscope', dueInDays: 88, damageLevelDbm: 30, amplitudeAccuracyDb: null },
-  { tag: 'FR-023', kind: 'Oscilloscope', dueInDays: 201, damageLevelDbm: 30, amplitudeAccuracyDb: null },
-  { tag: 'FR-031', kind: 'Spectrum analyzer', dueInDays: 55, damageLevelDbm: 20, amplitudeAccuracyDb: 0.8 },
-  { tag: 'FR-032', kind: 'Spectrum analyzer', dueInDays: 170, damageLevelDbm: 20, amplitudeAccuracyDb: 0.8 },
-  { tag: 'FR-033', kind: 'Frequency counter', dueInDays: 120, damageLevelDbm: 24, amplitudeAccuracyDb: null },
-  { tag: 'FR-034', kind: 'Frequency counter', dueInDays: 143, damageLevelDbm: 24, amplitudeAccuracyDb: null },
+  {
+    tag: 'FR-021',
+    kind: 'Oscilloscope',
+    dueInDays: 138,
+    damageLevelDbm: 30,
+    amplitudeAccuracyDb: null,
+    figures: DIGITAL_SCOPE,
+  },
+  {
+    tag: 'FR-022',
+    kind: 'Oscilloscope',
+    dueInDays: 88,
+    damageLevelDbm: 30,
+    amplitudeAccuracyDb: null,
+    figures: DIGITAL_SCOPE,
+  },
+  {
+    tag: 'FR-023',
+    kind: 'Oscilloscope',
+    dueInDays: 201,
+    damageLevelDbm: 30,
+    amplitudeAccuracyDb: null,
+    figures: OLD_SCOPE,
+  },
+  {
+    tag: 'FR-031',
+    kind: 'Spectrum analyzer',
+    dueInDays: 55,
+    damageLevelDbm: 20,
+    amplitudeAccuracyDb: 0.8,
+    figures: ANALYZER,
+  },
+  {
+    tag: 'FR-032',
+    kind: 'Spectrum analyzer',
+    dueInDays: 170,
+    damageLevelDbm: 20,
+    amplitudeAccuracyDb: 0.8,
+    figures: ANALYZER,
+  },
+  {
+    tag: 'FR-033',
+    kind: 'Frequency counter',
+    dueInDays: 120,
+    damageLevelDbm: 24,
+    amplitudeAccuracyDb: null,
+    figures: COUNTER,
+  },
+  {
+    tag: 'FR-034',
+    kind: 'Frequency counter',
+    dueInDays: 143,
+    damageLevelDbm: 24,
+    amplitudeAccuracyDb: null,
+    figures: COUNTER,
+  },
   { tag: 'FR-040', kind: 'Signal generator', dueInDays: 5, damageLevelDbm: 17, amplitudeAccuracyDb: 0.7 },
-  { tag: 'FR-051', kind: 'Multimeter', dueInDays: 174, damageLevelDbm: null, amplitudeAccuracyDb: null },
-  { tag: 'FR-054', kind: 'Multimeter', dueInDays: 230, damageLevelDbm: null, amplitudeAccuracyDb: null },
-  { tag: 'FR-055', kind: 'Multimeter', dueInDays: 61, damageLevelDbm: null, amplitudeAccuracyDb: null },
+  {
+    tag: 'FR-041',
+    kind: 'Log detector',
+    dueInDays: 77,
+    damageLevelDbm: 15,
+    amplitudeAccuracyDb: null,
+    figures: LOG_DETECTOR,
+  },
+  {
+    tag: 'FR-051',
+    kind: 'Multimeter',
+    dueInDays: 174,
+    damageLevelDbm: null,
+    amplitudeAccuracyDb: null,
+    figures: METER,
+  },
+  {
+    tag: 'FR-054',
+    kind: 'Multimeter',
+    dueInDays: 230,
+    damageLevelDbm: null,
+    amplitudeAccuracyDb: null,
+    figures: METER,
+  },
+  {
+    tag: 'FR-055',
+    kind: 'Multimeter',
+    dueInDays: 61,
+    damageLevelDbm: null,
+    amplitudeAccuracyDb: null,
+    figures: METER,
+  },
   {
     tag: 'FR-052',
     kind: 'Power attenuator',
@@ -88,14 +179,16 @@ export async function seedInventory(set: StageSet): Promise<Inventory> {
     BENCHES.map((name, index) => ({ tag: `Bench ${index + 1}`, name })),
   );
   const instruments = await service.enrolInstruments(
-    INSTRUMENTS.map(({ tag, name, kind: kindName, dueInDays, damageLevelDbm, amplitudeAccuracyDb }) => ({
-      tag,
-      name: name ?? kindName,
-      kindId: found(kindIds, kindName),
-      calibrationDueOn: dueInDays === null ? null : calendar.today.add({ days: dueInDays }).toString(),
-      damageLevelDbm,
-      amplitudeAccuracyDb,
-    })),
+    INSTRUMENTS.map(
+      ({ tag, name, kind: kindName, dueInDays, damageLevelDbm, amplitudeAccuracyDb, figures }) => ({
+        ...{ tag, figures },
+        name: name ?? kindName,
+        kindId: found(kindIds, kindName),
+        calibrationDueOn: dueInDays === null ? null : calendar.today.add({ days: dueInDays }).toString(),
+        damageLevelDbm,
+        amplitudeAccuracyDb,
+      }),
+    ),
   );
   const ids = new Map([...benches, ...instruments].map(({ tag, id }) => [tag, id]));
   const inventory: Inventory = {

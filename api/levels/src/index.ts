@@ -70,7 +70,7 @@ export { scanProducts } from './mixing/scan';
 export type { Scan, ScanInput } from './mixing/scan';
 export { crossovers } from './mixing/crossovers';
 export type { Crossover, CrossoverInput } from './mixing/crossovers';
-export { DIODE_RING, productLevel } from './mixing/product-levels';
+export { DIODE_RING, DIODE_RING_RANGES, productLevel } from './mixing/product-levels';
 export type { FigureDb, MixerFigures, MixerLevels, ProductLevel } from './mixing/product-levels';
 export { judgeProducts } from './mixing/judge-products';
 export type { JudgedProduct, JudgedProducts, JudgeInput } from './mixing/judge-products';
@@ -102,6 +102,7 @@ export { ladderMatrix } from './filters/abcd';
 export type { ChainMatrix, Complex } from './filters/abcd';
 export { fitLadder } from './filters/fit-ladder';
 export type { FitLadderInput, FittedElement, FittedLadder } from './filters/fit-ladder';
+export { trimmedLadder } from './filters/trim';
 export { ladderBuilds, spreadBands } from './filters/spread';
 export type { Builds, SpreadBands, SpreadInput } from './filters/spread';
 export { harmonicRejections, powerShares } from './filters/rejection';
@@ -122,6 +123,8 @@ export {
   mismatchBounds,
 } from './matching/match';
 export type { Impedance, Match, MismatchBounds } from './matching/match';
+export { lNetworkLoss } from './matching/l-network-loss';
+export type { LNetworkLoss } from './matching/l-network-loss';
 export { lNetworks } from './matching/l-network';
 export type { LNetwork, LNetworkInput } from './matching/l-network';
 export {
@@ -140,6 +143,7 @@ export {
   singleLayerHenries,
   singleLayerTurns,
   skinDepthMetres,
+  wireOhmsPerMetre,
 } from './matching/windings';
 export type { FluxInput, SingleLayerCoil } from './matching/windings';
 
@@ -153,7 +157,7 @@ export type { PlannedStage, Shortfall, StageShare } from './chain/shortfall';
 
 export { US_97 } from './rule-sets/us-97';
 export { IARU_REGION_1 } from './rule-sets/iaru-region-1';
-export { MODE_DUTY, US_EXPOSURE } from './rule-sets/exposure-limits';
+export { ICNIRP_EXPOSURE, MODE_DUTY, US_EXPOSURE } from './rule-sets/exposure-limits';
 export type { ExposureLimits, ExposureRow, ExposureTier } from './rule-sets/exposure-limits';
 export type {
   BandRow,
@@ -198,7 +202,16 @@ export {
 export type { ExposureDistance, ExposureExemption, ExposureInput } from './guards/exposure';
 export { deratedWatts, heatChain, HOT_TO_TOUCH_CELSIUS, sinkNeeded } from './guards/heat-sink';
 export type { HeatChain, HeatPath, SinkNeeded } from './guards/heat-sink';
-export { classBEfficiency, loadForPower, supplyBalance } from './guards/power-stage';
+export {
+  classBEfficiency,
+  classBHeat,
+  loadForPower,
+  supplyBalance,
+  supplyDropVolts,
+} from './guards/power-stage';
+export type { ClassBHeat, SupplyWire } from './guards/power-stage';
+export { densityOfField, exposureSum, isExemptByPower } from './guards/exposure-sources';
+export type { ExposureSum } from './guards/exposure-sources';
 export type { AmplifierClass, SupplyBalance, SupplyInput } from './guards/power-stage';
 
 export { ASSUMED_METER_ACCURACY_REL, logDetectorReading } from './readings/log-detector';
@@ -212,6 +225,8 @@ export type { IntermodulationInput } from './readings/intermodulation';
 export { dummyLoadTapReading } from './readings/dummy-load-tap';
 export type { DummyLoadTapInput } from './readings/dummy-load-tap';
 export { ASSUMED_TIME_BASE_REL, timeBaseReading } from './readings/time-base';
+export { ASSUMED_RISE_REL, riseTimeReading } from './readings/rise-time';
+export type { RiseTimeInput, RiseTimeReading } from './readings/rise-time';
 export type { TimeBaseInput } from './readings/time-base';
 export { probeLoading } from './readings/probe-loading';
 export type { ProbeLoading, ProbeLoadingInput } from './readings/probe-loading';
@@ -252,5 +267,7 @@ export { ENTRY_METHODS, entryFields, METER_UNITS, methodGives, methodUnit } from
 export type { EntryField, EntryMethod } from './entry-fields';
 export { meterUnitOf, readEntry } from './entry';
 export type { Entry, ReadEntry } from './entry';
+export { assumptionsWith, figuresFor, figureWords, INSTRUMENT_FIGURES } from './instrument-figures';
+export type { FigureWords, InstrumentFigures } from './instrument-figures';
 export { ASSUMED, readingFromInputs, scopeInput } from './entry-readings';
 export type { Assumptions } from './entry-readings';

@@ -6,7 +6,7 @@ import { requireWithin } from './domain';
 export type MeterUnit = 'V' | 'mV' | 'A' | 'mA' | 'ohm' | 'kohm' | 'W' | 'mW' | 'dB';
 
 /** Units of a reading's value and window. */
-export type ReadingUnit = 'dBm' | 'dB' | 'dBc' | 'Hz' | MeterUnit;
+export type ReadingUnit = 'dBm' | 'dB' | 'dBc' | 'Hz' | 'ns' | MeterUnit;
 
 /**
  * Name and version of a calculation, kept beside every reading so that it can be worked out again. The number rises
@@ -25,6 +25,7 @@ export type Calculation =
   | 'meter/1'
   | 'counter/1'
   | 'time-base/1'
+  | 'rise-time/1'
   | 'gain/1';
 
 /** A measured value and how sure it is. Nothing in it is rounded. */

@@ -1,6 +1,8 @@
 import levelTable from '../reference/levels.json';
 import uncertaintyTable from '../reference/uncertainty.json';
 import {
+  mismatchBounds,
+  COVERAGE_FACTOR,
   dB,
   dBm,
   dbFromPowerRatio,
@@ -128,6 +130,58 @@ describe('uncertainty against the GUM (JCGM 100:2008)', () => {
     });
     within(reading.value, 10, 1e-9);
     within(reading.expandedUncertainty, 0.36508, 2e-5);
+  });
+
+  it('resolution: half a step of a display, rectangular', () => {
+    const [row] = uncertaintyTable.resolution;
+    const half = (row?.inputs.display_step ?? NaN) / 2;
+    const { standardUncertainty } = uncertaintyBudget([source('display', half, 'rectangular')]);
+    within(standardUncertainty, row?.expected.standard_uncertainty ?? NaN, 1e-6);
+  });
+
+  it('corr-1: sources that know nothing of each other add as squares', () => {
+    const row = uncertaintyTable.combining.find(({ id }) => id === 'corr-1');
+    const { u1 = NaN, u2 = NaN } = row?.inputs ?? {};
+    const { standardUncertainty } = uncertaintyBudget([
+      source('a', u1, 'standard'),
+      source('b', u2, 'standard'),
+    ]);
+    within(standardUncertainty, row?.expected.uc ?? NaN, 1e-9);
+  });
+
+  it('mismatch-1: two reflections facing each other, either way', () => {
+    const row = uncertaintyTable.combining.find(({ id }) => id === 'mismatch-1');
+    const found = mismatchBounds(row?.inputs.rho_source ?? NaN, row?.inputs.rho_load ?? NaN);
+    within(-found.leastDb, row?.expected.plus_dB ?? NaN, 1e-4);
+    within(-found.greatestDb, row?.expected.minus_dB ?? NaN, 1e-4);
+  });
+
+  /** Part of a normal distribution under `k`, by Simpson's rule. */
+  const normalUnder = (k: number): number => {
+    const [from, steps] = [-9, 20_000];
+    const width = (k - from) / steps;
+    const weight = (index: number) => (index === 0 || index === steps ? 1 : index % 2 === 1 ? 4 : 2);
+    const heights = Array.from({ length: steps + 1 }, (_step, index) => {
+      return weight(index) * Math.exp(-((from + index * width) ** 2) / 2);
+    });
+    return (heights.reduce((sum, height) => sum + height, 0) * width) / 3 / Math.sqrt(2 * Math.PI);
+  };
+
+  it('cov-k2: the factor taken covers 95.45 % of a normal distribution', () => {
+    const [row] = uncertaintyTable.coverage;
+    expect(COVERAGE_FACTOR).toBe(row?.inputs.k);
+    within(100 * (2 * normalUnder(COVERAGE_FACTOR) - 1), row?.expected.coverage_pct ?? NaN, 0.01);
+  });
+
+  it('risk-2: the nearest value that passes is wrongly passed under 2.5 times in a hundred', () => {
+    const [row] = uncertaintyTable.risk;
+    const [limit, expanded] = [-43, 1.2];
+    const nearest = limit - expanded;
+    expect(verdictOf(nearest, expanded, { high: limit })).toBe('pass');
+    expect(verdictOf(nearest + 1e-9, expanded, { high: limit })).not.toBe('pass');
+    const wronglyPassed = 100 * (1 - normalUnder((limit - nearest) / (expanded / COVERAGE_FACTOR)));
+    within(wronglyPassed, row?.expected.false_accept_max_pct ?? NaN, 0.3);
+    expect(wronglyPassed).toBeLessThan(2.5);
   });
 
   it('round-1: value and uncertainty are shown to the same decimals', () => {

@@ -3,7 +3,7 @@ import { DataSource, IsNull, type EntityManager } from 'typeorm';
 import { requireMember, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { fieldError, notFound } from '../common/common.errors';
-import { Instrument } from '../instruments/instrument.entity';
+import { figuresOf, Instrument } from '../instruments/instrument.entity';
 import { InstrumentKind } from '../instruments/instrument-kind.entity';
 import { InstrumentUseService, lower } from '../instruments/instrument-use.service';
 import type { PlanCheck } from '../plans/plan-check.entity';
@@ -89,7 +89,16 @@ function after(instant: Date): Date {
 }
 
 function choiceDto(instrument: Instrument, reason: string | null): InstrumentChoiceDto {
-  const { resource, kind, calibrationDueOn, amplitudeAccuracyDb } = instrument;
+  const { resource, kind, calibrationDueOn, damageLevelDbm } = instrument;
   const { id, tag, name } = resource;
-  return { id, tag, name, kind: kind.name, reason, calibrationDueOn, amplitudeAccuracyDb };
+  return {
+    id,
+    tag,
+    name,
+    kind: kind.name,
+    reason,
+    calibrationDueOn,
+    damageLevelDbm,
+    figures: figuresOf(instrument),
+  };
 }

@@ -56,11 +56,12 @@ describe('judging an entry', () => {
       readToDivisions: '0.02',
       padsInLineDb: '0',
     };
-    const good = judgeEntry(asked, 'analyzer', entry, 0.3);
+    const good = judgeEntry(asked, 'analyzer', entry, { amplitudeAccuracyDb: 0.3, flatnessDb: 2 });
     const common = judgeEntry(asked, 'analyzer', entry);
     if ('problems' in good || 'problems' in common) throw new Error('both can be read');
     expect(good.reading.expandedUncertainty).toBeLessThan(common.reading.expandedUncertainty);
     expect(good.inputs.amplitudeAccuracyDb).toBe(0.3);
+    expect(good.inputs).not.toHaveProperty('flatnessDb');
   });
 
   it('names each field that cannot be read, is out of domain, is strange or is no text', () => {

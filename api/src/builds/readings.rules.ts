@@ -1,4 +1,5 @@
 import {
+  assumptionsWith,
   ENTRY_METHODS,
   entryFields,
   gainReading,
@@ -8,6 +9,7 @@ import {
   readingFromInputs,
   verdictOf,
   type EntryMethod,
+  type InstrumentFigures,
   type LevelReading,
   type Verdict,
   type VerdictWindow,
@@ -31,13 +33,13 @@ export type Judgement = JudgedReading | { problems: FieldProblem[] };
 /**
  * Reads what was typed, works it out and judges it. Decides alone: nothing the sender worked out is looked at.
  *
- * @param amplitudeAccuracyDb - of the instrument, when it states one.
+ * @param figures - of the instrument, as far as it states any.
  */
 export function judgeEntry(
   asked: AskedMeasure,
   method: string,
   entry: Readonly<Record<string, unknown>>,
-  amplitudeAccuracyDb?: number,
+  figures: InstrumentFigures = {},
 ): Judgement {
   if (!isEntryMethod(asked.method)) return problem('method', 'This value works itself out.');
   if (method !== asked.method) return problem('method', `This check is taken by ${asked.method}.`);
@@ -47,8 +49,7 @@ export function judgeEntry(
   if (strange.length > 0) return { problems: strange.map((name) => strangeField(name, known)) };
   const { inputs, problems } = readEntry(asked.method, entry as Record<string, string>, unit);
   if (problems.length > 0) return { problems: problems.map(entryProblem) };
-  const assumptions: Record<string, number> = { ...asked.defaults };
-  if (amplitudeAccuracyDb !== undefined) assumptions.amplitudeAccuracyDb = amplitudeAccuracyDb;
+  const assumptions = assumptionsWith(asked.method, asked.unit ?? '', asked.defaults, figures);
   try {
     const reading = readingFromInputs(asked.method, inputs, assumptions, unit);
     return { reading, inputs: { ...assumptions, ...inputs }, verdict: judge(reading, asked) };

@@ -3,7 +3,7 @@ import { DataSource, type EntityManager } from 'typeorm';
 import { requireMember, type Actor } from '../common/actor';
 import { Clock } from '../common/clock';
 import { commonProblems, fieldError } from '../common/common.errors';
-import type { Instrument } from '../instruments/instrument.entity';
+import { figuresOf, type Instrument } from '../instruments/instrument.entity';
 import type { PlanCheck } from '../plans/plan-check.entity';
 import { PlansService, type EditionContent } from '../plans/plans.service';
 import type { Stage } from '../plans/stage.entity';
@@ -122,7 +122,7 @@ function judgedOrRefused(
   { method, entry }: KeepReadingDto,
   instrument: Instrument | undefined,
 ): JudgedReading {
-  const judgement = judgeEntry(check, method, entry, instrument?.amplitudeAccuracyDb ?? undefined);
+  const judgement = judgeEntry(check, method, entry, instrument && figuresOf(instrument));
   if (!('problems' in judgement)) return judgement;
   const { problems } = judgement;
   const detail = problems[0]?.detail ?? 'The reading cannot be worked out.';

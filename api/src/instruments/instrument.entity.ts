@@ -1,3 +1,4 @@
+import type { InstrumentFigures } from '@ferrite-row/levels';
 import {
   Check,
   Column,
@@ -20,6 +21,10 @@ export type Condition = (typeof CONDITIONS)[number];
 @Index('instrument_of_kind', ['kindId'])
 @Check('instrument_condition_known', `condition IN ('ready', 'in repair', 'out of use')`)
 @Check('instrument_accuracy_positive', `amplitude_accuracy_db IS NULL OR amplitude_accuracy_db > 0`)
+@Check(
+  'instrument_figures_numbers',
+  `jsonb_typeof(figures) = 'object' AND NOT jsonb_path_exists(figures, '$.* ? (@.type() != "number")')`,
+)
 export class Instrument {
   @PrimaryColumn('uuid')
   resourceId: string;
@@ -53,4 +58,16 @@ export class Instrument {
   /** ± limit of its level readings from its last calibration, dB. */
   @Column('double precision', { nullable: true })
   amplitudeAccuracyDb: number | null;
+
+  /** What else its sheet says that a reading is worked out with, by the name the levels package has for it. */
+  @Column('jsonb', { default: () => `'{}'` })
+  figures: InstrumentFigures;
+}
+
+/** All figures of an instrument that a reading may be worked out with. */
+export function figuresOf({
+  figures,
+  amplitudeAccuracyDb,
+}: Pick<Instrument, 'figures' | 'amplitudeAccuracyDb'>): InstrumentFigures {
+  return { ...figures, ...(amplitudeAccuracyDb !== null && { amplitudeAccuracyDb }) };
 }

@@ -7,7 +7,8 @@ import { Resource } from './resource.entity';
 export type NewKind = Omit<InstrumentKind, 'id'>;
 export type NewBench = Pick<Resource, 'tag' | 'name'>;
 export type NewInstrument = Pick<Resource, 'tag' | 'name'> &
-  Pick<Instrument, 'kindId' | 'calibrationDueOn' | 'damageLevelDbm' | 'amplitudeAccuracyDb'>;
+  Pick<Instrument, 'kindId' | 'calibrationDueOn' | 'damageLevelDbm' | 'amplitudeAccuracyDb'> &
+  Partial<Pick<Instrument, 'figures'>>;
 
 /** For first set-up and seeds: writes down what stands in the room, in the order given. */
 @Injectable()
@@ -26,9 +27,9 @@ export class InventoryService {
     return this.dataSource.transaction(async (manager) => {
       const resources = await this.enrol(manager, 'instrument', instruments);
       const rows = instruments.map(
-        ({ kindId, calibrationDueOn, damageLevelDbm, amplitudeAccuracyDb }, index) => ({
+        ({ kindId, calibrationDueOn, damageLevelDbm, amplitudeAccuracyDb, figures }, index) => ({
           resourceId: resources[index]?.id,
-          ...{ kindId, calibrationDueOn, damageLevelDbm, amplitudeAccuracyDb },
+          ...{ kindId, calibrationDueOn, damageLevelDbm, amplitudeAccuracyDb, figures },
         }),
       );
       await manager.getRepository(Instrument).insert(rows);

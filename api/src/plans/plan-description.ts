@@ -1,3 +1,4 @@
+import type { EntryMethod } from '@ferrite-row/levels';
 import type { CheckKind } from './plan-check.entity';
 import type { Caution } from './stage.entity';
 
@@ -59,8 +60,7 @@ export const DERIVED_METHODS = ['gain', 'carried'] as const;
 export type DerivedMethod = (typeof DERIVED_METHODS)[number];
 
 /** How a measure is taken: typed from an instrument, or worked out. */
-export type MeasureMethod =
-  'oscilloscope' | 'dummy-load' | 'analyzer' | 'harmonic' | 'meter' | 'counter' | DerivedMethod;
+export type MeasureMethod = EntryMethod | DerivedMethod;
 
 export function isDerived(method: string | null): method is DerivedMethod {
   return DERIVED_METHODS.some((derived) => derived === method);

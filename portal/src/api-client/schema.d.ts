@@ -1674,6 +1674,10 @@ export interface components {
         InstrumentChoiceDto: {
             /** @description Why it cannot be chosen; null when it can. */
             reason: string | null;
+            /** @description What its sheet says and readings are worked out with, by the name the levels package has for it. */
+            figures: {
+                [key: string]: number;
+            };
             id: string;
             /** @example FR-021 */
             tag: string;
@@ -1682,8 +1686,8 @@ export interface components {
             kind: string;
             /** @description Last day of its calibration. */
             calibrationDueOn: string | null;
-            /** @description ± limit of its level readings, dB. */
-            amplitudeAccuracyDb: number | null;
+            /** @description The level that harms its input, dBm. */
+            damageLevelDbm: number | null;
         };
         InstrumentDetailDto: {
             /** @enum {string} */
@@ -1697,6 +1701,10 @@ export interface components {
             damageLevelDbm: number | null;
             /** @description ± limit of its level readings, dB. */
             amplitudeAccuracyDb: number | null;
+            /** @description All that its sheet says and readings are worked out with, by the name the levels package has for it. */
+            figures: {
+                [key: string]: number;
+            };
             /** @description Your clearance on its kind, lapsed ones too; null when you have none. */
             myClearance: components["schemas"]["MyClearanceDto"] | null;
             id: string;
@@ -1726,6 +1734,10 @@ export interface components {
             damageLevelDbm: number | null;
             /** @description ± limit of its level readings, dB. */
             amplitudeAccuracyDb: number | null;
+            /** @description All that its sheet says and readings are worked out with, by the name the levels package has for it. */
+            figures: {
+                [key: string]: number;
+            };
             /** @description Your clearance on its kind, lapsed ones too; null when you have none. */
             myClearance: components["schemas"]["MyClearanceDto"] | null;
             id: string;

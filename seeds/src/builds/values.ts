@@ -9,15 +9,15 @@ const SPREAD = 0.22;
 /**
  * A value a careful builder would find: near the target, or well inside an open window.
  *
- * @param care - 1 for the first try; smaller comes nearer, for a retake.
+ * @param care - 1 for the first try; smaller comes nearer, for a retake; above 1 nothing is trimmed yet.
  */
 export function plausible({ windowLow, windowHigh, target }: Window, dice: Dice, care: number): number {
   if (windowLow !== null && windowHigh !== null) {
     const middle = target ?? (windowLow + windowHigh) / 2;
     return middle + dice.bell() * SPREAD * care * ((windowHigh - windowLow) / 2);
   }
-  if (windowHigh !== null) return windowHigh - roomOf(windowHigh) * (1.2 + dice.next());
-  if (windowLow !== null) return windowLow + roomOf(windowLow) * (1.2 + dice.next());
+  if (windowHigh !== null) return windowHigh - (roomOf(windowHigh) * (1.2 + dice.next())) / Math.max(1, care);
+  if (windowLow !== null) return windowLow + (roomOf(windowLow) * (1.2 + dice.next())) / Math.max(1, care);
   return target ?? 0;
 }
 

@@ -11,6 +11,7 @@ export const KINDS = {
   meter: 'Multimeter',
   counter: 'Frequency counter',
   load: 'Dummy load and wattmeter',
+  detector: 'Log detector',
 } as const;
 
 /** Half a decibel wider than the gain's own tolerance would leave no room for the uncertainty of two readings. */
@@ -44,7 +45,8 @@ export const eyes = (key: string, title: string, instruction: string): CheckDesc
   instruction,
 });
 
-const measured = (
+/** A check whose value is read or worked out. */
+export const measured = (
   key: string,
   title: string,
   instruction: string,
@@ -78,7 +80,7 @@ export function scopeLevel(key: string, point: LevelPointDescription, instructio
 }
 
 /** What the scope's form starts with: the probe at ×10 into 50 ohm, read to a tenth of a division. */
-const SCOPE_START = { probeRatio: 10, loadOhms: 50, readToDivisions: 0.1 };
+export const SCOPE_START = { probeRatio: 10, loadOhms: 50, readToDivisions: 0.1 };
 
 /** A level that is no column of the level diagram, such as an oscillator's drive. */
 export function driveLevel(
@@ -178,20 +180,8 @@ export function decibels(
   });
 }
 
-/** Power in the dummy load from the voltage across it. */
-export function loadPower(
-  key: string,
-  title: string,
-  instruction: string,
-  [low, high, target]: [number, number, number],
-): CheckDescription {
-  return measured(key, title, instruction, {
-    ...{ method: 'dummy-load', unit: 'W', window: { low, high }, target, instrumentKind: KINDS.scope },
-    defaults: SCOPE_START,
-  });
-}
-
-function around(target: number, tolerance: number): { low: number; high: number } {
+/** From so much under a target to so much over it. */
+export function around(target: number, tolerance: number): { low: number; high: number } {
   return { low: tenths(target - tolerance), high: tenths(target + tolerance) };
 }
 

@@ -6,7 +6,6 @@ import {
   eyes,
   gain,
   KINDS,
-  loadPower,
   meter,
   photo,
   safety,
@@ -14,6 +13,7 @@ import {
   tick,
 } from './checks';
 import { LEVELS } from './levels';
+import { belowPeak, envelopePeak, probeLevel, tapPower } from './other-ways';
 
 /** Stages 10 to 12: where it can burn, and where it can be heard. */
 export const driver: StageDescription = {
@@ -33,7 +33,11 @@ export const driver: StageDescription = {
       'mA',
     ]),
     carried('driver-input', 'Input level at TP9', 'predriver-output', LEVELS.preDriver),
-    scopeLevel('driver-output', LEVELS.driver, 'At 14.1 MHz, 50 ohm at TP10.'),
+    probeLevel(
+      'driver-output',
+      LEVELS.driver,
+      'At 14.1 MHz, 50 ohm at TP10, by your own diode probe: the peak here is 3.3 V, well over its drop.',
+    ),
     gain(
       'driver-gain',
       'Gain at 14.1 MHz',
@@ -78,8 +82,26 @@ export const amplifierAndLowPass: StageDescription = {
       // Two scope readings are good to 0.6 dB, so a loss is only asked to be small; a filter cannot amplify.
       { low: -1.5 },
     ),
-    // +36 and +38 dBm are 3.98 and 6.31 W; rounded inwards.
-    loadPower('pa-power', 'Power in the dummy load', 'Key down, five seconds.', [4, 6.3, 5]),
+    // +35 and +39 dBm are 3.16 and 7.94 W, rounded inwards: a second way to the same power, each good to about 1 dB.
+    tapPower(
+      'pa-power',
+      'Power in the dummy load, by its tap',
+      'Key down, five seconds. The 20 dB pad between tap and analyzer, always: −13 dBm are left at its input.',
+      [3.2, 7.9, 5],
+    ),
+    envelopePeak(
+      'pa-envelope',
+      'Peak envelope power, two tones',
+      '700 and 1,900 Hz, equal, into the microphone input; the envelope’s widest height at TP11.',
+      [LEVELS.lowPass.plannedDbm, LEVELS.lowPass.toleranceDb],
+    ),
+    // Amateur transmitters reach 25 to 35 dB below the peak: common practice.
+    belowPeak(
+      'pa-products',
+      'Third-order products, 25 dB below the peak',
+      'The same two tones, on the tap behind the 20 dB pad, 1 kHz a division.',
+      25,
+    ),
     meter('pa-current', 'Supply current at full power', 'Key down, five seconds.', [1, 0.25, 'A']),
     // 43 + 10 lg 5 = 49.99 dB: ITU Radio Regulations, Appendix 3, amateur stations under 30 MHz (from memory).
     below(

@@ -13,6 +13,7 @@ import {
   tick,
 } from './checks';
 import { FREQUENCIES, LEVELS, RING_DRIVE_LEVEL } from './levels';
+import { detectorLevel } from './other-ways';
 
 /** Stages 4 to 6: from a carrier and a voice to one sideband at 8.867 MHz. */
 export const balancedModulator: StageDescription = {
@@ -43,7 +44,11 @@ export const crystalFilter: StageDescription = {
   levelPoints: [LEVELS.filter],
   checks: [
     carried('filter-input', 'Input level at TP4', 'modulator-output', LEVELS.modulator),
-    scopeLevel('filter-output', LEVELS.filter, 'At the middle of the passband, 50 ohm at TP5.'),
+    detectorLevel(
+      'filter-output',
+      LEVELS.filter,
+      'At the middle of the passband, the detector’s own 50 ohm at TP5. Some 40 mV: behind a ×10 probe a scope shows too little.',
+    ),
     gain(
       'filter-loss',
       'Loss of the filter',

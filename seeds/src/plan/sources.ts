@@ -1,6 +1,7 @@
 import type { StageDescription } from '@ferrite-row/api/plans/plan-description';
 import { below, decibels, driveLevel, eyes, frequency, KINDS, meter, photo, safety, tick } from './checks';
 import { FREQUENCIES, RING_DRIVE } from './levels';
+import { seenFrequency } from './other-ways';
 
 /** Stages 1 to 3 and 7: what everything else is fed with. Currents are such as small-signal stages draw (common practice). */
 export const supplyRails: StageDescription = {
@@ -35,6 +36,12 @@ export const carrierOscillator: StageDescription = {
   summary: 'A crystal pulled to 300 Hz above the filter, loud enough for the diode ring.',
   checks: [
     meter('carrier-current', 'Supply current', 'In the 9 V lead.', [11, 3, 'mA']),
+    seenFrequency(
+      'carrier-seen',
+      'Swings at the crystal’s own frequency',
+      'Count whole cycles at TP2 along the screen: its third overtone would be three times as many.',
+      [8_868_500, 700_000],
+    ),
     frequency(
       'carrier-frequency',
       'Carrier frequency',
@@ -76,6 +83,12 @@ export const localOscillator: StageDescription = {
   summary: 'Tunes 22.87 to 23.22 MHz, so that less 8.87 MHz it covers the whole of 20 metres.',
   checks: [
     meter('lo-current', 'Supply current', 'In the 9 V lead.', [22, 4, 'mA']),
+    seenFrequency(
+      'lo-seen',
+      'Swings where the coil says',
+      'At the middle of the dial, by whole cycles at TP7; the coil’s turns are wrong if it is far off.',
+      [23_043_500, 1_800_000],
+    ),
     frequency('lo-low', 'Low end of the dial', 'Fully anticlockwise, never below the band’s edge.', [
       ...FREQUENCIES.oscillatorLowEnd,
     ]),

@@ -1,10 +1,12 @@
 import { requireSome, requireWhole, requireWithin } from '../domain';
+import { hertz as hertzOf } from '../units';
 import { requireLadder } from './ladder';
 import type { Ladder } from './ladder';
 import { valueAtRank } from './quantile';
 import { seededRandom } from './random';
 import { fillResponse, packedLadder, requireFrequencies } from './response';
 import type { PackedLadder, PartQ } from './response';
+import { resonatorsOf, trim } from './trim';
 
 /** How a ladder's parts scatter, and how many are built. */
 export interface SpreadInput extends PartQ {
@@ -12,6 +14,8 @@ export interface SpreadInput extends PartQ {
   /** Every part lies anywhere within, 0.05 for ± 5 %. */
   capacitorToleranceRel: number;
   inductorToleranceRel: number;
+  /** Every resonator to ground is trimmed to this frequency after it is built; left out, parts stay as they are. */
+  trimmedAtHertz?: number;
   /** 1 to 20,000. */
   builds: number;
   /** The same seed gives the same builds on every machine. */
@@ -45,15 +49,25 @@ export function ladderBuilds(input: SpreadInput, hertz: Float64Array): Builds {
   const tolerances = tolerancesOf(packed, input);
   const random = seededRandom(input.seed);
   const values = new Float64Array(packed.values.length);
+  const trimmed = trimmingOf(packed, input);
   const figures = builds * hertz.length;
   const made = { hertz, builds, gainDb: new Float64Array(figures), returnLossDb: new Float64Array(figures) };
   for (let build = 0; build < builds; build++) {
     for (let index = 0; index < values.length; index++) {
       values[index] = (packed.values[index] ?? 0) * (1 + (2 * random() - 1) * (tolerances[index] ?? 0));
     }
+    trimmed(values);
     fillResponse(packed, values, hertz, made.gainDb, made.returnLossDb, build * hertz.length);
   }
   return made;
+}
+
+/** What is done to a build's values before it is looked at. */
+function trimmingOf(packed: PackedLadder, { trimmedAtHertz }: SpreadInput): (values: Float64Array) => void {
+  if (trimmedAtHertz === undefined) return () => undefined;
+  const omega = 2 * Math.PI * hertzOf(trimmedAtHertz, 'trimmedAtHertz');
+  const resonators = resonatorsOf(packed);
+  return (values) => trim(packed, resonators, values, omega);
 }
 
 function requireBuilds({ builds, seed }: SpreadInput, points: number): number {

@@ -33,6 +33,7 @@ import {
   singleLayerTurns,
   skinDepthMetres,
   turnsFor,
+  wireOhmsPerMetre,
 } from '../index';
 
 // Values, tolerances and sources: api/levels/reference/cascade.json and inductors.json, each row with its own source.
@@ -146,6 +147,18 @@ describe('windings against published values', () => {
 
   it.each(table.skin_depth)('$id', ({ inputs, expected, tolerance }) => {
     withinRel(1e6 * skinDepthMetres(inputs.f_Hz, inputs.rho_ohm_m), expected.depth_um, tolerance.rel);
+  });
+
+  const wired = table.skin_depth.filter(
+    ({ expected }) => expected.round_wire_1mm_Rac_ohm_per_m_approx !== null,
+  );
+  it.each(wired)('$id: resistance of a wire of 1 mm', ({ inputs, expected, tolerance }) => {
+    const found = wireOhmsPerMetre(inputs.f_Hz, 1e-3, inputs.rho_ohm_m);
+    withinRel(found, expected.round_wire_1mm_Rac_ohm_per_m_approx ?? NaN, tolerance.rel);
+  });
+
+  it('skin-60: at mains frequency the current fills the wire, and it is refused', () => {
+    expect(errorOf(() => wireOhmsPerMetre(60, 1e-3)).input).toBe('diameterMetres');
   });
 
   it('flux-1: peak flux density, tesla for gauss', () => {

@@ -76,6 +76,30 @@ export function skinDepthMetres(frequencyHertz: number, resistivityOhmMetres = C
   return Math.sqrt(resistivity / (Math.PI * hertz(frequencyHertz, 'frequencyHertz') * VACUUM_PERMEABILITY));
 }
 
+/**
+ * Resistance of a round wire at radio frequency.
+ *
+ * Taken for a current in one skin depth under the surface; the true one is about a depth over a diameter higher, and
+ * turns that lie close raise it more.
+ *
+ * @param diameterMetres - bare, ten skin depths at least: thinner, the current is no longer all at the surface.
+ * @param resistivityOhmMetres - copper's where left out.
+ * @returns ohms for each metre.
+ * @throws OutOfDomainError naming the input.
+ * @example wireOhmsPerMetre(7e6, 1e-3) //=> 0.219715
+ * @see ρ/(π·d·δ), textbook
+ */
+export function wireOhmsPerMetre(
+  frequencyHertz: number,
+  diameterMetres: number,
+  resistivityOhmMetres = COPPER_OHM_METRES,
+): number {
+  const depth = skinDepthMetres(frequencyHertz, resistivityOhmMetres);
+  const domain = { input: 'diameterMetres', label: 'Wire, for this frequency', unit: 'm', atMost: 1 };
+  requireWithin({ ...domain, atLeast: Number((10 * depth).toPrecision(6)) }, diameterMetres);
+  return resistivityOhmMetres / (Math.PI * diameterMetres * depth);
+}
+
 /** A winding under voltage. */
 export interface FluxInput {
   voltsRms: number;

@@ -1,8 +1,10 @@
 import fc from 'fast-check';
+import table from '../../reference/mixers.json';
 import { between } from '../../testing/between';
 import { within } from '../../testing/within';
 import {
   DIODE_RING,
+  DIODE_RING_RANGES,
   dBm,
   judgeProducts,
   type JudgeInput,
@@ -57,6 +59,23 @@ describe('levels of products against class facts', () => {
     expect(DIODE_RING.conversionLoss.db).toBeLessThanOrEqual(7);
     expect(DIODE_RING.loLeakage.db).toBeGreaterThanOrEqual(25);
     expect(DIODE_RING.loLeakage.db).toBeLessThanOrEqual(50);
+  });
+
+  it('fact-04, fact-05: its class compresses 4 to 7 dB under the drive and intercepts 5 to 10 dB over it', () => {
+    const row = (id: string) => table.class_facts.find((known) => known.id === id)?.expected;
+    const { compressionBelowDriveDb, interceptAboveDriveDb } = DIODE_RING_RANGES;
+    const [compression, intercept] = [row('fact-04'), row('fact-05')];
+    expect(compressionBelowDriveDb).toEqual({
+      least: compression?.below_LO_dB_min,
+      greatest: compression?.below_LO_dB_max,
+    });
+    expect(interceptAboveDriveDb).toEqual({
+      least: intercept?.above_LO_dB_min,
+      greatest: intercept?.above_LO_dB_max,
+    });
+    const assumed = DIODE_RING.inputInterceptDbm - levels.loDbm;
+    expect(assumed).toBeGreaterThanOrEqual(interceptAboveDriveDb.least);
+    expect(assumed).toBeLessThanOrEqual(interceptAboveDriveDb.greatest);
   });
 
   it('fact-06: oscillator leakage against the wanted product', () => {

@@ -88,6 +88,15 @@ describe('conversions against the published table', () => {
     );
   });
 
+  it('inv-8: two conversions that each turn the sideband leave it as it was', () => {
+    const first = convert(9.3e6, 5.5e6, 'difference');
+    const second = convert(20e6, first.hertz, 'difference');
+    expect([first.sideband, second.sideband]).toEqual(['inverted', 'inverted']);
+    const moved = convert(20e6, convert(9.3e6, 5.501e6, 'difference').hertz, 'difference');
+    const isInverted = moved.hertz < second.hertz;
+    expect(isInverted).toBe(table.inversion.find(({ id }) => id === 'inv-8')?.expected.spectrum_inverted);
+  });
+
   it.each(table.images)('$id: image and half-IF of $inputs.RF_MHz MHz, $inputs.injection side', (row) => {
     const { inputs, expected } = row;
     const found = receiveImage({

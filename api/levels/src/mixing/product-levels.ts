@@ -42,6 +42,15 @@ export const DIODE_RING: MixerFigures = {
   higherOrderPlusMinusDb: 10,
 };
 
+/**
+ * Where a diode ring compresses and intercepts, as decibels from its drive: common practice for the class, the lower
+ * ends from memory. A measured ring may lie outside by two or three.
+ */
+export const DIODE_RING_RANGES = {
+  compressionBelowDriveDb: { least: 4, greatest: 7 },
+  interceptAboveDriveDb: { least: 5, greatest: 10 },
+} as const;
+
 /** Drive and signal of a mixer. */
 export interface MixerLevels {
   loDbm: number;

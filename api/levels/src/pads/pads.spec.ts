@@ -262,6 +262,15 @@ describe('a pad to be built', () => {
     expect((two?.ratings[0]?.watts ?? NaN) / (two?.ratings[1]?.watts ?? NaN)).toBeCloseTo(large / small, 9);
   });
 
+  it('through-01: a load of 6 dB return loss looks like 18 dB through a 6 dB pad', () => {
+    const row = padTable.use_checks.find(({ id }) => id === 'through-01');
+    const { pad_dB: pad = NaN, load_return_loss_dB: there = NaN } = row?.inputs ?? {};
+    const reflection = 10 ** (-there / 20);
+    const ends = { sourceOhms: 50, loadOhms: (50 * (1 + reflection)) / (1 - reflection) };
+    const { input } = padPerformance(padValues({ kind: 'pi', ...matched(pad) }), ends);
+    within(input.returnLossDb, row?.expected.input_return_loss_dB ?? NaN, 0.01);
+  });
+
   it('through-03: 100 W into 30 dB leaves 99.9 W in the pad, more than one resistor stands', () => {
     const { resistors } = designPad({ ...wanted, lossDb: 30, inputWatts: 100, atMostParts: 2, enoughRel: 0 });
     within(

@@ -1,9 +1,12 @@
+import attenuators from '../../reference/attenuators.json';
 import cascade from '../../reference/cascade.json';
 import mixers from '../../reference/mixers.json';
 import { errorOf } from '../../testing/error-of';
 import { within, withinRel } from '../../testing/within';
 import {
   analyzerReading,
+  convert,
+  dBm,
   diodeProbeReading,
   type DiodeProbeInput,
   dummyLoadTapReading,
@@ -14,9 +17,11 @@ import {
   oscilloscopeReading,
   OutOfDomainError,
   probeLoading,
+  riseTimeReading,
   timeBaseReading,
   twoToneEnvelopeReading,
   twoToneOf,
+  wattsFromDbm,
 } from '../index';
 
 const RECTANGULAR = Math.sqrt(3);
@@ -98,6 +103,33 @@ describe('bench readings against published ones', () => {
     const relative = (2 * Math.hypot(0.1 / seen.divisions, 0.02)) / RECTANGULAR;
     withinRel(found.expandedUncertainty, found.value * relative, 1e-9);
     expect([found.unit, found.calculation]).toEqual(['Hz', 'time-base/1']);
+  });
+
+  it('bench-01, bench-02: both products of a mixer, and ten microwatts', () => {
+    const products = [convert(9.3e6, 5.5e6, 'difference'), convert(9.3e6, 5.5e6, 'sum')];
+    products.forEach(({ hertz }, index) =>
+      within(hertz / 1e6, row('bench-01')?.products_MHz?.[index] ?? NaN, 1e-9),
+    );
+    withinRel(wattsFromDbm(dBm(-20)), row('bench-02')?.W ?? NaN, 1e-6);
+  });
+
+  it('through-02: −12.4 dBm behind 10 and 20 dB is +17.6 dBm at the source', () => {
+    const through = attenuators.use_checks.find(({ id }) => id === 'through-02');
+    const pads = (through?.inputs.pads_dB ?? []).reduce((sum, pad) => sum + pad, 0);
+    const at = { referenceLevelDbm: 0, dbPerDivision: 10, ...screen, padsInLineDb: pads };
+    const divisionsDown = -(through?.inputs.analyzer_dBm ?? NaN) / 10;
+    within(analyzerReading({ ...at, divisionsDown }).value, through?.expected.source_dBm ?? NaN, 1e-9);
+  });
+
+  it('bench-10: the rise of an edge without the oscilloscope’s own', () => {
+    const input = { divisions: 6, secondsPerDivision: 1e-9, readToDivisions: 0.1, bandwidthHertz: 100e6 };
+    const found = riseTimeReading({ ...input, timeBaseToleranceRel: 0.02, riseToleranceRel: 0.1 });
+    withinRel(found.instrumentSeconds, row('bench-10')?.scope_rise_s ?? NaN, 1e-3);
+    withinRel(found.value, 1e9 * (row('bench-10')?.signal_rise_s ?? NaN), 1e-3);
+    // By hand, each limit by its derivative: 0.1 and 0.02 × 6 ns times 6/4.873, 0.1 × 3.5 ns times 3.5/4.873.
+    const limits = [0.1 * (6 / 4.8734), 0.12 * (6 / 4.8734), 0.35 * (3.5 / 4.8734)];
+    found.components.forEach(({ limit }, index) => withinRel(limit, limits[index] ?? NaN, 1e-3));
+    expect(errorOf(() => riseTimeReading({ ...input, divisions: 3.6 })).input).toBe('divisions');
   });
 
   it('bench-06, bench-08: a harmonic, and an oscilloscope behind ×10', () => {

@@ -9,7 +9,7 @@ export interface ExposureRow {
   toMegahertz: number;
   /** mW/cm² = factor · f^power, f in MHz. */
   factor: number;
-  power: -2 | 0 | 1;
+  power: number;
 }
 
 /** Limits of a rule, and over how long they are averaged. */
@@ -43,6 +43,36 @@ export const US_EXPOSURE: ExposureLimits = {
       { fromMegahertz: 30, toMegahertz: 300, factor: 0.2, power: 0 },
       { fromMegahertz: 300, toMegahertz: 1500, factor: 1 / 1500, power: 1 },
       { fromMegahertz: 1500, toMegahertz: 100_000, factor: 1, power: 0 },
+    ],
+  },
+};
+
+/**
+ * Reference levels of the International Commission on Non-Ionizing Radiation Protection for the whole body, as power
+ * density: workers, and the general public.
+ *
+ * Below 30 MHz the guidelines state fields: the density is that of a plane wave with the stricter of the two, and near
+ * an antenna each field counts for itself. National limits decide, and may be older or stricter.
+ */
+export const ICNIRP_EXPOSURE: ExposureLimits = {
+  title: 'ICNIRP guidelines of 2020, reference levels for the whole body',
+  source: 'Health Physics 118 (2020) 483, Table 5, from memory',
+  averagingMinutes: { controlled: 30, uncontrolled: 30 },
+  rows: {
+    controlled: [
+      // 660/f^0.7 V/m over 377 ohm.
+      { fromMegahertz: 0.1, toMegahertz: 30, factor: 660 ** 2 / 3770, power: -1.4 },
+      { fromMegahertz: 30, toMegahertz: 400, factor: 1, power: 0 },
+      { fromMegahertz: 400, toMegahertz: 2000, factor: 1 / 400, power: 1 },
+      { fromMegahertz: 2000, toMegahertz: 300_000, factor: 5, power: 0 },
+    ],
+    uncontrolled: [
+      // 300/f^0.7 V/m; from 29.6 MHz on 2.2/f A/m is the stricter.
+      { fromMegahertz: 0.1, toMegahertz: 29.6, factor: 300 ** 2 / 3770, power: -1.4 },
+      { fromMegahertz: 29.6, toMegahertz: 30, factor: 37.7 * 2.2 ** 2, power: -2 },
+      { fromMegahertz: 30, toMegahertz: 400, factor: 0.2, power: 0 },
+      { fromMegahertz: 400, toMegahertz: 2000, factor: 1 / 2000, power: 1 },
+      { fromMegahertz: 2000, toMegahertz: 300_000, factor: 1, power: 0 },
     ],
   },
 };

@@ -53,6 +53,9 @@ export class InstrumentChoiceDto {
   reason: string | null;
   /** Last day of its calibration. */
   calibrationDueOn: string | null;
-  /** ± limit of its level readings, dB. */
-  amplitudeAccuracyDb: number | null;
+  /** The level that harms its input, dBm. */
+  damageLevelDbm: number | null;
+  /** What its sheet says and readings are worked out with, by the name the levels package has for it. */
+  @ApiProperty({ type: 'object', additionalProperties: { type: 'number' } })
+  figures: Record<string, number>;
 }

@@ -9,3 +9,4 @@ export { WhatHangsTogether1700000000008 } from './0008-what-hangs-together';
 export { MoneyHoldsByItself1700000000009 } from './0009-money-holds-by-itself';
 export { WorksheetsRules1700000000010 } from './0010-worksheets-rules';
 export { OpeningHours1700000000011 } from './0011-opening-hours';
+export { InstrumentFigures1700000000012 } from './0012-instrument-figures';

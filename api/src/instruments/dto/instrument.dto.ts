@@ -1,6 +1,7 @@
+import type { InstrumentFigures } from '@ferrite-row/levels';
 import { ApiProperty } from '@nestjs/swagger';
 import type { Clearance } from '../clearance.entity';
-import { CONDITIONS, type Condition, type Instrument } from '../instrument.entity';
+import { CONDITIONS, figuresOf, type Condition, type Instrument } from '../instrument.entity';
 import { REASON_CODES, type UseReason } from '../instruments.rules';
 
 export class InstrumentKindDto {
@@ -51,6 +52,9 @@ export class InstrumentDto {
   /** ± limit of its level readings, dB. */
   @ApiProperty({ type: Number, nullable: true })
   amplitudeAccuracyDb: number | null;
+  /** All that its sheet says and readings are worked out with, by the name the levels package has for it. */
+  @ApiProperty({ type: 'object', additionalProperties: { type: 'number' } })
+  figures: InstrumentFigures;
   /** Your clearance on its kind, lapsed ones too; null when you have none. */
   @ApiProperty({ type: MyClearanceDto, nullable: true })
   myClearance: MyClearanceDto | null;
@@ -90,6 +94,7 @@ export function instrumentDto(
     calibrationDueOn,
     damageLevelDbm,
     amplitudeAccuracyDb,
+    figures: figuresOf(instrument),
     myClearance: clearance ? { grantedOn: clearance.grantedOn, until: clearance.until } : null,
     mayBook: reasons.length === 0,
     reasons,

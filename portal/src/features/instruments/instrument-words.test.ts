@@ -14,6 +14,7 @@ const instrument = (overrides: Partial<Instrument> = {}): Instrument => ({
   calibrationDueOn: '2026-12-09',
   damageLevelDbm: 20,
   amplitudeAccuracyDb: 0.8,
+  figures: { amplitudeAccuracyDb: 0.8 },
   myClearance: { grantedOn: '2026-01-01', until: '2027-01-01' },
   mayBook: true,
   reasons: [],

@@ -20,6 +20,8 @@ export interface QuantityFieldProps {
   /** Outranks what the field itself finds unclear. */
   error?: string;
   hint?: ReactNode;
+  /** Where a value came from that nobody typed: 'from the plan'; stands after what was understood. */
+  source?: string;
   /** On a phone, whose decimal keyboard has no letters, the unit is chosen among these: `['mV/div', 'V/div']`. */
   phoneUnits?: readonly QuantityUnit[];
   autoFocus?: boolean;
@@ -41,6 +43,7 @@ export function QuantityField({
   onBlur,
   error,
   hint,
+  source,
   phoneUnits,
   ...rest
 }: QuantityFieldProps) {
@@ -63,7 +66,7 @@ export function QuantityField({
         onBlur?.();
       }}
       error={error ?? unclear}
-      hint={readAs(typed) ?? hint}
+      hint={[readAs(typed), source].filter(Boolean).join(', ') || hint}
       inputMode={isPhone ? 'decimal' : 'text'}
       autoComplete="off"
       end={

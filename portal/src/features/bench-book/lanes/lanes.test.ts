@@ -20,6 +20,7 @@ const instrument = (overrides: Partial<Instrument> = {}): Instrument => ({
   calibrationDueOn: '2026-12-09',
   damageLevelDbm: 20,
   amplitudeAccuracyDb: 0.8,
+  figures: { amplitudeAccuracyDb: 0.8 },
   myClearance: null,
   mayBook: true,
   reasons: [],

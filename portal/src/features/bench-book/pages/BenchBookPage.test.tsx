@@ -25,6 +25,7 @@ const analyzer = (overrides: Partial<Schemas['InstrumentDto']> = {}): Schemas['I
   calibrationDueOn: '2026-12-09',
   damageLevelDbm: 20,
   amplitudeAccuracyDb: 0.8,
+  figures: { amplitudeAccuracyDb: 0.8 },
   myClearance: { grantedOn: '2026-01-01', until: null },
   mayBook: true,
   reasons: [],

@@ -8,6 +8,7 @@ export type BuildStage = components['schemas']['BuildStageDto'];
 export type BuildCheck = components['schemas']['BuildCheckDto'];
 export type Reading = components['schemas']['ReadingDto'];
 export type Photo = components['schemas']['PhotoDto'];
+export type InstrumentChoice = components['schemas']['InstrumentChoiceDto'];
 export type Caution = BuildStage['cautions'][number];
 type KeepReading = components['schemas']['KeepReadingDto'];
 

@@ -6,7 +6,10 @@ import { Link as RouterLink } from 'react-router-dom';
 import type { BuildCheck, BuildStage } from '../api/builds';
 import { usePhone } from '../../../shared-ui/use-phone';
 import type { ReadingFormState } from '../logic/use-reading-form';
+import { gainAddress } from '../logic/bench-address';
+import { sourcesOf } from '../logic/stage';
 import { windowText } from '../logic/words';
+import { BenchLink } from './bench-link';
 import { AllCautions, GraveCautions } from './caution-ticks';
 import { PhotoCard } from './photo-card';
 import { ReadingCard } from './reading-card';
@@ -97,6 +100,7 @@ function Body({ buildId, stage, check, form, testPoint, onDone }: OpenCheckProps
         <TickCard buildId={buildId} check={check} onDone={onDone} />
       )}
       {check.kind === 'measure' && <Tries check={check} />}
+      {check.kind === 'measure' && <BenchLink to={gainAddress(check, sourcesOf(check, stage))} />}
     </>
   );
 }

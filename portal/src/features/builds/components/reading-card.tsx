@@ -7,6 +7,7 @@ import type { BuildStage } from '../api/builds';
 import { useStill } from '../logic/use-still';
 import type { ReadingFormState } from '../logic/use-reading-form';
 import { readingSentence } from '../logic/words';
+import { BenchLink } from './bench-link';
 import { CautionTicks, MildCautions } from './caution-ticks';
 import { KeepButtons } from './keep-buttons';
 import { LiveResult } from './live-result';
@@ -80,6 +81,7 @@ export function ReadingCard({ form, stage, testPoint }: ReadingCardProps) {
           <ProblemAlert title="Not sent yet. Kept on this device." error={form.problem} onRetry={form.keep} />
         </Box>
       )}
+      <BenchLink to={form.benchPath} />
       {reading && (
         <UncertaintyList
           components={reading.components}

@@ -4,9 +4,11 @@ import { QuantityField } from '../../../shared-ui/fields/quantity-field';
 import { SelectField } from '../../../shared-ui/fields/select-field';
 import { ToggleField } from '../../../shared-ui/fields/toggle-field';
 import type { ReadingFormState } from '../logic/use-reading-form';
+import { sheetWords } from '../logic/sheet-words';
 
 const PHONE_UNITS: Partial<Record<QuantityUnit, readonly QuantityUnit[]>> = {
   'V/div': ['mV/div', 'V/div'],
+  's/div': ['ns/div', 'µs/div', 'ms/div'],
   ohm: ['ohm', 'kohm'],
   V: ['V', 'mV'],
   A: ['A', 'mA'],
@@ -38,6 +40,7 @@ export function ReadingFields({ form, testPoint }: ReadingFieldsProps) {
           value={form.instrumentId}
           onChange={form.setInstrument}
           error={form.errorOf('instrumentId')}
+          hint={form.instrument && sheetWords(form.instrument, form.check)}
           options={form.instruments.map(({ id, tag, reason }) => ({
             value: id,
             label: tag,
@@ -61,6 +64,7 @@ function Field({ field, form, testPoint }: ReadingFieldsProps & { field: EntryFi
         options={choices.map((choice) => ({ value: String(choice), label: `×${choice}` }))}
         onChange={(next) => form.setEntry(name, next)}
         error={form.errorOf(name)}
+        hint={form.sourceOf(name)}
       />
     );
   return (
@@ -72,6 +76,7 @@ function Field({ field, form, testPoint }: ReadingFieldsProps & { field: EntryFi
       onBlur={() => form.leave(name)}
       error={form.errorOf(name)}
       phoneUnits={PHONE_UNITS[unit]}
+      source={form.sourceOf(name)}
     />
   );
 }

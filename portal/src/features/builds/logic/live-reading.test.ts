@@ -1,19 +1,14 @@
 import { describe, expect, it } from 'vitest';
 import { aCheck } from '../testing/build.fixture';
-import { liveGain, liveReading, startEntry } from './live-reading';
+import { liveGain, liveReading } from './live-reading';
+import { prefillOf } from './prefill';
 import { readingSentence, readingWords, windowText } from './words';
 
 const scope = aCheck({ defaults: { probeRatio: 10, loadOhms: 50, readToDivisions: 0.1 } });
-const typed = { ...startEntry(scope), voltsPerDivision: '20m', divisionsPeakToPeak: '3.3' };
+const start = prefillOf(scope, []).entry;
+const typed = { ...start, voltsPerDivision: '20m', divisionsPeakToPeak: '3.3' };
 
 describe('the reading while typing', () => {
-  it('starts from the plan’s own suggestions', () => {
-    expect(startEntry(scope)).toEqual({
-      ...{ voltsPerDivision: '', divisionsPeakToPeak: '', readToDivisions: '0.1' },
-      ...{ probeRatio: '10', loadOhms: '50' },
-    });
-  });
-
   it('comes to level, uncertainty and verdict, and says what would settle it', () => {
     // 20 mV/div × 3.3 div × 10 = 0.66 V peak to peak in 50 ohm: 1.089 mW, +0.37 dBm.
     const live = liveReading(scope, typed);
@@ -25,7 +20,7 @@ describe('the reading while typing', () => {
   });
 
   it('is incomplete, field by field, until every field can be read', () => {
-    expect(liveReading(scope, startEntry(scope))).toMatchObject({ state: 'incomplete' });
+    expect(liveReading(scope, start)).toMatchObject({ state: 'incomplete' });
     const tooHigh = liveReading(scope, { ...typed, divisionsPeakToPeak: '33' });
     expect(tooHigh).toMatchObject({
       problems: { divisionsPeakToPeak: expect.stringContaining('3.3') as string },
@@ -41,7 +36,10 @@ describe('the reading while typing', () => {
       readToDivisions: '0.02',
       padsInLineDb: '0',
     };
-    const [good, plain] = [liveReading(analyzer, entry, 0.3), liveReading(analyzer, entry, null)];
+    const [good, plain] = [
+      liveReading(analyzer, entry, { amplitudeAccuracyDb: 0.3 }),
+      liveReading(analyzer, entry),
+    ];
     if (good.state !== 'read' || plain.state !== 'read') throw new Error('both can be read');
     expect(good.reading.expandedUncertainty).toBeLessThan(plain.reading.expandedUncertainty);
   });
@@ -60,6 +58,13 @@ describe('the reading while typing', () => {
 });
 
 describe('words', () => {
+  it('tell a frequency read by eye in megahertz, one from a counter to the hertz', () => {
+    const seen = { value: 8.87e6, unit: 'Hz', uncertaintyUnit: 'Hz', expandedUncertainty: 340_000 };
+    expect(readingSentence(seen)).toBe('8.87 MHz ± 0.34 MHz');
+    const counted = { ...seen, value: 8_868_512, expandedUncertainty: 9 };
+    expect(readingSentence(counted)).toBe('8.868512 MHz ± 9 Hz');
+  });
+
   const reading = { value: -19.42, unit: 'dBm', uncertaintyUnit: 'dB', expandedUncertainty: 0.473 };
 
   it('show as many figures as the uncertainty deserves, signed only where the trade signs', () => {

@@ -1,4 +1,5 @@
 import {
+  assumptionsWith,
   entryFields,
   ENTRY_METHODS,
   gainReading,
@@ -12,6 +13,7 @@ import {
   verdictOf,
   type EntryField,
   type EntryMethod,
+  type InstrumentFigures,
   type LevelReading,
   type TighterScale,
   type Verdict,
@@ -22,22 +24,12 @@ import type { BuildCheck } from '../api/builds';
 export type Entry = Record<string, string>;
 type Asked = Pick<BuildCheck, 'method' | 'unit' | 'windowLow' | 'windowHigh' | 'defaults'>;
 
-const entryMethod = ({ method }: Pick<BuildCheck, 'method'>): EntryMethod | undefined =>
+export const entryMethod = ({ method }: Pick<BuildCheck, 'method'>): EntryMethod | undefined =>
   ENTRY_METHODS.find((known) => known === method);
 
 export function fieldsOf(check: Pick<BuildCheck, 'method' | 'unit'>): readonly EntryField[] {
   const method = entryMethod(check);
   return method ? entryFields(method, meterUnitOf(check.unit ?? '')) : [];
-}
-
-/** What the form starts with: the plan's own suggestions, as if they had been typed. */
-export function startEntry(check: Asked): Entry {
-  return Object.fromEntries(
-    fieldsOf(check).map(({ name, choices }) => {
-      const value = check.defaults[name] ?? choices?.at(-1);
-      return [name, value === undefined ? '' : String(value)];
-    }),
-  );
 }
 
 const windowOf = ({ windowLow, windowHigh }: Asked): VerdictWindow => ({
@@ -58,16 +50,15 @@ export type Live =
     };
 
 /**
- * @param amplitudeAccuracyDb - of the instrument chosen, when it states one.
+ * @param figures - of the instrument chosen, as far as it states any.
  */
-export function liveReading(check: Asked, entry: Entry, amplitudeAccuracyDb?: number | null): Live {
+export function liveReading(check: Asked, entry: Entry, figures: InstrumentFigures = {}): Live {
   const method = entryMethod(check);
   if (!method) return { state: 'incomplete', problems: {} };
   const unit = meterUnitOf(check.unit ?? '');
   const { inputs, problems } = readEntry(method, entry, unit);
   if (problems.length > 0) return { state: 'incomplete', problems: byField(problems) };
-  const assumptions: Record<string, number> = { ...check.defaults };
-  if (typeof amplitudeAccuracyDb === 'number') assumptions.amplitudeAccuracyDb = amplitudeAccuracyDb;
+  const assumptions = assumptionsWith(method, check.unit ?? '', check.defaults, figures);
   try {
     const reading = readingFromInputs(method, inputs, assumptions, unit);
     const window = windowOf(check);

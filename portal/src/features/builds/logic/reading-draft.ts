@@ -5,6 +5,7 @@ import { isInHand } from './stage';
 
 /** What is typed for one check and not sent yet. */
 export interface ReadingDraft {
+  /** Only what was typed: it outranks whatever the form fills in by itself. */
   entry: Entry;
   /** Empty: whatever is offered first. */
   instrumentId: string;

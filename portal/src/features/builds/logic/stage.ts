@@ -4,6 +4,15 @@ import type { Build, BuildCheck, BuildStage, Reading } from '../api/builds';
 export const readingInForce = ({ readings }: Pick<BuildCheck, 'readings'>): Reading | undefined =>
   readings.at(-1);
 
+/** The readings in force that a check is worked out from, in its order. */
+export const sourcesOf = (
+  { fromCheckIds }: Pick<BuildCheck, 'fromCheckIds'>,
+  { checks }: Pick<BuildStage, 'checks'>,
+): (Reading | undefined)[] =>
+  fromCheckIds.map((sourceId) =>
+    readingInForce(checks.find(({ id }) => id === sourceId) ?? { readings: [] }),
+  );
+
 const DERIVED = ['gain', 'carried'];
 
 /** Gains and levels carried over need no hand; nor does what a mentor has to see. */

@@ -5,6 +5,7 @@ import type { LevelBeingEntered } from '../../../shared-ui/level-diagram/level-p
 import { instrumentsQuery, type Build } from '../api/builds';
 import { chosenOf } from './instrument-wait';
 import { liveReading } from './live-reading';
+import { prefillOf } from './prefill';
 import { lastTypedLevel } from './reading-draft';
 
 interface LevelOnDevice {
@@ -25,7 +26,8 @@ export function useLevelOnDevice(build: Build): LevelOnDevice | undefined {
   if (!typed) return undefined;
   const { stage, check, draft } = typed;
   const instrument = chosenOf(offered.data ?? [], draft.value.instrumentId);
-  const live = liveReading(check, draft.value.entry, instrument?.amplitudeAccuracyDb);
+  const entry = { ...prefillOf(check, stage.checks, instrument).entry, ...draft.value.entry };
+  const live = liveReading(check, entry, instrument?.figures);
   const at = { stageId: stage.id, checkId: check.id };
   if (live.state !== 'read' || check.levelPointId === null) return { entered: undefined, ...at };
   const { value: levelDbm, expandedUncertainty: expandedUncertaintyDb } = live.reading;

@@ -4,10 +4,18 @@ import { carryOut } from '../../../api-client/carry-out';
 import { ProblemError } from '../../../api-client/problem-error';
 import { useDraft } from '../../../shared-ui/use-draft';
 import { useToast } from '../../../shared-ui/toasts';
-import { instrumentsQuery, useKeepReading, type BuildCheck, type BuildStage } from '../api/builds';
+import {
+  instrumentsQuery,
+  useKeepReading,
+  type BuildCheck,
+  type BuildStage,
+  type InstrumentChoice,
+} from '../api/builds';
+import { benchAddress } from './bench-address';
 import { gravesOf } from './cautions';
 import { chosenOf, instrumentWait } from './instrument-wait';
-import { fieldsOf, liveReading, startEntry, type Live } from './live-reading';
+import { fieldsOf, liveReading, type Entry, type Live } from './live-reading';
+import { prefillOf } from './prefill';
 import { readingPlace, type ReadingDraft } from './reading-draft';
 import { readingSentence } from './words';
 
@@ -46,27 +54,40 @@ function useInstruments(buildId: string, check: BuildCheck, chosenId: string) {
   };
 }
 
+/** What stands in the fields: what was typed over what the form fills in by itself. */
+function useFilledIn(
+  check: BuildCheck,
+  { checks }: Pick<BuildStage, 'checks'>,
+  instrument: InstrumentChoice | undefined,
+  typed: Entry,
+) {
+  const prefill = useMemo(() => prefillOf(check, checks, instrument), [check, checks, instrument]);
+  const entry = useMemo(() => ({ ...prefill.entry, ...typed }), [prefill.entry, typed]);
+  return { entry, sources: prefill.sources };
+}
+
 /** The form of one measured check: what is typed, what it comes to, and keeping it. */
 export function useReadingForm(
   buildId: string,
-  stage: Pick<BuildStage, 'cautions'>,
+  stage: Pick<BuildStage, 'cautions' | 'checks'>,
   check: BuildCheck,
   onKept: (verdict: string) => void,
 ) {
   const fields = fieldsOf(check);
   const draft = useDraft<ReadingDraft>(readingPlace(buildId, check.id), {
-    entry: startEntry(check),
+    entry: {},
     instrumentId: '',
   });
   const say = useToast();
   const keeping = useKeepReading(buildId, check.id);
   const [left, setLeft] = useState<readonly string[]>([]);
   const [ticks, setTicks] = useState<readonly string[]>([]);
-  const { entry } = draft.value;
+  const typed = draft.value.entry;
   const { instrument, waitsFor, ...instruments } = useInstruments(buildId, check, draft.value.instrumentId);
+  const { entry, sources } = useFilledIn(check, stage, instrument, typed);
   const live = useMemo(
-    () => liveReading(check, entry, instrument?.amplitudeAccuracyDb),
-    [check, entry, instrument?.amplitudeAccuracyDb],
+    () => liveReading(check, entry, instrument?.figures),
+    [check, entry, instrument?.figures],
   );
   const [lastGood, setLastGood] = useState<Live>();
   if (live.state === 'read' && live !== lastGood) setLastGood(live);
@@ -86,7 +107,7 @@ export function useReadingForm(
     keeping.reset();
     // Half typed again: its error waits until the field is left again.
     setLeft((before) => before.filter((other) => other !== name));
-    draft.setValue({ ...draft.value, entry: { ...entry, [name]: text } });
+    draft.setValue({ ...draft.value, entry: { ...typed, [name]: text } });
   };
   const keep = () => {
     if (keeping.isPending) return;
@@ -110,7 +131,12 @@ export function useReadingForm(
     leave: (name: string) => setLeft((before) => [...new Set([...before, name])]),
     setTick: (kind: string, isOn: boolean) =>
       setTicks((before) => (isOn ? [...before, kind] : before.filter((other) => other !== kind))),
+    /** Where a value nobody typed came from: 'from FR-021'. */
+    sourceOf: (name: string) => (typed[name] === undefined ? sources[name] : undefined),
+    /** The same on the level bench. */
+    benchPath: benchAddress(check, entry, instrument?.figures),
     ...instruments,
+    instrument,
     waitsFor,
     instrumentId: instrument?.id ?? '',
     setInstrument: (instrumentId: string) => draft.setValue({ ...draft.value, instrumentId }),
@@ -120,7 +146,7 @@ export function useReadingForm(
     keptAt: draft.keptAt,
     /** Types the setting that would settle it, and leaves the height to be read anew. */
     takeAgainAt: (voltsPerDivision: string) => {
-      const again = { ...entry, voltsPerDivision, divisionsPeakToPeak: '' };
+      const again = { ...typed, voltsPerDivision, divisionsPeakToPeak: '' };
       draft.setValue({ ...draft.value, entry: again });
       setLeft([]);
     },

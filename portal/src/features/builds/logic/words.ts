@@ -3,6 +3,8 @@ import { fixed, signed } from '../../../lib/text';
 import type { BuildCheck, Reading } from '../api/builds';
 
 const HERTZ_PER_MEGAHERTZ = 1e6;
+/** By eye along a screen, not by a counter: to be told in megahertz. */
+const COARSE_HERTZ = 10_000;
 
 type Measured = Pick<Reading, 'value' | 'unit' | 'uncertaintyUnit' | 'expandedUncertainty'>;
 type Asked = Pick<BuildCheck, 'windowLow' | 'windowHigh' | 'unit'>;
@@ -24,6 +26,15 @@ const numberText = (value: number, unit: string, decimals: number): string =>
  */
 export function readingWords(reading: Measured, figures: 1 | 2): ReadingWords {
   const { value, unit, expandedUncertainty } = reading;
+  if (unit === 'Hz' && expandedUncertainty >= COARSE_HERTZ) {
+    const megahertz = expandedUncertainty / HERTZ_PER_MEGAHERTZ;
+    const decimals = decimalsFor(megahertz, figures);
+    return {
+      value: fixed(value / HERTZ_PER_MEGAHERTZ, decimals),
+      unit: 'MHz',
+      plusMinus: `± ${fixed(megahertz, decimals)} MHz`,
+    };
+  }
   if (unit === 'Hz')
     return {
       value: fixed(value / HERTZ_PER_MEGAHERTZ, 6),

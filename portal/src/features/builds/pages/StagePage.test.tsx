@@ -18,6 +18,11 @@ const open = (stage: BuildStage = aStage(), build: Build = aBuild(stage)) => {
   });
 };
 const field = (label: string) => screen.findByRole('textbox', { name: label });
+/** Over what the form filled in by itself. */
+const retype = async (user: ReturnType<typeof open>['user'], label: string, text: string) => {
+  await user.clear(await field(label));
+  await user.type(await field(label), text);
+};
 
 describe('the stage page', () => {
   it('shows level, uncertainty and verdict while typing, and keeps the reading as typed', async () => {
@@ -31,7 +36,7 @@ describe('the stage page', () => {
         });
       }),
     );
-    await user.type(await field('Volts per division'), '10m');
+    await retype(user, 'Volts per division', '10m');
     await user.type(await field('Divisions, peak to peak'), '6.7');
     expect(screen.getByText('+0.50')).toBeVisible();
     expect(screen.getByText('± 0.39 dB at 95 %')).toBeVisible();
@@ -51,7 +56,7 @@ describe('the stage page', () => {
 
   it('offers a better scale when it is too close to call, and says why', async () => {
     const { user } = open();
-    await user.type(await field('Volts per division'), '20m');
+    await retype(user, 'Volts per division', '20m');
     await user.type(await field('Divisions, peak to peak'), '3.3');
     expect(screen.getByText(/The low end of your reading is −0.10 dBm/)).toBeVisible();
     await user.click(screen.getByRole('button', { name: 'Take it again at 10 mV/div' }));
@@ -62,7 +67,7 @@ describe('the stage page', () => {
   it('keeps what was typed on this device when sending fails', async () => {
     const { user, unmount } = open();
     server.use(http.post('*/api/builds/build/checks/output/readings', () => HttpResponse.error()));
-    await user.type(await field('Volts per division'), '10m');
+    await retype(user, 'Volts per division', '10m');
     await user.type(await field('Divisions, peak to peak'), '6.7');
     await user.click(screen.getByRole('button', { name: 'Keep this reading' }));
     expect(await screen.findByText(/Not sent yet. Kept on this device./)).toBeVisible();
@@ -83,7 +88,7 @@ describe('the stage page', () => {
         ),
       ),
     );
-    await user.type(await field('Volts per division'), '10m');
+    await retype(user, 'Volts per division', '10m');
     await user.type(await field('Divisions, peak to peak'), '6.7');
     await user.click(screen.getByRole('button', { name: 'Keep this reading' }));
     expect(await screen.findByText('The load is another one.')).toBeVisible();
@@ -92,7 +97,7 @@ describe('the stage page', () => {
 
   it('says on leaving a field what cannot be, not while it is half typed', async () => {
     const { user } = open();
-    await user.type(await field('Volts per division'), '10m');
+    await retype(user, 'Volts per division', '10m');
     await user.type(await field('Divisions, peak to peak'), '33');
     expect(screen.queryByText(/Did you mean 3.3/)).toBeNull();
     await user.tab();
@@ -146,7 +151,7 @@ describe('the stage page', () => {
 
   it('asks for the tick beside a grave caution before it offers Keep', async () => {
     const { user } = open(aStage({ cautions: ['rf power'] }));
-    await user.type(await field('Volts per division'), '10m');
+    await retype(user, 'Volts per division', '10m');
     await user.type(await field('Divisions, peak to peak'), '6.7');
     expect(screen.queryByRole('button', { name: 'Keep this reading' })).toBeNull();
     await user.click(screen.getByRole('checkbox', { name: /The dummy load is connected/ }));
@@ -156,12 +161,12 @@ describe('the stage page', () => {
   describe('where the check names a kind of instrument', () => {
     const scope = (reason: string | null) => ({
       ...{ id: 'scope', tag: 'FR-021', name: 'Two channels', kind: 'Oscilloscope', reason },
-      ...{ calibrationDueOn: '2027-01-31', amplitudeAccuracyDb: null },
+      ...{ calibrationDueOn: '2027-01-31', damageLevelDbm: null, figures: {} },
     });
     const typed = async (answer: () => Response | Promise<Response>) => {
       const { user } = open(aStage({ checks: [aCheck({ instrumentKindId: 'scopes' })] }));
       server.use(http.get('*/api/builds/build/checks/:checkId/instruments', answer));
-      await user.type(await field('Volts per division'), '10m');
+      await retype(user, 'Volts per division', '10m');
       await user.type(await field('Divisions, peak to peak'), '6.7');
       return user;
     };
@@ -189,6 +194,36 @@ describe('the stage page', () => {
       arrive();
       await user.click(await screen.findByRole('button', { name: 'Keep this reading' }));
       await waitFor(() => expect(sent).toMatchObject([{ instrumentId: 'scope' }]));
+    });
+
+    it('says where each value came from, takes the next instrument’s own, and leaves what was typed', async () => {
+      const check = aCheck({
+        method: 'log-detector',
+        instrumentKindId: 'detectors',
+        defaults: { readToVolts: 0.005 },
+      });
+      const line = (tag: string, interceptDbm: number) => ({
+        ...{ ...scope(null), id: tag, tag, damageLevelDbm: 15 },
+        figures: { voltsPerDb: 0.025, interceptDbm, validFromDbm: -70, validToDbm: 5, conformityDb: 0.5 },
+      });
+      const { user } = open(aStage({ checks: [check] }));
+      server.use(
+        http.get('*/api/builds/build/checks/:checkId/instruments', () =>
+          HttpResponse.json([line('FR-041', -85), line('FR-042', -80)]),
+        ),
+      );
+      await waitFor(async () => expect(await field('Intercept')).toHaveValue('-85'));
+      expect(await field('Intercept')).toHaveAccessibleDescription('from FR-041');
+      expect(screen.getByText(/From FR-041: fit of its line ± 0.5 dB, never above \+15 dBm/)).toBeVisible();
+      await retype(user, 'Slope, each decibel', '24m');
+      expect(await field('Slope, each decibel')).toHaveAccessibleDescription('Read as 24 mV');
+      await user.click(screen.getByRole('combobox', { name: 'Instrument' }));
+      await user.click(await screen.findByRole('option', { name: 'FR-042' }));
+      expect(await field('Intercept')).toHaveValue('-80');
+      expect(await field('Slope, each decibel')).toHaveValue('24m');
+      await user.type(await field('Voltage shown'), '1.9');
+      const link = screen.getByRole('link', { name: 'Open in Level bench' });
+      expect(link.getAttribute('href')).toMatch(/way=log-detector.*volts=1\.9/);
     });
 
     it('says that none can be used, instead of keeping a reading without one', async () => {

@@ -1,3 +1,4 @@
+import { figureWords } from '@ferrite-row/levels';
 import Box from '@mui/material/Box';
 import { useQuery } from '@tanstack/react-query';
 import { formatDate } from '../../../lib/club-time-text';
@@ -12,14 +13,17 @@ import { calibrationWords, changeWords, clearanceWords, levelWords } from '../in
 /** What an opened instrument says of itself: what harms it, three facts, why not, and what was done to it. */
 export function InstrumentFacts({ instrument }: { instrument: Instrument }) {
   const detail = useQuery(instrumentQuery(instrument.id));
-  const { damageLevelDbm, amplitudeAccuracyDb, conditionNote, kind, reasons } = instrument;
-  const facts = [
+  const { damageLevelDbm, amplitudeAccuracyDb, conditionNote, kind, reasons, figures } = instrument;
+  const sheet = figureWords(figures)
+    .filter(({ name }) => name !== 'amplitudeAccuracyDb')
+    .map(({ label, words }): Fact => [label, words]);
+  const facts: readonly Fact[] = [
     ['Calibration', calibrationWords(instrument)],
-    ['Good to', amplitudeAccuracyDb === null ? 'not stated' : `± ${fixed(amplitudeAccuracyDb)} dB`],
+    ...(amplitudeAccuracyDb === null && sheet.length > 0 ? [] : [goodTo(amplitudeAccuracyDb)]),
     kind.needsClearance
       ? ['Cleared on it', detail.data ? `${detail.data.clearedPeople} people` : '']
       : ['Clearance', clearanceWords(instrument)],
-  ] as const;
+  ];
   return (
     <>
       {conditionNote && <p>{conditionNote}</p>}
@@ -28,18 +32,7 @@ export function InstrumentFacts({ instrument }: { instrument: Instrument }) {
           A pad first wherever the level may be higher, rated for the whole power.
         </CautionBox>
       )}
-      <Box component="dl" sx={FACTS}>
-        {facts.map(([name, value]) => (
-          <div key={name}>
-            <Box component="dt" sx={{ typography: 'small', color: 'token.ink2' }}>
-              {name}
-            </Box>
-            <Box component="dd" sx={{ m: 0, fontWeight: 700 }}>
-              {value}
-            </Box>
-          </div>
-        ))}
-      </Box>
+      <Facts facts={[...facts, ...sheet]} />
       {reasons.map(({ code, reason, remedy }) => (
         <Box key={code} component="p" sx={{ typography: 'small', color: 'token.brass' }}>
           {reason} {remedy}
@@ -47,6 +40,30 @@ export function InstrumentFacts({ instrument }: { instrument: Instrument }) {
       ))}
       <History instrumentId={instrument.id} />
     </>
+  );
+}
+
+const goodTo = (decibels: number | null): Fact => [
+  'Good to',
+  decibels === null ? 'not stated' : `± ${fixed(decibels)} dB`,
+];
+
+type Fact = readonly [name: string, value: string];
+
+function Facts({ facts }: { facts: readonly Fact[] }) {
+  return (
+    <Box component="dl" sx={FACTS}>
+      {facts.map(([name, value]) => (
+        <div key={name}>
+          <Box component="dt" sx={{ typography: 'small', color: 'token.ink2' }}>
+            {name}
+          </Box>
+          <Box component="dd" sx={{ m: 0, fontWeight: 700 }}>
+            {value}
+          </Box>
+        </div>
+      ))}
+    </Box>
   );
 }
 

@@ -10,6 +10,8 @@ const PERCENTILES = [2.5, 97.5];
 export interface BuildsAsked extends PartQ {
   ladder: Ladder;
   toleranceRel: number;
+  /** Each resonator of each build is trimmed to this frequency. */
+  trimmedAtHertz?: number;
   seed: number;
   /** Where the band of the builds is drawn. */
   plotHertz: Float64Array;

@@ -10,7 +10,7 @@ import { carrierOf, type Carrier } from './carrier';
 import { outside } from './field-names';
 import { axisFor, plotFrequencies, type Axis } from './frequencies';
 import type { FilterValues } from './inputs';
-import { exactLadder, fittedLadder } from './ladder';
+import { exactLadder, fittedLadder, setUp, trimmedAt } from './ladder';
 import { limitsOf, type Limit, type Limits } from './limits';
 
 /** A limit, and what the filter as fitted takes there. */
@@ -64,6 +64,8 @@ function requireSpread({ toleranceRel, seed }: FilterValues): void {
 export function workFilter(values: FilterValues): FilterFigures {
   requireSpread(values);
   const fitted = fittedLadder(exactLadder(values), values);
+  const ladder = setUp(fitted, values);
+  const trimmedAtHertz = trimmedAt(values);
   const { inductorQ, capacitorQ, toleranceRel, seed } = values;
   const q = { inductorQ, capacitorQ };
   const carrier = carrierOf(values);
@@ -72,17 +74,17 @@ export function workFilter(values: FilterValues): FilterFigures {
   const limitHertz = Float64Array.from(against.limits, ({ hertz }) => hertz);
   const axis = axisFor(carrier.lowHertz);
   const plotHertz = plotFrequencies(axis, [...bandHertz, ...limitHertz], closeLook(values));
-  const inBand = ladderResponse(fitted, bandHertz, q);
-  const atLimits = ladderResponse(fitted, limitHertz, q).gainDb;
+  const inBand = ladderResponse(ladder, bandHertz, q);
+  const atLimits = ladderResponse(ladder, limitHertz, q).gainDb;
   const carrierHertz = carrier.lowHertz;
   const worstAt = bandHertz[inBand.gainDb.indexOf(least(inBand.gainDb))] ?? carrierHertz;
-  const shares = powerShares(fitted, worstAt, q);
+  const shares = powerShares(ladder, worstAt, q);
   return {
     values,
     fitted,
     carrier,
     axis,
-    response: ladderResponse(fitted, plotHertz, q),
+    response: ladderResponse(ladder, plotHertz, q),
     against,
     limits: against.limits.map((limit, index) => ({
       ...limit,
@@ -91,6 +93,9 @@ export function workFilter(values: FilterValues): FilterFigures {
     returnLossDb: least(inBand.returnLossDb),
     insertionLossDb: shares.insertionLossDb,
     heatWatts: shares.heat * against.carrierWatts,
-    asked: { ladder: fitted, ...q, toleranceRel, seed, plotHertz, carrierHertz, bandHertz, limitHertz },
+    asked: {
+      ...{ ladder, ...q, toleranceRel, seed, trimmedAtHertz },
+      ...{ plotHertz, carrierHertz, bandHertz, limitHertz },
+    },
   };
 }

@@ -80,6 +80,7 @@ export function FilterInputs({ bench, problems, figures }: FilterInputsProps) {
         <Box sx={CLOSE}>{field(bench.texts.kind === 'band-pass' ? 'resonators' : 'order')}</Box>
         {field('family', true)}
         {DESIGN.map((name) => field(name))}
+        {bench.texts.kind === 'band-pass' && <Wide>{field('trimmed', true)}</Wide>}
       </InputGroup>
       <InputGroup title={bench.texts.kind === 'high-pass' ? 'Against what lies below' : 'Against the rule'}>
         {bench.texts.kind !== 'high-pass' && <Wide>{field('rule')}</Wide>}

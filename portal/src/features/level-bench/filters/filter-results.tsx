@@ -45,7 +45,7 @@ export const FilterResults = memo(function FilterResults({
           <PartsTable
             ladder={figures.fitted}
             toleranceRel={figures.values.toleranceRel}
-            isTrimmed={figures.values.kind === 'band-pass'}
+            trimmed={figures.values.kind === 'band-pass' ? figures.values.trimmed : undefined}
           />
         )}
       </ResponseSection>

@@ -142,6 +142,31 @@ describe('the spread of a filter', () => {
   });
 });
 
+describe('a band-pass whose resonators are trimmed', () => {
+  const bandPass = (trimmed: string) => workFilter(values({ kind: 'band-pass', trimmed }));
+
+  it('is centred in every build, and its line lies in the band of the builds', () => {
+    const figures = bandPass('yes');
+    const built = filterBuilds(figures.asked);
+    const at = figures.response.hertz.findIndex((hertz) => hertz >= 14.175e6);
+    const [low, high] = built.bands.gainDb.map((gain) => gain[at]);
+    expect(high - low).toBeLessThan(1);
+    expect(figures.response.gainDb[at]).toBeGreaterThan(low - 0.1);
+    expect(figures.response.gainDb[at]).toBeLessThan(high + 0.1);
+    const loose = filterBuilds(bandPass('no').asked).bands.gainDb;
+    expect(loose[1][at] - loose[0][at]).toBeGreaterThan(3);
+  });
+
+  it('is said to be, and keeps its parts as bought', () => {
+    const figures = bandPass('yes');
+    expect(inText(figures, judge(figures, filterBuilds(figures.asked)))).toContain(
+      'resonators trimmed to the centre',
+    );
+    expect(figures.fitted).toEqual(bandPass('no').fitted);
+    expect(workFilter(values({ trimmed: 'yes' })).asked.trimmedAtHertz).toBeUndefined();
+  });
+});
+
 describe('the rule', () => {
   // ITU Radio Regulations, Appendix 3: 43 + 10 log P or 50 dB, whichever is less stringent; 47 CFR 97.307(d): 43 dB.
   it('is told as a sum', () => {

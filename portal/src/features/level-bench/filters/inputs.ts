@@ -38,6 +38,15 @@ export const INPUTS = {
   sourceOhms: quantity('Impedance', 'ohm', '50'),
   alNanohenry: quantity('Core', 'nH', '4.2', { unitWords: 'nH/turn²' }),
   resonatorHenries: quantity('Coil of each', 'nH', '500', { when: BAND_PASS }),
+  trimmed: choice(
+    'Resonators',
+    [
+      { value: 'no', label: 'As their parts come' },
+      { value: 'yes', label: 'Trimmed to the centre' },
+    ],
+    'no',
+    { when: BAND_PASS },
+  ),
   inductorQ: quantity('Coil Q', '', '180'),
   toleranceRel: quantity('Part tolerance', '%', '5', { unitWords: '± %' }),
   capacitorQ: quantity('Capacitor Q', '', '500'),

@@ -4,6 +4,7 @@ import {
   highPassLadder,
   lowPassLadder,
   rippleFromReturnLoss,
+  trimmedLadder,
   turnsFor,
   type FittedLadder,
   type Ladder,
@@ -40,6 +41,16 @@ export function exactLadder(values: FilterValues): Ladder {
       turnsFor(values.resonatorHenries, coreOf(values)),
     ).henries,
   });
+}
+
+/** Where resonators are trimmed to, if they are. */
+export const trimmedAt = ({ kind, trimmed, centreHertz }: FilterValues): number | undefined =>
+  kind === 'band-pass' && trimmed === 'yes' ? centreHertz : undefined;
+
+/** The nearest parts as the builder leaves them: resonators turned to the centre where they have trimmers. */
+export function setUp(fitted: Ladder, values: FilterValues): Ladder {
+  const centre = trimmedAt(values);
+  return centre === undefined ? fitted : trimmedLadder(fitted, centre);
 }
 
 /** The nearest ladder that can be built: one capacitor or two in parallel, whole turns. */

@@ -10,9 +10,10 @@ import { grouped, inHandWords, nameOf, returnLossWords } from './words';
 const KINDS = { 'low-pass': 'Low-pass', 'high-pass': 'High-pass', 'band-pass': 'Band-pass' } as const;
 
 function designWords({ values }: FilterFigures): string {
-  const { kind, family, order, resonators } = values;
+  const { kind, family, order, resonators, trimmed } = values;
   const mhz = (hertz: number) => `${Number((hertz / 1e6).toPrecision(6))} MHz`;
   const size = kind === 'band-pass' ? `${resonators} resonators` : `${order} elements`;
+  const setting = kind === 'band-pass' && trimmed === 'yes' ? ', resonators trimmed to the centre' : '';
   const edge = {
     'low-pass': `edge ${mhz(values.cutoffHertz)}`,
     'high-pass': `edge ${mhz(values.lowEdgeHertz)}`,
@@ -20,7 +21,7 @@ function designWords({ values }: FilterFigures): string {
   }[kind];
   const match =
     family === 'Chebyshev' ? `, return loss ${Number(values.returnLossDb.toPrecision(3))} dB` : '';
-  return `${KINDS[kind]}, ${family}, ${size}, ${edge}${match}, ${formatQuantity(values.sourceOhms, 'ohm')}`;
+  return `${KINDS[kind]}, ${family}, ${size}, ${edge}${match}, ${formatQuantity(values.sourceOhms, 'ohm')}${setting}`;
 }
 
 /** All of it as plain lines, for a letter. */

@@ -3,17 +3,18 @@ import Box from '@mui/material/Box';
 import Typography from '@mui/material/Typography';
 import { memo } from 'react';
 import { farOffWords, partCount, partRows } from './parts';
+import type { FilterValues } from './inputs';
 import { smallTable } from './small-table';
 
 interface PartsTableProps {
   ladder: FittedLadder;
   toleranceRel: number;
-  /** A band-pass of resonators. */
-  isTrimmed: boolean;
+  /** Of a band-pass: whether its resonators are. */
+  trimmed?: FilterValues['trimmed'];
 }
 
 /** What the book says, and what will be fitted. */
-export const PartsTable = memo(function PartsTable({ ladder, toleranceRel, isTrimmed }: PartsTableProps) {
+export const PartsTable = memo(function PartsTable({ ladder, toleranceRel, trimmed }: PartsTableProps) {
   return (
     <Box component="section" aria-label="Parts to fit" sx={{ mb: '18px' }}>
       <Typography
@@ -53,8 +54,10 @@ export const PartsTable = memo(function PartsTable({ ladder, toleranceRel, isTri
       </Box>
       <Typography variant="small" component="p" sx={{ m: 0, mt: '6px', color: 'token.ink3' }}>
         {farOffWords(ladder, toleranceRel)} {partCount(ladder)}; two values with a plus lie in parallel.
-        {isTrimmed &&
+        {trimmed === 'no' &&
           ' A trimmer across each resonator takes up what the parts scatter, common practice; the builds here are without.'}
+        {trimmed === 'yes' &&
+          ' Each resonator has a trimmer in place of a part of its capacitor: the builds here are turned to the centre.'}
       </Typography>
     </Box>
   );

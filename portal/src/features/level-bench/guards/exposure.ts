@@ -1,11 +1,17 @@
 import {
   densityAt,
   exposureDistances,
+  exposureExemption,
+  exposureSum,
   formatQuantity,
+  ICNIRP_EXPOSURE,
+  isExemptByPower,
   MODE_DUTY,
   onFraction,
   US_EXPOSURE,
+  OutOfDomainError,
   type ExposureDistance,
+  type ExposureLimits,
   type ExposureTier,
 } from '@ferrite-row/levels';
 import { capital, fixed } from '../../../lib/text';
@@ -21,8 +27,25 @@ const WHO: Record<ExposureTier, string> = {
 const dutyOf = ({ mode, modeDuty }: GuardValues): number =>
   mode === 'own' ? modeDuty : MODE_DUTY[mode as keyof typeof MODE_DUTY];
 
-const partOf = ({ onMinutes, offMinutes }: GuardValues, tier: ExposureTier): number =>
-  onFraction(onMinutes / 60, offMinutes / 60, US_EXPOSURE.averagingMinutes[tier]);
+/** Limits that go with a rule set: those of the United States, and elsewhere the international guidelines. */
+const LIMITS: Record<GuardValues['ruleSet'], ExposureLimits> = {
+  'US-97': US_EXPOSURE,
+  'IARU-R1': ICNIRP_EXPOSURE,
+};
+
+const partOf = ({ onMinutes, offMinutes, ruleSet }: GuardValues, tier: ExposureTier): number =>
+  onFraction(onMinutes / 60, offMinutes / 60, LIMITS[ruleSet].averagingMinutes[tier]);
+
+/** '0.4 0.35' as two parts; none where nothing was typed. */
+function partsOf({ otherParts }: GuardValues): number[] {
+  const texts = otherParts.split(/[\s;]+/).filter(Boolean);
+  return texts.map((text) => {
+    const part = Number(text.replace(',', '.'));
+    if (Number.isFinite(part) && part >= 0) return part;
+    const permitted = 'numbers from 0, such as 0.4 0.35';
+    throw new OutOfDomainError('parts', text, permitted, `Other sources: ${permitted}.`);
+  });
+}
 
 /** Up to the next tenth: a distance is never told shorter than it is. */
 const metresText = (metres: number): string =>
@@ -31,13 +54,21 @@ const metresText = (metres: number): string =>
 const density = (milliwatts: number): string => `${Number(milliwatts.toPrecision(3))} mW/cm²`;
 
 /** In the near field the far field's formula says too little about distance. */
-const keptMetres = ({ metres, nearFieldMetres }: ExposureDistance): number =>
-  Math.max(metres, nearFieldMetres);
+const keptMetres = ({ metres, nearFieldMetres }: ExposureDistance, left: number): number =>
+  Math.max(metres / Math.sqrt(left), nearFieldMetres);
 
-function tierFigure(tier: ExposureTier, found: ExposureDistance): JudgedFigure {
+/** Of the limit, for this station: what the other sources leave. */
+const leftOf = (values: GuardValues): number => {
+  const parts = partsOf(values);
+  return parts.length === 0 ? 1 : exposureSum(parts).left;
+};
+
+function tierFigure(tier: ExposureTier, found: ExposureDistance, left: number): JudgedFigure {
+  const name = `${capital(tier)}, keep at least`;
+  if (left === 0) return { name, figure: 'None', words: 'the other sources leave nothing', tone: 'caution' };
   return {
-    name: `${capital(tier)}, keep at least`,
-    ...{ figure: metresText(keptMetres(found)), unit: 'm' },
+    name,
+    ...{ figure: metresText(keptMetres(found, left)), unit: 'm' },
     words: found.isInNearField ? `the near field’s edge; ${WHO[tier]}` : WHO[tier],
     tone: found.isInNearField ? 'caution' : 'plain',
   };
@@ -47,7 +78,7 @@ function rowsOf(values: GuardValues, found: Record<ExposureTier, ExposureDistanc
   const row = (name: string, text: (tier: ExposureTier) => string) => ({ cells: [name, ...TIERS.map(text)] });
   const { distanceMetres } = values;
   return [
-    row('Averaged over', (tier) => `${US_EXPOSURE.averagingMinutes[tier]} min`),
+    row('Averaged over', (tier) => `${LIMITS[values.ruleSet].averagingMinutes[tier]} min`),
     row('Transmits, part of it', (tier) => `${fixed(100 * partOf(values, tier), 0)} %`),
     row('Average power at the antenna', (tier) => formatQuantity(found[tier].averageWatts, 'W')),
     row('Radiated, EIRP', (tier) => formatQuantity(found[tier].eirpWatts, 'W')),
@@ -57,10 +88,46 @@ function rowsOf(values: GuardValues, found: Record<ExposureTier, ExposureDistanc
     ...(distanceMetres === undefined
       ? []
       : [
+          row(`Part of the limit at ${formatQuantity(distanceMetres, 'm')}`, (tier) =>
+            withOthers(
+              values,
+              densityAt(found[tier], distanceMetres) / found[tier].limitMilliwattsPerSquareCentimetre,
+            ),
+          ),
           row(`Density at ${formatQuantity(distanceMetres, 'm')}`, (tier) =>
             density(densityAt(found[tier], distanceMetres)),
           ),
         ]),
+  ];
+}
+
+/** '0.21, 0.96 with the others'. */
+function withOthers(values: GuardValues, own: number): string {
+  const parts = partsOf(values);
+  const told = (part: number) => String(Number(part.toPrecision(2)));
+  if (parts.length === 0) return told(own);
+  const { sum, isWithinLimits } = exposureSum([...parts, own]);
+  return `${told(own)}, ${told(sum)} with the others${isWithinLimits ? '' : ': over'}`;
+}
+
+const DIPOLE_DBI = 2.15;
+
+/** Only the United States let a source go without an evaluation by a table. */
+function exemptRows(values: GuardValues, found: Record<ExposureTier, ExposureDistance>): JudgedRow[] {
+  const { ruleSet, carrierHertz, distanceMetres } = values;
+  if (ruleSet !== 'US-97') return [];
+  const row = (name: string, text: (tier: ExposureTier) => string) => ({ cells: [name, ...TIERS.map(text)] });
+  if (TIERS.every((tier) => isExemptByPower(found[tier].averageWatts)))
+    return [row('Evaluation, 47 CFR 1.1307(b)(3)(i)(A)', () => 'exempt: 1 mW or less')];
+  if (distanceMetres === undefined) return [];
+  const exemption = (tier: ExposureTier) =>
+    exposureExemption(carrierHertz, distanceMetres, found[tier].eirpWatts / 10 ** (DIPOLE_DBI / 10));
+  return [
+    row(`Evaluation at ${formatQuantity(distanceMetres, 'm')}, 47 CFR 1.1307(b)(3)(i)(C)`, (tier) => {
+      const { isApplicable, isExempt, thresholdErpWatts } = exemption(tier);
+      if (!isApplicable) return 'needed: nearer than the table holds';
+      return `${isExempt ? 'exempt' : 'needed'}, table to ${formatQuantity(thresholdErpWatts, 'W')} ERP`;
+    }),
   ];
 }
 
@@ -72,11 +139,11 @@ export function judgeExposure(values: GuardValues): Judged {
     modeDuty: dutyOf(values),
     onFraction: { controlled: partOf(values, 'controlled'), uncontrolled: partOf(values, 'uncontrolled') },
     reflectionFactor: reflectionFactor === '1' ? 1 : reflectionFactor === '4' ? 4 : 2.56,
-    limits: US_EXPOSURE,
+    limits: LIMITS[values.ruleSet],
   });
   return {
     figures: [
-      ...TIERS.map((tier) => tierFigure(tier, found[tier])),
+      ...TIERS.map((tier) => tierFigure(tier, found[tier], leftOf(values))),
       {
         name: 'Average over peak',
         ...{ figure: fixed(100 * dutyOf(values), 0), unit: '%' },
@@ -87,14 +154,14 @@ export function judgeExposure(values: GuardValues): Judged {
       {
         title: 'How it comes to that',
         heads: ['Figure', 'Uncontrolled', 'Controlled'],
-        rows: rowsOf(values, found),
+        rows: [...rowsOf(values, found), ...exemptRows(values, found)],
       },
     ],
-    source: `${US_EXPOSURE.title}: ${US_EXPOSURE.source}. Distance: OET Bulletin 65 (1997), equations 3, 6 and 7; average over peak: its Supplement B, Table 2.`,
+    source: `${LIMITS[values.ruleSet].title}: ${LIMITS[values.ruleSet].source}. Distance: OET Bulletin 65 (1997), equations 3, 6 and 7; average over peak: its Supplement B, Table 2.`,
     caution: {
       kind: 'RF exposure',
       words:
-        'An estimate for the far field, by the limits of the United States; national limits may be stricter and decide. Nobody touches an antenna that may be on: it burns at once, whatever the average.',
+        'An estimate for the far field, by the limits named; national limits may be stricter and decide. Nobody touches an antenna that may be on: it burns at once, whatever the average.',
     },
   };
 }

@@ -116,7 +116,11 @@ describe('a band', () => {
 });
 
 describe('exposure', () => {
+  const cellsOf = (found: ReturnType<typeof judged>, name: string) =>
+    found.tables[0]?.rows.find(({ cells }) => cells[0]?.startsWith(name))?.cells.slice(1);
+
   const carrier = {
+    ruleSet: 'US-97',
     mode: 'carrier',
     onMinutes: '60',
     offMinutes: '0',
@@ -130,33 +134,105 @@ describe('exposure', () => {
     expect(figure(found, /^Uncontrolled/)).toBe('3.9');
     // 1.737 m lies beyond λ/2π = 1.674 m, so the distance itself stands.
     expect(figure(found, /^Controlled/)).toBe('1.8');
-    const at3 = judged('exposure', { ...carrier, distanceMetres: '3' }).tables[0]?.rows.at(-1)?.cells;
-    expect(at3).toEqual(['Density at 3 m', '0.371 mW/cm²', '0.371 mW/cm²']);
+    const at3 = judged('exposure', { ...carrier, distanceMetres: '3' });
+    expect(cellsOf(at3, 'Density at 3 m')).toEqual(['0.371 mW/cm²', '0.371 mW/cm²']);
   });
 
   it('averages over six and thirty minutes', () => {
     // OET Bulletin 65, Supplement B, pages 13 and 14: 1,500 W PEP of speech, seven minutes on and off: 300 W and 160 W.
     const seven = {
+      ruleSet: 'US-97',
       mode: 'conversational SSB, no processing',
       onMinutes: '7',
       offMinutes: '7',
       peakWatts: '1500',
     };
-    const { rows = [] } = judged('exposure', seven).tables[0] ?? {};
-    expect(rows.find(({ cells }) => cells[0] === 'Average power at the antenna')?.cells.slice(1)).toEqual([
-      '160 W',
-      '300 W',
-    ]);
+    expect(cellsOf(judged('exposure', seven), 'Average power at the antenna')).toEqual(['160 W', '300 W']);
   });
 
   it('names the field of the page for a frequency no limit holds for', () => {
-    expect(() => judged('exposure', { carrierHertz: '0.1' })).toThrow(
+    expect(() => judged('exposure', { carrierHertz: '0.05' })).toThrow(
       expect.objectContaining({ input: 'carrierHertz' }),
     );
   });
 });
 
+describe('exposure by the other rules and of other sources', () => {
+  const cellsOf = (found: ReturnType<typeof judged>, name: string) =>
+    found.tables[0]?.rows.find(({ cells }) => cells[0]?.startsWith(name))?.cells.slice(1);
+  const carrier = {
+    ...{ ruleSet: 'US-97', mode: 'carrier', onMinutes: '60', offMinutes: '0' },
+    ...{ carrierHertz: '28.5', peakWatts: '100' },
+  };
+
+  it('takes the club’s own rule set: ICNIRP’s levels in Region 1, and says so', () => {
+    // ICNIRP 2020, Table 5, from memory: 300/f^0.7 V/m over 377 ohm at 14.2 MHz.
+    const found = judged('exposure', { carrierHertz: '14.2', ruleSet: 'IARU-R1' });
+    const limit = 300 ** 2 / 14.2 ** 1.4 / 3770;
+    expect(cellsOf(found, 'Limit')?.[0]).toBe(`${Number(limit.toPrecision(3))} mW/cm²`);
+    expect(cellsOf(found, 'Averaged over')).toEqual(['30 min', '30 min']);
+    expect(inText(found)).toMatch(/Source: ICNIRP guidelines of 2020.*from memory/);
+    expect(cellsOf(judged('exposure', { ...carrier }), 'Averaged over')).toEqual(['30 min', '6 min']);
+  });
+
+  it('adds the parts of the limit that other sources take, and keeps people further away', () => {
+    // 47 CFR 1.1307(b)(3)(ii)(B): the sum may reach 1. Half is left, so √2 of 3.884 m: 5.49 m.
+    const found = judged('exposure', { ...carrier, otherParts: '0.3 0,2', distanceMetres: '5.5' });
+    expect(figure(found, /^Uncontrolled/)).toBe('5.5');
+    // (3.8835/5.5)² = 0.499.
+    expect(cellsOf(found, 'Part of the limit at 5.5 m')?.[0]).toBe('0.5, 1 with the others');
+    const full = judged('exposure', { ...carrier, otherParts: '0.4 0.35 0.3' });
+    expect(figure(full, /^Uncontrolled/)).toBe('None');
+    expect(inText(full)).toContain('the other sources leave nothing');
+    expect(() => judged('exposure', { otherParts: 'a lot' })).toThrow(
+      expect.objectContaining({ input: 'otherParts' }),
+    );
+  });
+
+  it('tells what 47 CFR 1.1307 lets go without an evaluation, and only under that rule set', () => {
+    // ex-06 and ex-07 of the published cases: 106.187 W of average ERP at 28.5 MHz and 5 m.
+    const name = 'Evaluation';
+    const at5 = (peakWatts: string) =>
+      cellsOf(judged('exposure', { ...carrier, peakWatts, distanceMetres: '5' }), name)?.[0];
+    expect(at5('100')).toBe('exempt, table to 106 W ERP');
+    expect(at5('200')).toBe('needed, table to 106 W ERP');
+    const near = judged('exposure', { ...carrier, distanceMetres: '1' });
+    expect(cellsOf(near, name)?.[0]).toContain('nearer than the table holds');
+    const weak = judged('exposure', { ...carrier, peakWatts: '0.001' });
+    expect(cellsOf(weak, name)?.[0]).toBe('exempt: 1 mW or less');
+    expect(
+      cellsOf(judged('exposure', { ...carrier, ruleSet: 'IARU-R1', distanceMetres: '5' }), name),
+    ).toBeUndefined();
+  });
+});
+
 describe('a heat sink', () => {
+  it('of a class-B stage stands its worst level, and tells two tones', () => {
+    // Textbook: 4/π² of 100 W is 40.5 W, at 64 % of the swing; two tones run at π²/16 = 61.7 %, 31.1 W of heat.
+    const found = judged('heat', { heatOf: 'class-B', classPeakWatts: '100', sinkToAir: '1' });
+    expect(found.heat?.watts).toBeCloseTo(40.528, 3);
+    const text = inText(found);
+    expect(text).toContain('Hottest: 40.5 W, at 64 % of its swing');
+    expect(text).toContain('Two equal tones at full peak: 31.1 W');
+    expect(text).toContain('Efficiency then: 61.7 %');
+    expect(inText(judged('heat'))).not.toContain('class-B');
+    expect(() => judged('heat', { heatOf: 'class-B', classPeakWatts: '0' })).toThrow(
+      expect.objectContaining({ input: 'classPeakWatts' }),
+    );
+  });
+
+  it('tells what its supply’s wires lose, where a current is given', () => {
+    // By hand: 2 × 2 m × 1.7241e-8 ohm m / 4 mm² × 20 A = 0.345 V.
+    const wires = { supplyAmperes: '20', wireMetres: '2', wireSquareMillimetres: '4' };
+    expect(inText(judged('heat', wires))).toMatch(
+      /Lost there and back: 345 mV\n.*\n.*Fuse: at the supply’s end/,
+    );
+    expect(inText(judged('heat'))).not.toContain('Lost there and back');
+    expect(() => judged('heat', { ...wires, wireSquareMillimetres: '0' })).toThrow(
+      expect.objectContaining({ input: 'wireSquareMillimetres' }),
+    );
+  });
+
   // Thermal resistances in series: 25 °C + 40 W × (1 + 0.2 + 0.8) K/W, data-sheet practice.
   const path = {
     ...{ watts: '40', ambientCelsius: '25', junctionToCase: '1', caseToSink: '0.2', sinkToAir: '0.8' },

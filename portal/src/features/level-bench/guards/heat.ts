@@ -1,13 +1,17 @@
 import {
+  classBHeat,
   heatChain,
+  formatQuantity,
   HOT_TO_TOUCH_CELSIUS,
   sinkNeeded,
+  supplyDropVolts,
   type HeatChain,
   type SinkNeeded,
 } from '@ferrite-row/levels';
 import { fixed } from '../../../lib/text';
+import { atField } from '../inputs/at-field';
 import type { GuardValues } from './inputs';
-import type { Judged, JudgedFigure } from './judged';
+import type { Judged, JudgedFigure, JudgedTable } from './judged';
 
 /** Temperatures and resistances from the junction to the air, for the drawing. */
 export interface HeatPicture {
@@ -60,6 +64,49 @@ function neededFigure(needed: SinkNeeded): JudgedFigure {
       };
 }
 
+/** Of an ideal class-B stage: its worst, and while two tones test it. */
+function classBTable({ heatOf, classPeakWatts }: GuardValues): JudgedTable[] {
+  if (heatOf !== 'class-B') return [];
+  const { worstSwing, worstWatts, twoToneEfficiency, twoToneWatts } = classBOf(classPeakWatts);
+  return [
+    {
+      title: 'An ideal class-B stage',
+      heads: ['Figure', 'Value'],
+      rows: [
+        { cells: ['Hottest', `${fixed(worstWatts)} W, at ${fixed(100 * worstSwing, 0)} % of its swing`] },
+        { cells: ['Two equal tones at full peak', `${fixed(twoToneWatts)} W`] },
+        { cells: ['Efficiency then', `${fixed(100 * twoToneEfficiency)} %`] },
+        { cells: ['Left out', 'idle current and what is left across the devices'] },
+      ],
+    },
+  ];
+}
+
+const classBOf = (peakWatts: number) => atField({ peakWatts: 'classPeakWatts' }, () => classBHeat(peakWatts));
+
+/** What the supply's wires take, where a current was typed. */
+function wireTable({
+  supplyAmperes: amperes,
+  wireMetres,
+  wireSquareMillimetres,
+}: GuardValues): JudgedTable[] {
+  if (amperes === undefined) return [];
+  const areaSquareMetres = wireSquareMillimetres * 1e-6;
+  const volts = supplyDropVolts({ amperes, lengthMetres: wireMetres, areaSquareMetres });
+  return [
+    {
+      title: 'The wires of its supply',
+      heads: ['Figure', 'Value'],
+      rows: [
+        { cells: ['Lost there and back', formatQuantity(volts, 'V')] },
+        { cells: ['Heat in them', formatQuantity(volts * amperes, 'W')] },
+        // No figure on purpose: sizes come from the national rules for wiring.
+        { cells: ['Fuse', 'at the supply’s end, never above what the wire stands; wiring rules decide'] },
+      ],
+    },
+  ];
+}
+
 function pictureOf(values: GuardValues, chain: HeatChain): HeatPicture {
   return {
     places: [
@@ -79,7 +126,9 @@ function pictureOf(values: GuardValues, chain: HeatChain): HeatPicture {
 }
 
 /** A device on its heat sink. */
-export function judgeHeat(values: GuardValues): Judged & { heat: HeatPicture } {
+export function judgeHeat(typed: GuardValues): Judged & { heat: HeatPicture } {
+  const isClassB = typed.heatOf === 'class-B';
+  const values = isClassB ? { ...typed, watts: classBOf(typed.classPeakWatts).worstWatts } : typed;
   const chain = heatChain(values, values.sinkToAir);
   const needed = sinkNeeded(values);
   const heat = pictureOf(values, chain);
@@ -104,9 +153,11 @@ export function judgeHeat(values: GuardValues): Judged & { heat: HeatPicture } {
           { cells: ['Junction may reach', celsius(values.greatestJunctionCelsius)] },
         ],
       },
+      ...classBTable(values),
+      ...wireTable(values),
     ],
     source:
-      'Thermal resistances in series, data-sheet practice. Over 55 °C a sink burns a hand: common practice.',
+      'Thermal resistances in series, data-sheet practice; class B: textbook; copper at 20 °C. Over 55 °C a sink burns a hand: common practice.',
     caution: {
       kind: 'hot parts',
       words:

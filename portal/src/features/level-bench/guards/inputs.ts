@@ -34,7 +34,7 @@ export const INPUTS = {
     ],
     'instrument',
   ),
-  ruleSet: choice('Rule set', RULE_SET_CHOICES, USUAL_RULE_SET, on('spurious', 'band')),
+  ruleSet: choice('Rule set', RULE_SET_CHOICES, USUAL_RULE_SET, on('spurious', 'band', 'exposure')),
 
   levelDbm: quantity('Greatest level', 'dBm', '38', on('instrument')),
   plusMinusDb: quantity('May be off by', 'dB', '1', on('instrument')),
@@ -112,6 +112,11 @@ export const INPUTS = {
   offMinutes: quantity('then listens for', 'min', '2', on('exposure')),
   gainDbi: quantity('Antenna gain', 'dB', '2.15', { unitWords: 'dBi', ...on('exposure') }),
   distanceMetres: optional('People at', 'm', on('exposure')),
+  otherParts: words('Other sources, parts of their limit', '', {
+    longest: 80,
+    ...on('exposure'),
+    hint: 'As 0.4 0.35, at the same place and time',
+  }),
   reflectionFactor: choice(
     'Ground',
     [
@@ -123,12 +128,27 @@ export const INPUTS = {
     on('exposure'),
   ),
 
-  watts: quantity('Turned to heat', 'W', '8.8', on('heat')),
+  heatOf: choice(
+    'Heat',
+    [
+      { value: 'told', label: 'As measured' },
+      { value: 'class-B', label: 'Class B, its worst' },
+    ],
+    'told',
+    on('heat'),
+  ),
+  watts: quantity('Turned to heat', 'W', '8.8', { when: { judge: ['heat'], heatOf: ['told'] } }),
+  classPeakWatts: quantity('Peak envelope power', 'W', '5', {
+    when: { judge: ['heat'], heatOf: ['class-B'] },
+  }),
   ambientCelsius: quantity('Air', '°C', '35', on('heat')),
   junctionToCase: quantity('Junction to case', 'K/W', '3', on('heat')),
   caseToSink: quantity('Case to sink', 'K/W', '0.5', on('heat')),
   sinkToAir: quantity('Sink to air', 'K/W', '5', on('heat')),
   greatestJunctionCelsius: quantity('Junction at most', '°C', '150', on('heat')),
+  supplyAmperes: optional('Supply current', 'A', on('heat')),
+  wireMetres: quantity('Supply wires, one way', 'm', '1', on('heat')),
+  wireSquareMillimetres: quantity('Their cross section', '', '1.5', { unitWords: 'mm²', ...on('heat') }),
 };
 
 export type GuardValues = BenchValues<typeof INPUTS>;

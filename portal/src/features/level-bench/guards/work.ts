@@ -29,6 +29,10 @@ const FIELDS: Record<string, keyof typeof INPUTS> = {
   lowHertz: 'carrierHertz',
   highHertz: 'carrierHertz',
   rippleDb: 'returnLossDb',
+  parts: 'otherParts',
+  amperes: 'supplyAmperes',
+  lengthMetres: 'wireMetres',
+  areaSquareMetres: 'wireSquareMillimetres',
   'onFraction.controlled': 'onMinutes',
   'onFraction.uncontrolled': 'onMinutes',
 };

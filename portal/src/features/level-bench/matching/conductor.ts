@@ -1,4 +1,10 @@
-import { formatQuantity, OutOfDomainError, peakFluxTesla, skinDepthMetres } from '@ferrite-row/levels';
+import {
+  formatQuantity,
+  OutOfDomainError,
+  peakFluxTesla,
+  skinDepthMetres,
+  wireOhmsPerMetre,
+} from '@ferrite-row/levels';
 import { fixed } from '../../../lib/text';
 import { atField } from '../inputs/at-field';
 import type { MatchingInputs } from './inputs';
@@ -35,6 +41,9 @@ function requirePositive(input: string, label: string, value: number): number {
 
 const hertzText = (hertz: number) => formatQuantity(hertz, 'Hz', 4);
 
+/** Ten depths across: thinner, the current is no longer all at the surface. */
+const isThick = (diameter: number, depth: number): boolean => diameter >= 10 * depth;
+
 /** How deep a current runs in copper. */
 export function workSkin({ frequencyHertz, wireMetres }: MatchingInputs): BandSheet {
   const diameter = requirePositive('wireMetres', 'Wire', wireMetres);
@@ -43,18 +52,25 @@ export function workSkin({ frequencyHertz, wireMetres }: MatchingInputs): BandSh
   const inside = Math.max(diameter - 2 * depth, 0);
   const used = 100 * (1 - (inside / diameter) ** 2);
   const section = { name: 'Of the wire within one depth', figure: `${used.toPrecision(2)} %` };
+  const resistance = {
+    name: 'Resistance of a metre of it',
+    figure: isThick(diameter, depth)
+      ? formatQuantity(wireOhmsPerMetre(frequencyHertz, diameter), 'ohm')
+      : 'nearer to that for direct current: it is under ten depths across',
+  };
   return {
     kind: 'bands',
     title: 'Skin depth in copper',
-    note: 'Copper at 20 °C, 17.24 nohm m, from memory.',
+    note: 'Copper at 20 °C, 17.24 nohm m, from memory. Resistance of a straight wire; turns that lie close have more.',
     quantity: { name: 'Skin depth', unit: 'µm' },
     rows: rowsOf((hertz) => 1e6 * skinDepthMetres(hertz)),
     wire: { diameter, depth },
     cells: [
       cellOf(skin, 'where the current has fallen to 37 %'),
       cellOf(section, `of its cross section, ${metreText(diameter)} across`),
+      ...(isThick(diameter, depth) ? [cellOf(resistance, 'straight, at this frequency')] : []),
     ],
-    figures: [skin, section],
+    figures: [skin, section, resistance],
   };
 }
 

@@ -119,6 +119,8 @@ export const INPUTS = {
     'E24',
     { when: { calculation: ['l-network'] } },
   ),
+  inductorQ: optional('Coil Q', '', { when: { calculation: ['l-network'] } }),
+  capacitorQ: optional('Capacitor Q', '', { when: { calculation: ['l-network'] } }),
   diameterMetres: quantity('Diameter, to mid wire', 'mm', '10', { when: { calculation: ['air'] } }),
   lengthMetres: quantity('Length of the coil', 'mm', '15', { when: { calculation: ['air'] } }),
   turns: quantity('Turns', '', '12', {

@@ -3,6 +3,7 @@ import {
   formatQuantity,
   frequencyGrid,
   ladderResponse,
+  lNetworkLoss,
   lNetworks,
   matchFromImpedance,
   type FittedElement,
@@ -22,6 +23,8 @@ export interface FittedNetwork {
   elements: FittedElement[];
   /** At the frequency, with the nearest parts, dB. */
   returnLossDb: number;
+  /** At the frequency, of parts with the Q that was given and mismatch together, dB; absent where no Q was. */
+  lossDb?: number;
   /** Along the sheet's frequencies. */
   curve: Float64Array;
   /** Where 20 dB or more is kept around the frequency; absent where it is not reached there. */
@@ -79,17 +82,22 @@ function goodAround(curve: Float64Array, hertz: Float64Array): FittedNetwork['go
 
 function fittedNetwork(network: LNetwork, values: MatchingInputs, hertz: Float64Array): FittedNetwork {
   const { sourceOhms, resistanceOhms, reactanceOhms, frequencyHertz, series } = values;
+  const q = { inductorQ: values.inductorQ, capacitorQ: values.capacitorQ };
+  const isLossy = Object.values(q).some((one) => one !== undefined);
+  const match = { sourceOhms, load: { resistanceOhms, reactanceOhms }, frequencyHertz };
   const ends = { sourceOhms, loadOhms: resistanceOhms };
   const { elements } = fitLadder(
     { elements: network.elements, ...ends },
     { capacitors: { series }, inductors: { alNanohenry: alOf(values) } },
   );
   const whole = { elements: [...elements, ...loadElement(reactanceOhms, frequencyHertz)], ...ends };
-  const curve = ladderResponse(whole, hertz).returnLossDb;
+  // The load's own reactance would be given the parts' Q, so its curve is that of parts without loss.
+  const curve = ladderResponse(whole, hertz, reactanceOhms === 0 ? q : {}).returnLossDb;
   return {
     name: `${capital(passText(network))}, Q ${fixed(network.q, 2)}`,
     elements,
     returnLossDb: curve[(POINTS - 1) / 2] ?? 0,
+    lossDb: isLossy ? lNetworkLoss({ elements }, match, q).lossDb : undefined,
     curve,
     good: goodAround(curve, hertz),
   };
@@ -100,6 +108,15 @@ export function goodText({ good }: FittedNetwork): string {
   const [low, high] = [good.low, good.high].map((hertz) => fixed(hertz / 1e6, 1));
   return `20 dB or more from ${low} to ${high} MHz`;
 }
+
+/** 'loss 0.12 dB', or nothing where no Q was given. */
+export const lossText = ({ lossDb }: FittedNetwork): string =>
+  lossDb === undefined ? '' : `loss ${fixed(lossDb, 2)} dB`;
+
+const lossNote = ({ inductorQ, capacitorQ }: MatchingInputs): string =>
+  inductorQ === undefined && capacitorQ === undefined
+    ? 'Parts without loss; give their Q for what they take.'
+    : 'Loss of the nearest parts with the Q given, mismatch included.';
 
 export const elementsText = ({ elements }: FittedNetwork): string =>
   elements
@@ -121,7 +138,7 @@ export function workNetwork(values: MatchingInputs): NetworkSheet {
   return {
     kind: 'l-network',
     title: `${formatQuantity(sourceOhms, 'ohm')} to ${loadText} at ${fixed(frequencyHertz / 1e6, 3)} MHz`,
-    note: 'Parts without loss; the load’s reactance is taken as one coil or capacitor in series with it.',
+    note: `${lossNote(values)} The load’s reactance is taken as one coil or capacitor in series with it.`,
     hertz,
     atHertz: frequencyHertz,
     networks,
@@ -132,7 +149,7 @@ export function workNetwork(values: MatchingInputs): NetworkSheet {
         name: network.name,
         figure: fixed(Math.min(network.returnLossDb, 99), 1),
         unit: 'dB return loss',
-        words: goodText(network),
+        words: [lossText(network), goodText(network)].filter(Boolean).join(', '),
       })),
       {
         name: 'Without it',
@@ -145,7 +162,7 @@ export function workNetwork(values: MatchingInputs): NetworkSheet {
     figures: networks.flatMap((network): Figure[] => [
       {
         name: network.name,
-        figure: `${elementsText(network)}; return loss ${fixed(network.returnLossDb)} dB, ${goodText(network)}`,
+        figure: `${elementsText(network)}; return loss ${fixed(network.returnLossDb)} dB, ${[lossText(network), goodText(network)].filter(Boolean).join(', ')}`,
       },
       {
         name: 'Exact',

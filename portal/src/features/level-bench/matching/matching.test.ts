@@ -74,6 +74,17 @@ describe('an L-network', () => {
     ]);
   });
 
+  // Textbook, for parts much better than the network: the coil takes Q/Qcoil = 1.732/100 of the power, 0.0746 dB.
+  it('tells the loss of its parts where their Q is given, and none where it is not', () => {
+    const fine = { frequencyHertz: '7', alNanohenry: '0.5', series: 'E96' };
+    const [low] = network({ ...fine, inductorQ: '100' }).networks;
+    expect(low.lossDb).toBeCloseTo(0.0746, 2);
+    expect(sheetText(network({ ...fine, inductorQ: '100' }))).toMatch(/loss 0\.0[78] dB/);
+    expect(network(fine).networks[0].lossDb).toBeUndefined();
+    expect(sheetText(network(fine))).not.toContain(' loss 0');
+    expect(() => network({ inductorQ: '0' })).toThrow(expect.objectContaining({ input: 'inductorQ' }));
+  });
+
   it('matches the better, the nearer its parts come to the exact ones', () => {
     const coarse = network({ series: 'E12', alNanohenry: '40' }).networks[0].returnLossDb;
     const fine = network({ series: 'E96', alNanohenry: '0.1' }).networks[0].returnLossDb;
@@ -180,6 +191,15 @@ describe('a conductor and a core', () => {
     const sheet = worked({ calculation: 'skin', frequencyHertz: '1' });
     expect(sheet.figures[0].figure).toBe('66.1 µm');
     expect(worked({ calculation: 'skin', frequencyHertz: '10' }).figures[0].figure).toBe('20.9 µm');
+  });
+
+  // Textbook: ρ/(π·d·δ), 1.7241e-8/(π × 1 mm × 25.0 µm) = 0.2197 ohm for a metre at 7 MHz.
+  it('has the resistance of a wire, and none where the current fills it', () => {
+    const name = 'Resistance of a metre of it';
+    const thick = worked({ calculation: 'skin', frequencyHertz: '7', wireMetres: '1' });
+    expect(figureOf(thick, name)).toBe('220 mohm');
+    const thin = worked({ calculation: 'skin', frequencyHertz: '7', wireMetres: '0.2' });
+    expect(figureOf(thin, name)).toContain('direct current');
   });
 
   // B = √2·E/(2π·f·N·A): 31.62 V, 3.5 MHz, 12 turns, 11.4 mm² is 14.87 mT.

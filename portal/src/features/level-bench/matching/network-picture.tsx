@@ -10,6 +10,7 @@ import {
   exactText,
   fitText,
   goodText,
+  lossText,
   type FittedNetwork,
   type NetworkSheet,
 } from './l-network';
@@ -47,7 +48,7 @@ function Network({ network, sheet }: { network: FittedNetwork; sheet: NetworkShe
         }}
       >
         <b>{network.name}</b>
-        <span>{goodText(network)}</span>
+        <span>{[lossText(network), goodText(network)].filter(Boolean).join(', ')}</span>
       </Box>
       <div ref={frame}>
         <NetworkDrawing

@@ -97,6 +97,7 @@ const Assumed = memo(
     );
   },
   (before, after) =>
+    before.values.ratedDbm === after.values.ratedDbm &&
     ASSUMED.every(
       (name) =>
         before.values[name] === after.values[name] &&

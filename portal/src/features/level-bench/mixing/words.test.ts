@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import { classFigures } from './assumed';
 import { VERDICTS } from '../../../shared-ui/states/state-words';
 import { driveWords, exactText, padText, placeWords, sidebandWords } from './answer-words';
 import { copiedText } from './copied-text';
@@ -104,5 +105,16 @@ describe('copied as text', () => {
     expect(lines).toContain(tuningWords(mixing));
     expect(lines.at(-1)).toMatch(/licence/);
     expect(lines.join('')).not.toMatch(/NaN|Infinity|undefined/);
+  });
+});
+
+describe('a ring’s class', () => {
+  // Common practice: compression 4 to 7 dB under the drive, intercept 5 to 10 dB over it.
+  it('is told for the drive it is rated for', () => {
+    expect(classFigures({ ratedDbm: 7 })).toEqual([
+      ['A ring of this drive intercepts at', '+12 to +17 dBm'],
+      ['and compresses from', '0 to +3 dBm'],
+    ]);
+    expect(classFigures({ ratedDbm: 17 })[1]).toEqual(['and compresses from', '+10 to +13 dBm']);
   });
 });

@@ -34,6 +34,14 @@ describe('the filters page', () => {
     await waitFor(() => expect(router.state.location.search).toBe('?toleranceRel=55'));
   });
 
+  it('offers to trim the resonators of a band-pass, and says what the builds then are', async () => {
+    renderPage(<FiltersPage />, { at: `${AT}?kind=band-pass` });
+    expect(await screen.findByText(/the builds here are without/)).toBeVisible();
+    await userEvent.click(screen.getByRole('combobox', { name: 'Resonators' }));
+    await userEvent.click(await screen.findByRole('option', { name: 'Trimmed to the centre' }));
+    expect(await screen.findByText(/the builds here are turned to the centre/)).toBeVisible();
+  });
+
   it('walks the plot by the keyboard and turns it into its table', async () => {
     renderPage(<FiltersPage />, { at: AT });
     const plot = await screen.findByLabelText(/^Filter plot/);

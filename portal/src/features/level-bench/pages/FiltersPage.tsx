@@ -44,7 +44,7 @@ export default function FiltersPage() {
             <PartsTable
               ladder={figures.fitted}
               toleranceRel={figures.values.toleranceRel}
-              isTrimmed={figures.values.kind === 'band-pass'}
+              trimmed={figures.values.kind === 'band-pass' ? figures.values.trimmed : undefined}
             />
           )}
           <FilterAssumptions bench={bench} problems={problems} figures={figures} />

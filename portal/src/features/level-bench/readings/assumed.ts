@@ -2,6 +2,7 @@ import {
   ASSUMED,
   ASSUMED_METER_ACCURACY_REL,
   ASSUMED_PAD_TOLERANCE_DB,
+  ASSUMED_RISE_REL,
   ASSUMED_SCOPE_LIMITS,
   ASSUMED_TIME_BASE_REL,
   formatQuantity,
@@ -60,6 +61,11 @@ const VOLTMETER: AssumedFigure = {
   start: perCent(ASSUMED_METER_ACCURACY_REL),
 };
 
+const TIME_BASE: AssumedFigure = {
+  ...{ name: 'timeBaseToleranceRel', label: 'Time base', unit: '%' },
+  start: perCent(ASSUMED_TIME_BASE_REL),
+};
+
 /** What each way takes for granted; nothing where everything is typed. */
 export const ASSUMED_FIGURES: Record<Way, readonly AssumedFigure[]> = {
   oscilloscope: SCOPE,
@@ -85,10 +91,12 @@ export const ASSUMED_FIGURES: Record<Way, readonly AssumedFigure[]> = {
     LOAD,
     { name: 'peakPerVolt', label: 'Peak for each volt shown', unit: '', start: '1', isExact: true },
   ],
-  'time-base': [
+  'time-base': [TIME_BASE],
+  'rise-time': [
+    TIME_BASE,
     {
-      ...{ name: 'timeBaseToleranceRel', label: 'Time base', unit: '%' },
-      start: perCent(ASSUMED_TIME_BASE_REL),
+      ...{ name: 'riseToleranceRel', label: 'Its own rise', unit: '%' },
+      start: perCent(ASSUMED_RISE_REL),
     },
   ],
   gain: [],

@@ -98,11 +98,16 @@ function tableInputs(): Entries {
 function otherInputs(): Entries {
   const gain = { when: { way: ['gain'] } };
   const probe = { when: { way: ['probe-loading'] } };
+  const rise = { when: { way: ['rise-time'] } };
   return [
     ['gain.output', quantity('Level at the output', 'dBm', '1.5', gain)],
     ['gain.outputUncertainty', quantity('± at 95 %', 'dB', '0.39', gain)],
     ['gain.input', quantity('Level at the input', 'dBm', '-19.2', gain)],
     ['gain.inputUncertainty', quantity('± at 95 %', 'dB', '0.47', gain)],
+    ['rise-time.divisions', quantity('Divisions, 10 to 90 %', 'div', '3', rise)],
+    ['rise-time.secondsPerDivision', quantity('Time per division', 's/div', '2 ns', rise)],
+    ['rise-time.readToDivisions', quantity('Read to within', 'div', '0.1', rise)],
+    ['rise-time.bandwidthHertz', quantity('Bandwidth with the probe', 'MHz', '100', rise)],
     ['probe-loading.circuitOhms', quantity('Circuit there', 'ohm', '1k', probe)],
     ['probe-loading.frequencyHertz', quantity('Frequency', 'MHz', '14.1', probe)],
     ['probe-loading.probeOhms', quantity('Probe, resistance', 'ohm', '10M', probe)],

@@ -41,6 +41,16 @@ describe('a reading', () => {
     );
   });
 
+  it('of an edge takes the oscilloscope’s own rise off', () => {
+    // Common practice: 0.35/100 MHz = 3.5 ns; √(6² − 3.5²) = 4.873 ns.
+    const found = worked({ way: 'rise-time' });
+    expect([found.reading.unit, found.reading.value]).toEqual(['ns', expect.closeTo(4.8734, 3)]);
+    expect(inText(found)).toContain('The oscilloscope’s own: 3.5 ns');
+    expect(() => worked({ way: 'rise-time', 'rise-time.divisions': '1.5' })).toThrow(
+      expect.objectContaining({ input: 'rise-time.divisions' }),
+    );
+  });
+
   it('of two tones tells peak envelope power, average and each tone', () => {
     // 47 CFR 97.3(b). 200 V p-p in 50 ohm: 200²/(8 × 50) = 100 W at the crest; two equal tones average half of it.
     const found = worked({

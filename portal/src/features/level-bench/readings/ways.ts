@@ -20,6 +20,7 @@ const NAMES = {
   'detector-table': 'Log detector, by its table',
   'diode-probe': 'Diode probe',
   'time-base': 'Frequency by the time base',
+  'rise-time': 'Rise time of an edge',
   gain: 'Gain of two levels',
   'probe-loading': 'What a probe takes',
 } as const;
@@ -35,7 +36,12 @@ export const wayName = (way: Way): string => NAMES[way];
 export const entryMethodOf = (way: string): EntryMethod | undefined =>
   ENTRY_METHODS.find((method) => method === way);
 
-const OTHER_UNITS = { 'detector-table': 'dBm', gain: 'dB', 'probe-loading': 'dB' } as const;
+const OTHER_UNITS = {
+  'detector-table': 'dBm',
+  'rise-time': 'ns',
+  gain: 'dB',
+  'probe-loading': 'dB',
+} as const;
 
 /** Unit of what a way gives. */
 export function unitOf(way: Way, meterUnit: MeterUnit): ReadingUnit {

@@ -66,6 +66,8 @@ export function budgetRows({ components, uncertaintyUnit }: ShownReading): Budge
 /** The same reading told in other ways; empty where there is no other. */
 export function otherFigures(reading: ShownReading): { name: string; figure: string }[] {
   const { unit, voltsPeakToPeak, watts, averageWatts, averageDbm, eachToneDbm } = reading;
+  const { shownSeconds, instrumentSeconds } = reading;
+  const timeText = (seconds?: number) => (seconds === undefined ? undefined : formatQuantity(seconds, 's'));
   const isEnvelope = averageWatts !== undefined;
   const told: [string, string | undefined][] = [
     [
@@ -82,6 +84,8 @@ export function otherFigures(reading: ShownReading): { name: string; figure: str
         ? undefined
         : `${formatQuantity(averageWatts, 'W', 3)}, ${signed(averageDbm, 2)} dBm`,
     ],
+    ['Shown', timeText(shownSeconds)],
+    ['The oscilloscope’s own', timeText(instrumentSeconds)],
     ['Each tone', eachToneDbm === undefined ? undefined : `${signed(eachToneDbm, 2)} dBm`],
   ];
   return told.flatMap(([name, figure]) => (figure === undefined ? [] : [{ name, figure }]));

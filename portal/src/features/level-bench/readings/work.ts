@@ -8,6 +8,7 @@ import {
   OutOfDomainError,
   probeLoading,
   readingFromInputs,
+  riseTimeReading,
   scopeInput,
   tighterScale,
   tooCloseText,
@@ -29,7 +30,13 @@ import { entryMethodOf, keyOf, unitOf, WAYS, type Way } from './ways';
 export type ShownReading = Pick<
   LevelReading,
   'value' | 'unit' | 'uncertaintyUnit' | 'expandedUncertainty' | 'components' | 'voltsPeakToPeak' | 'watts'
-> & { averageWatts?: number; averageDbm?: number; eachToneDbm?: number };
+> & {
+  averageWatts?: number;
+  averageDbm?: number;
+  eachToneDbm?: number;
+  shownSeconds?: number;
+  instrumentSeconds?: number;
+};
 
 export interface WorkedReading {
   way: Way;
@@ -137,6 +144,16 @@ function readingOf(given: Given): ShownReading {
   if (method)
     return readingFromInputs(method, entryInputs(method, given), assumptionsOf(given), given.meterUnit);
   if (given.way === 'detector-table') return tableReading(given);
+  if (given.way === 'rise-time') {
+    const { of } = given;
+    return riseTimeReading({
+      divisions: (of('divisions') ?? NaN) / baseUnitsIn('div'),
+      secondsPerDivision: of('secondsPerDivision') ?? NaN,
+      readToDivisions: (of('readToDivisions') ?? NaN) / baseUnitsIn('div'),
+      bandwidthHertz: of('bandwidthHertz') ?? NaN,
+      ...assumptionsOf(given),
+    });
+  }
   if (given.way === 'gain')
     return gainReading({ output: levelOf(given, 'output'), input: levelOf(given, 'input') });
   return loadingReading(given);
