@@ -106,6 +106,7 @@ describe('the stage page', () => {
 
   it('lets an error go while its field is typed in again', async () => {
     const { user } = open();
+    await user.clear(await field('Volts per division'));
     await user.type(await field('Volts per division'), '10m');
     await user.type(await field('Divisions, peak to peak'), '33');
     await user.tab();
@@ -116,6 +117,7 @@ describe('the stage page', () => {
 
   it('shows the last good result pale while what is typed cannot be read, its verdict too', async () => {
     const { user } = open();
+    await user.clear(await field('Volts per division'));
     await user.type(await field('Volts per division'), '10m');
     await user.type(await field('Divisions, peak to peak'), '6.7');
     const chips = () => screen.getAllByText('Pass').map(({ parentElement }) => parentElement);
