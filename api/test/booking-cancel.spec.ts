@@ -25,11 +25,19 @@ describe('cancelling a booking', () => {
       .expect(201);
     return body.id as string;
   };
-  const listed = async (resourceId: string) => {
+  const listed = async (resourceId: string, who = me) => {
     const query = { from: tomorrowAt(0), to: tomorrowAt(24), resourceId };
-    const { body } = await me.agent.get('/api/bookings').query(query).expect(200);
+    const { body } = await who.agent.get('/api/bookings').query(query).expect(200);
     return body as { id: string; endsAt: string }[];
   };
+
+  it('is offered to nobody it is not for, who sees all the same who has what', async () => {
+    const { id } = await bench(test);
+    await book(id);
+    expect(await listed(id, other)).toMatchObject([
+      { personName: 'Some One', mine: false, mayCancel: false, resources: [{ id }] },
+    ]);
+  });
 
   it('gives the bench back to others and leaves the book and the own list', async () => {
     const { id } = await bench(test);

@@ -100,16 +100,6 @@ describe('booking benches and instruments', () => {
     expect(await detailFor()).toContain(`You already have ${tag} then, Fri 16 Jan, 14:00 to 16:00.`);
   });
 
-  it('shows everybody who has what, and offers cancelling to nobody it is not for', async () => {
-    const { id } = await bench(test);
-    await book([id]).expect(201);
-    const query = { from: tomorrowAt(0), to: tomorrowAt(24), resourceId: id };
-    const { body } = await other.agent.get('/api/bookings').query(query).expect(200);
-    expect(body).toMatchObject([
-      { personName: 'Some One', mine: false, mayCancel: false, resources: [{ id }] },
-    ]);
-  });
-
   describe('nearest free times', () => {
     const nearest = async (resourceIds: string[], more: object = {}): Promise<unknown[]> => {
       const { body } = await book(resourceIds, more).expect(409);

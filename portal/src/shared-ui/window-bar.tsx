@@ -67,6 +67,7 @@ export function WindowBar(props: WindowBarProps) {
         aria-label={spoken(props)}
         fill="none"
         fontSize="11"
+        style={{ display: 'block' }}
       >
         <rect
           x={x(low ?? from)}

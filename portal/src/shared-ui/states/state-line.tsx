@@ -19,6 +19,8 @@ export function StateLine({ shape, colour, children }: StateLineProps) {
       component="span"
       sx={{
         display: 'inline-flex',
+        // In the middle of its row, not on the mark's foot.
+        verticalAlign: 'middle',
         alignItems: 'center',
         gap: '6px',
         color: `token.${colour}`,

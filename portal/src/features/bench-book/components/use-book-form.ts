@@ -52,7 +52,7 @@ export function useBookForm(view: BookView, benches: readonly Bench[], instrumen
       },
       { keepDefaultValues: true },
     );
-  }, [benches, instruments, view.check, view.need, reset, getValues]);
+  }, [benches, instruments, view.check, view.need, view.tags, reset, getValues]);
 
   useLanesFollow(view, form, isOpen);
   /** Opens with the bench and the day that are looked at, unless something was typed before. */

@@ -32,13 +32,17 @@ export function useDrawnLanes({ dates, week, lanes, bookings, wishes, hours }: D
 
 type Frame = RefObject<HTMLDivElement | null>;
 
+function scrollDown(element: HTMLElement, top: number): void {
+  element.scrollTop = top;
+}
+
 /** Opens the day at the first minute worth seeing, counted from the top; where the person scrolls to afterwards is theirs. */
 function useOpenedAt(frame: Frame, { from, day }: { from: number; day: string | undefined }): void {
   const opened = useRef<string>(undefined);
   useLayoutEffect(() => {
     if (!frame.current || opened.current === day) return;
     opened.current = day;
-    frame.current.scrollTop = from * MINUTE_PX - 10;
+    scrollDown(frame.current, from * MINUTE_PX - 10);
   }, [frame, from, day]);
 }
 
@@ -52,6 +56,6 @@ function useInSight(frame: Frame, from: number | undefined): void {
     const { scrollTop, clientHeight } = frame.current;
     const top = from * MINUTE_PX;
     const isSeen = top >= scrollTop && top + HEADS_PX + 2 * SLOT_PX <= scrollTop + clientHeight;
-    if (!isSeen) frame.current.scrollTop = top - SLOT_PX;
+    if (!isSeen) scrollDown(frame.current, top - SLOT_PX);
   }, [frame, from]);
 }

@@ -16,7 +16,16 @@ import { PhotoList } from './photo-list';
 const WIDE = { display: { xs: 'none', md: 'table-cell' } };
 const WIDE_HEADERS = ['Against window', 'With'];
 
-const CELL = { py: '8px', px: '6px', borderBottom: '1px solid', borderColor: 'token.rule' };
+const CELL = {
+  py: '7px',
+  px: '6px',
+  borderBottom: '1px solid',
+  borderColor: 'token.rule',
+  fontSize: '0.8125rem',
+  lineHeight: '1.25rem',
+  verticalAlign: 'middle',
+  '&:first-of-type': { pl: 0 },
+};
 
 /** Everything a mentor decides on: readings against their windows, ticks, photos, instruments. */
 export function Evidence({ stage }: { stage: BuildStage }) {
@@ -57,7 +66,8 @@ function Readings({ checks }: { checks: readonly BuildCheck[] }) {
                     ...CELL,
                     textAlign: 'left',
                     fontWeight: 600,
-                    color: 'token.ink2',
+                    typography: 'least',
+                    color: 'token.ink3',
                     borderColor: 'token.ink',
                     ...(WIDE_HEADERS.includes(header) && WIDE),
                   }}
@@ -84,7 +94,11 @@ function ReadingRow({ check }: { check: BuildCheck }) {
   const isClose = reading?.verdict === 'too close to call';
   return (
     <Box component="tr" sx={{ backgroundColor: isClose ? 'token.brassTint' : 'transparent' }}>
-      <Box component="th" scope="row" sx={{ ...CELL, textAlign: 'left', fontWeight: 700 }}>
+      <Box
+        component="th"
+        scope="row"
+        sx={{ ...CELL, textAlign: 'left', fontWeight: 700, '&:first-of-type': { pl: isClose ? '8px' : 0 } }}
+      >
         {check.title}
         {check.readings.length > 1 && (
           <Typography variant="small" component="span" sx={{ ml: '6px', color: 'token.ink3' }}>

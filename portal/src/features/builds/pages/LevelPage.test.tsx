@@ -8,6 +8,7 @@ import { server } from '../../../testing/server';
 import { readingPlace } from '../logic/reading-draft';
 import { aBuild, aReading, aStage, aCheck } from '../testing/build.fixture';
 import LevelPage from './LevelPage';
+import StagePage from './StagePage';
 
 const HALF = { voltsPerDivision: '10m', divisionsPeakToPeak: '', readToDivisions: '0.1' };
 const WHOLE = { ...HALF, divisionsPeakToPeak: '6.7' };
@@ -48,5 +49,29 @@ describe('the page of levels on a phone', () => {
     type(WHOLE, 'somebody else');
     open();
     expect(await screen.findByRole('button', { name: /Pre-driver.*Measured \+0.4/ })).toBeVisible();
+  });
+});
+
+describe('a link into a build', () => {
+  it('says plainly that a link leads to no build, with a way back', async () => {
+    server.use(
+      http.get('*/api/builds/nowhere', () =>
+        HttpResponse.json({ status: 404, title: 'Not there', detail: 'x' }, { status: 404 }),
+      ),
+    );
+    renderPage(<StagePage />, {
+      at: '/build/nowhere/stages/stage-9',
+      path: '/build/:buildId/stages/:stageId',
+    });
+    expect(await screen.findByText('There is no such build here')).toBeVisible();
+    expect(screen.getByRole('link', { name: 'Open my build' })).toHaveAttribute('href', '/build');
+    expect(screen.queryByRole('button', { name: 'Try again' })).toBeNull();
+  });
+
+  it('says that a link leads to no stage of the build, and opens the current one', async () => {
+    server.use(http.get('*/api/builds/build', () => HttpResponse.json(aBuild())));
+    renderPage(<StagePage />, { at: '/build/build/stages/gone', path: '/build/:buildId/stages/:stageId' });
+    const link = await screen.findByRole('link', { name: 'Open the current stage' });
+    expect(link).toHaveAttribute('href', '/build/build/stages/stage-9');
   });
 });

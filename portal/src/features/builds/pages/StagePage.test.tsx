@@ -129,28 +129,6 @@ describe('the stage page', () => {
     expect(isPale(screen.getByText('± 0.39 dB at 95 %'))).toBe(true);
   });
 
-  it('says plainly that a link leads to no build, with a way back', async () => {
-    server.use(
-      http.get('*/api/builds/nowhere', () =>
-        HttpResponse.json({ status: 404, title: 'Not there', detail: 'x' }, { status: 404 }),
-      ),
-    );
-    renderPage(<StagePage />, {
-      at: '/build/nowhere/stages/stage-9',
-      path: '/build/:buildId/stages/:stageId',
-    });
-    expect(await screen.findByText('There is no such build here')).toBeVisible();
-    expect(screen.getByRole('link', { name: 'Open my build' })).toHaveAttribute('href', '/build');
-    expect(screen.queryByRole('button', { name: 'Try again' })).toBeNull();
-  });
-
-  it('says that a link leads to no stage of the build, and opens the current one', async () => {
-    server.use(http.get('*/api/builds/build', () => HttpResponse.json(aBuild())));
-    renderPage(<StagePage />, { at: '/build/build/stages/gone', path: '/build/:buildId/stages/:stageId' });
-    const link = await screen.findByRole('link', { name: 'Open the current stage' });
-    expect(link).toHaveAttribute('href', '/build/build/stages/stage-9');
-  });
-
   it('asks for the tick beside a grave caution before it offers Keep', async () => {
     const { user } = open(aStage({ cautions: ['rf power'] }));
     await retype(user, 'Volts per division', '10m');
