@@ -30,6 +30,7 @@ export default defineConfig({
           include: ['src/**/*.test.ts'],
           exclude: needsBrowser,
           environment: 'node',
+          isolate: false,
         },
       },
       {
@@ -38,6 +39,8 @@ export default defineConfig({
           name: 'pages',
           include: ['src/**/*.test.tsx', ...needsBrowser],
           environment: 'jsdom',
+          // React, MUI and jsdom are loaded and warmed up once in each process instead of once in each file.
+          isolate: false,
           environmentOptions: { jsdom: { url: 'http://127.0.0.1:4782/' } },
           setupFiles: './src/testing/setup.ts',
         },
