@@ -27,13 +27,12 @@ const ROOMY = { NODE_OPTIONS: '--max-semi-space-size=64' };
 
 /**
  * The order is a matter of time on two cores: the long ones that use a core each go first, side by side, the short
- * ones fill what is left, and the runners that use every core come last.
+ * ones fill what is left, and what uses every core comes last.
  * @type {Step[]}
  */
 const steps = [
   buildStep,
   lintPortal,
-  browserStep,
   lintServer,
   restartStep,
   ...gates,
@@ -41,6 +40,7 @@ const steps = [
   scriptsStep,
   vitestStep,
   jestStep,
+  browserStep,
 ];
 
 /**

@@ -61,6 +61,8 @@ export const browserStep = {
   name: 'browser',
   about: 'the stories, in Chromium against the built product',
   needs: ['build'],
+  // Two browsers at once, and a count of how long keys take.
+  alone: true,
   usesCluster: true,
   debian: ['chromium', 'fonts-liberation'],
   work: browser,

@@ -25,7 +25,7 @@ function jest(bench) {
   const command = {
     name: 'jest',
     command: inRoot('node_modules/.bin/jest'),
-    args: ['--json', `--outputFile=${report}`, '--maxWorkers=2'],
+    args: ['--json', `--outputFile=${report}`, '--maxWorkers=3'],
     cwd: inRoot('api'),
     env: { TEST_DATABASE_ADMIN_URL: bench.cluster?.adminUrl },
   };
