@@ -7,6 +7,9 @@ const api = process.env.API_URL ?? 'http://127.0.0.1:4781';
 // Specs in plain TypeScript that stand on a browser's storage or its requests.
 const needsBrowser = ['src/api-client/**/*.test.ts'];
 
+// Puts back what specs change in modules that all files of a process share.
+const MODULES = './src/testing/modules.ts';
+
 export default defineConfig({
   plugins: [react()],
   // The levels package is read from its TypeScript source, so the browser never waits for a server build.
@@ -20,6 +23,7 @@ export default defineConfig({
     globals: true,
     css: false,
     testTimeout: 30_000,
+    unstubGlobals: true,
     // Left to itself Vitest keeps one core free.
     maxWorkers: '100%',
     projects: [
@@ -31,6 +35,7 @@ export default defineConfig({
           exclude: needsBrowser,
           environment: 'node',
           isolate: false,
+          setupFiles: MODULES,
         },
       },
       {
@@ -42,7 +47,7 @@ export default defineConfig({
           // React, MUI and jsdom are loaded and warmed up once in each process instead of once in each file.
           isolate: false,
           environmentOptions: { jsdom: { url: 'http://127.0.0.1:4782/' } },
-          setupFiles: './src/testing/setup.ts',
+          setupFiles: [MODULES, './src/testing/setup.ts'],
         },
       },
     ],

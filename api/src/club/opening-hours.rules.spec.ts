@@ -47,8 +47,8 @@ describe('given hours', () => {
   it('are refused when a day closes on its opening or before it, at that day', () => {
     expect(hoursProblems(WEEK)).toEqual([]);
     expect(hoursProblems([day(1, 12, 22), day(2, 20, 20), day(3, 20, 8)])).toEqual([
-      { pointer: '#/days/1/closesMinute', detail: 'It closes before it has opened.' },
-      { pointer: '#/days/2/closesMinute', detail: 'It closes before it has opened.' },
+      { pointer: '#/days/1/closesMinute', detail: 'It closes when it opens, or before.' },
+      { pointer: '#/days/2/closesMinute', detail: 'It closes when it opens, or before.' },
     ]);
   });
 });

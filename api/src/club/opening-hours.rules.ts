@@ -19,7 +19,7 @@ export function hoursProblems(days: readonly OpenDay[]): FieldProblem[] {
   return days.flatMap(({ opensMinute, closesMinute }, index) =>
     closesMinute > opensMinute
       ? []
-      : [{ pointer: `#/days/${index}/closesMinute`, detail: 'It closes before it has opened.' }],
+      : [{ pointer: `#/days/${index}/closesMinute`, detail: 'It closes when it opens, or before.' }],
   );
 }
 

@@ -129,7 +129,7 @@ describe('the frame', () => {
       await sheet.findByRole('link', { name: new RegExp(`Build nights ?${dayText(day)}, coming`) }),
     ).toBeVisible();
     expect(await sheet.findByRole('link', { name: /Groups ?Thursday five/ })).toBeVisible();
-    expect(await sheet.findByRole('link', { name: /Instruments ?2, one out of use/ })).toBeVisible();
+    expect(await sheet.findByRole('link', { name: /Instruments ?2, one not ready/ })).toBeVisible();
   });
 
   it('begins with the skip link', async () => {

@@ -21,7 +21,7 @@ function instrumentNews(instruments: readonly { condition: string }[]): string {
   const out = instruments.filter(({ condition }) => condition !== 'ready').length;
   return out === 0
     ? `${instruments.length}, all ready`
-    : `${instruments.length}, ${countWord(out)} out of use`;
+    : `${instruments.length}, ${countWord(out)} not ready`;
 }
 
 /** What the More sheet says beside pages that need nobody, by path; asked for when the sheet is open. */

@@ -47,3 +47,10 @@ export function initials(name: string): string {
   const last = words.length > 1 ? words[words.length - 1] : '';
   return (words[0].charAt(0) + last.charAt(0)).toUpperCase();
 }
+
+/** The level that harms an input: '+20 dBm', '+12.6 dBm'; never rounded up. Empty where none is known. */
+export function damageWords(dBm: number | null): string {
+  if (dBm === null) return '';
+  const tenths = Math.floor(Number((dBm * 10).toPrecision(12)));
+  return `${tenths > 0 ? '+' : ''}${fixed(tenths / 10, tenths % 10 === 0 ? 0 : 1)} dBm`;
+}

@@ -1,6 +1,6 @@
 import Box from '@mui/material/Box';
 import Drawer from '@mui/material/Drawer';
-import { useEffect, useRef, type ReactNode } from 'react';
+import { useRef, type ReactNode } from 'react';
 import { createPortal } from 'react-dom';
 import type { DrawerPanelProps } from './drawer-panel';
 import { DrawerPanel } from './drawer-panel';
@@ -8,6 +8,7 @@ import { useDrawerSlot } from './drawer-slot';
 import { PhoneSheet } from './phone-sheet';
 import { token } from './tokens';
 import { useEscape } from './use-escape';
+import { useFocusBack } from './use-focus-back';
 import { useNarrow, usePhone } from './use-phone';
 
 interface DockedDrawerProps extends Omit<DrawerPanelProps, 'grip'> {
@@ -59,13 +60,7 @@ const dock = (drawer: ReactNode, slot: HTMLElement | null) => (slot ? createPort
 function Docked({ width, ...panel }: DrawerPanelProps & { width: number }) {
   const root = useRef<HTMLElement>(null);
   useEscape(root, panel.onClose);
-  useEffect(() => {
-    const opener = document.activeElement;
-    root.current?.focus({ preventScroll: true });
-    return () => {
-      if (opener instanceof HTMLElement) opener.focus();
-    };
-  }, []);
+  useFocusBack(root);
   return (
     <Box
       component="aside"

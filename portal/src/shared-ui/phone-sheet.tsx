@@ -1,9 +1,10 @@
 import Box from '@mui/material/Box';
-import { useEffect, useRef, useState } from 'react';
+import { useRef, useState } from 'react';
 import { createPortal } from 'react-dom';
 import { DrawerPanel, type DrawerPanelProps } from './drawer-panel';
 import { token } from './tokens';
 import { useEscape } from './use-escape';
+import { useFocusBack } from './use-focus-back';
 import { useToastsAbove } from './use-toasts-above';
 
 /** The height of a sheet that leaves the page in sight over it. */
@@ -19,13 +20,7 @@ export function PhoneSheet(panel: Omit<DrawerPanelProps, 'grip'>) {
   const [isTall, setIsTall] = useState(false);
   useEscape(root, panel.onClose);
   useToastsAbove(root);
-  useEffect(() => {
-    const opener = document.activeElement;
-    root.current?.focus({ preventScroll: true });
-    return () => {
-      if (opener instanceof HTMLElement) opener.focus();
-    };
-  }, []);
+  useFocusBack(root);
   return createPortal(
     <Box
       component="aside"

@@ -26,7 +26,7 @@ describe('a toast', () => {
     const lift = () => document.documentElement.style.getPropertyValue(TOAST_LIFT);
     expect(lift()).toBe('66px');
     const css = [...document.querySelectorAll('style')].map(({ textContent }) => textContent).join('');
-    expect(css).toContain(`calc(24px + var(${TOAST_LIFT}, 0px))`);
+    expect(css).toContain(`calc(24px + min(var(${TOAST_LIFT}, 0px), 100dvh - 180px))`);
     rerender(page(false));
     expect(lift()).toBe('');
     height.mockRestore();

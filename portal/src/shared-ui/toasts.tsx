@@ -13,7 +13,8 @@ interface Toast {
 type Say = (words: string, undo?: () => void) => void;
 
 const SHOWN_MS = 8000;
-const LIFT = `var(${TOAST_LIFT}, 0px)`;
+/** Never so far that a toast leaves the window over a tall sheet. */
+const LIFT = `min(var(${TOAST_LIFT}, 0px), 100dvh - 180px)`;
 const Saying = createContext<Say>(() => undefined);
 
 /**

@@ -1,8 +1,6 @@
 import '@testing-library/jest-dom/vitest';
 import { cleanup, configure } from '@testing-library/react';
 import { afterAll, afterEach, beforeAll } from 'vitest';
-import { setClubCurrency } from '../lib/club-currency';
-import { setClubZone } from '../lib/club-zone';
 import { server } from './server';
 
 // jsdom has no scrolling; the router restores it on every page.
@@ -12,13 +10,10 @@ window.scrollTo = () => undefined;
 configure({ asyncUtilTimeout: 8000 });
 
 beforeAll(() => server.listen({ onUnhandledRequest: 'error' }));
-// Spec files share a process and its modules, so each spec leaves them as it found them.
 afterEach(() => {
   cleanup();
   server.resetHandlers();
   localStorage.clear();
   sessionStorage.clear();
-  setClubCurrency('GBP');
-  setClubZone('Europe/London');
 });
 afterAll(() => server.close());

@@ -8,21 +8,23 @@ export interface ExposureSum {
   left: number;
 }
 
+/** Parts that add up to 1 in decimals do so whatever binary fractions leave over. */
+const DUST = 1e-12;
+
 /**
  * Several sources of exposure together: their parts of the limit add up, and the sum is not to pass 1.
  *
  * @param parts - of each source: power density over the limit at its frequency, or ERP over its threshold; up to 50.
  * @throws OutOfDomainError naming the input.
  * @example exposureSum([0.4, 0.35, 0.3]) //=> { sum: 1.05, isWithinLimits: false, left: 0 }
- * @see 47 CFR 1.1307(b)(3)(ii)(B), text of 2026-09-23; ICNIRP says the same of simultaneous exposure
+ * @see 47 CFR 1.1307(b)(3)(ii)(B), text of 2026-09-23; ICNIRP (2020) says the same of simultaneous exposure, from memory
  */
 export function exposureSum(parts: readonly number[]): ExposureSum {
   requireSome({ input: 'parts', label: 'Sources' }, parts, 50);
   const each = { input: 'parts', label: 'Part of the limit', atLeast: 0, atMost: 1e6 };
   const sum = parts.reduce((total, part) => total + requireWithin(each, part), 0);
-  // Parts that add up to 1 in decimals do so whatever the binary dust.
-  const isWithinLimits = sum <= 1 + 1e-12;
-  return { sum, isWithinLimits, left: Math.max(0, 1 - sum) };
+  const isWithinLimits = sum <= 1 + DUST;
+  return { sum, isWithinLimits, left: sum >= 1 - DUST ? 0 : 1 - sum };
 }
 
 const EXEMPT_WATTS = 1e-3;

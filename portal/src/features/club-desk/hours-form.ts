@@ -37,7 +37,7 @@ export function toProblem({ from, to }: HoursValues['days'][number]): string | u
   if (to.trim() === '') return from.trim() === '' ? undefined : 'Until when? Leave both empty when closed.';
   const [opens, closes] = [readClock(from), readClock(to)];
   if (closes === undefined) return TIME_WORDS;
-  return opens !== undefined && closes <= opens ? 'It closes before it has opened.' : undefined;
+  return opens !== undefined && closes <= opens ? 'It closes when it opens, or before.' : undefined;
 }
 
 /** The open days of a form without faults. */

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { Instrument } from './api/instruments';
-import { calibrationState, changeWords, clearanceWords, levelWords, stateOf } from './instrument-words';
+import { damageWords } from '../../lib/text';
+import { calibrationState, changeWords, clearanceWords, stateOf } from './instrument-words';
 
 const TODAY = '2026-10-15';
 const instrument = (overrides: Partial<Instrument> = {}): Instrument => ({
@@ -44,7 +45,9 @@ describe('an instrument’s state', () => {
   it('says clearance, level and history in words', () => {
     expect(clearanceWords(instrument())).toBe('Cleared until 1 Jan 2027');
     expect(clearanceWords(instrument({ reasons: [notCleared] }))).toBe('You are not cleared');
-    expect([levelWords(20), levelWords(-10), levelWords(null)]).toEqual(['+20 dBm', '−10 dBm', '']);
+    expect([damageWords(20), damageWords(-10), damageWords(null)]).toEqual(['+20 dBm', '−10 dBm', '']);
+    // Down, whichever way it would round: never more than it stands.
+    expect([damageWords(12.68), damageWords(-9.95)]).toEqual(['+12.6 dBm', '−10 dBm']);
     const change = { id: 'c', changedAt: '', changedBy: 'Oona', note: '', changed: 'calibration' as const };
     expect(changeWords({ ...change, before: null, after: '2027-01-14' })).toBe(
       'Calibration good until 14 Jan 2027, before none',

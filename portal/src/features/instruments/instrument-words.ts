@@ -1,6 +1,5 @@
 import { daysBetween } from '../../lib/club-time';
 import { dateText } from '../../lib/club-time-text';
-import { fixed } from '../../lib/text';
 import type { InstrumentState } from '../../shared-ui/states/state-words';
 import type { Change, Instrument } from './api/instruments';
 
@@ -57,9 +56,6 @@ export const calibrationWords = ({ kind, calibrationDueOn }: Instrument): string
     : calibrationDueOn
       ? `Due ${dateText(calibrationDueOn)}`
       : 'None on record';
-
-export const levelWords = (dBm: number | null): string =>
-  dBm === null ? '' : `${dBm > 0 ? '+' : ''}${fixed(dBm, 0)} dBm`;
 
 /** One line of the history: what was changed from what to what. */
 export function changeWords({ changed, before, after }: Change): string {

@@ -3,6 +3,7 @@ import { Temporal } from 'temporal-polyfill';
 import { addDays, clubDay } from '../../../lib/club-time';
 import { longDayText } from '../../../lib/club-time-text';
 import { Icon } from '../../../shared-ui/icon';
+import { FOCUS_BACK } from '../../../shared-ui/use-focus-back';
 import { PageTitle } from '../../../shared-ui/page-title';
 import { sameDayIn } from '../book-view';
 
@@ -42,7 +43,7 @@ export function BookHeader({ week, day, onDay, onBook }: BookHeaderProps) {
             <Icon name="forward" size={16} />
           </Button>
           {onBook && (
-            <Button variant="contained" onClick={onBook}>
+            <Button variant="contained" onClick={onBook} {...FOCUS_BACK}>
               Book a bench
             </Button>
           )}

@@ -1,5 +1,6 @@
 import Box from '@mui/material/Box';
 import Button from '@mui/material/Button';
+import { FOCUS_BACK } from '../../../shared-ui/use-focus-back';
 import { Icon } from '../../../shared-ui/icon';
 import { PhoneBar } from '../../../shared-ui/phone-bar';
 import { VisuallyHidden } from '../../../shared-ui/visually-hidden';
@@ -49,7 +50,7 @@ export function PhoneBookBar({ view, all, shown, onBook }: PhoneBookBarProps) {
             words="Lanes"
             onChange={(next) => view.showKind(next === 'table' ? 'list' : 'lanes')}
           />
-          <Button variant="contained" onClick={onBook}>
+          <Button variant="contained" onClick={onBook} {...FOCUS_BACK}>
             Book a bench
           </Button>
         </Box>

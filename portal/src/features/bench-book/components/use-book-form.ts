@@ -9,10 +9,6 @@ import { useOpeningHours } from '../../../api-client/club';
 import { DAY, startingTimes, startingValues, type BookingValues } from '../form/booking-values';
 import type { Picked } from './lane-day';
 
-/**
- * The form's values for the whole page, because the lanes draw what is typed and a click in the lanes types for you.
- * They are kept on the device; what a check needs is filled in once.
- */
 /** As far ahead as the book is open. */
 const FURTHEST_DAYS = 180;
 
@@ -28,6 +24,10 @@ function useLanesFollow(view: BookView, form: UseFormReturn<BookingValues>, isOp
   useEffect(() => follow(), [day, isOpen]);
 }
 
+/**
+ * The form's values for the whole page, because the lanes draw what is typed and a click in the lanes types for you.
+ * They are kept on the device; what a check needs is filled in once.
+ */
 export function useBookForm(view: BookView, benches: readonly Bench[], instruments: readonly Instrument[]) {
   const hours = useOpeningHours();
   const form = useForm<BookingValues>({ defaultValues: startingValues(hours) });

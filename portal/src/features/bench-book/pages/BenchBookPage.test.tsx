@@ -228,6 +228,12 @@ describe('the Bench book', () => {
     expect(screen.getByText('Kept from 13:12')).toBeInTheDocument();
   });
 
+  it('gives the focus back to the button that opened the form, when it is closed', async () => {
+    const { user } = await openForm();
+    await user.keyboard('{Escape}');
+    expect(await screen.findByRole('button', { name: 'Book a bench' })).toHaveFocus();
+  });
+
   it('comes filled in from the check that needs an instrument', async () => {
     const { user } = renderPage(<BenchBookPage />, { at: '/bench-book?check=c9&need=Spectrum%20analyzer' });
     expect(await screen.findByRole('checkbox', { name: /FR-031/ })).toBeChecked();

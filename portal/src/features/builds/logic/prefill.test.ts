@@ -1,7 +1,7 @@
-import { ENTRY_METHODS, entryFields } from '@ferrite-row/levels';
+import { ENTRY_METHODS, entryFields, type EntryMethod } from '@ferrite-row/levels';
 import { describe, expect, it } from 'vitest';
 import { aCheck, aReading } from '../testing/build.fixture';
-import { isReadEachTime, prefillOf } from './prefill';
+import { prefillOf } from './prefill';
 import { sheetWords } from './sheet-words';
 
 const detector = aCheck({
@@ -9,7 +9,7 @@ const detector = aCheck({
   defaults: { readToVolts: 0.005, padsInLineDb: 0 },
 });
 const fr041 = {
-  tag: 'FR-041',
+  ...{ id: 'fr-041', tag: 'FR-041' },
   damageLevelDbm: 15,
   figures: {
     ...{ voltsPerDb: 0.025, interceptDbm: -85, validFromDbm: -70, validToDbm: 5 },
@@ -18,22 +18,39 @@ const fr041 = {
 };
 
 describe('what the form holds before anybody types', () => {
+  /** What each method's instrument shows, and nothing else of its form. */
+  const shown: Record<EntryMethod, string[]> = {
+    oscilloscope: ['divisionsPeakToPeak'],
+    'dummy-load': ['divisionsPeakToPeak'],
+    'two-tone-envelope': ['divisionsPeakToPeak'],
+    analyzer: ['divisionsDown'],
+    'dummy-load-tap': ['divisionsDown'],
+    harmonic: ['fundamentalDivisionsDown', 'harmonicDivisionsDown'],
+    intermodulation: ['toneDivisionsDown', 'productDivisionsDown'],
+    meter: ['value'],
+    counter: ['frequencyMegahertz'],
+    'log-detector': ['volts'],
+    'diode-probe': ['directVolts'],
+    'time-base': ['cycles', 'divisions'],
+  };
+
   it.each(ENTRY_METHODS)(
     'leaves open what %s shows, and only that, with plan and instrument in hand',
     (method) => {
       const names = entryFields(method, 'V').map(({ name }) => name);
-      expect(names.filter(isReadEachTime).length).toBeGreaterThan(0);
       const all = Object.fromEntries(names.map((name) => [name, 1]));
       const { entry, sources } = prefillOf(aCheck({ method, unit: 'V', defaults: all }), []);
-      for (const name of names) {
-        expect(entry[name] === '').toBe(isReadEachTime(name));
-        expect(sources[name]).toBe(isReadEachTime(name) ? undefined : 'from the plan');
-      }
+      expect(names.filter((name) => entry[name] === '')).toEqual(shown[method]);
+      expect(Object.keys(sources)).toEqual(names.filter((name) => !shown[method].includes(name)));
     },
   );
 
   it('takes a detector’s line from its own sheet, whatever an earlier reading or the plan says', () => {
-    const earlier = aReading({ method: 'log-detector', entry: { voltsPerDb: '20m', padsInLineDb: '10' } });
+    const earlier = aReading({
+      method: 'log-detector',
+      instrumentId: 'fr-041',
+      entry: { voltsPerDb: '20m', padsInLineDb: '10' },
+    });
     const { entry, sources } = prefillOf({ ...detector, readings: [earlier] }, [], fr041);
     expect([entry.voltsPerDb, sources.voltsPerDb]).toEqual(['0.025', 'from FR-041']);
     expect([entry.interceptDbm, entry.validFromDbm, entry.validToDbm]).toEqual(['-85', '-70', '5']);
@@ -41,7 +58,17 @@ describe('what the form holds before anybody types', () => {
     expect([entry.padsInLineDb, sources.padsInLineDb]).toEqual(['10', 'from your reading of 15 Oct']);
   });
 
-  it('takes the settings last typed on the check, else on one of the same stage taken the same way', () => {
+  it('takes nothing that belongs to one instrument from a reading on another', () => {
+    const elsewhere = aReading({
+      ...{ method: 'log-detector', instrumentId: 'fr-040' },
+      entry: { voltsPerDb: '20m', padsInLineDb: '30', readToVolts: '2m' },
+    });
+    const bare = { ...fr041, figures: {} };
+    const { entry } = prefillOf({ ...detector, readings: [elsewhere] }, [], bare);
+    expect([entry.voltsPerDb, entry.padsInLineDb, entry.readToVolts]).toEqual(['', '0', '2m']);
+  });
+
+  it('takes the settings last typed on the check, then the plan, then those of the stage’s others', () => {
     const entries = (voltsPerDivision: string, takenAt: string) =>
       aReading({ entry: { voltsPerDivision, divisionsPeakToPeak: '6', probeRatio: '1' }, takenAt });
     const own = aCheck({
@@ -55,7 +82,7 @@ describe('what the form holds before anybody types', () => {
     ]);
     expect(there.entry.divisionsPeakToPeak).toBe('');
     const fresh = prefillOf(aCheck(), [own, other]);
-    expect([fresh.entry.voltsPerDivision, fresh.entry.probeRatio]).toEqual(['50m', '1']);
+    expect([fresh.entry.voltsPerDivision, fresh.entry.probeRatio]).toEqual(['50m', '10']);
     const current = aCheck({ method: 'meter', unit: 'mA' });
     expect(prefillOf(current, [current, own]).sources).toEqual({});
   });
@@ -79,13 +106,13 @@ describe('what the form holds before anybody types', () => {
 
   it('counts attenuation built into the instrument to the pads of the plan, until somebody types', () => {
     const check = aCheck({ method: 'analyzer', defaults: { padsInLineDb: 20 } });
-    const builtIn = { tag: 'FR-032', figures: { padsInLineDb: 10 } };
+    const builtIn = { id: 'fr-032', tag: 'FR-032', figures: { padsInLineDb: 10 } };
     const { entry, sources } = prefillOf(check, [], builtIn);
     expect([entry.padsInLineDb, sources.padsInLineDb]).toEqual([
       '30',
       '20 dB from the plan, the rest built into FR-032',
     ]);
-    const before = aReading({ method: 'analyzer', entry: { padsInLineDb: '40' } });
+    const before = aReading({ method: 'analyzer', instrumentId: 'fr-032', entry: { padsInLineDb: '40' } });
     expect(prefillOf({ ...check, readings: [before] }, [], builtIn).entry.padsInLineDb).toBe('40');
   });
 });

@@ -3,6 +3,7 @@ import {
   dbmFromWatts,
   figuresFor,
   formatQuantity,
+  INSTRUMENT_FIGURES,
   meterUnitOf,
   ohms,
   SCREEN_DIVISIONS,
@@ -28,7 +29,7 @@ const SHOWN = new Set([
   ...['cycles', 'divisions', 'value'],
 ]);
 
-export const isReadEachTime = (name: string): boolean => SHOWN.has(name);
+const isReadEachTime = (name: string): boolean => SHOWN.has(name);
 
 const FROM_PLAN = 'from the plan';
 
@@ -37,9 +38,10 @@ type Found = readonly [text: string, source: string] | undefined;
 
 interface Known {
   check: BuildCheck;
+  /** Null where none is chosen. */
+  instrumentId: string | null;
   figures: Readonly<Record<string, number>>;
   tag: string;
-  earlier: readonly Reading[];
 }
 
 /** A pad in line is a setting of the bench, even where one is built in; the rest of a sheet stays true. */
@@ -50,8 +52,14 @@ function fromInstrument({ figures, tag }: Known, name: string): Found {
   return figure === undefined || isSetting(name) ? undefined : [String(figure), `from ${tag}`];
 }
 
-function fromReading({ earlier }: Known, name: string): Found {
-  const reading = earlier.find(({ entry }) => typeof entry[name] === 'string' && entry[name] !== '');
+/** What belongs to an instrument, its built-in pads too, is taken only from a reading on that same one. */
+function fromReading(earlier: readonly Reading[], { instrumentId }: Known, name: string): Found {
+  const reading = earlier.find(
+    ({ entry, instrumentId: takenOn }) =>
+      typeof entry[name] === 'string' &&
+      entry[name] !== '' &&
+      (takenOn === instrumentId || !INSTRUMENT_FIGURES.includes(name)),
+  );
   return reading && [String(reading.entry[name]), `from your reading of ${shortDay(reading.takenAt)}`];
 }
 
@@ -76,27 +84,30 @@ function stepAtLeast(value: number): number {
   return steps.find((step) => step >= value * (1 - 1e-9)) ?? value;
 }
 
+/** A number that stands in another field of the form, or else what is usual. */
+type Standing = (name: string, otherwise: number) => number;
+
 /** The least setting on which the highest level that passes is still on the screen. */
-function voltsPerDivision({ unit, windowHigh, target, defaults }: BuildCheck): number | undefined {
+function voltsPerDivision({ unit, windowHigh, target }: BuildCheck, standing: Standing): number | undefined {
   const most = windowHigh ?? target;
   if (most === null || (unit === 'W' && most <= 0)) return undefined;
   const level = unit === 'W' ? dbmFromWatts(watts(most)) : dBm(most);
-  const volts = voltsPeakToPeakFromDbm(level, ohms(defaults.loadOhms ?? 50));
-  return stepAtLeast(volts / (defaults.probeRatio ?? 10) / SCREEN_DIVISIONS);
+  const volts = voltsPeakToPeakFromDbm(level, ohms(standing('loadOhms', 50)));
+  return stepAtLeast(volts / standing('probeRatio', 10) / SCREEN_DIVISIONS);
 }
 
 /** The lowest line of tens over the highest level that passes. */
-function referenceLevel({ unit, windowHigh, target, defaults }: BuildCheck): number | undefined {
+function referenceLevel({ unit, windowHigh, target }: BuildCheck, standing: Standing): number | undefined {
   const most = windowHigh ?? target;
   if (most === null || unit !== 'dBm') return undefined;
-  return Math.ceil((most - (defaults.padsInLineDb ?? 0)) / 10) * 10;
+  return Math.ceil((most - standing('padsInLineDb', 0)) / 10) * 10;
 }
 
 /** Three cycles at least, along ten divisions. */
 const secondsPerDivision = ({ target }: BuildCheck): number | undefined =>
   target === null || target <= 0 ? undefined : stepAtLeast(3 / target / 10);
 
-const RANGES: Readonly<Record<string, (check: BuildCheck) => number | undefined>> = {
+const RANGES: Readonly<Record<string, (check: BuildCheck, standing: Standing) => number | undefined>> = {
   voltsPerDivision,
   referenceLevelDbm: referenceLevel,
   secondsPerDivision,
@@ -109,8 +120,8 @@ const UNITS: Readonly<Record<string, QuantityUnit>> = {
 };
 
 /** A range that suits the planned value. */
-function fromTarget({ check }: Known, name: string): Found {
-  const value = RANGES[name]?.(check);
+function fromTarget({ check }: Known, name: string, standing: Standing): Found {
+  const value = RANGES[name]?.(check, standing);
   if (value === undefined) return undefined;
   const unit = UNITS[name];
   return [unit ? formatQuantity(value, unit) : String(value), `${FROM_PLAN}, for its window`];
@@ -118,14 +129,14 @@ function fromTarget({ check }: Known, name: string): Found {
 
 /**
  * What stands in every field of a check before it is typed over: figures of the instrument's own sheet, then the
- * setting last typed, then the plan, then a range that suits the planned value.
+ * setting last typed on this check, then the plan, then one typed on another check, then a range that suits the window.
  *
- * @param stageChecks - those of the same stage; a reading of the same kind on one of them tells the settings too.
+ * @param stageChecks - those of the same stage; a reading taken the same way on one of them tells what the plan does not.
  */
 export function prefillOf(
   check: BuildCheck,
   stageChecks: readonly BuildCheck[],
-  instrument?: Pick<InstrumentChoice, 'tag' | 'figures'>,
+  instrument?: Pick<InstrumentChoice, 'id' | 'tag' | 'figures'>,
 ): Prefill {
   const method = entryMethod(check);
   if (!method) return { entry: {}, sources: {} };
@@ -133,28 +144,33 @@ export function prefillOf(
     check,
     figures: figuresFor(method, meterUnitOf(check.unit ?? ''), instrument?.figures ?? {}),
     tag: instrument?.tag ?? '',
-    earlier: earlierOf(check, stageChecks),
+    instrumentId: instrument?.id ?? null,
+  };
+  const [own, others] = [latestFirst(check.readings), latestFirst(alikeOf(check, stageChecks))];
+  const settled = (name: string): Found =>
+    fromInstrument(known, name) ??
+    fromReading(own, known, name) ??
+    fromPlan(known, name) ??
+    fromReading(others, known, name);
+  const standing: Standing = (name, otherwise) => {
+    const value = Number(settled(name)?.[0]);
+    return Number.isFinite(value) ? value : otherwise;
   };
   const sources: Record<string, string> = {};
   const entry = fieldsOf(check).map(({ name, choices }): [string, string] => {
     if (isReadEachTime(name)) return [name, ''];
-    const found =
-      fromInstrument(known, name) ??
-      fromReading(known, name) ??
-      fromPlan(known, name) ??
-      fromTarget(known, name);
+    const found = settled(name) ?? fromTarget(known, name, standing);
     if (found) sources[name] = found[1];
     return [name, found?.[0] ?? String(choices?.at(-1) ?? '')];
   });
   return { entry: Object.fromEntries(entry), sources };
 }
 
-/** Readings of this check, the latest first, then those of the stage's others that are taken the same way. */
-function earlierOf(check: BuildCheck, stageChecks: readonly BuildCheck[]): Reading[] {
-  const alike = stageChecks.filter(
-    ({ id, method, unit }) => id !== check.id && method === check.method && unit === check.unit,
-  );
-  const latestFirst = (readings: readonly Reading[]) =>
-    [...readings].sort((one, other) => other.takenAt.localeCompare(one.takenAt));
-  return [...latestFirst(check.readings), ...latestFirst(alike.flatMap(({ readings }) => readings))];
-}
+/** Readings of the stage's other checks that are taken the same way. */
+const alikeOf = (check: BuildCheck, stageChecks: readonly BuildCheck[]): Reading[] =>
+  stageChecks
+    .filter(({ id, method, unit }) => id !== check.id && method === check.method && unit === check.unit)
+    .flatMap(({ readings }) => readings);
+
+const latestFirst = (readings: readonly Reading[]): Reading[] =>
+  [...readings].sort((one, other) => other.takenAt.localeCompare(one.takenAt));

@@ -1,5 +1,5 @@
 import { figuresFor, figureWords } from '@ferrite-row/levels';
-import { fixed } from '../../../lib/text';
+import { damageWords } from '../../../lib/text';
 import type { BuildCheck, InstrumentChoice } from '../api/builds';
 import { entryMethod, fieldsOf } from './live-reading';
 
@@ -14,10 +14,7 @@ export function sheetWords(
   const limits = figureWords(figuresFor(method, check.unit ?? '', figures))
     .filter(({ name }) => !own.includes(name))
     .map(({ label, words }) => `${label.toLowerCase()} ${words}`);
-  const harm =
-    damageLevelDbm === null
-      ? []
-      : [`never above ${damageLevelDbm > 0 ? '+' : ''}${fixed(damageLevelDbm, 0)} dBm at its input`];
+  const harm = damageLevelDbm === null ? [] : [`never above ${damageWords(damageLevelDbm)} at its input`];
   const said = [...limits, ...harm];
   return said.length === 0 ? undefined : `From ${tag}: ${said.join(', ')}.`;
 }

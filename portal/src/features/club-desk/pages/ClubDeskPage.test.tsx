@@ -107,7 +107,7 @@ describe('the club desk', () => {
       await user.type(monday.getByLabelText('To'), '8:00');
       await user.type((await day('Tuesday')).getByLabelText('From'), 'noon');
       await user.click(save());
-      expect(await monday.findByText('It closes before it has opened.')).toBeVisible();
+      expect(await monday.findByText('It closes when it opens, or before.')).toBeVisible();
       expect((await day('Tuesday')).getByText('A time of day, such as 19:00.')).toBeVisible();
       expect((await day('Tuesday')).getByText('Until when? Leave both empty when closed.')).toBeVisible();
       expect(sent).toEqual([]);

@@ -2,13 +2,13 @@ import { figureWords } from '@ferrite-row/levels';
 import Box from '@mui/material/Box';
 import { useQuery } from '@tanstack/react-query';
 import { formatDate } from '../../../lib/club-time-text';
-import { fixed } from '../../../lib/text';
+import { fixed, damageWords } from '../../../lib/text';
 import { CautionBox } from '../../../shared-ui/caution-box';
 import { LoadingBars } from '../../../shared-ui/loading-bars';
 import { ProblemAlert } from '../../../shared-ui/problem-alert';
 import { SectionHeading } from '../../../shared-ui/section-heading';
 import { historyQuery, instrumentQuery, type Instrument } from '../api/instruments';
-import { calibrationWords, changeWords, clearanceWords, levelWords } from '../instrument-words';
+import { calibrationWords, changeWords, clearanceWords } from '../instrument-words';
 
 /** What an opened instrument says of itself: what harms it, three facts, why not, and what was done to it. */
 export function InstrumentFacts({ instrument }: { instrument: Instrument }) {
@@ -28,7 +28,7 @@ export function InstrumentFacts({ instrument }: { instrument: Instrument }) {
     <>
       {conditionNote && <p>{conditionNote}</p>}
       {damageLevelDbm !== null && (
-        <CautionBox kind="RF power" name={`Never above ${levelWords(damageLevelDbm)} at the input.`}>
+        <CautionBox kind="RF power" name={`Never above ${damageWords(damageLevelDbm)} at the input.`}>
           A pad first wherever the level may be higher, rated for the whole power.
         </CautionBox>
       )}

@@ -14,7 +14,8 @@ import { ProblemAlert } from '../../../shared-ui/problem-alert';
 import { InstrumentStateLine } from '../../../shared-ui/states/state-line';
 import { instrumentListQuery, type Instrument } from '../api/instruments';
 import { InstrumentDrawer } from '../components/instrument-drawer';
-import { calibrationWords, clearanceWords, levelWords, stateOf } from '../instrument-words';
+import { damageWords } from '../../../lib/text';
+import { calibrationWords, clearanceWords, stateOf } from '../instrument-words';
 
 function StateCell({ instrument }: { instrument: Instrument }) {
   const { state, words } = stateOf(instrument, clubDay());
@@ -43,7 +44,7 @@ const COLUMNS: readonly Column<Instrument>[] = [
     key: 'damage',
     header: 'Harmed above',
     align: 'right',
-    cell: ({ damageLevelDbm }) => levelWords(damageLevelDbm),
+    cell: ({ damageLevelDbm }) => damageWords(damageLevelDbm),
     phone: 'hidden',
   },
 ];

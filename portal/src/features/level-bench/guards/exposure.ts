@@ -66,11 +66,12 @@ const leftOf = (values: GuardValues): number => {
 function tierFigure(tier: ExposureTier, found: ExposureDistance, left: number): JudgedFigure {
   const name = `${capital(tier)}, keep at least`;
   if (left === 0) return { name, figure: 'None', words: 'the other sources leave nothing', tone: 'caution' };
+  const isNear = found.metres / Math.sqrt(left) < found.nearFieldMetres;
   return {
     name,
     ...{ figure: metresText(keptMetres(found, left)), unit: 'm' },
-    words: found.isInNearField ? `the near field’s edge; ${WHO[tier]}` : WHO[tier],
-    tone: found.isInNearField ? 'caution' : 'plain',
+    words: isNear ? `the near field’s edge; ${WHO[tier]}` : WHO[tier],
+    tone: isNear ? 'caution' : 'plain',
   };
 }
 
@@ -112,11 +113,13 @@ function withOthers(values: GuardValues, own: number): string {
 
 const DIPOLE_DBI = 2.15;
 
-/** Only the United States let a source go without an evaluation by a table. */
+/** Only the United States let a source go without an evaluation by a table; the rows are for a source that stands alone. */
 function exemptRows(values: GuardValues, found: Record<ExposureTier, ExposureDistance>): JudgedRow[] {
   const { ruleSet, carrierHertz, distanceMetres } = values;
   if (ruleSet !== 'US-97') return [];
   const row = (name: string, text: (tier: ExposureTier) => string) => ({ cells: [name, ...TIERS.map(text)] });
+  if (partsOf(values).length > 0)
+    return [row('Evaluation, 47 CFR 1.1307(b)(3)(ii)(B)', () => 'by the sum: other sources count')];
   if (TIERS.every((tier) => isExemptByPower(found[tier].averageWatts)))
     return [row('Evaluation, 47 CFR 1.1307(b)(3)(i)(A)', () => 'exempt: 1 mW or less')];
   if (distanceMetres === undefined) return [];

@@ -198,6 +198,8 @@ describe('exposure by the other rules and of other sources', () => {
     expect(at5('200')).toBe('needed, table to 106 W ERP');
     const near = judged('exposure', { ...carrier, distanceMetres: '1' });
     expect(cellsOf(near, name)?.[0]).toContain('nearer than the table holds');
+    const among = judged('exposure', { ...carrier, otherParts: '0.4', distanceMetres: '5' });
+    expect(cellsOf(among, name)?.[0]).toBe('by the sum: other sources count');
     const weak = judged('exposure', { ...carrier, peakWatts: '0.001' });
     expect(cellsOf(weak, name)?.[0]).toBe('exempt: 1 mW or less');
     expect(

@@ -112,7 +112,7 @@ export const INPUTS = {
   offMinutes: quantity('then listens for', 'min', '2', on('exposure')),
   gainDbi: quantity('Antenna gain', 'dB', '2.15', { unitWords: 'dBi', ...on('exposure') }),
   distanceMetres: optional('People at', 'm', on('exposure')),
-  otherParts: words('Other sources, parts of their limit', '', {
+  otherParts: words('Other sources, parts of the uncontrolled limit', '', {
     longest: 80,
     ...on('exposure'),
     hint: 'As 0.4 0.35, at the same place and time',
