@@ -6,10 +6,10 @@ import { token } from './tokens';
 import { useEscape } from './use-escape';
 import { useFocusBack } from './use-focus-back';
 import { useToastsAbove } from './use-toasts-above';
+import { BOTTOM_BAR } from './bottom-bar-height';
 
 /** The height of a sheet that leaves the page in sight over it. */
 export const HALF_SHEET = '42dvh';
-const BOTTOM_BAR = 62;
 
 /**
  * A phone's sheet over the lower part of a page that stays in use above it; the grip makes it tall and half high

@@ -68,16 +68,32 @@ export function meter(
   });
 }
 
-/** A level of the plan, read on the oscilloscope across the load: its window is planned ± tolerance. */
-export function scopeLevel(key: string, point: LevelPointDescription, instruction: string): CheckDescription {
-  const { testPoint, plannedDbm, toleranceDb } = point;
+/** How a level is taken: its method, the instrument's kind, and what its form starts with. */
+type Way = Pick<MeasureDescription, 'method' | 'instrumentKind' | 'defaults'>;
+
+/** A level of the plan, taken one way or another: its window is planned ± tolerance. */
+export function plannedLevel(
+  key: string,
+  { testPoint, plannedDbm, toleranceDb }: LevelPointDescription,
+  instruction: string,
+  way: Way,
+): CheckDescription {
   return measured(key, `Output level at ${testPoint}`, instruction, {
-    ...{ method: 'oscilloscope', unit: 'dBm', levelPoint: testPoint, target: plannedDbm },
+    ...{ unit: 'dBm', levelPoint: testPoint, target: plannedDbm },
     window: around(plannedDbm, toleranceDb),
-    defaults: SCOPE_START,
-    instrumentKind: KINDS.scope,
+    ...way,
   });
 }
+
+/** A level of the plan, read on the oscilloscope across the load. */
+export const scopeLevel = (
+  key: string,
+  point: LevelPointDescription,
+  instruction: string,
+): CheckDescription =>
+  plannedLevel(key, point, instruction, {
+    ...{ method: 'oscilloscope', defaults: SCOPE_START, instrumentKind: KINDS.scope },
+  });
 
 /** What the scope's form starts with: the probe at ×10 into 50 ohm, read to a tenth of a division. */
 export const SCOPE_START = { probeRatio: 10, loadOhms: 50, readToDivisions: 0.1 };
@@ -97,19 +113,15 @@ export function driveLevel(
 }
 
 /** A level of the plan where other products stand beside the wanted one, so only the analyzer tells them apart. */
-export function analyzerLevel(
+export const analyzerLevel = (
   key: string,
   point: LevelPointDescription,
   instruction: string,
-): CheckDescription {
-  const { testPoint, plannedDbm, toleranceDb } = point;
-  return measured(key, `Output level at ${testPoint}`, instruction, {
-    ...{ method: 'analyzer', unit: 'dBm', levelPoint: testPoint, target: plannedDbm },
-    window: around(plannedDbm, toleranceDb),
+): CheckDescription =>
+  plannedLevel(key, point, instruction, {
+    ...{ method: 'analyzer', instrumentKind: KINDS.analyzer },
     defaults: { referenceLevelDbm: 0, dbPerDivision: 10, readToDivisions: 0.02, padsInLineDb: 0 },
-    instrumentKind: KINDS.analyzer,
   });
-}
 
 /** A level measured at an earlier stage, carried over as what this stage is fed with. */
 export function carried(

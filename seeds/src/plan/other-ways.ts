@@ -1,5 +1,5 @@
 import type { CheckDescription, LevelPointDescription } from '@ferrite-row/api/plans/plan-description';
-import { around, KINDS, measured, SCOPE_START } from './checks';
+import { around, KINDS, measured, plannedLevel, SCOPE_START } from './checks';
 
 /** Power in the dummy load by an analyzer on its tap, 30 dB down, behind the club's 20 dB pad. */
 export function tapPower(
@@ -46,32 +46,29 @@ export function belowPeak(
 }
 
 /** A level of the plan too small for an oscilloscope behind a ×10 probe: a log detector reads it to a few tenths. */
-export function detectorLevel(
+export const detectorLevel = (
   key: string,
   point: LevelPointDescription,
   instruction: string,
-): CheckDescription {
-  const { testPoint, plannedDbm, toleranceDb } = point;
-  return measured(key, `Output level at ${testPoint}`, instruction, {
-    ...{ method: 'log-detector', unit: 'dBm', levelPoint: testPoint, target: plannedDbm },
-    window: around(plannedDbm, toleranceDb),
+): CheckDescription =>
+  plannedLevel(key, point, instruction, {
     // The detector's own line comes with the instrument.
-    defaults: { readToVolts: 0.005, padsInLineDb: 0 },
+    ...{ method: 'log-detector', defaults: { readToVolts: 0.005, padsInLineDb: 0 } },
     instrumentKind: KINDS.detector,
   });
-}
 
 /** A level of the plan by the builder's own diode probe and a multimeter: no other instrument is needed. */
-export function probeLevel(key: string, point: LevelPointDescription, instruction: string): CheckDescription {
-  const { testPoint, plannedDbm, toleranceDb } = point;
-  return measured(key, `Output level at ${testPoint}`, instruction, {
-    ...{ method: 'diode-probe', unit: 'dBm', levelPoint: testPoint, target: plannedDbm },
-    window: around(plannedDbm, toleranceDb),
+export const probeLevel = (
+  key: string,
+  point: LevelPointDescription,
+  instruction: string,
+): CheckDescription =>
+  plannedLevel(key, point, instruction, {
+    method: 'diode-probe',
     // A germanium diode into ten megohms drops 0.2 to 0.4 V: common practice.
     defaults: { readToVolts: 0.01, diodeDropVolts: 0.3, diodeDropPlusMinusVolts: 0.1, loadOhms: 50 },
     instrumentKind: KINDS.meter,
   });
-}
 
 /** About the right frequency, by counting cycles along the oscilloscope's screen; the window is in hertz. */
 export function seenFrequency(

@@ -96,6 +96,7 @@ describe('a band-pass trimmed to its centre', () => {
       first: 'shunt',
     });
     expect(errorOf(() => trimmedLadder(low, CENTRE)).input).toBe('ladder');
+    expect(errorOf(() => trimmedLadder(ladder, 10 * CENTRE)).message).toContain('Take less inductance');
     expect(errorOf(() => trimmedLadder(ladder, 0)).input).toBe('centreHertz');
     expect(errorOf(() => ladderBuilds({ ...builds, trimmedAtHertz: NaN }, hertz)).input).toBe(
       'trimmedAtHertz',

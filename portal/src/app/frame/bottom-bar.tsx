@@ -4,6 +4,7 @@ import { Link, useLocation } from 'react-router-dom';
 import { Icon } from '../../shared-ui/icon';
 import { token } from '../../shared-ui/tokens';
 import { BOTTOM_PATHS, isAt, OWN_PAGES } from '../pages';
+import { BOTTOM_BAR } from '../../shared-ui/bottom-bar-height';
 
 const cell = (isHere: boolean) => ({
   display: 'flex',
@@ -13,7 +14,7 @@ const cell = (isHere: boolean) => ({
   gap: '3px',
   flex: '1 1 0',
   minWidth: 0,
-  height: 62,
+  height: BOTTOM_BAR,
   color: isHere ? 'token.ink' : 'token.ink2',
   backgroundColor: isHere ? 'token.paper' : 'transparent',
   boxShadow: isHere ? `inset 0 3px 0 ${token('green')}` : 'none',

@@ -9,8 +9,7 @@ import type { ReadingFormState } from '../logic/use-reading-form';
 import { readingWords } from '../logic/words';
 import { KeepButtons } from './keep-buttons';
 import { BigValue, LiveWindow, secondValues, shownLive, uncertaintyText } from './live-result';
-
-const BOTTOM_BAR = 62;
+import { BOTTOM_BAR } from '../../../shared-ui/bottom-bar-height';
 
 /** The phone's result, within thumb's reach; one row of it while the keyboard is up. */
 export function PinnedResult({ form }: { form: ReadingFormState }) {

@@ -50,7 +50,8 @@ export const trimmedAt = ({ kind, trimmed, centreHertz }: FilterValues): number 
 /** The nearest parts as the builder leaves them: resonators turned to the centre where they have trimmers. */
 export function setUp(fitted: Ladder, values: FilterValues): Ladder {
   const centre = trimmedAt(values);
-  return centre === undefined ? fitted : trimmedLadder(fitted, centre);
+  if (centre === undefined) return fitted;
+  return named({ ladder: 'resonatorHenries' }, () => trimmedLadder(fitted, centre));
 }
 
 /** The nearest ladder that can be built: one capacitor or two in parallel, whole turns. */
